@@ -1,0 +1,261 @@
+/** The appraisal file: the engine's one public input and output. Lengths mm, loads kN/m², strengths MPa, masses kg, moments kNm. */
+import { z } from 'zod'
+
+export const mark = z
+  .string()
+  .trim()
+  .min(1)
+  .max(20)
+  .regex(/^[\w.-]+$/)
+const coordinate = z.number().min(-1_000_000).max(1_000_000)
+export const ring = z
+  .array(z.tuple([coordinate, coordinate]))
+  .min(3)
+  .max(200) // open, anticlockwise, simple, area > 0
+export const load = z.number().min(0).max(100)
+export const repeat = z.int().min(1).max(1000).default(1)
+export const decimal = z.string().regex(/^\d{1,9}(\.\d{1,6})?$/)
+export const percent = z.string().regex(/^\d{1,3}(\.\d{1,4})?$/)
+export const mesh = z.enum(['none', 'A98', 'A142', 'A193', 'A252', 'A393'])
+export const bar = z.strictObject({ diameter: z.literal([6, 8, 10, 12, 16, 20, 25, 32, 40]), count: z.int().min(1).max(10) })
+export const layer = z.strictObject({ diameter: bar.shape.diameter, spacing: z.number().min(50).max(500) })
+
+export const itemCode = z.enum([
+  'concrete.slab',
+  'blocks.whole',
+  'blocks.cut',
+  'blocks.closedEnds',
+  'steel.bar.6',
+  'steel.bar.8',
+  'steel.bar.10',
+  'steel.bar.12',
+  'steel.bar.16',
+  'steel.bar.20',
+  'steel.bar.25',
+  'steel.bar.32',
+  'steel.bar.40',
+  'steel.mesh.A98',
+  'steel.mesh.A142',
+  'steel.mesh.A193',
+  'steel.mesh.A252',
+  'steel.mesh.A393',
+  'formwork.soffit',
+  'formwork.edge',
+  'curing.area',
+  'propping.area',
+])
+const loads = {
+  imposedLoad: load,
+  finishesLoad: load.default(0),
+  servicesLoad: load.default(0), // permanent: finishes, services
+  partitionsLoad: load.default(0), // variable, both bases
+  cover: z.number().min(10).max(100), // nominal, to the outermost bar; no link unless `link` is given
+  fireMinutes: z.literal([0, 30, 60, 90, 120, 180, 240]),
+}
+export const brief = z.discriminatedUnion('basis', [
+  z.strictObject({ basis: z.literal('EN1992'), ...loads, fck: z.number().min(12).max(50), fyk: z.number().min(250).max(600) }),
+  z.strictObject({ basis: z.literal('BS8110'), ...loads, fcu: z.number().min(20).max(60), fy: z.number().min(250).max(500) }),
+])
+export const edge = z.strictObject({
+  supportWidth: z.number().min(0).max(3000),
+  kind: z.enum(['beam', 'wall']).default('beam'), // over a wall the floor bears, over a beam it does not
+  continuity: z.enum(['continuous', 'discontinuous', 'free']),
+})
+export const panel = z.strictObject({
+  mark,
+  repeat,
+  outline: ring,
+  edges: z.array(edge).min(1), // 1, or as many as vertices; edge i runs from vertex i to i + 1; free ⇒ supportWidth 0
+  ribDirection: z.number().min(0).lt(180),
+  voids: z.array(ring).max(50).default([]),
+})
+export const ribbed = z.strictObject({
+  mark,
+  kind: z.literal('ribbed'),
+  block: z.strictObject({
+    length: z.number().min(50).max(2000),
+    width: z.number().min(50).max(2000),
+    height: z.number().min(50).max(1000),
+    mass: z.number().min(0).max(500),
+  }),
+  ribWidth: z.number().min(50).max(1000),
+  topping: z.number().min(0).max(500),
+  mesh: mesh.default('none'),
+  edgeStrip: z.number().min(0).max(5000).default(0),
+  solidZone: z.union([z.number().min(0).max(5000), z.literal('least')]), // 'least': widened until shear passes; a number is never changed
+  crossRibs: z
+    .union([z.literal('none'), z.literal('rule'), z.strictObject({ every: z.number().min(500), width: z.number().min(50) })])
+    .default('none'),
+  trimmerWidth: z.number().min(0).max(1000).default(100), // solid strip around every void
+  cutBlocks: z.boolean().default(false),
+  leastPiece: z.number().min(10).default(50),
+  ribBars: z.union([z.literal('computed'), z.array(bar).min(1).max(3)]).default('computed'), // bottom of every rib
+  topBars: z.union([z.literal('computed'), z.array(bar).max(3)]).default('computed'), // per rib over continuous edges
+  link: z.literal([0, 6, 8, 10]).default(0),
+}) // link diameter; 0: none
+export const solid = z.strictObject({
+  mark,
+  kind: z.literal('solid'),
+  thickness: z.union([z.literal('least'), z.number().min(50).max(1500)]),
+  bars: z
+    .union([
+      z.literal('computed'),
+      z.strictObject({ bottomX: layer, bottomY: layer, topX: layer.optional(), topY: layer.optional() }),
+    ])
+    .default('computed'),
+})
+export const level = z.strictObject({ mark, repeat, panels: z.array(panel).min(1).max(500) })
+export const scheme = z.discriminatedUnion('kind', [ribbed, solid])
+export const markups = z.strictObject({
+  preliminariesPercent: percent.default('0'),
+  contingencyPercent: percent.default('0'),
+  taxPercent: percent.default('0'),
+})
+export const rates = z.strictObject({
+  currency: z.string().regex(/^[A-Z]{3}$/),
+  items: z.partialRecord(itemCode, decimal),
+  markups: markups.prefault({}),
+})
+export const appraisalFile = z.strictObject({
+  format: z.literal('bothways.appraisal/1'),
+  brief,
+  levels: z.array(level).min(1).max(100),
+  schemes: z.array(scheme).min(1).max(20),
+  rates: rates.optional(),
+})
+
+export const money = z.string().regex(/^-?\d+(\.\d+)?$/)
+export const check = z.strictObject({
+  level: mark,
+  panel: mark,
+  name: z.enum([
+    'flexure.midspan',
+    'flexure.support',
+    'shear',
+    'deflection',
+    'steel.least',
+    'steel.most',
+    'bars.spacing',
+    'bars.fit',
+    'ribs.proportions',
+    'topping',
+    'fire.size',
+    'fire.cover',
+  ]),
+  clause: z.string(),
+  demand: z.number(),
+  capacity: z.number(),
+  unit: z.string(),
+  utilisation: z.number(),
+  pass: z.boolean(),
+  working: z.string(),
+})
+export const panelResult = z.strictObject({
+  level: mark,
+  mark,
+  depth: z.number(),
+  grossArea: z.number(),
+  clearArea: z.number(), // one panel, m²
+  rows: z.int(),
+  blocksWhole: z.int(),
+  blocksCut: z.int(), // 0 for solid
+  moments: z.strictObject({
+    midspan: z.number(),
+    support: z.number(),
+    midspanLong: z.number().optional(),
+    supportLong: z.number().optional(),
+  }), // kNm per rib (ribbed) or per m (solid), all ≥ 0; long: second direction of two-way panels
+  steel: z.strictObject({
+    midspanRequired: z.number(),
+    midspanProvided: z.number(),
+    supportRequired: z.number(),
+    supportProvided: z.number(),
+  }),
+}) // mm² per rib or m; short direction
+export const unit = z.enum(['m³', 'm²', 'm', 't', 'nr'])
+export const part = z.strictObject({ level: mark, panel: mark, expression: z.string(), value: z.number() })
+export const split = z.strictObject({
+  topping: z.number(),
+  ribs: z.number(),
+  edgeStrips: z.number(),
+  solidZones: z.number(),
+  crossRibs: z.number(),
+  trimmers: z.number(),
+  fillers: z.number(),
+  slab: z.number(),
+  wallStrips: z.number(),
+})
+export const quantity = z.strictObject({ item: itemCode, unit, net: z.number(), parts: z.array(part), split: split.optional() })
+export const deadLoad = z.strictObject({ perArea: z.number(), total: z.number() }) // concrete + blocks only; kN/m² of gross area; kN
+export const billLine = z.strictObject({ item: itemCode, quantity: z.string(), unit: z.string(), rate: decimal, amount: money })
+export const markupLine = z.strictObject({ name: z.enum(['preliminaries', 'contingency', 'tax']), percent, amount: money })
+export const cost = z.strictObject({
+  currency: z.string(),
+  lines: z.array(billLine),
+  markups: z.array(markupLine),
+  unpriced: z.array(itemCode),
+  total: money,
+  perArea: money,
+})
+export const schemeResult = z.strictObject({
+  mark,
+  kind: z.enum(['ribbed', 'solid']),
+  depth: z.number(),
+  passes: z.boolean(),
+  checks: z.array(check),
+  panels: z.array(panelResult),
+  quantities: z.array(quantity),
+  deadLoad,
+  cost: cost.nullable(),
+})
+export const ledgerLine = z.strictObject({ item: z.string(), first: money, second: money, difference: money, running: money })
+export const tippingPoint = z.strictObject({
+  item: itemCode,
+  rate: decimal,
+  value: decimal.nullable(),
+  cheaperBelow: mark.nullable(),
+})
+export const comparison = z.strictObject({
+  between: z.tuple([mark, mark]),
+  ledger: z.array(ledgerLine),
+  tippingPoints: z.array(tippingPoint),
+})
+export const appraisal = z.strictObject({
+  format: z.literal('bothways.appraisal-result/1'),
+  schemes: z.array(schemeResult),
+  comparison: comparison.nullable(),
+})
+
+export type ItemCode = z.infer<typeof itemCode>
+export type Brief = z.infer<typeof brief>
+export type Edge = z.infer<typeof edge>
+export type Ring = z.infer<typeof ring>
+export type Panel = z.infer<typeof panel>
+export type Level = z.infer<typeof level>
+export type RibbedScheme = z.infer<typeof ribbed>
+export type SolidScheme = z.infer<typeof solid>
+export type Scheme = z.infer<typeof scheme>
+export type Mesh = z.infer<typeof mesh>
+export type Bar = z.infer<typeof bar>
+export type BarLayer = z.infer<typeof layer>
+export type Markups = z.infer<typeof markups>
+export type Rates = z.infer<typeof rates>
+export type AppraisalFile = z.infer<typeof appraisalFile>
+export type Check = z.infer<typeof check>
+export type PanelResult = z.infer<typeof panelResult>
+export type Part = z.infer<typeof part>
+export type ConcreteSplit = z.infer<typeof split>
+export type Quantity = z.infer<typeof quantity>
+export type Unit = z.infer<typeof unit>
+export type DeadLoad = z.infer<typeof deadLoad>
+export type BillLine = z.infer<typeof billLine>
+export type MarkupLine = z.infer<typeof markupLine>
+export type Cost = z.infer<typeof cost>
+export type SchemeResult = z.infer<typeof schemeResult>
+export type LedgerLine = z.infer<typeof ledgerLine>
+export type TippingPoint = z.infer<typeof tippingPoint>
+export type Comparison = z.infer<typeof comparison>
+export type Appraisal = z.infer<typeof appraisal>
+/** Input as it may be written, with defaults left out. */
+export type AppraisalFileInput = z.input<typeof appraisalFile>
+export type BarDiameter = Bar['diameter']

@@ -1,0 +1,54 @@
+import { fileURLToPath } from 'node:url'
+import vue from '@vitejs/plugin-vue'
+import { defineConfig } from 'vitest/config'
+
+const root = fileURLToPath(new URL('..', import.meta.url))
+
+/** Four suites: the pure engine, the API on a real MariaDB, the client in jsdom, the product in a real browser. */
+export default defineConfig({
+  root,
+  plugins: [vue()],
+  test: {
+    projects: [
+      {
+        extends: true,
+        test: {
+          name: 'shared',
+          include: ['tests/*.test.ts', 'tests/shared/**/*.test.ts', 'tests/scripts/**/*.test.ts'],
+          testTimeout: 60_000,
+        },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'server',
+          include: ['tests/server/**/*.test.ts'],
+          globalSetup: ['tests/support/startDatabase.ts'],
+          testTimeout: 30_000,
+          hookTimeout: 60_000,
+        },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'client',
+          include: ['tests/client/**/*.test.ts'],
+          environment: 'jsdom',
+          setupFiles: ['tests/support/browserGaps.ts'],
+          server: { deps: { inline: ['element-plus'] } },
+          testTimeout: 30_000,
+        },
+      },
+      {
+        extends: true,
+        test: {
+          name: 'e2e',
+          include: ['tests/e2e/**/*.test.ts'],
+          testTimeout: 180_000,
+          hookTimeout: 180_000,
+          fileParallelism: false,
+        },
+      },
+    ],
+  },
+})
