@@ -1,0 +1,38 @@
+import { AuditEntity } from './AuditEntity'
+import { FirmEntity } from './firm/FirmEntity'
+import { PersonEntity } from './firm/PersonEntity'
+import { PersonRoleEntity } from './firm/PersonRoleEntity'
+import { IdempotencyEntity } from './IdempotencyEntity'
+import { LevelEntity } from './project/LevelEntity'
+import { ProjectEntity } from './project/ProjectEntity'
+import { ProjectShareEntity } from './project/ProjectShareEntity'
+import { SchemeEntity } from './project/SchemeEntity'
+import { BlockEntity } from './rates/BlockEntity'
+import { EditionEntity } from './rates/EditionEntity'
+import { RateBookEntity } from './rates/RateBookEntity'
+import { RateEntity } from './rates/RateEntity'
+import { AttemptEntity } from './session/AttemptEntity'
+import { RefreshTokenEntity } from './session/RefreshTokenEntity'
+import { SessionEntity } from './session/SessionEntity'
+import { SingleUseTokenEntity } from './session/SingleUseTokenEntity'
+
+/** Every table the schema has. */
+export const ENTITIES = [
+  FirmEntity,
+  PersonEntity,
+  PersonRoleEntity,
+  AuditEntity,
+  IdempotencyEntity,
+  SessionEntity,
+  RefreshTokenEntity,
+  SingleUseTokenEntity,
+  AttemptEntity,
+  RateBookEntity,
+  EditionEntity,
+  RateEntity,
+  BlockEntity,
+  ProjectEntity,
+  LevelEntity,
+  SchemeEntity,
+  ProjectShareEntity,
+]

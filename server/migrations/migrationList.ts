@@ -1,0 +1,48 @@
+import { CreateAudit1796100000004 } from './1796100000004-CreateAudit'
+import { CreateIdempotency1796100000005 } from './1796100000005-CreateIdempotency'
+import { CreateFirm1796100000001 } from './firm/1796100000001-CreateFirm'
+import { CreatePerson1796100000002 } from './firm/1796100000002-CreatePerson'
+import { CreatePersonRole1796100000003 } from './firm/1796100000003-CreatePersonRole'
+import { CreateProject1796100000014 } from './project/1796100000014-CreateProject'
+import { CreateLevel1796100000015 } from './project/1796100000015-CreateLevel'
+import { CreateScheme1796100000016 } from './project/1796100000016-CreateScheme'
+import { CreateProjectShare1796100000017 } from './project/1796100000017-CreateProjectShare'
+import { CreateRateBook1796100000010 } from './rates/1796100000010-CreateRateBook'
+import { CreateEdition1796100000011 } from './rates/1796100000011-CreateEdition'
+import { CreateRate1796100000012 } from './rates/1796100000012-CreateRate'
+import { CreateBlock1796100000013 } from './rates/1796100000013-CreateBlock'
+import { KeepPublishedEdition1796100000018 } from './rates/1796100000018-KeepPublishedEdition'
+import { KeepEditionRow1796100000019 } from './rates/1796100000019-KeepEditionRow'
+import { KeepRateInsert1796100000020 } from './rates/1796100000020-KeepRateInsert'
+import { KeepRateUpdate1796100000021 } from './rates/1796100000021-KeepRateUpdate'
+import { KeepRateDelete1796100000022 } from './rates/1796100000022-KeepRateDelete'
+import { CreateSession1796100000006 } from './session/1796100000006-CreateSession'
+import { CreateRefreshToken1796100000007 } from './session/1796100000007-CreateRefreshToken'
+import { CreateSingleUseToken1796100000008 } from './session/1796100000008-CreateSingleUseToken'
+import { CreateAttempt1796100000009 } from './session/1796100000009-CreateAttempt'
+
+/** Every step of the schema, in the order it is taken. One statement each, so that a step broken off can be taken again. */
+export const MIGRATIONS = [
+  CreateFirm1796100000001,
+  CreatePerson1796100000002,
+  CreatePersonRole1796100000003,
+  CreateAudit1796100000004,
+  CreateIdempotency1796100000005,
+  CreateSession1796100000006,
+  CreateRefreshToken1796100000007,
+  CreateSingleUseToken1796100000008,
+  CreateAttempt1796100000009,
+  CreateRateBook1796100000010,
+  CreateEdition1796100000011,
+  CreateRate1796100000012,
+  CreateBlock1796100000013,
+  CreateProject1796100000014,
+  CreateLevel1796100000015,
+  CreateScheme1796100000016,
+  CreateProjectShare1796100000017,
+  KeepPublishedEdition1796100000018,
+  KeepEditionRow1796100000019,
+  KeepRateInsert1796100000020,
+  KeepRateUpdate1796100000021,
+  KeepRateDelete1796100000022,
+]
