@@ -1,0 +1,74 @@
+import type { ApiIssue } from '#shared/contracts/apiError'
+import type { AppraisalFile, Rates } from '#shared/contracts/appraisal'
+import { brief, level, panel, rates, scheme } from '#shared/contracts/appraisal'
+import type { Project, StoredLevel, StoredScheme } from '#shared/contracts/project'
+import type { EditionWithRates } from '#shared/contracts/rateBook'
+import type { z } from 'zod'
+import type { FileOrigin } from '../workers/appraisalAnswer'
+
+/** What an appraisal file is made from: a surveyor's sheet, or a reader's, which has no prices. */
+export interface AppraisalSource {
+  readonly project: Pick<Project, 'brief'> & Partial<Pick<Project, 'markups'>>
+  readonly levels: readonly StoredLevel[]
+  readonly schemes: readonly StoredScheme[]
+  readonly edition: EditionWithRates | null
+}
+
+export interface AppraisalDraft {
+  /** Null when nothing can be appraised yet. */
+  readonly file: AppraisalFile | null
+  readonly origin: FileOrigin
+  /** What was left out and why, by path in the sheet. */
+  readonly problems: readonly ApiIssue[]
+}
+
+/** The value read by its contract; what is wrong goes to `problems` under `path`. */
+function read<T extends z.ZodType>(schema: T, value: unknown, path: string, problems: ApiIssue[]): z.infer<T> | null {
+  const answer = schema.safeParse(value)
+  if (answer.success) return answer.data
+  problems.push(...answer.error.issues.map((issue) => ({ path: [path, ...issue.path].join('.'), message: issue.message })))
+  return null
+}
+
+function readLevel(row: StoredLevel, index: number, problems: ApiIssue[]) {
+  const panels = row.panels.flatMap((given, at) => {
+    const value = read(panel, given, `levels.${index}.panels.${at}`, problems)
+    return value === null ? [] : [{ value, at }]
+  })
+  if (panels.length === 0) return []
+  const given = { mark: row.mark, repeat: row.repeat, panels: panels.map(({ value }) => value) }
+  const value = read(level, given, `levels.${index}`, problems)
+  return value === null ? [] : [{ value, origin: { index, panels: panels.map(({ at }) => at) } }]
+}
+
+function ratesOf({ project, edition }: AppraisalSource, problems: ApiIssue[]): Rates | undefined {
+  if (edition === null || project.markups === undefined) return undefined
+  const items = Object.fromEntries(edition.rates.map(({ item, likely }) => [item, likely]))
+  return read(rates, { currency: edition.currency, items, markups: project.markups }, 'rates', problems) ?? undefined
+}
+
+/** The appraisal file of a sheet: rows that the contract refuses are left out, their reasons kept. */
+export function toAppraisalFile(source: AppraisalSource): AppraisalDraft {
+  const problems: ApiIssue[] = []
+  const readBrief = read(brief, source.project.brief, 'brief', problems)
+  const levels = source.levels.flatMap((row, index) => readLevel(row, index, problems))
+  const schemes = source.schemes.flatMap((row, index) => {
+    const value = read(scheme, row.specification, `schemes.${index}`, problems)
+    return value === null ? [] : [{ value, index }]
+  })
+  const priced = ratesOf(source, problems)
+  const canStand = readBrief !== null && levels.length > 0 && schemes.length > 0
+  return {
+    origin: { levels: levels.map(({ origin }) => origin), schemes: schemes.map(({ index }) => index) },
+    problems,
+    file: canStand
+      ? {
+          format: 'bothways.appraisal/1',
+          brief: readBrief,
+          levels: levels.map(({ value }) => value),
+          schemes: schemes.map(({ value }) => value),
+          ...(priced === undefined ? {} : { rates: priced }),
+        }
+      : null,
+  }
+}

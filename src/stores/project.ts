@@ -1,0 +1,170 @@
+import type { ApiIssue } from '#shared/contracts/apiError'
+import type { LevelInput, ProjectInput, ProjectSheet, SchemeInput, StoredLevel, StoredScheme } from '#shared/contracts/project'
+import type { ProjectReading } from '#shared/contracts/projectReading'
+import { defineStore } from 'pinia'
+import { computed, shallowRef } from 'vue'
+import { idempotencyKey } from '../api/idempotencyKey'
+import { createLevel, removeLevel as askToRemoveLevel } from '../api/levels'
+import { readProjectReading, readProjectSheet } from '../api/projects'
+import { readEdition } from '../api/rateBooks'
+import { createScheme, removeScheme as askToRemoveScheme } from '../api/schemes'
+import type { FullAppraisal } from '../workers/appraisalAnswer'
+import type { AppraisalSource } from './appraisalFile'
+import { useSessionStore } from './session'
+import { createSheetAppraisal } from './sheetAppraisal'
+import type { SheetRow } from './sheetRow'
+import { levelInputOf, schemeInputOf, withoutRow, withRow } from './sheetRow'
+import { createSheetSaving } from './sheetSaving'
+
+/**
+ * The open project. A surveyor has a working copy (`sheet`), changed at once, appraised in the browser and saved after a pause;
+ * a developer or an engineer reads what the server appraised (`reading`). `project`, `levels`, `schemes`, `edition` and `full`
+ * serve both.
+ */
+export const useProjectStore = defineStore('project', () => {
+  const session = useSessionStore()
+  const sheet = shallowRef<ProjectSheet | null>(null)
+  const reading = shallowRef<ProjectReading | null>(null)
+  const source = (): AppraisalSource | null => sheet.value ?? (reading.value && { ...reading.value, edition: null })
+  const appraisal = createSheetAppraisal(source)
+  const saving = createSheetSaving(sheet)
+
+  const project = computed(() => sheet.value?.project ?? reading.value?.project ?? null)
+  const levels = computed<readonly StoredLevel[]>(() => sheet.value?.levels ?? reading.value?.levels ?? [])
+  const schemes = computed<readonly StoredScheme[]>(() => sheet.value?.schemes ?? reading.value?.schemes ?? [])
+  const edition = computed(() => sheet.value?.edition ?? reading.value?.edition ?? null)
+  const full = computed<FullAppraisal | null>(() =>
+    reading.value === null
+      ? appraisal.full.value
+      : { appraisal: reading.value.appraisal, sized: appraisal.full.value?.sized ?? [] },
+  )
+  const problems = computed<readonly ApiIssue[]>(() => {
+    const all = [...appraisal.problems.value, ...saving.refusals.value]
+    return all.filter(({ path, message }, at) => all.findIndex((one) => one.path === path && one.message === message) === at)
+  })
+
+  /** Loads the project as the signed-in person may see it. @throws ApiFailure */
+  async function open(projectId: string): Promise<void> {
+    await saving.queue.flush()
+    close()
+    if (session.hasRole('surveyor')) sheet.value = await readProjectSheet(projectId)
+    else reading.value = await readProjectReading(projectId)
+    appraisal.schedule(0)
+  }
+
+  function close(): void {
+    saving.reset()
+    appraisal.reset()
+    sheet.value = null
+    reading.value = null
+  }
+
+  function change(row: SheetRow): void {
+    if (sheet.value === null) return
+    sheet.value = withRow(sheet.value, row)
+    saving.touch(row)
+    appraisal.schedule()
+  }
+
+  /** Changes brief, edition or markups; another edition's rates are fetched first. @throws ApiFailure */
+  async function changeProject(input: ProjectInput): Promise<void> {
+    if (sheet.value === null) return
+    change({ kind: 'project', row: { ...sheet.value.project, ...input } })
+    if (input.editionId === (sheet.value.edition?.id ?? null)) return
+    const other = input.editionId === null ? null : await readEdition(input.editionId)
+    if (sheet.value.project.editionId !== input.editionId) return
+    sheet.value = { ...sheet.value, edition: other }
+    appraisal.schedule()
+  }
+
+  function changeLevel(levelId: string, input: LevelInput): void {
+    const row = sheet.value?.levels.find(({ id }) => id === levelId)
+    if (row !== undefined) change({ kind: 'level', row: { ...row, ...input } })
+  }
+
+  function changeScheme(schemeId: string, input: SchemeInput): void {
+    const row = sheet.value?.schemes.find(({ id }) => id === schemeId)
+    if (row !== undefined) change({ kind: 'scheme', row: { ...row, ...input } })
+  }
+
+  /** @throws ApiFailure */
+  async function addLevel(input: LevelInput): Promise<StoredLevel | null> {
+    if (sheet.value === null) return null
+    const row = await createLevel(sheet.value.project.id, input, idempotencyKey())
+    sheet.value = { ...sheet.value, levels: [...sheet.value.levels, row] }
+    appraisal.schedule()
+    return row
+  }
+
+  /** @throws ApiFailure */
+  async function addScheme(input: SchemeInput): Promise<StoredScheme | null> {
+    if (sheet.value === null) return null
+    const row = await createScheme(sheet.value.project.id, input, idempotencyKey())
+    sheet.value = { ...sheet.value, schemes: [...sheet.value.schemes, row] }
+    appraisal.schedule()
+    return row
+  }
+
+  /** Takes the row out once what was typed in it is stored, so that its version is the newest. @throws ApiFailure */
+  async function remove(key: string, ask: (projectId: string, version: number) => Promise<void>): Promise<void> {
+    await saving.queue.flush()
+    const rows = [...(sheet.value?.levels ?? []), ...(sheet.value?.schemes ?? [])]
+    const row = rows.find(({ id }) => key.endsWith(`:${id}`))
+    if (sheet.value === null || row === undefined) return
+    await ask(sheet.value.project.id, row.version)
+    saving.forget(key)
+    sheet.value = withoutRow(sheet.value, key)
+    appraisal.schedule()
+  }
+
+  const removeLevel = (id: string) => remove(`level:${id}`, (projectId, version) => askToRemoveLevel(projectId, id, version))
+  const removeScheme = (id: string) => remove(`scheme:${id}`, (projectId, version) => askToRemoveScheme(projectId, id, version))
+
+  /** Of a conflict: stores my version over theirs. @throws ApiFailure */
+  async function keepMine(): Promise<void> {
+    if (saving.conflict.value === null) return
+    const anew = saving.keepMine(saving.conflict.value)
+    if (anew?.kind === 'level') await addLevel(levelInputOf(anew.row))
+    if (anew?.kind === 'scheme') await addScheme(schemeInputOf(anew.row))
+    appraisal.schedule()
+  }
+
+  /** Of a conflict: leaves mine and goes on from theirs. @throws ApiFailure */
+  async function takeTheirs(): Promise<void> {
+    if (saving.conflict.value === null || sheet.value === null) return
+    saving.takeTheirs(saving.conflict.value)
+    const { editionId } = sheet.value.project
+    if (editionId !== (sheet.value.edition?.id ?? null))
+      sheet.value = { ...sheet.value, edition: editionId === null ? null : await readEdition(editionId) }
+    appraisal.schedule()
+  }
+
+  return {
+    sheet,
+    reading,
+    project,
+    levels,
+    schemes,
+    edition,
+    full,
+    problems,
+    isAppraising: appraisal.isAppraising,
+    fault: appraisal.fault,
+    saving: saving.queue.state,
+    savedAt: saving.queue.savedAt,
+    saveFailure: saving.failure,
+    conflict: saving.conflict,
+    open,
+    close,
+    flush: saving.queue.flush,
+    changeProject,
+    changeLevel,
+    addLevel,
+    removeLevel,
+    changeScheme,
+    addScheme,
+    removeScheme,
+    keepMine,
+    takeTheirs,
+  }
+})
