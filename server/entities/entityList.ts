@@ -1,4 +1,7 @@
 import { AuditEntity } from './AuditEntity'
+import { ContactEntity } from './dispatch/ContactEntity'
+import { DispatchEntity } from './dispatch/DispatchEntity'
+import { OutboxEntity } from './dispatch/OutboxEntity'
 import { FirmEntity } from './firm/FirmEntity'
 import { PersonEntity } from './firm/PersonEntity'
 import { PersonRoleEntity } from './firm/PersonRoleEntity'
@@ -35,4 +38,7 @@ export const ENTITIES = [
   LevelEntity,
   SchemeEntity,
   ProjectShareEntity,
+  ContactEntity,
+  DispatchEntity,
+  OutboxEntity,
 ]

@@ -1,5 +1,8 @@
 import { CreateAudit1796100000004 } from './1796100000004-CreateAudit'
 import { CreateIdempotency1796100000005 } from './1796100000005-CreateIdempotency'
+import { CreateContact1796100000040 } from './dispatch/1796100000040-CreateContact'
+import { CreateDispatch1796100000041 } from './dispatch/1796100000041-CreateDispatch'
+import { CreateOutbox1796100000042 } from './dispatch/1796100000042-CreateOutbox'
 import { CreateFirm1796100000001 } from './firm/1796100000001-CreateFirm'
 import { CreatePerson1796100000002 } from './firm/1796100000002-CreatePerson'
 import { CreatePersonRole1796100000003 } from './firm/1796100000003-CreatePersonRole'
@@ -45,4 +48,7 @@ export const MIGRATIONS = [
   KeepRateInsert1796100000020,
   KeepRateUpdate1796100000021,
   KeepRateDelete1796100000022,
+  CreateContact1796100000040,
+  CreateDispatch1796100000041,
+  CreateOutbox1796100000042,
 ]
