@@ -11,5 +11,5 @@ export function niceTicks(least: number, greatest: number, most: number): number
   const step = ([1, 2, 2.5, 5].find((factor) => factor * power >= rough * (1 - 1e-9)) ?? 10) * power
   const first = Math.floor(low / step + 1e-9)
   const last = Math.max(first + 1, Math.ceil(high / step - 1e-9))
-  return Array.from({ length: last - first + 1 }, (_, index) => (first + index) * step)
+  return Array.from({ length: last - first + 1 }, (_, index) => Number(((first + index) * step).toPrecision(12)))
 }
