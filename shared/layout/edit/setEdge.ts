@@ -1,0 +1,31 @@
+import type { Edge, Panel } from '../../contracts/appraisal'
+import { edgeRecords } from './edgeRecords'
+import { meetingEdges } from './meetingEdges'
+
+/**
+ * Panels with one edge's record changed; where neighbours share the edge, theirs change with it, so that both sides of a
+ * support line agree. A free edge has no support, so its width becomes 0; an edge that stops being free takes `usualWidthMm`.
+ *
+ * @param change - what was typed: any of width, kind, continuity
+ * @param usualWidthMm - width for an edge that stops being free without a width of its own
+ */
+export function setEdge(
+  panels: readonly Panel[],
+  panel: number,
+  edge: number,
+  change: Partial<Edge>,
+  usualWidthMm: number,
+): Panel[] {
+  const changed = (before: Edge): Edge => {
+    const after = { ...before, ...change }
+    if (after.continuity === 'free') return { ...after, supportWidth: 0 }
+    const width = before.continuity === 'free' ? (change.supportWidth ?? usualWidthMm) : after.supportWidth
+    return { ...after, supportWidth: width }
+  }
+  const targets = [{ panel, edge }, ...meetingEdges(panels, panel, edge)]
+  return panels.map((each, p) => {
+    const edges = targets.filter((target) => target.panel === p).map((target) => target.edge)
+    if (edges.length === 0) return each
+    return { ...each, edges: edgeRecords(each).map((record, e) => (edges.includes(e) ? changed(record) : record)) }
+  })
+}
