@@ -32,13 +32,6 @@ export function compareMarks(schemes: readonly SchemeResult[], between: readonly
   return compareSchemes(first!, second!)
 }
 
-/** The first ribbed scheme against the first solid one; null where one of the kinds is missing or not priced. */
-export function compareFirstOfEach(schemes: readonly SchemeResult[]): Comparison | null {
-  const ribbed = schemes.find(({ kind }) => kind === 'ribbed')
-  const solid = schemes.find(({ kind }) => kind === 'solid')
-  return ribbed && solid ? compareSchemes(ribbed, solid) : null
-}
-
 function pricedOf({ mark, cost }: SchemeResult): PricedScheme | null {
   return cost && { mark, cost }
 }

@@ -9,7 +9,7 @@ import {
   type Rates,
   type SchemeResult,
 } from '#shared/contracts/appraisal'
-import { compareFirstOfEach, compareMarks, compareSchemes } from '#shared/comparison/compareSchemes'
+import { compareMarks, compareSchemes } from '#shared/comparison/compareSchemes'
 import { unroundedTotal } from '#shared/comparison/unroundedTotal'
 import { Decimal } from '#shared/pricing/decimal'
 import { minorUnit } from '#shared/pricing/minorUnit'
@@ -107,7 +107,7 @@ describe('compareSchemes', () => {
         const most = new Decimal(halves)
           .div(2)
           .times(new Decimal(10).pow(-minorUnit(cost.currency)))
-          .times(3)
+          .times(LARGEST_FACTOR)
         expect(apart.lessThanOrEqualTo(most)).toBe(true)
       }),
       { numRuns: 500 },
@@ -132,13 +132,8 @@ describe('compareSchemes', () => {
 describe('which schemes are compared', () => {
   const other = schemeOf('R2', 'ribbed', [quantity('concrete.slab', 80)], simpleRates)
 
-  it('sets the first ribbed against the first solid one, whatever their order', () => {
-    expect(compareFirstOfEach([solid, ribbed, other])!.between).toEqual(['R1', 'S1'])
-  })
-
-  it('compares nothing where a kind or the rates are missing', () => {
-    expect(compareFirstOfEach([ribbed, other])).toBeNull()
-    expect(compareFirstOfEach([ribbed, schemeOf('S1', 'solid', [], null)])).toBeNull()
+  it('compares nothing where the rates are missing', () => {
+    expect(compareSchemes(ribbed, schemeOf('S1', 'solid', [], null))).toBeNull()
   })
 
   it('compares any pair by its marks and refuses a mark that is not there', () => {
