@@ -1,6 +1,7 @@
 import type { Role } from '#shared/contracts/person'
 import type { RouteRecordRaw } from 'vue-router'
 import { createRouter, createWebHistory } from 'vue-router'
+import { sheetsFor } from '../components/project/projectSheets'
 import { useSessionStore } from '../stores/session'
 import { homeOf } from './homeOf'
 import type { RouteName } from './routeName'
@@ -83,6 +84,7 @@ const routes: NamedRoute[] = [
   {
     path: '/projects/:projectId',
     name: 'project',
+    props: true,
     component: () => import('../views/ProjectView.vue'),
     meta: { title: 'Project', roles: ['surveyor', 'developer', 'engineer'] },
     children: projectSheets,
@@ -125,6 +127,7 @@ router.beforeEach(async (to) => {
   if (to.meta.isOpen) return to.name === 'signIn' && store.session ? { name: homeOf(store.roles), replace: true } : true
   if (!store.session) return { name: 'signIn', query: to.fullPath === '/' ? {} : { next: to.fullPath } }
   const isAllowed = to.matched.every(({ meta }) => meta.roles?.some(store.hasRole) ?? true)
+  if (to.name === 'project') return { name: sheetsFor(store.roles)[0]?.name ?? 'projects', params: to.params, replace: true }
   return isAllowed || { name: homeOf(store.roles), replace: true }
 })
 
