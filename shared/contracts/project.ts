@@ -43,7 +43,7 @@ export const projectSheet = z.strictObject({
 })
 export type ProjectSheet = z.infer<typeof projectSheet>
 
-/** A line of the list of projects. `canOpen`: the reader may open the sheets, not only this line. */
+/** A line of the list of projects. */
 export const projectSummary = z.strictObject({
   id,
   name: z.string(),
@@ -51,6 +51,8 @@ export const projectSummary = z.strictObject({
   place: z.string(),
   levelCount: z.int(),
   panelCount: z.int(),
+  /** The reader may open the project, not only see this line. */
+  canOpen: z.boolean(),
   /** Region and number of the edition in use; null: none chosen. */
   edition: edition.pick({ region: true, number: true, currency: true }).nullable(),
   /** Totals as appraised at the last save; null where a scheme cannot be priced yet. */

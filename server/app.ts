@@ -1,0 +1,60 @@
+import cookieParser from 'cookie-parser'
+import express, { Router, type Express } from 'express'
+import type { DataSource } from 'typeorm'
+import type { Env } from './env'
+import { AppError } from './errors'
+import type { Log } from './log'
+import { clientFiles } from './middleware/clientFiles'
+import { errorHandler } from './middleware/errorHandler'
+import { jsonBody } from './middleware/jsonBody'
+import { requestLog } from './middleware/requestLog'
+import { sameOriginOnly } from './middleware/sameOriginOnly'
+import { securityHeaders } from './middleware/securityHeaders'
+import { signedInOnly } from './middleware/signedInOnly'
+import { healthRoutes } from './routes/healthRoutes'
+import { projectRoutes } from './routes/projectRoutes'
+import { rateRoutes } from './routes/rateRoutes'
+import { sessionRoutes } from './routes/sessionRoutes'
+
+/** What the application runs on. */
+export interface Surroundings {
+  readonly db: DataSource
+  readonly env: Env
+  readonly log: Log
+  /** True once the server is about to stop. */
+  readonly isDraining?: () => boolean
+}
+
+/** The API below `/api`: first what is open to everybody, then what needs a session. */
+function api({ db, env }: Surroundings): Router {
+  const settings = { secret: env.sessionSecret, origin: env.origin }
+  const { manager } = db
+  return Router()
+    .use((_request, response, next) => {
+      response.set('Cache-Control', 'no-store')
+      next()
+    })
+    .use(sessionRoutes(manager, settings, env.localMailFolder !== null))
+    .use(signedInOnly(manager, settings))
+    .use(projectRoutes(manager))
+    .use(rateRoutes(manager))
+    .use(() => {
+      throw new AppError('not_found')
+    })
+}
+
+/** The whole application, not yet listening. The database must be initialised and migrated. */
+export function createApp(surroundings: Surroundings): Express {
+  const { db, env, log, isDraining = () => false } = surroundings
+  const app = express()
+  app.disable('x-powered-by').set('etag', false).set('trust proxy', env.trustedProxies).set('is https', env.isHttps)
+  app.set('query parser', 'simple')
+  app.use(requestLog(log))
+  app.use(securityHeaders(env.isHttps))
+  app.use(healthRoutes(db.manager, isDraining))
+  app.use(sameOriginOnly(env.origin), jsonBody(), cookieParser())
+  app.use('/api', api(surroundings))
+  app.use(clientFiles(env.clientFolder))
+  app.use(errorHandler(db.manager, log))
+  return app
+}

@@ -1,0 +1,51 @@
+import type { ApiError } from '#shared/contracts/apiError'
+import type { ErrorRequestHandler, Request, Response } from 'express'
+import type { EntityManager } from 'typeorm'
+import { AppError, STATUS } from '../errors'
+import type { Log } from '../log'
+import { recordEvent } from '../services/auditLog'
+import type { SignedIn } from '../services/session/signedIn'
+import { isUnavailable } from '../services/unavailable'
+
+/** An error of the framework that says itself that it may be shown: a body that is no JSON, an address that cannot be decoded. */
+function fromFramework(error: unknown): AppError | null {
+  if (!(error instanceof Error) || !('status' in error) || typeof error.status !== 'number') return null
+  if (error.status < 400 || error.status > 499) return null
+  if (error.status === 413) return new AppError('too_large')
+  if (error.status === 415) return new AppError('unsupported_media_type')
+  const reason = 'type' in error && error.type === 'entity.parse.failed' ? 'The body is not JSON.' : undefined
+  return new AppError('invalid_request', reason)
+}
+
+/** The error as the caller may see it: what is not known to be theirs is ours. */
+export function toAppError(error: unknown): AppError {
+  if (error instanceof AppError) return error
+  if (isUnavailable(error)) return new AppError('unavailable', undefined, undefined, 1)
+  return fromFramework(error) ?? new AppError('internal')
+}
+
+async function auditRefusal(db: EntityManager, request: Request, response: Response): Promise<void> {
+  const who = response.locals['who'] as SignedIn | undefined
+  const detail = { method: request.method, path: request.path.slice(0, 200) }
+  await recordEvent(db, { event: 'request.refused', firmId: who?.firmId ?? null, personId: who?.personId ?? null, detail })
+}
+
+/** Answers every error in the one shape; logs whole what is ours, and records what was refused for want of rights. */
+export function errorHandler(db: EntityManager, log: Log): ErrorRequestHandler {
+  return async (error: unknown, request, response, next) => {
+    const known = toAppError(error)
+    const requestId = String(request.id)
+    if (STATUS[known.code] >= 500) log.error({ err: error, requestId }, 'request failed')
+    if (response.headersSent) return next(error)
+    const body: ApiError = { code: known.code, message: known.message, requestId }
+    if (known.retryAfterS !== undefined) response.set('Retry-After', String(known.retryAfterS))
+    response
+      .status(STATUS[known.code])
+      .set('Cache-Control', 'no-store')
+      .json(known.issues === undefined ? body : { ...body, issues: known.issues })
+    if (known.code !== 'forbidden') return
+    await auditRefusal(db, request, response).catch((cause: unknown) =>
+      log.error({ err: cause, requestId }, 'refusal not recorded'),
+    )
+  }
+}

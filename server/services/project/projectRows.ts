@@ -1,0 +1,30 @@
+import type { Project, StoredLevel, StoredScheme } from '#shared/contracts/project'
+import type { EntityManager } from 'typeorm'
+import { PersonEntity } from '../../entities/firm/PersonEntity'
+import type { LevelEntity } from '../../entities/project/LevelEntity'
+import { ProjectEntity } from '../../entities/project/ProjectEntity'
+import type { SchemeEntity } from '../../entities/project/SchemeEntity'
+import { AppError } from '../../errors'
+
+/** The firm's project. @throws AppError `not_found`, the same for another firm's */
+export async function requireProject(db: EntityManager, firmId: string, id: string): Promise<ProjectEntity> {
+  const row = await db.findOneBy(ProjectEntity, { firmId, id })
+  if (row === null) throw new AppError('not_found')
+  return row
+}
+
+/** A project's row as the contract has it. */
+export async function toProject(db: EntityManager, row: ProjectEntity): Promise<Project> {
+  const { id, name, reference, place, use, brief, editionId, markups, version } = row
+  const person = await db.findOneByOrFail(PersonEntity, { firmId: row.firmId, id: row.updatedBy })
+  const updatedAt = row.updatedAt.toISOString()
+  return { id, name, reference, place, use, brief, editionId, markups, version, updatedAt, updatedBy: person.name }
+}
+
+export function toStoredLevel({ id, position, mark, name, repeat, panels, version }: LevelEntity): StoredLevel {
+  return { id, position, mark, name, repeat, panels, version }
+}
+
+export function toStoredScheme({ id, position, name, blockId, specification, version }: SchemeEntity): StoredScheme {
+  return { id, position, name, blockId, specification, version }
+}
