@@ -7,15 +7,15 @@ export interface Stretch {
   readonly end: number
 }
 
-/** One piece of block along a row. */
-export interface Piece extends Stretch {
-  readonly isCut: boolean
+/** A line of blocks without a gap: whole ones, and at both ends a cut one of `cutMm` each (0: none). */
+export interface FilledRun extends Stretch {
+  readonly whole: number
+  readonly cutMm: number
 }
 
 /** A usable length filled with blocks. */
 export interface FilledLength {
-  /** Blocks without a gap between them, one list for each run. */
-  readonly runs: readonly (readonly Piece[])[]
+  readonly runs: readonly FilledRun[]
   readonly crossRibs: readonly Stretch[]
   /** Solid remainders beside the runs. */
   readonly fillers: readonly Stretch[]
@@ -41,7 +41,7 @@ export function fillLength(
   })
   const filled = segments.map((segment) => fillSegment(segment, scheme))
   return {
-    runs: filled.map(({ pieces }) => pieces).filter((pieces) => pieces.length > 0),
+    runs: filled.flatMap(({ run }) => run ?? []),
     crossRibs: segments.slice(1).map(({ start }) => ({ start: start - widthMm, end: start })),
     fillers: filled.flatMap(({ fillers }) => fillers),
   }
@@ -50,21 +50,15 @@ export function fillLength(
 function fillSegment(
   { start, end }: Stretch,
   { block, cutBlocks, leastPiece }: Pick<RibbedScheme, 'block' | 'cutBlocks' | 'leastPiece'>,
-): { pieces: Piece[]; fillers: Stretch[] } {
+): { readonly run: FilledRun | null; readonly fillers: readonly Stretch[] } {
   const whole = Math.floor((end - start + FIT_TOLERANCE_MM) / block.length)
   const half = (end - start - whole * block.length) / 2
-  const isCut = cutBlocks && half >= leastPiece - FIT_TOLERANCE_MM
-  const first = start + half
-  const pieces: Piece[] = Array.from({ length: whole }, (_, i) => ({
-    start: first + i * block.length,
-    end: first + (i + 1) * block.length,
-    isCut: false,
-  }))
-  const ends: readonly [Stretch, Stretch] = [
-    { start, end: first },
-    { start: end - half, end },
+  if (cutBlocks && half >= leastPiece - FIT_TOLERANCE_MM) return { run: { start, end, whole, cutMm: half }, fillers: [] }
+  if (whole === 0) return { run: null, fillers: [{ start, end }] }
+  const run = { start: start + half, end: end - half, whole, cutMm: 0 }
+  const fillers = [
+    { start, end: run.start },
+    { start: run.end, end },
   ]
-  if (isCut) return { pieces: [{ ...ends[0], isCut }, ...pieces, { ...ends[1], isCut }], fillers: [] }
-  if (whole === 0) return { pieces, fillers: [{ start, end }] }
-  return { pieces, fillers: half > FIT_TOLERANCE_MM ? [...ends] : [] }
+  return { run, fillers: half > FIT_TOLERANCE_MM ? fillers : [] }
 }

@@ -3,9 +3,9 @@ import { signedArea } from '../geometry/ring'
 import { clearOutline } from './clearOutline'
 import type { LaidRow } from './laidRow'
 import { layRow } from './laidRow'
-import type { PanelField } from './panelField'
 import { panelField } from './panelField'
-import type { BlockRow, PanelLayout, PlacedBlock } from './panelLayout'
+import type { BlockRow, PanelLayout } from './panelLayout'
+import { placedBlocks } from './placedBlocks'
 import { longestRib, ribLines } from './ribLines'
 import { ribbedAreas } from './ribbedAreas'
 import { rowBands } from './rowBands'
@@ -37,9 +37,9 @@ export function layOutPanel(
   const bands = rowBands(field.top - field.bottom, scheme)
   const rows = bands.starts.map((start) => layRow(field, field.bottom + start, scheme, rules))
   const windows = solidWindows(field, rows)
-  const pieces = rows.flatMap(({ filled }) => filled.flatMap(({ runs }) => runs.flat()))
-  const cut = pieces.filter(({ isCut }) => isCut)
-  const blocks = once(() => placedBlocks(field, rows))
+  const runs = rows.flatMap(({ filled }) => filled.flatMap((each) => each.runs))
+  const cutRuns = runs.filter(({ cutMm }) => cutMm > 0)
+  const blocks = once(() => placedBlocks(field.frame, rows, scheme.block.length))
   const regions = once(() => solidRegions(field, windows))
   return {
     clear: clear.ring,
@@ -52,10 +52,10 @@ export function layOutPanel(
       return regions()
     },
     areas: ribbedAreas(field, rows, windows, stripAreas(panel, clear, sharedEdges), signedArea(panel.outline)),
-    blocksWhole: pieces.length - cut.length,
-    blocksCut: cut.length,
-    closedEnds: 2 * rows.reduce((runs, { filled }) => runs + filled.reduce((sum, each) => sum + each.runs.length, 0), 0),
-    cutLength: cut.reduce((sum, { start, end }) => sum + end - start, 0),
+    blocksWhole: runs.reduce((sum, { whole }) => sum + whole, 0),
+    blocksCut: 2 * cutRuns.length,
+    closedEnds: 2 * runs.length,
+    cutLength: cutRuns.reduce((sum, { cutMm }) => sum + 2 * cutMm, 0),
     longestRib: longestRib(field, rows, scheme),
     solidZone: solidZoneMm,
   }
@@ -69,21 +69,9 @@ function blockRow({ bandStart, bandEnd, lengths, filled }: LaidRow): BlockRow {
       .filter(({ usableStart, usableEnd }) => usableEnd > usableStart)
       .map(({ usableStart, usableEnd, startsAt, endsAt }) => ({ start: usableStart, end: usableEnd, startsAt, endsAt })),
     runs: filled.flatMap(({ runs }) =>
-      runs.map((run) => ({ start: run[0]!.start, end: run[run.length - 1]!.end, blocks: run.length })),
+      runs.map(({ start, end, whole, cutMm }) => ({ start, end, blocks: whole + (cutMm > 0 ? 2 : 0) })),
     ),
   }
-}
-
-function placedBlocks({ frame }: PanelField, rows: readonly LaidRow[]): PlacedBlock[] {
-  return rows.flatMap(({ bandStart, bandEnd, filled }, row) =>
-    filled.flatMap(({ runs }) =>
-      runs.flat().map(({ start, end, isCut }): PlacedBlock => {
-        const corner = (x: number, y: number): [number, number] => [...frame.toLevel([x, y])]
-        const ring = [corner(start, bandStart), corner(end, bandStart), corner(end, bandEnd), corner(start, bandEnd)]
-        return { ring, length: end - start, isCut, row }
-      }),
-    ),
-  )
 }
 
 /** The same value at every call, made at the first. */

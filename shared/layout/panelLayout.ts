@@ -4,7 +4,10 @@ import type { Point } from '../geometry/point'
 /** Where a usable length of a row ends: it decides whether a solid zone stands there. */
 export type RunEnd = 'support' | 'trimmer' | 'free'
 
-/** A line of blocks without a gap, closed at both ends. `start` and `end` along the rib direction, mm, in the panel's local frame. */
+/**
+ * A line of blocks without a gap, closed at both ends. `start` and `end` along the rib direction, mm, in the panel's local frame;
+ * `blocks` counts whole and cut ones.
+ */
 export interface BlockRun {
   readonly start: number
   readonly end: number
@@ -45,7 +48,7 @@ export interface RibLine {
 export interface PanelAreas {
   readonly gross: number
   readonly strips: number
-  /** Of `strips`, what stands over walls and so belongs to the floor. */
+  /** What stands over walls and so belongs to the floor; the outer half of unshared walls, outside `gross` and `strips`, included. */
   readonly wallStrips: number
   readonly clear: number
   readonly blocks: number

@@ -37,8 +37,7 @@ export function ribbedAreas(
 function blockArea(rows: readonly LaidRow[]): number {
   let area = 0
   for (const { bandStart, bandEnd, filled } of rows)
-    for (const { runs } of filled)
-      for (const run of runs) area += (run[run.length - 1]!.end - run[0]!.start) * (bandEnd - bandStart)
+    for (const { runs } of filled) for (const { start, end } of runs) area += (end - start) * (bandEnd - bandStart)
   return area
 }
 
