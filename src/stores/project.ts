@@ -8,7 +8,7 @@ import { createLevel, removeLevel as askToRemoveLevel } from '../api/levels'
 import { readProjectReading, readProjectSheet } from '../api/projects'
 import { readEdition } from '../api/rateBooks'
 import { createScheme, removeScheme as askToRemoveScheme } from '../api/schemes'
-import type { FullAppraisal } from '../workers/appraisalAnswer'
+import type { FullAppraisal } from '#shared/appraise'
 import type { AppraisalSource } from './appraisalFile'
 import { useSessionStore } from './session'
 import { createSheetAppraisal } from './sheetAppraisal'
@@ -36,7 +36,7 @@ export const useProjectStore = defineStore('project', () => {
   const full = computed<FullAppraisal | null>(() =>
     reading.value === null
       ? appraisal.full.value
-      : { appraisal: reading.value.appraisal, sized: appraisal.full.value?.sized ?? [] },
+      : { sized: [], problems: [], ...appraisal.full.value, appraisal: reading.value.appraisal },
   )
   const problems = computed<readonly ApiIssue[]>(() => {
     const all = [...appraisal.problems.value, ...saving.refusals.value]

@@ -1,6 +1,6 @@
 import type { ApiIssue } from '#shared/contracts/apiError'
 import { ref, shallowRef } from 'vue'
-import type { FullAppraisal } from '../workers/appraisalAnswer'
+import type { FullAppraisal } from '#shared/appraise'
 import type { Appraiser } from '../workers/appraiser'
 import { createAppraiser } from '../workers/appraiser'
 import type { AppraisalSource } from './appraisalFile'

@@ -4,6 +4,6 @@ import { appraiseWhatStands } from './appraiseWhatStands'
 
 /** The engine off the main thread: one answer to each request. */
 self.addEventListener('message', ({ data }: MessageEvent<AppraisalRequest>) => {
-  const answer: AppraisalAnswer = { id: data.id, ...appraiseWhatStands(appraiseInFull, data.file, data.origin) }
+  const answer: AppraisalAnswer = { id: data.id, ...appraiseWhatStands(appraiseInFull, data) }
   self.postMessage(answer)
 })

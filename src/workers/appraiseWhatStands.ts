@@ -1,79 +1,42 @@
+import type { FullAppraisal } from '#shared/appraise'
+import { AppraisalRefusedError } from '#shared/appraisalRefused'
 import type { ApiIssue } from '#shared/contracts/apiError'
 import type { AppraisalFile } from '#shared/contracts/appraisal'
 import { OutOfScopeError } from '#shared/outOfScope'
-import type { FileOrigin, FullAppraisal } from './appraisalAnswer'
+import type { TracedFile } from './fileRows'
+import { namesFloor, pathInSheet, rowCount, withoutRows } from './fileRows'
 
-interface Attempt {
-  readonly file: AppraisalFile
-  readonly origin: FileOrigin
-}
+type Appraise = (file: AppraisalFile) => FullAppraisal
 
-const without = <T>(list: readonly T[], index: number): T[] => list.filter((_, at) => at !== index)
-
-/** The path as the sheet counts its rows. */
-function pathInSheet(path: string, { levels, schemes }: FileOrigin): string {
-  return path
-    .replace(/^levels\.(\d+)\.panels\.(\d+)/, (_, level: string, panel: string) => {
-      const row = levels[Number(level)]
-      return `levels.${row?.index ?? level}.panels.${row?.panels[Number(panel)] ?? panel}`
-    })
-    .replace(/^levels\.(\d+)(?!\.panels)/, (_, level: string) => `levels.${levels[Number(level)]?.index ?? level}`)
-    .replace(/^schemes\.(\d+)/, (_, scheme: string) => `schemes.${schemes[Number(scheme)] ?? scheme}`)
-}
-
-function withoutLevel({ file, origin }: Attempt, level: number): Attempt {
-  return {
-    file: { ...file, levels: without(file.levels, level) },
-    origin: { ...origin, levels: without(origin.levels, level) },
+/** The result of one try, and what it says against the file. @throws what is a fault of the engine */
+function attempt(appraise: Appraise, file: AppraisalFile): { full: FullAppraisal | null; issues: readonly ApiIssue[] } {
+  try {
+    const full = appraise(file)
+    return { full, issues: full.problems.map(({ issue }) => issue) }
+  } catch (cause) {
+    if (cause instanceof AppraisalRefusedError) return { full: null, issues: cause.issues }
+    if (cause instanceof OutOfScopeError) return { full: null, issues: [{ path: cause.path, message: cause.expected }] }
+    throw cause
   }
-}
-
-function withoutPanel({ file, origin }: Attempt, level: number, panel: number): Attempt {
-  const panels = without(file.levels[level]?.panels ?? [], panel)
-  if (panels.length === 0) return withoutLevel({ file, origin }, level)
-  return {
-    file: { ...file, levels: file.levels.map((row, at) => (at === level ? { ...row, panels } : row)) },
-    origin: {
-      ...origin,
-      levels: origin.levels.map((row, at) => (at === level ? { ...row, panels: without(row.panels, panel) } : row)),
-    },
-  }
-}
-
-/** The attempt less the row that the path names; null when the path names none. */
-function withoutWhat(path: string, attempt: Attempt): Attempt | null {
-  const [, scheme] = /^schemes\.(\d+)/.exec(path) ?? []
-  if (scheme !== undefined) {
-    const { file, origin } = attempt
-    return {
-      file: { ...file, schemes: without(file.schemes, Number(scheme)) },
-      origin: { ...origin, schemes: without(origin.schemes, Number(scheme)) },
-    }
-  }
-  const [, level, panel] = /^levels\.(\d+)(?:\.panels\.(\d+))?/.exec(path) ?? []
-  if (level === undefined) return null
-  return panel === undefined ? withoutLevel(attempt, Number(level)) : withoutPanel(attempt, Number(level), Number(panel))
 }
 
 /**
  * Appraises what stands: a row that the engine refuses is left out, its reason kept, and the rest is appraised again,
- * so that one half-typed panel does not blank the sheet.
+ * so that one half-typed panel does not blank the sheet. A panel that one scheme cannot cover is left out of all of them,
+ * so that the schemes still answer the same floor.
  */
-export function appraiseWhatStands(
-  appraise: (file: AppraisalFile) => FullAppraisal,
-  file: AppraisalFile,
-  origin: FileOrigin,
-): { full: FullAppraisal | null; problems: ApiIssue[] } {
+export function appraiseWhatStands(appraise: Appraise, given: TracedFile): { full: FullAppraisal | null; problems: ApiIssue[] } {
   const problems: ApiIssue[] = []
-  let attempt: Attempt | null = { file, origin }
-  while (attempt !== null && attempt.file.levels.length > 0 && attempt.file.schemes.length > 0) {
-    try {
-      return { full: appraise(attempt.file), problems }
-    } catch (cause) {
-      if (!(cause instanceof OutOfScopeError)) throw cause
-      problems.push({ path: pathInSheet(cause.path, attempt.origin), message: cause.expected })
-      attempt = withoutWhat(cause.path, attempt)
-    }
+  let traced = given
+  while (traced.file.levels.length > 0 && traced.file.schemes.length > 0) {
+    const { full, issues } = attempt(appraise, traced.file)
+    const { origin } = traced
+    problems.push(...issues.map(({ path, message }) => ({ path: pathInSheet(path, origin), message })))
+    const barred = issues.map(({ path }) => path).filter((path) => full === null || namesFloor(path))
+    if (barred.length === 0) return { full, problems }
+    const rest = withoutRows(traced, barred)
+    if (rowCount(rest) === rowCount(traced)) return { full, problems }
+    traced = rest
   }
   return { full: null, problems }
 }
