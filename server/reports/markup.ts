@@ -1,6 +1,6 @@
 import { escapeMarkup } from '#shared/drawing/svgText'
 
-/** Markup that is safe to put into a page: made by `html`, or said to be safe by `trustedMarkup`. */
+/** Markup that is safe to put into a page: made by `markup`, or said to be safe by `trustedMarkup`. */
 export class Markup {
   constructor(readonly text: string) {}
 
@@ -18,7 +18,7 @@ function partText(part: Part): string {
 }
 
 /** Template whose parts are escaped, unless they are markup themselves: text is text everywhere. */
-export function html(strings: TemplateStringsArray, ...parts: readonly Part[]): Markup {
+export function markup(strings: TemplateStringsArray, ...parts: readonly Part[]): Markup {
   return new Markup(strings.map((string, index) => string + (index < parts.length ? partText(parts[index]!) : '')).join(''))
 }
 

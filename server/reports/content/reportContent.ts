@@ -1,0 +1,89 @@
+import type { Check } from '#shared/contracts/appraisal'
+import { Decimal } from '#shared/pricing/decimal'
+import { signedDecimalText } from '../figureText'
+import type { FrozenComparison } from '../frozenComparison'
+import { basisFacts } from './basisFacts'
+import { CAUTIONS } from './cautions'
+import { comparedFigures, type ComparedFigure } from './comparedFigures'
+import { headline, standfirst, wholeTotal, type SchemeKind, type Sentence } from './headline'
+import { leftOut } from './leftOut'
+import type { ReportFact } from './reportFact'
+import { solidIsBetter } from './solidIsBetter'
+import { titleBlock } from './titleBlock'
+import { turningPoints, type TurningPoint } from './turningPoints'
+import { wholeParts } from './wholeParts'
+
+/** A bar of the chart of differences: `share` of the longest bar, negative where ribbed is the cheaper there. */
+export interface DifferenceBar {
+  readonly label: string
+  /** Whole units of money, signed; the bars add up to the total as printed. */
+  readonly amount: string
+  readonly share: number
+}
+
+export interface CheckedScheme {
+  readonly kind: SchemeKind
+  readonly mark: string
+  readonly summary: string
+  readonly checks: readonly Check[]
+}
+
+/** Everything the report says, once; the page, the PDF, the e-mail and its text alternative only set it differently. */
+export interface ReportContent {
+  readonly title: string
+  readonly headline: Sentence
+  readonly standfirst: string
+  readonly note: string
+  readonly currency: string
+  readonly figures: readonly ComparedFigure[]
+  readonly bars: readonly DifferenceBar[]
+  readonly totalDifference: string
+  readonly turning: readonly TurningPoint[]
+  readonly solidIsBetter: readonly ReportFact[]
+  readonly basis: readonly ReportFact[]
+  readonly leftOut: readonly string[]
+  readonly checked: readonly CheckedScheme[]
+  readonly cautions: readonly string[]
+  readonly titleBlock: readonly ReportFact[]
+}
+
+function differenceBars(frozen: FrozenComparison, total: Decimal): DifferenceBar[] {
+  const exact = frozen.groups.map(({ difference }) => new Decimal(difference))
+  const amounts = wholeParts(exact, total)
+  const longest = Math.max(1, ...exact.map((difference) => difference.abs().toNumber()))
+  return frozen.groups.map(({ label }, index) => ({
+    label,
+    amount: signedDecimalText(amounts[index]!.toFixed()),
+    share: exact[index]!.toNumber() / longest,
+  }))
+}
+
+function checkedScheme(frozen: FrozenComparison, kind: SchemeKind): CheckedScheme {
+  const { specification, checkCount, failedCount, checks } = frozen[kind]
+  const summary =
+    failedCount === 0
+      ? `All ${checkCount} checks pass; the tightest of each kind:`
+      : `${failedCount} of ${checkCount} checks fail:`
+  return { kind, mark: specification.mark, summary, checks }
+}
+
+export function reportContent(frozen: FrozenComparison): ReportContent {
+  const total = wholeTotal(frozen, 'ribbed').minus(wholeTotal(frozen, 'solid'))
+  return {
+    title: `${frozen.project.name}: the floor built both ways`,
+    headline: headline(frozen),
+    standfirst: standfirst(frozen),
+    note: frozen.note,
+    currency: frozen.edition.currency,
+    figures: comparedFigures(frozen),
+    bars: differenceBars(frozen, total),
+    totalDifference: signedDecimalText(total.toFixed()),
+    turning: turningPoints(frozen),
+    solidIsBetter: solidIsBetter(frozen),
+    basis: basisFacts(frozen),
+    leftOut: leftOut(frozen),
+    checked: [checkedScheme(frozen, 'ribbed'), checkedScheme(frozen, 'solid')],
+    cautions: CAUTIONS,
+    titleBlock: titleBlock(frozen),
+  }
+}

@@ -1,0 +1,25 @@
+import type { Check } from '#shared/contracts/appraisal'
+
+/** Failing checks listed at most; the report says how many there are in all. */
+const MOST_FAILING = 200
+
+/** The tightest check of each kind, in the order of the kinds, then the other failing ones, worst first. */
+export function tightestChecks(checks: readonly Check[]): Check[] {
+  const byKind = new Map<Check['name'], Check>()
+  for (const check of checks) {
+    const tightest = byKind.get(check.name)
+    if (!tightest || isTighter(check, tightest)) byKind.set(check.name, check)
+  }
+  const tightest = [...byKind.values()]
+  const failing = checks
+    .filter((check) => !check.pass && !tightest.includes(check))
+    .sort((a, b) => b.utilisation - a.utilisation)
+    .slice(0, MOST_FAILING)
+  return [...tightest, ...failing]
+}
+
+/** A failing check is tighter than one that passes, whatever their utilisations. */
+function isTighter(check: Check, than: Check): boolean {
+  if (check.pass !== than.pass) return !check.pass
+  return check.utilisation > than.utilisation
+}
