@@ -1,5 +1,5 @@
+import { offsetRing } from '../geometry/offsetRing'
 import { distance } from '../geometry/ring'
-import { clearOutline } from '../layout/clearOutline'
 import { panelEdges } from '../layout/panelEdges'
 import { toM } from '../units'
 import { type Expression, figure, plus } from './expression'
@@ -13,13 +13,18 @@ export function soffitOf(measured: MeasuredPanel, rules: MeasurementRules): Expr
   return soffitAreaOf(measured, rules.deductVoidsOver.soffitM2)
 }
 
-/** Edges of one panel that are formed, m: its free edges between the faces of supports, and round every void. None: null. */
-export function edgesOf({ panel }: MeasuredPanel): Expression | null {
-  const { faces } = clearOutline(panel)
-  const freeEdges = panelEdges(panel).flatMap(({ continuity }, index) => {
-    const { start, end } = faces[index]!
-    return continuity === 'free' ? [figure(toM(distance(start, end)))] : []
+/**
+ * Edges of one panel that are formed, m: its free edges as far as the floor's own concrete goes (to the faces of beams, over walls to
+ * the centre-line, or to the outer face where no other panel shares the wall), and round every void. None: null.
+ */
+export function edgesOf({ panel, sharedEdges }: MeasuredPanel): Expression | null {
+  const edges = panelEdges(panel)
+  const inwardsMm = edges.map(({ kind, supportWidth }, index) => {
+    if (kind === 'beam') return supportWidth / 2
+    return sharedEdges[index] ? 0 : -supportWidth / 2
   })
-  const lengths = [...freeEdges, ...panel.voids.map(perimeterOf)]
+  const { moved } = offsetRing(panel.outline, inwardsMm)
+  const freeEdges = moved.filter((_, index) => edges[index]!.continuity === 'free')
+  const lengths = [...freeEdges.map(({ start, end }) => figure(toM(distance(start, end)))), ...panel.voids.map(perimeterOf)]
   return lengths.length === 0 ? null : plus(...lengths)
 }

@@ -1,4 +1,5 @@
 import type { Level, Panel } from '../contracts/appraisal'
+import { findSharedEdges } from '../layout/neighbours'
 import type { SizedPanel, SizedScheme } from '../sizing/sizedPanel'
 import { type Expression, timesed } from './expression'
 
@@ -7,10 +8,9 @@ export interface MeasuredPanel {
   readonly level: Level
   readonly panel: Panel
   readonly sized: SizedPanel
+  /** One for each edge of the outline: whether another panel of the level stands on the same support. */
+  readonly sharedEdges: readonly boolean[]
 }
-
-/** What one panel contributes to a quantity, repeats not counted; null: nothing. */
-export type Measure = (measured: MeasuredPanel) => Expression | null
 
 /**
  * Every panel of a scheme with its level, in the order of the levels.
@@ -18,15 +18,18 @@ export type Measure = (measured: MeasuredPanel) => Expression | null
  * @throws RangeError when the scheme was sized from other levels
  */
 export function measuredPanels(sized: SizedScheme, levels: readonly Level[]): MeasuredPanel[] {
-  const asked = levels.flatMap((level) => level.panels.map((panel) => ({ level, panel })))
+  const asked = levels.flatMap((level) => {
+    const shared = findSharedEdges(level)
+    return level.panels.map((panel, index) => ({ level, panel, sharedEdges: shared[index]! }))
+  })
   if (asked.length !== sized.panels.length)
     throw new RangeError(`expected ${asked.length} sized panels, got ${sized.panels.length}`)
-  return asked.map(({ level, panel }, index) => {
+  return asked.map(({ level, panel, sharedEdges }, index) => {
     const sizedPanel = sized.panels[index]!
     if (sizedPanel.level !== level.mark || sizedPanel.mark !== panel.mark) {
       throw new RangeError(`expected panel ${level.mark} ${panel.mark} sized, got ${sizedPanel.level} ${sizedPanel.mark}`)
     }
-    return { level, panel, sized: sizedPanel }
+    return { level, panel, sized: sizedPanel, sharedEdges }
   })
 }
 
