@@ -1,0 +1,70 @@
+import type { Comparison, Cost, SchemeResult } from '#shared/contracts/appraisal'
+import { itemCode } from '#shared/contracts/appraisal'
+import { Decimal, sumOf } from '#shared/pricing/decimal'
+import { unitOf } from '#shared/takeoff/measurementRules'
+import { formatDecimal } from '../base/formatDecimal'
+import type { Pair } from '../compare/phrase'
+import { itemInWords } from '../quantity/itemInWords'
+
+/** One line of the ledger as it is read. Amounts are exact decimal strings. */
+export interface LedgerRow {
+  readonly key: string
+  readonly name: string
+  /** How the amounts came about: quantities and rate, or what a markup is charged on. */
+  readonly working: string
+  readonly ribbed: string
+  readonly solid: string
+  readonly difference: string
+  readonly running: string
+}
+
+export interface LedgerRows {
+  readonly rows: readonly LedgerRow[]
+  /** What costs the same in both, taken together; null where there is none. */
+  readonly same: { readonly names: string; readonly amount: string } | null
+  readonly total: Pair<string> & { readonly difference: string }
+}
+
+const MARKUPS: Readonly<Record<string, string>> = { preliminaries: 'Preliminaries', contingency: 'Contingency', tax: 'Tax' }
+
+/** The engine's ledger made readable: names, workings, and what is the same in both taken together. */
+export function ledgerRows(comparison: Comparison, pair: Pair<SchemeResult>): LedgerRows | null {
+  const [ribbed, solid] = [pair.ribbed.cost, pair.solid.cost]
+  if (ribbed === null || solid === null) return null
+  const lines = comparison.ledger.map((line) => ({
+    ...line,
+    key: line.item,
+    ribbed: line.first,
+    solid: line.second,
+    ...named(line.item, ribbed, solid),
+  }))
+  const same = lines.filter(({ difference }) => Number(difference) === 0)
+  return {
+    rows: lines.filter(({ difference }) => Number(difference) !== 0),
+    same:
+      same.length === 0
+        ? null
+        : {
+            names: same.map(({ name }) => name.toLowerCase()).join(', '),
+            amount: sumOf(same.map(({ first }) => new Decimal(first))).toFixed(),
+          },
+    total: {
+      ribbed: ribbed.total,
+      solid: solid.total,
+      difference: new Decimal(ribbed.total).minus(solid.total).toFixed(),
+    },
+  }
+}
+
+function named(item: string, ribbed: Cost, solid: Cost): { name: string; working: string } {
+  const code = itemCode.safeParse(item)
+  if (!code.success) {
+    const percent =
+      ribbed.markups.find(({ name }) => name === item)?.percent ?? solid.markups.find(({ name }) => name === item)?.percent
+    return { name: `${MARKUPS[item] ?? item}, ${percent} %`, working: 'on every item, those that cost the same included' }
+  }
+  const lines = [ribbed, solid].map(({ lines: all }) => all.find((line) => line.item === item))
+  const quantities = lines.map((line) => (line ? formatDecimal(line.quantity) : 'none'))
+  const rates = [...new Set(lines.flatMap((line) => (line ? [formatDecimal(line.rate)] : [])))]
+  return { name: itemInWords(code.data), working: `${quantities.join(' and ')} ${unitOf(code.data)} at ${rates.join(' and ')}` }
+}
