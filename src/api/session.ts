@@ -15,7 +15,7 @@ export const readSession = (): Promise<Session> => request(session, 'GET', '/api
 
 export const refreshSession = (): Promise<void> => command('POST', '/api/session/refresh', { body: {}, isSigningIn: true })
 
-export const signOut = (): Promise<void> => command('DELETE', '/api/session', { isSigningIn: true })
+export const signOut = (): Promise<void> => command('DELETE', '/api/session')
 
 /** Answers the same for every address. */
 export const requestPasswordReset = (input: PasswordResetRequest): Promise<void> =>

@@ -118,7 +118,8 @@ const routes: NamedRoute[] = [
 export const router = createRouter({
   history: createWebHistory(),
   routes,
-  scrollBehavior: (to, from, saved) => saved ?? (to.hash ? { el: to.hash } : to.path === from.path ? {} : { top: 0 }),
+  scrollBehavior: (to, from, saved) =>
+    saved ?? (/^#[a-z]$/.test(to.hash) ? { el: to.hash } : to.path === from.path ? {} : { top: 0 }),
 })
 
 router.beforeEach(async (to) => {

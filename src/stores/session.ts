@@ -41,8 +41,11 @@ export const useSessionStore = defineStore('session', () => {
     session.value = await askToSignIn(input)
   }
 
+  /** Ends the session; one that had run out already is as good as ended. */
   async function signOut(): Promise<void> {
-    await askToSignOut()
+    await askToSignOut().catch((failure: unknown) => {
+      if (!(failure instanceof ApiFailure) || failure.code !== 'unauthenticated') throw failure
+    })
     session.value = null
   }
 
