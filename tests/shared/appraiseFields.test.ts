@@ -1,0 +1,92 @@
+import { describe, expect, it } from 'vitest'
+import { appraise } from '#shared/appraise'
+import { AppraisalRefusedError } from '#shared/appraisalRefused'
+import { type AppraisalFileInput, appraisalFile } from '#shared/contracts/appraisal'
+import { OutOfScopeError } from '#shared/outOfScope'
+import { parseAppraisalFile } from '#shared/parseAppraisalFile'
+import { computedFile, givenFile } from './support/richFiles'
+
+type Path = readonly (string | number)[]
+
+/** Every field that holds a value, defaults filled in, by its path. */
+function fieldsOf(value: unknown, path: Path = []): Path[] {
+  if (typeof value !== 'object' || value === null) return [path]
+  return Object.entries(value).flatMap(([key, inner]) => fieldsOf(inner, [...path, Array.isArray(value) ? Number(key) : key]))
+}
+
+function valueAt(file: unknown, path: Path): unknown {
+  return path.reduce<unknown>((value, key) => (value as Record<string | number, unknown>)[key], file)
+}
+
+function withValue(file: unknown, path: Path, value: unknown): unknown {
+  const copy: unknown = structuredClone(file)
+  const parent = valueAt(copy, path.slice(0, -1)) as Record<string | number, unknown>
+  parent[path.at(-1)!] = value
+  return copy
+}
+
+/** Other values of words that the contract lists. */
+const OTHER_WORD: Readonly<Record<string, unknown>> = {
+  EN1992: 'BS8110',
+  BS8110: 'EN1992',
+  beam: 'wall',
+  wall: 'beam',
+  continuous: 'discontinuous',
+  discontinuous: 'continuous',
+  ribbed: 'solid',
+  solid: 'ribbed',
+  USD: 'JPY',
+}
+/** Other values of single fields, where the next number or word would not do. */
+const OTHER_VALUE: Readonly<Record<string, unknown>> = {
+  mesh: 'A393',
+  'crossRibs:rule': 'none',
+  'ribBars:computed': [{ diameter: 25, count: 3 }],
+  'topBars:computed': [{ diameter: 25, count: 3 }],
+  'bars:computed': { bottomX: { diameter: 12, spacing: 100 }, bottomY: { diameter: 12, spacing: 100 } },
+  'thickness:least': 400,
+  'solidZone:least': 900,
+  diameter: 16,
+  fireMinutes: 90,
+  link: 10,
+  mark: 'M9',
+}
+
+function otherThan(path: Path, value: unknown): unknown {
+  const name = String(path.at(-1))
+  const special = OTHER_VALUE[`${name}:${String(value)}`] ?? OTHER_VALUE[name]
+  if (special !== undefined) return special
+  if (typeof value === 'boolean') return !value
+  if (typeof value === 'number') return Number.isInteger(value) ? value + Math.max(1, Math.round(value / 5)) : value * 1.2
+  if (/^\d/.test(String(value))) return `1${String(value)}`
+  return OTHER_WORD[String(value)] ?? `${String(value)}x`
+}
+
+/** The result as text, or 'refused'. */
+function outcomeOf(file: unknown): string {
+  try {
+    return JSON.stringify(appraise(parseAppraisalFile(file)))
+  } catch (error) {
+    if (error instanceof AppraisalRefusedError || error instanceof OutOfScopeError) return 'refused'
+    throw error
+  }
+}
+
+const files: [string, AppraisalFileInput][] = [
+  ['sizes left to the engine', computedFile],
+  ['sizes given', givenFile],
+]
+
+describe.each(files)('with %s', (_name, input) => {
+  const file = appraisalFile.parse(input)
+  const before = outcomeOf(file)
+
+  it('appraises the file as it is', () => {
+    expect(before).not.toBe('refused')
+  })
+
+  it.each(fieldsOf(file).map((path) => [path.join('.'), path] as const))('%s changes the result or is refused', (_path, path) => {
+    const changed = withValue(file, path, otherThan(path, valueAt(file, path)))
+    expect(outcomeOf(changed)).not.toBe(before)
+  })
+})

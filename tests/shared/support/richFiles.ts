@@ -1,0 +1,119 @@
+import type { AppraisalFileInput } from '#shared/contracts/appraisal'
+import { rectangle } from './handSized'
+
+type Levels = AppraisalFileInput['levels']
+type Rates = NonNullable<AppraisalFileInput['rates']>
+
+const edge = (continuity: 'continuous' | 'discontinuous', kind: 'beam' | 'wall' = 'beam') => ({
+  supportWidth: 250,
+  kind,
+  continuity,
+})
+
+/** Two bays in a line and a repeat of each, with a void and a wall. */
+const levels: Levels = [
+  {
+    mark: 'L1',
+    repeat: 2,
+    panels: [
+      {
+        mark: 'P1',
+        repeat: 3,
+        outline: rectangle(0, 0, 6210, 5070),
+        edges: [edge('discontinuous', 'wall'), edge('continuous'), edge('discontinuous'), edge('discontinuous')],
+        ribDirection: 0,
+        voids: [rectangle(2000, 2000, 2100, 700)],
+      },
+      {
+        mark: 'P2',
+        repeat: 3,
+        outline: rectangle(6210, 0, 5630, 5070),
+        edges: [edge('discontinuous'), edge('discontinuous'), edge('discontinuous'), edge('continuous')],
+        ribDirection: 0,
+        voids: [],
+      },
+    ],
+  },
+]
+
+const rates: Rates = {
+  currency: 'USD',
+  items: {
+    'concrete.slab': '168.40',
+    'blocks.whole': '1.92',
+    'blocks.cut': '2.35',
+    'blocks.closedEnds': '0.46',
+    'steel.mesh.A142': '4.85',
+    'formwork.soffit': '21.60',
+    'formwork.edge': '9.75',
+    'curing.area': '0.62',
+    'propping.area': '4.30',
+  },
+  markups: { preliminariesPercent: '11', contingencyPercent: '5', taxPercent: '7.5' },
+}
+
+const block = { length: 200, width: 400, height: 200, mass: 12.5 }
+const loads = { imposedLoad: 2, finishesLoad: 1.5, servicesLoad: 0.3, partitionsLoad: 0.8, cover: 25, fireMinutes: 60 } as const
+
+/** A file in which every field of EN 1992-1-1 schemes with sizes left to the engine has something to do. */
+export const computedFile: AppraisalFileInput = {
+  format: 'bothways.appraisal/1',
+  brief: { basis: 'EN1992', ...loads, fck: 30, fyk: 500 },
+  levels,
+  schemes: [
+    {
+      mark: 'R1',
+      kind: 'ribbed',
+      block,
+      ribWidth: 120,
+      topping: 60,
+      mesh: 'A142',
+      edgeStrip: 50,
+      solidZone: 'least',
+      crossRibs: 'rule',
+      trimmerWidth: 150,
+      cutBlocks: true,
+      leastPiece: 50,
+      ribBars: 'computed',
+      topBars: 'computed',
+      link: 6,
+    },
+    { mark: 'S1', kind: 'solid', thickness: 'least', bars: 'computed' },
+  ],
+  rates,
+}
+
+/** The same floor by BS 8110 with sizes, bars and cross ribs given. */
+export const givenFile: AppraisalFileInput = {
+  ...computedFile,
+  brief: { basis: 'BS8110', ...loads, fcu: 30, fy: 460 },
+  schemes: [
+    {
+      mark: 'R1',
+      kind: 'ribbed',
+      block,
+      ribWidth: 120,
+      topping: 60,
+      mesh: 'none',
+      edgeStrip: 50,
+      solidZone: 250,
+      crossRibs: { every: 2000, width: 100 },
+      trimmerWidth: 150,
+      cutBlocks: false,
+      ribBars: [{ diameter: 12, count: 2 }],
+      topBars: [{ diameter: 12, count: 2 }],
+      link: 0,
+    },
+    {
+      mark: 'S1',
+      kind: 'solid',
+      thickness: 175,
+      bars: {
+        bottomX: { diameter: 10, spacing: 150 },
+        bottomY: { diameter: 10, spacing: 175 },
+        topX: { diameter: 10, spacing: 150 },
+        topY: { diameter: 8, spacing: 200 },
+      },
+    },
+  ],
+}
