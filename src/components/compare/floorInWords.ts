@@ -1,5 +1,6 @@
 import type { PanelResult } from '#shared/contracts/appraisal'
 import type { StoredLevel } from '#shared/contracts/project'
+import { formatQuantity } from '../base/formatQuantity'
 
 const NUMBERS = ['no', 'one', 'two', 'three', 'four', 'five', 'six', 'seven', 'eight', 'nine', 'ten', 'eleven', 'twelve']
 
@@ -17,5 +18,5 @@ export function floorInWords(name: string, levels: readonly StoredLevel[], panel
   const count = levels.reduce((sum, { repeat }) => sum + repeat, 0)
   const floors = `${NUMBERS[count] ?? count} suspended floor${count === 1 ? '' : 's'}`
   const area = Math.round(floorAreaM2(levels, panels))
-  return `${name}, ${floors}${area > 0 ? `, ${area.toLocaleString('en-GB')} m²` : ''}`
+  return `${name}, ${floors}${area > 0 ? `, ${formatQuantity(area)} m²` : ''}`
 }
