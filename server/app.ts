@@ -11,22 +11,27 @@ import { requestLog } from './middleware/requestLog'
 import { sameOriginOnly } from './middleware/sameOriginOnly'
 import { securityHeaders } from './middleware/securityHeaders'
 import { signedInOnly } from './middleware/signedInOnly'
+import { appraisalRoutes } from './routes/appraisalRoutes'
 import { healthRoutes } from './routes/healthRoutes'
+import { passwordRoutes } from './routes/passwordRoutes'
+import { personRoutes } from './routes/personRoutes'
 import { projectRoutes } from './routes/projectRoutes'
 import { rateRoutes } from './routes/rateRoutes'
 import { sessionRoutes } from './routes/sessionRoutes'
+import type { AppraisalPool } from './services/appraisal/appraisalPool'
 
 /** What the application runs on. */
 export interface Surroundings {
   readonly db: DataSource
   readonly env: Env
   readonly log: Log
+  readonly appraisals: AppraisalPool
   /** True once the server is about to stop. */
   readonly isDraining?: () => boolean
 }
 
 /** The API below `/api`: first what is open to everybody, then what needs a session. */
-function api({ db, env }: Surroundings): Router {
+function api({ db, env, appraisals }: Surroundings): Router {
   const settings = { secret: env.sessionSecret, origin: env.origin }
   const { manager } = db
   return Router()
@@ -35,9 +40,12 @@ function api({ db, env }: Surroundings): Router {
       next()
     })
     .use(sessionRoutes(manager, settings, env.localMailFolder !== null))
+    .use(passwordRoutes(manager, settings))
     .use(signedInOnly(manager, settings))
-    .use(projectRoutes(manager))
+    .use(projectRoutes(manager, appraisals))
+    .use(appraisalRoutes(manager, appraisals))
     .use(rateRoutes(manager))
+    .use(personRoutes(manager, env.origin))
     .use(() => {
       throw new AppError('not_found')
     })

@@ -1,5 +1,6 @@
 import type { z } from 'zod'
 import type { ApiErrorCode, ApiIssue } from '#shared/contracts/apiError'
+import { readableIssues } from '#shared/readableIssues'
 
 /** The one table from error code to HTTP status. */
 export const STATUS = {
@@ -54,33 +55,23 @@ export function refuse(path: string, message: string): AppError {
 }
 
 const MOST_ISSUES = 50
+const SECRET = /(^|\.)(password|token)$/
 
-/** What was expected by each alternative of a union, as one sentence. */
-function unionMessage(errors: z.core.$ZodIssue[][]): string {
-  const wanted = errors.flat().map(({ message }) => message.replace(/^Invalid input: /, ''))
-  return [...new Set(wanted)].slice(0, 4).join('; or ')
-}
-
-/** Rows of `{ path, message }` as the API answers them, at most 50, paths at most 200 characters. */
-export function issuesOf(error: z.core.$ZodError): ApiIssue[] {
-  const rows = error.issues.flatMap((issue) => {
-    const path = issue.path.map(String)
-    if (issue.code === 'unrecognized_keys') {
-      return issue.keys.map((key) => ({ path: [...path, key], message: 'unknown field: it is not expected here' }))
-    }
-    const message = issue.code === 'invalid_union' && issue.errors.length > 0 ? unionMessage(issue.errors) : issue.message
-    return [{ path, message: message.replace(/^Invalid input: /, '') }]
-  })
-  return rows
+/** Rows of `{ path, message }` as the API answers them: at most 50, none too long, no secret quoted back. */
+function issuesOf(error: z.core.$ZodError, value: unknown): ApiIssue[] {
+  return readableIssues(error.issues, value)
     .slice(0, MOST_ISSUES)
-    .map(({ path, message }) => ({ path: path.join('.').slice(0, 200), message: message.slice(0, 500) }))
+    .map(({ path, message }) => ({
+      path: path.slice(0, 200),
+      message: (SECRET.test(path) ? message.replace(/, got .*$/s, '') : message).slice(0, 500),
+    }))
 }
 
 /** Value of `schema` read from untrusted `value`. @throws AppError `invalid_request` with every issue and its path */
 export function parse<T extends z.ZodType>(schema: T, value: unknown, root = ''): z.infer<T> {
   const result = schema.safeParse(value)
   if (result.success) return result.data
-  const issues = issuesOf(result.error)
+  const issues = issuesOf(result.error, value)
   throw new AppError(
     'invalid_request',
     undefined,

@@ -3,6 +3,7 @@ import { createApp } from './app'
 import { createDataSource } from './dataSource'
 import { EnvError, readEnv, type Env } from './env'
 import { createLog } from './log'
+import { createAppraisalPool } from './services/appraisal/appraisalPool'
 
 const DRAIN_MS = 10_000
 
@@ -35,8 +36,9 @@ async function main(): Promise<void> {
   const log = createLog(env.logLevel)
   const db = createDataSource(env.database)
   await db.initialize()
+  const appraisals = createAppraisalPool()
   let isDraining = false
-  const server = createServer(createApp({ db, env, log, isDraining: () => isDraining }))
+  const server = createServer(createApp({ db, env, log, appraisals, isDraining: () => isDraining }))
   server.requestTimeout = 30_000
   await listen(server, env)
   log.info({ origin: env.origin, port: env.port }, 'listening')
@@ -44,6 +46,7 @@ async function main(): Promise<void> {
     if (isDraining) return
     isDraining = true
     await drain(server)
+    await appraisals.close()
     await db.destroy()
     process.exit(0)
   }

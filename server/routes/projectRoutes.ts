@@ -7,6 +7,7 @@ import { creatingRequest } from '../middleware/creatingRequest'
 import { idOf } from '../middleware/idOf'
 import { whoOf } from '../middleware/signedInOnly'
 import { seenVersion, tellVersion } from '../middleware/version'
+import type { AppraisalPool } from '../services/appraisal/appraisalPool'
 import { changeLevel, createLevel, removeLevel } from '../services/project/levelService'
 import { listProjects } from '../services/project/projectList'
 import { changeReaders, readReaders } from '../services/project/readerService'
@@ -14,18 +15,18 @@ import { changeProject, createProject, readProjectSheet } from '../services/proj
 import { changeScheme, createScheme, removeScheme } from '../services/project/schemeService'
 
 /** Projects with their levels and schemes, and who may read them. */
-export function projectRoutes(db: EntityManager): Router {
+export function projectRoutes(db: EntityManager, pool: AppraisalPool): Router {
   const router = Router()
-  addProjects(router, db)
+  addProjects(router, db, pool)
   addLevels(router, db)
   addSchemes(router, db)
   return router
 }
 
-function addProjects(router: Router, db: EntityManager): void {
+function addProjects(router: Router, db: EntityManager, pool: AppraisalPool): void {
   router
     .get('/projects', async (_request, response) => {
-      response.json(await listProjects(db, whoOf(response)))
+      response.json(await listProjects(db, pool, whoOf(response)))
     })
     .post('/projects', async (request, response) => {
       const input = parse(projectInput, request.body)

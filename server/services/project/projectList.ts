@@ -5,7 +5,9 @@ import { ProjectEntity } from '../../entities/project/ProjectEntity'
 import { ProjectShareEntity } from '../../entities/project/ProjectShareEntity'
 import { EditionEntity } from '../../entities/rates/EditionEntity'
 import { RateBookEntity } from '../../entities/rates/RateBookEntity'
+import type { AppraisalPool } from '../appraisal/appraisalPool'
 import { hasRole, requireRole, type SignedIn } from '../session/signedIn'
+import { currentTotals } from './projectTotals'
 
 const MOST = 500
 
@@ -47,7 +49,7 @@ async function editionsOf(db: EntityManager, firmId: string, rows: readonly Proj
  * Lines of the projects the reader may know of, newest change first, at most 500: all of the firm for surveyors and estimators, those
  * shared with them for developers and engineers. Engineers see no money.
  */
-export async function listProjects(db: EntityManager, who: SignedIn): Promise<ProjectSummary[]> {
+export async function listProjects(db: EntityManager, pool: AppraisalPool, who: SignedIn): Promise<ProjectSummary[]> {
   requireRole(who, 'surveyor', 'estimator', 'developer', 'engineer')
   const { firmId } = who
   const isReader = hasRole(who, 'developer', 'engineer')
@@ -55,9 +57,10 @@ export async function listProjects(db: EntityManager, who: SignedIn): Promise<Pr
   const where = hasRole(who, 'surveyor', 'estimator') ? { firmId } : { firmId, id: In([...shared]) }
   const rows = await db.find(ProjectEntity, { where, order: { updatedAt: 'DESC', id: 'DESC' }, take: MOST })
   const seesMoney = hasRole(who, 'surveyor', 'estimator', 'developer')
+  const totals = seesMoney ? await currentTotals(db, pool, rows) : new Map<string, ProjectSummary['totals']>()
   const counts = await countsOf(db, firmId)
   const editions = await editionsOf(db, firmId, rows)
-  return rows.map(({ id, name, reference, place, editionId, totals, updatedAt }) => ({
+  return rows.map(({ id, name, reference, place, editionId, updatedAt }) => ({
     id,
     name,
     reference,
@@ -66,7 +69,7 @@ export async function listProjects(db: EntityManager, who: SignedIn): Promise<Pr
     panelCount: counts.get(id)?.panels ?? 0,
     canOpen: hasRole(who, 'surveyor') || shared.has(id),
     edition: (seesMoney && editionId !== null && editions.get(editionId)) || null,
-    totals: seesMoney ? totals : [],
+    totals: totals.get(id) ?? [],
     updatedAt: updatedAt.toISOString(),
   }))
 }

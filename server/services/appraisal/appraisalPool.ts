@@ -1,0 +1,110 @@
+import type { Appraisal, AppraisalFile } from '#shared/contracts/appraisal'
+import { Worker } from 'node:worker_threads'
+import { AppError } from '../../errors'
+import type { AppraisalJob, AppraisalOutcome } from './appraisalJob'
+
+export interface PoolBounds {
+  readonly threads: number
+  readonly waiting: number
+  /** Longest appraisal; what takes longer is broken off. */
+  readonly timeMs: number
+}
+
+const BOUNDS: PoolBounds = { threads: 2, waiting: 64, timeMs: 10_000 }
+const MEMORY_MB = 512
+
+/** Appraises in threads of its own, so that a heavy floor holds up nobody else's request. */
+export interface AppraisalPool {
+  /** A file as somebody sent it. @throws AppError `invalid_request` or `out_of_scope` with the issues, `too_large`, `unavailable` */
+  appraiseSent(value: unknown): Promise<Appraisal>
+  /** A file made from what is stored: schemes that cannot stand are left out. @throws AppError `too_large`, `unavailable` */
+  appraiseStored(file: AppraisalFile): Promise<Appraisal>
+  close(): Promise<void>
+}
+
+interface Task {
+  readonly job: AppraisalJob
+  readonly resolve: (outcome: AppraisalOutcome) => void
+  readonly reject: (error: Error) => void
+}
+
+function startWorker(): Worker {
+  const worker = new Worker(new URL('./appraisalWorker.ts', import.meta.url), {
+    execArgv: ['--import', 'tsx'],
+    resourceLimits: { maxOldGenerationSizeMb: MEMORY_MB },
+  })
+  worker.unref()
+  return worker
+}
+
+function toAppraisal(outcome: AppraisalOutcome): Appraisal {
+  switch (outcome.kind) {
+    case 'done':
+      return outcome.appraisal
+    case 'refused':
+      throw new AppError('invalid_request', undefined, outcome.issues)
+    case 'outOfScope':
+      throw new AppError('out_of_scope', undefined, outcome.issues)
+    case 'fault':
+      throw new Error(`The appraisal failed: ${outcome.text}`)
+  }
+}
+
+/** Threads start with the first job and are kept; one that runs out of time or memory is replaced. */
+export function createAppraisalPool(bounds: PoolBounds = BOUNDS): AppraisalPool {
+  const idle: Worker[] = []
+  const all = new Set<Worker>()
+  const waiting: Task[] = []
+
+  function drop(worker: Worker): void {
+    all.delete(worker)
+    void worker.terminate()
+  }
+
+  function next(): void {
+    if (waiting.length === 0) return
+    if (idle.length === 0 && all.size < bounds.threads) {
+      const worker = startWorker()
+      all.add(worker)
+      idle.push(worker)
+    }
+    const worker = idle.pop()
+    if (worker) run(worker, waiting.shift()!)
+  }
+
+  function run(worker: Worker, { job, resolve, reject }: Task): void {
+    const end = (settle: () => void, isSound: boolean) => {
+      clearTimeout(late)
+      worker.removeAllListeners()
+      if (isSound) idle.push(worker)
+      else drop(worker)
+      settle()
+      next()
+    }
+    const tooMuch = (what: string) =>
+      new AppError('too_large', `The appraisal takes more ${what} than allowed; give it less to do.`)
+    const late = setTimeout(() => end(() => reject(tooMuch('time')), false), bounds.timeMs)
+    worker.once('message', (outcome: AppraisalOutcome) => end(() => resolve(outcome), true))
+    worker.once('error', (error: NodeJS.ErrnoException) => {
+      end(() => reject(error.code === 'ERR_WORKER_OUT_OF_MEMORY' ? tooMuch('memory') : error), false)
+    })
+    worker.postMessage(job)
+  }
+
+  async function perform(job: AppraisalJob): Promise<Appraisal> {
+    if (waiting.length >= bounds.waiting) throw new AppError('unavailable', 'Too many appraisals wait.', undefined, 5)
+    const outcome = await new Promise<AppraisalOutcome>((resolve, reject) => {
+      waiting.push({ job, resolve, reject })
+      next()
+    })
+    return toAppraisal(outcome)
+  }
+
+  return {
+    appraiseSent: (value) => perform({ kind: 'sent', value }),
+    appraiseStored: (file) => perform({ kind: 'stored', file }),
+    close: async () => {
+      await Promise.all([...all].map((worker) => worker.terminate()))
+    },
+  }
+}

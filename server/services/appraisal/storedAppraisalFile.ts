@@ -1,0 +1,19 @@
+import type { AppraisalFile, ItemCode, Rates } from '#shared/contracts/appraisal'
+import type { ProjectSheet } from '#shared/contracts/project'
+
+function ratesOf({ project, edition }: ProjectSheet): Rates | undefined {
+  if (edition === null) return undefined
+  const items = Object.fromEntries(edition.rates.map(({ item, likely }) => [item, likely])) as Partial<Record<ItemCode, string>>
+  return { currency: edition.currency, items, markups: project.markups }
+}
+
+/** The appraisal file of a stored project, priced by its edition's likely rates. Null while it has no panel or no scheme. */
+export function storedAppraisalFile(sheet: ProjectSheet): AppraisalFile | null {
+  const levels = sheet.levels
+    .filter(({ panels }) => panels.length > 0)
+    .map(({ mark, repeat, panels }) => ({ mark, repeat, panels }))
+  const schemes = sheet.schemes.map(({ specification }) => specification)
+  if (levels.length === 0 || schemes.length === 0) return null
+  const rates = ratesOf(sheet)
+  return { format: 'bothways.appraisal/1', brief: sheet.project.brief, levels, schemes, ...(rates ? { rates } : {}) }
+}
