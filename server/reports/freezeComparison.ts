@@ -1,0 +1,108 @@
+import type { AppraisalFile, RibbedScheme, SchemeResult, SolidScheme } from '#shared/contracts/appraisal'
+import type { CatalogueBlock } from '#shared/contracts/blockCatalogue'
+import type { Project, StoredScheme } from '#shared/contracts/project'
+import type { Edition } from '#shared/contracts/rateBook'
+import { Decimal } from '#shared/pricing/decimal'
+import type { FullAppraisal } from '#shared/appraise'
+import { comparisonSections } from '#shared/drawing/comparisonSections'
+import type { SectionSubject } from '#shared/drawing/sectionBody'
+import { sectionReinforcement } from '#shared/drawing/sectionReinforcement'
+import { differenceGroups } from './content/differenceGroups'
+import { tightestChecks } from './content/tightestChecks'
+import type { FrozenComparison } from './frozenComparison'
+
+/** Two schemes of a project, appraised and fully priced: the first scheme of the file is ribbed, the second solid. */
+export interface ComparedProject {
+  readonly project: Project
+  readonly schemes: readonly [StoredScheme, StoredScheme]
+  readonly blockMaterial: CatalogueBlock['material'] | undefined
+  readonly edition: Edition
+  readonly file: AppraisalFile
+  readonly full: FullAppraisal
+}
+
+/** Who sends it to whom. */
+export type Sending = Pick<FrozenComparison, 'firm' | 'recipient' | 'preparedBy' | 'note'>
+
+const WIDE_PX = 788
+const NARROW_PX = 328
+
+function frozenScheme(row: StoredScheme, { depth, passes, checks, deadLoad, quantities, cost }: SchemeResult) {
+  if (cost === null) throw new RangeError(`expected a price of scheme ${row.specification.mark}`)
+  return {
+    name: row.name,
+    depth,
+    passes,
+    checkCount: checks.length,
+    failedCount: checks.filter(({ pass }) => !pass).length,
+    checks: tightestChecks(checks),
+    deadLoad,
+    quantities: quantities.filter(({ net }) => net !== 0).map(({ item, unit, net }) => ({ item, unit, net })),
+    total: cost.total,
+    perArea: cost.perArea,
+  }
+}
+
+function sections({ schemes, file, full, blockMaterial }: ComparedProject): FrozenComparison['sections'] {
+  const subject = (index: 0 | 1): SectionSubject => {
+    const { specification } = schemes[index]
+    const { panels, depth } = full.sized[index]!
+    return {
+      scheme: specification,
+      depthMm: depth,
+      reinforcement: sectionReinforcement(specification, file.brief.cover, panels[0] ?? null),
+      ...(blockMaterial === undefined ? {} : { blockMaterial }),
+    }
+  }
+  const pair = { ribbed: subject(0), solid: subject(1) }
+  return {
+    wide: comparisonSections(pair, { id: 'wide', widthPx: WIDE_PX }),
+    narrow: comparisonSections(pair, { id: 'narrow', widthPx: NARROW_PX }),
+  }
+}
+
+/** Gross area, number of floors and number of panels, repeats in. */
+function floorOf({ levels }: AppraisalFile, { panels }: SchemeResult): FrozenComparison['floor'] {
+  const repeatsOf = (levelMark: string, panelMark: string): number => {
+    const level = levels.find(({ mark }) => mark === levelMark)
+    return (level?.repeat ?? 0) * (level?.panels.find(({ mark }) => mark === panelMark)?.repeat ?? 0)
+  }
+  const repeated = panels.map(({ level, mark, grossArea }) => ({ repeats: repeatsOf(level, mark), grossArea }))
+  return {
+    areaM2: repeated.reduce((sum, { repeats, grossArea }) => sum + repeats * grossArea, 0),
+    floorCount: levels.reduce((sum, { repeat }) => sum + repeat, 0),
+    panelCount: repeated.reduce((sum, { repeats }) => sum + repeats, 0),
+  }
+}
+
+/**
+ * All that the report needs, taken out of an appraisal once and for good: what is in it never changes with the project, the
+ * rates or the engine. It holds no rate, and amounts of groups only.
+ * @throws RangeError when a scheme is not priced
+ */
+export function freezeComparison(compared: ComparedProject, sending: Sending, frozenAt: string): FrozenComparison {
+  const { project, schemes, edition, file, full } = compared
+  const [ribbed, solid] = full.appraisal.schemes
+  if (!ribbed?.cost || !solid?.cost) throw new RangeError('expected two priced schemes')
+  const { id, name, reference, place, use } = project
+  return {
+    format: 'bothways.comparison/1',
+    frozenAt,
+    ...sending,
+    project: { id, name, reference, place, use },
+    brief: file.brief,
+    edition: {
+      region: edition.region,
+      number: edition.number,
+      currency: edition.currency,
+      baseDate: edition.baseDate,
+      taxBasis: edition.taxBasis,
+    },
+    floor: floorOf(file, ribbed),
+    ribbed: { ...frozenScheme(schemes[0], ribbed), specification: schemes[0].specification as RibbedScheme },
+    solid: { ...frozenScheme(schemes[1], solid), specification: schemes[1].specification as SolidScheme },
+    groups: differenceGroups(ribbed.cost, solid.cost),
+    markups: ribbed.cost.markups.filter(({ percent }) => !new Decimal(percent).isZero()).map(({ name: markup }) => markup),
+    sections: sections(compared),
+  }
+}
