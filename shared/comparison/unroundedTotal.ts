@@ -1,5 +1,8 @@
 import type { Cost, ItemCode } from '../contracts/appraisal'
 import { Decimal, sumOf } from '../pricing/decimal'
+import { markupFactor } from '../pricing/markupFactor'
+
+export { markupFactor }
 
 /**
  * Total of a bill before any rounding of money: Σ printed quantity × rate × (1 + preliminaries)(1 + contingency)(1 + tax).
@@ -10,9 +13,4 @@ import { Decimal, sumOf } from '../pricing/decimal'
 export function unroundedTotal(cost: Cost, item?: ItemCode, rate?: Decimal): Decimal {
   const lines = cost.lines.map((line) => new Decimal(line.quantity).times(line.item === item && rate ? rate : line.rate))
   return sumOf(lines).times(markupFactor(cost))
-}
-
-/** What all markups together multiply the measured work by: 1 where there are none. */
-export function markupFactor({ markups }: Cost): Decimal {
-  return markups.reduce((factor, { percent }) => factor.times(new Decimal(percent).div(100).plus(1)), new Decimal(1))
 }

@@ -10,6 +10,7 @@ import {
   type SchemeResult,
 } from '#shared/contracts/appraisal'
 import { compareMarks, compareSchemes } from '#shared/comparison/compareSchemes'
+import { compareAllIn } from '#shared/comparison/compareAllIn'
 import { unroundedTotal } from '#shared/comparison/unroundedTotal'
 import { Decimal } from '#shared/pricing/decimal'
 import { minorUnit } from '#shared/pricing/minorUnit'
@@ -146,5 +147,35 @@ describe('which schemes are compared', () => {
     const rates = { ...simpleRates, items: Object.fromEntries(itemCode.options.map((item) => [item, '1'])) }
     const { tippingPoints } = compareSchemes(schemeOf('R1', 'ribbed', all, rates), schemeOf('S1', 'solid', [], rates))!
     expect(tippingPoints.map(({ item }) => item)).toEqual(itemCode.options)
+  })
+})
+
+describe('compareAllIn', () => {
+  it('folds the markups in and ends at the same difference', () => {
+    // all-in: 90 m³ at 110, 2000 blocks at 1.10 against 120 m³ at 110
+    expect(compareAllIn(ribbed, solid)).toEqual({
+      between: ['R1', 'S1'],
+      ledger: [
+        { item: 'concrete.slab', first: '9900.00', second: '13200.00', difference: '-3300.00', running: '-3300.00' },
+        { item: 'blocks.whole', first: '2200.00', second: '0.00', difference: '2200.00', running: '-1100.00' },
+      ],
+      tippingPoints: [
+        { item: 'concrete.slab', rate: '110.00', value: '73.33', cheaperBelow: 'S1' },
+        { item: 'blocks.whole', rate: '1.100', value: '1.650', cheaperBelow: 'R1' },
+      ],
+    })
+  })
+
+  it('always ends at the difference of the totals', () => {
+    fc.assert(
+      fc.property(arbitraryQuantities, arbitraryQuantities, arbitraryRates, (ofFirst, ofSecond, rates) => {
+        const [first, second] = [schemeOf('R1', 'ribbed', ofFirst, rates), schemeOf('S1', 'solid', ofSecond, rates)]
+        const { ledger } = comparisonContract.parse(compareAllIn(first, second))
+        expect(ledger.some(({ item }) => ['preliminaries', 'contingency', 'tax'].includes(item))).toBe(false)
+        const end = new Big(ledger.at(-1)?.running ?? 0)
+        expect(end.eq(new Big(first.cost!.total).minus(second.cost!.total))).toBe(true)
+      }),
+      { numRuns: 500 },
+    )
   })
 })

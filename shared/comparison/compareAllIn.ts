@@ -1,0 +1,37 @@
+import type { Comparison, Cost, SchemeResult, TippingPoint } from '../contracts/appraisal'
+import { allInCost } from '../pricing/allInCost'
+import { allInRate } from '../pricing/allInRate'
+import { Decimal } from '../pricing/decimal'
+import { markupFactor } from '../pricing/markupFactor'
+import { compareSchemes } from './compareSchemes'
+import { ledger } from './ledger'
+
+/** A tipping point at or above this cannot be printed as a rate. */
+const LARGEST_RATE = new Decimal(10).pow(9)
+
+/**
+ * `compareSchemes` for readers who may not see margins: the ledger runs over all-in amounts, without markups, to the same
+ * difference; rates and tipping points are reckoned on the full figures and then multiplied by the markups, as all-in rates are.
+ * Null where one of the schemes is not priced.
+ *
+ * @param first - with markups, as priced; both under the same markups
+ */
+export function compareAllIn(first: SchemeResult, second: SchemeResult): Comparison | null {
+  const comparison = compareSchemes(first, second)
+  if (!comparison || !first.cost || !second.cost) return null
+  const { cost } = first
+  return {
+    between: comparison.between,
+    ledger: ledger(allInCost(first.cost), allInCost(second.cost)),
+    tippingPoints: comparison.tippingPoints.map((point) => allInPoint(point, cost)),
+  }
+}
+
+function allInPoint({ item, rate, value, cheaperBelow }: TippingPoint, cost: Cost): TippingPoint {
+  const factor = markupFactor(cost)
+  const now = allInRate(rate, factor, cost.currency)
+  if (value === null || new Decimal(value).times(factor).greaterThanOrEqualTo(LARGEST_RATE)) {
+    return { item, rate: now, value: null, cheaperBelow: null }
+  }
+  return { item, rate: now, value: allInRate(value, factor, cost.currency), cheaperBelow }
+}
