@@ -18,7 +18,7 @@ const LAYERS: Record<string, { may: string[]; packages: string[] }> = {
   'shared/comparison': { may: ['shared/contracts', 'shared/sizing', 'shared/takeoff', 'shared/pricing'], packages: [] },
   'shared/drawing': { may: [...ENGINE, 'shared/layout', 'shared/sizing'], packages: [] },
   'server/entities': { may: ['shared/contracts'], packages: ['typeorm'] },
-  'server/services': { may: ['shared', 'server/entities', 'server/errors'], packages: ['*'] },
+  'server/services': { may: ['shared', 'server/entities', 'server/errors', 'server/mail', 'server/reports'], packages: ['*'] },
   'server/routes': {
     may: ['shared/contracts', 'server/services', 'server/middleware', 'server/errors'],
     packages: ['express', 'zod'],
