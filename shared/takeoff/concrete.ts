@@ -14,9 +14,9 @@ import { deductedVoids } from './voidsOf'
  * Source: engine design 2.5, gross volume − voids − gross block volume; threshold of voids by the rules
  */
 export function concreteOf(measured: MeasuredPanel, scheme: Scheme, rules: MeasurementRules): Expression {
-  const { panel, sized } = measured
+  const { sized } = measured
   const wallStrips = sized.areas.wallStrips > 0 ? [figure(toM2(sized.areas.wallStrips))] : []
-  const plan = less(plus(clearAreaOf(measured), ...wallStrips), ...deductedVoids(panel, voidThresholdM2(measured, rules)))
+  const plan = less(plus(clearAreaOf(measured), ...wallStrips), ...deductedVoids(measured, voidThresholdM2(measured, rules)))
   const gross = times(plan, figure(toM(sized.depth)))
   const blocks = scheme.kind === 'ribbed' ? blockVolume(measured, scheme) : null
   return blocks ? less(gross, blocks) : gross
@@ -54,7 +54,7 @@ export function concreteSplit(panels: readonly MeasuredPanel[], scheme: Scheme, 
 
 function panelSplit(measured: MeasuredPanel, scheme: Scheme, rules: MeasurementRules): ConcreteSplit {
   const { areas, depth } = measured.sized
-  const deducted = deductedVoids(measured.panel, voidThresholdM2(measured, rules)).reduce((sum, { value }) => sum + value, 0)
+  const deducted = deductedVoids(measured, voidThresholdM2(measured, rules)).reduce((sum, { value }) => sum + value, 0)
   const keptVoids = (toM2(areas.voids) - deducted) * toM(depth)
   const fullDepth = (areaMm2: number) => toM3(areaMm2 * depth)
   const split =

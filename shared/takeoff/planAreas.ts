@@ -12,12 +12,12 @@ export function clearAreaOf({ panel, sized }: MeasuredPanel): Expression {
 
 /** Plan area between the faces of supports less voids, m²: what is formed and propped. */
 export function soffitAreaOf(measured: MeasuredPanel, voidsOverM2: number): Expression {
-  return less(clearAreaOf(measured), ...deductedVoids(measured.panel, voidsOverM2))
+  return less(clearAreaOf(measured), ...deductedVoids(measured, voidsOverM2))
 }
 
 /** Plan area of the floor's own concrete, m²: between supports and over walls, less voids. */
 export function floorAreaOf(measured: MeasuredPanel, voidsOverM2: number): Expression {
   const { wallStrips } = measured.sized.areas
   const whole = wallStrips > 0 ? plus(clearAreaOf(measured), figure(toM2(wallStrips))) : clearAreaOf(measured)
-  return less(whole, ...deductedVoids(measured.panel, voidsOverM2))
+  return less(whole, ...deductedVoids(measured, voidsOverM2))
 }

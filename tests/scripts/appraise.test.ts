@@ -62,6 +62,17 @@ describe('the command', () => {
       'invalid_request',
       ['levels.0.repeat'],
     ],
+    [
+      'a code of practice that is not built',
+      [
+        write(
+          'basis.json',
+          ONE_PANEL.replace('"EN1992"', '"BS8110"').replace('"fck": 30', '"fcu": 30').replace('"fyk": 500', '"fy": 500'),
+        ),
+      ],
+      'out_of_scope',
+      ['brief.basis'],
+    ],
   ])('refuses %s with status 2, the error on stderr and nothing on stdout', (_what, args, code, paths) => {
     const { status, stdout, stderr } = appraise(...args)
     expect({ status, stdout }).toEqual({ status: 2, stdout: '' })

@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest'
 import { appraise, appraiseInFull } from '#shared/appraise'
 import { AppraisalRefusedError } from '#shared/appraisalRefused'
 import { type Appraisal, appraisal as appraisalContract, type AppraisalFile } from '#shared/contracts/appraisal'
+import { OutOfScopeError } from '#shared/outOfScope'
 import { Decimal, sumOf } from '#shared/pricing/decimal'
 import { parseAppraisalFile } from '#shared/parseAppraisalFile'
 import { netRules } from '#shared/takeoff/measurementRules'
@@ -17,8 +18,8 @@ const readExample = (name: string) =>
 const files: [string, AppraisalFile][] = [
   ['tarn-court.json', readExample('tarn-court.json')],
   ['one-panel.json', readExample('one-panel.json')],
-  ['a file by EN 1992-1-1', parseAppraisalFile(computedFile)],
-  ['a file by BS 8110', parseAppraisalFile(givenFile)],
+  ['sizes left to the engine', parseAppraisalFile(computedFile)],
+  ['sizes given', parseAppraisalFile(givenFile)],
 ]
 
 describe.each(files)('%s', (_name, file) => {
@@ -109,6 +110,22 @@ describe('the front door', () => {
     expect(problems).toEqual([])
     expect(sized.map(({ mark }) => mark)).toEqual(['R1', 'S1'])
     expect(sized[0]!.panels[0]!.layout!.blocks.length).toBe(appraisal.schemes[0]!.panels[0]!.blocksWhole)
+  })
+
+  it('passes on what lies outside the rules; for screens it is a problem of the scheme', () => {
+    const brief = { basis: 'BS8110' as const, imposedLoad: 2, cover: 25, fireMinutes: 60 as const, fcu: 30, fy: 460 }
+    const other = parseAppraisalFile({ ...file, brief })
+    expect(() => appraise(other)).toThrow(OutOfScopeError)
+    const { appraisal, sized, problems } = appraiseInFull(other)
+    expect({ schemes: appraisal.schemes, comparison: appraisal.comparison, sized }).toEqual({
+      schemes: [],
+      comparison: null,
+      sized: [],
+    })
+    expect(problems.map(({ scheme, issue }) => [scheme, issue.path])).toEqual([
+      ['R1', 'brief.basis'],
+      ['S1', 'brief.basis'],
+    ])
   })
 
   it('refuses a floor that cannot be', () => {

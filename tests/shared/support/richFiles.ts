@@ -83,10 +83,9 @@ export const computedFile: AppraisalFileInput = {
   rates,
 }
 
-/** The same floor by BS 8110 with sizes, bars and cross ribs given. */
+/** The same floor with sizes, bars and cross ribs given. */
 export const givenFile: AppraisalFileInput = {
   ...computedFile,
-  brief: { basis: 'BS8110', ...loads, fcu: 30, fy: 460 },
   schemes: [
     {
       mark: 'R1',

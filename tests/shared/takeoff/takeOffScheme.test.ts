@@ -83,6 +83,13 @@ describe('voids', () => {
     expect(netOf(quantities, 'curing.area')).toBe(26.65) // 36.5125 - 9.36 - 0.5 = 26.6525
   })
 
+  it('count only as far as the support faces, to which they may miss by a fit', () => {
+    const past = levelOf({ outline: rectangle(0, 0, 6600, 6000), voids: [rectangle(124.6, 1000, 2000, 1500)] })
+    const [concrete] = takeOff(solidOf(160), [past])
+    expect(concrete!.parts[0]!.value).toBeCloseTo((6.35 * 5.75 - 1.9996 * 1.5) * 0.16, 9)
+    expect(concrete!.split!.slab).toBeCloseTo(concrete!.parts[0]!.value, 9)
+  })
+
   it('are formed all round', () => {
     expect(find(quantities, 'formwork.edge')!.parts[0]!.expression).toBe('2 * (2.6 + 3.6) + 2 * (1 + 0.5)')
     expect(netOf(quantities, 'formwork.edge')).toBe(15.4)
