@@ -57,13 +57,17 @@ function install(dataFolder) {
   renameSync(unfinished, dataFolder)
 }
 
+/** Waits for the greeting: the socket is there earlier, while the first statements are still to be read. */
 async function untilAccepting(socketPath, hasEnded) {
   for (let waited = 0; waited < 30_000; waited += 50) {
     if (hasEnded()) return false
     const isUp = await new Promise((resolve) => {
       const probe = connect(socketPath)
-      probe.once('connect', () => resolve(true)).once('error', () => resolve(false))
-      probe.once('connect', () => probe.destroy())
+      probe
+        .once('data', () => resolve(true))
+        .once('error', () => resolve(false))
+        .once('close', () => resolve(false))
+      probe.once('data', () => probe.destroy()).setTimeout(5_000, () => probe.destroy())
     })
     if (isUp) return true
     await new Promise((resolve) => setTimeout(resolve, 50))
