@@ -4,6 +4,7 @@ import type { DataSource } from 'typeorm'
 import type { Env } from './env'
 import { AppError } from './errors'
 import type { Log } from './log'
+import type { LocalInbox } from './mail/localInbox'
 import { clientFiles } from './middleware/clientFiles'
 import { errorHandler } from './middleware/errorHandler'
 import { jsonBody } from './middleware/jsonBody'
@@ -11,8 +12,12 @@ import { requestLog } from './middleware/requestLog'
 import { sameOriginOnly } from './middleware/sameOriginOnly'
 import { securityHeaders } from './middleware/securityHeaders'
 import { signedInOnly } from './middleware/signedInOnly'
+import { createPdfPrinter, type PdfPrinter } from './reports/pdfPrinter'
 import { appraisalRoutes } from './routes/appraisalRoutes'
+import { contactRoutes } from './routes/contactRoutes'
+import { dispatchRoutes } from './routes/dispatchRoutes'
 import { healthRoutes } from './routes/healthRoutes'
+import { localMailRoutes } from './routes/localMailRoutes'
 import { passwordRoutes } from './routes/passwordRoutes'
 import { personRoutes } from './routes/personRoutes'
 import { projectRoutes } from './routes/projectRoutes'
@@ -26,12 +31,16 @@ export interface Surroundings {
   readonly env: Env
   readonly log: Log
   readonly appraisals: AppraisalPool
+  /** Prints reports; absent: one of its own, started when it is first needed. */
+  readonly printer?: PdfPrinter
+  /** Mail server of the local set-up; absent elsewhere, where `/mail` does not exist. */
+  readonly inbox?: LocalInbox
   /** True once the server is about to stop. */
   readonly isDraining?: () => boolean
 }
 
 /** The API below `/api`: first what is open to everybody, then what needs a session. */
-function api({ db, env, appraisals }: Surroundings): Router {
+function api({ db, env, appraisals, printer = createPdfPrinter(env.chromiumPath) }: Surroundings): Router {
   const settings = { secret: env.sessionSecret, origin: env.origin }
   const { manager } = db
   return Router()
@@ -45,15 +54,19 @@ function api({ db, env, appraisals }: Surroundings): Router {
     .use(projectRoutes(manager, appraisals))
     .use(appraisalRoutes(manager, appraisals))
     .use(rateRoutes(manager))
+    .use(contactRoutes(manager))
+    .use(dispatchRoutes(manager, appraisals, printer))
     .use(personRoutes(manager, env.origin))
-    .use(() => {
-      throw new AppError('not_found')
-    })
+    .use(absent)
+}
+
+function absent(): never {
+  throw new AppError('not_found')
 }
 
 /** The whole application, not yet listening. The database must be initialised and migrated. */
 export function createApp(surroundings: Surroundings): Express {
-  const { db, env, log, isDraining = () => false } = surroundings
+  const { db, env, log, inbox, isDraining = () => false } = surroundings
   const app = express()
   app.disable('x-powered-by').set('etag', false).set('trust proxy', env.trustedProxies).set('is https', env.isHttps)
   app.set('query parser', 'simple')
@@ -62,6 +75,7 @@ export function createApp(surroundings: Surroundings): Express {
   app.use(healthRoutes(db.manager, isDraining))
   app.use(sameOriginOnly(env.origin), jsonBody(), cookieParser())
   app.use('/api', api(surroundings))
+  app.use('/mail', inbox ? localMailRoutes(inbox, env.origin) : absent)
   app.use(clientFiles(env.clientFolder))
   app.use(errorHandler(db.manager, log))
   return app

@@ -3,6 +3,8 @@ import { createApp } from './app'
 import { createDataSource } from './dataSource'
 import { EnvError, readEnv, type Env } from './env'
 import { createLog } from './log'
+import { startMail } from './startMail'
+import { createPdfPrinter } from './reports/pdfPrinter'
 import { createAppraisalPool } from './services/appraisal/appraisalPool'
 
 const DRAIN_MS = 10_000
@@ -37,8 +39,10 @@ async function main(): Promise<void> {
   const db = createDataSource(env.database)
   await db.initialize()
   const appraisals = createAppraisalPool()
+  const printer = createPdfPrinter(env.chromiumPath)
+  const mail = await startMail({ db, env, log, printer })
   let isDraining = false
-  const server = createServer(createApp({ db, env, log, appraisals, isDraining: () => isDraining }))
+  const server = createServer(createApp({ db, env, log, appraisals, printer, inbox: mail.inbox, isDraining: () => isDraining }))
   server.requestTimeout = 30_000
   await listen(server, env)
   log.info({ origin: env.origin, port: env.port }, 'listening')
@@ -46,6 +50,8 @@ async function main(): Promise<void> {
     if (isDraining) return
     isDraining = true
     await drain(server)
+    await mail.stop()
+    await printer.close()
     await appraisals.close()
     await db.destroy()
     process.exit(0)

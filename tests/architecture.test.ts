@@ -20,13 +20,15 @@ const LAYERS: Record<string, { may: string[]; packages: string[] }> = {
   'server/entities': { may: ['shared/contracts'], packages: ['typeorm'] },
   'server/services': { may: ['shared', 'server/entities', 'server/errors', 'server/mail', 'server/reports'], packages: ['*'] },
   'server/routes': {
-    may: ['shared/contracts', 'server/services', 'server/middleware', 'server/errors'],
+    may: ['shared/contracts', 'server/services', 'server/middleware', 'server/errors', 'server/mail', 'server/reports'],
     packages: ['express', 'zod'],
   },
   'server/middleware': {
     may: ['shared/contracts', 'server/services', 'server/errors', 'server/env', 'server/log'],
     packages: ['*'],
   },
+  'server/mail': { may: ['shared', 'server/entities', 'server/errors', 'server/log', 'server/reports'], packages: ['*'] },
+  'server/reports': { may: ['shared', 'server/errors'], packages: ['*'] },
   server: { may: ['shared', 'server'], packages: ['*'] },
   'src/api': { may: ['shared/contracts'], packages: ['zod'] },
   'src/stores': { may: ['shared', 'src/api', 'src/workers'], packages: ['pinia', 'vue'] },

@@ -1,12 +1,12 @@
-import type { AppraisalFile, RibbedScheme, SchemeResult, SolidScheme } from '#shared/contracts/appraisal'
+import type { Appraisal, AppraisalFile, RibbedScheme, SchemeResult, SolidScheme } from '#shared/contracts/appraisal'
 import type { CatalogueBlock } from '#shared/contracts/blockCatalogue'
 import type { Project, StoredScheme } from '#shared/contracts/project'
 import type { Edition } from '#shared/contracts/rateBook'
 import { Decimal } from '#shared/pricing/decimal'
-import type { FullAppraisal } from '#shared/appraise'
 import { comparisonSections } from '#shared/drawing/comparisonSections'
 import type { SectionSubject } from '#shared/drawing/sectionBody'
 import { sectionReinforcement } from '#shared/drawing/sectionReinforcement'
+import type { SizedPanel } from '#shared/sizing/sizedPanel'
 import { differenceGroups } from './content/differenceGroups'
 import { tightestChecks } from './content/tightestChecks'
 import type { FrozenComparison } from './frozenComparison'
@@ -18,7 +18,9 @@ export interface ComparedProject {
   readonly blockMaterial: CatalogueBlock['material'] | undefined
   readonly edition: Edition
   readonly file: AppraisalFile
-  readonly full: FullAppraisal
+  readonly appraisal: Appraisal
+  /** The panel of each scheme that its cross-section shows. */
+  readonly cutPanels: readonly (SizedPanel | null)[]
 }
 
 /** Who sends it to whom. */
@@ -43,14 +45,13 @@ function frozenScheme(row: StoredScheme, { depth, passes, checks, deadLoad, quan
   }
 }
 
-function sections({ schemes, file, full, blockMaterial }: ComparedProject): FrozenComparison['sections'] {
+function sections({ schemes, file, appraisal, cutPanels, blockMaterial }: ComparedProject): FrozenComparison['sections'] {
   const subject = (index: 0 | 1): SectionSubject => {
     const { specification } = schemes[index]
-    const { panels, depth } = full.sized[index]!
     return {
       scheme: specification,
-      depthMm: depth,
-      reinforcement: sectionReinforcement(specification, file.brief.cover, panels[0] ?? null),
+      depthMm: appraisal.schemes[index]!.depth,
+      reinforcement: sectionReinforcement(specification, file.brief.cover, cutPanels[index] ?? null),
       ...(blockMaterial === undefined ? {} : { blockMaterial }),
     }
   }
@@ -81,8 +82,8 @@ function floorOf({ levels }: AppraisalFile, { panels }: SchemeResult): FrozenCom
  * @throws RangeError when a scheme is not priced
  */
 export function freezeComparison(compared: ComparedProject, sending: Sending, frozenAt: string): FrozenComparison {
-  const { project, schemes, edition, file, full } = compared
-  const [ribbed, solid] = full.appraisal.schemes
+  const { project, schemes, edition, file, appraisal } = compared
+  const [ribbed, solid] = appraisal.schemes
   if (!ribbed?.cost || !solid?.cost) throw new RangeError('expected two priced schemes')
   const { id, name, reference, place, use } = project
   return {

@@ -1,4 +1,5 @@
-import { Decimal, sumOf } from '#shared/pricing/decimal'
+import type { Decimal } from '#shared/pricing/decimal'
+import { sumOf } from '#shared/pricing/decimal'
 
 /**
  * Signed parts rounded to whole units so that they add up to `whole` on paper: each is rounded down, and the units left over go

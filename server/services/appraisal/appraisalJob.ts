@@ -1,13 +1,26 @@
 import type { ApiIssue } from '#shared/contracts/apiError'
 import type { Appraisal, AppraisalFile } from '#shared/contracts/appraisal'
+import type { SizedPanel } from '#shared/sizing/sizedPanel'
 
-/** Work for another thread: a file as somebody sent it, or one of ours whose schemes are taken as far as they stand. */
+/**
+ * Work for another thread: a file as somebody sent it; one of ours whose schemes are taken as far as they stand; or one of ours
+ * that must stand as a whole, to be compared and drawn.
+ */
 export type AppraisalJob =
-  { readonly kind: 'sent'; readonly value: unknown } | { readonly kind: 'stored'; readonly file: AppraisalFile }
+  | { readonly kind: 'sent'; readonly value: unknown }
+  | { readonly kind: 'stored'; readonly file: AppraisalFile }
+  | { readonly kind: 'compared'; readonly file: AppraisalFile }
+
+/** An appraisal with the panel of each scheme that its cross-section shows, without the panel's blocks. */
+export interface ComparedAppraisal {
+  readonly appraisal: Appraisal
+  readonly cutPanels: readonly (SizedPanel | null)[]
+}
 
 /** How it ended. `outOfScope` names the field and what was expected, as `refused` does. */
 export type AppraisalOutcome =
   | { readonly kind: 'done'; readonly appraisal: Appraisal }
+  | ({ readonly kind: 'compared' } & ComparedAppraisal)
   | { readonly kind: 'refused'; readonly issues: readonly ApiIssue[] }
   | { readonly kind: 'outOfScope'; readonly issues: readonly ApiIssue[] }
   | { readonly kind: 'fault'; readonly text: string }

@@ -1,7 +1,7 @@
 import type { Appraisal, AppraisalFile } from '#shared/contracts/appraisal'
 import { Worker } from 'node:worker_threads'
 import { AppError } from '../../errors'
-import type { AppraisalJob, AppraisalOutcome } from './appraisalJob'
+import type { AppraisalJob, AppraisalOutcome, ComparedAppraisal } from './appraisalJob'
 
 export interface PoolBounds {
   readonly threads: number
@@ -19,6 +19,8 @@ export interface AppraisalPool {
   appraiseSent(value: unknown): Promise<Appraisal>
   /** A file made from what is stored: schemes that cannot stand are left out. @throws AppError `too_large`, `unavailable` */
   appraiseStored(file: AppraisalFile): Promise<Appraisal>
+  /** A file made from what is stored, every scheme of which must stand. @throws AppError as `appraiseSent` */
+  appraiseCompared(file: AppraisalFile): Promise<ComparedAppraisal>
   close(): Promise<void>
 }
 
@@ -37,10 +39,13 @@ function startWorker(): Worker {
   return worker
 }
 
-function toAppraisal(outcome: AppraisalOutcome): Appraisal {
+/** What the outcome holds. @throws AppError where it holds the reasons why there is none */
+function required(outcome: AppraisalOutcome): ComparedAppraisal {
   switch (outcome.kind) {
     case 'done':
-      return outcome.appraisal
+      return { appraisal: outcome.appraisal, cutPanels: [] }
+    case 'compared':
+      return outcome
     case 'refused':
       throw new AppError('invalid_request', undefined, outcome.issues)
     case 'outOfScope':
@@ -91,18 +96,19 @@ export function createAppraisalPool(bounds: PoolBounds = BOUNDS): AppraisalPool 
     worker.postMessage(job)
   }
 
-  async function perform(job: AppraisalJob): Promise<Appraisal> {
+  async function perform(job: AppraisalJob): Promise<ComparedAppraisal> {
     if (waiting.length >= bounds.waiting) throw new AppError('unavailable', 'Too many appraisals wait.', undefined, 5)
     const outcome = await new Promise<AppraisalOutcome>((resolve, reject) => {
       waiting.push({ job, resolve, reject })
       next()
     })
-    return toAppraisal(outcome)
+    return required(outcome)
   }
 
   return {
-    appraiseSent: (value) => perform({ kind: 'sent', value }),
-    appraiseStored: (file) => perform({ kind: 'stored', file }),
+    appraiseSent: async (value) => (await perform({ kind: 'sent', value })).appraisal,
+    appraiseStored: async (file) => (await perform({ kind: 'stored', file })).appraisal,
+    appraiseCompared: (file) => perform({ kind: 'compared', file }),
     close: async () => {
       await Promise.all([...all].map((worker) => worker.terminate()))
     },

@@ -13,9 +13,21 @@ function appraiseStored(file: AppraisalFile): Appraisal {
   return appraiseInFull({ ...file, schemes }).appraisal
 }
 
+/** Every scheme, or the reasons why one of them has no result. */
+function appraiseCompared(file: AppraisalFile): AppraisalOutcome {
+  const { appraisal, sized, problems } = appraiseInFull(parseAppraisalFile(file))
+  if (problems.length > 0) {
+    const issues = problems.map(({ scheme, issue }) => ({ path: `schemes.${scheme}.${issue.path}`, message: issue.message }))
+    return { kind: 'outOfScope', issues }
+  }
+  const cutPanels = sized.map(({ panels }) => (panels[0] ? { ...panels[0], layout: null } : null))
+  return { kind: 'compared', appraisal, cutPanels }
+}
+
 /** Appraises, and says in plain data how it ended, so that the outcome can cross threads. */
 export function doAppraisalJob(job: AppraisalJob): AppraisalOutcome {
   try {
+    if (job.kind === 'compared') return appraiseCompared(job.file)
     const appraisal = job.kind === 'sent' ? appraise(parseAppraisalFile(job.value)) : appraiseStored(job.file)
     return { kind: 'done', appraisal }
   } catch (error) {

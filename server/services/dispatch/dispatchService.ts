@@ -13,11 +13,13 @@ import { queueMail } from '../../mail/queueMail'
 import { comparisonMail } from '../../mail/templates/comparisonMail'
 import { freezeComparison } from '../../reports/freezeComparison'
 import type { FrozenComparison } from '../../reports/frozenComparison'
+import type { AppraisalPool } from '../appraisal/appraisalPool'
 import { createOnce, type CreatingRequest } from '../createOnce'
 import { requireProject } from '../project/projectRows'
 import { sheetOf } from '../project/projectService'
 import { hasRole, requireRole, type SignedIn } from '../session/signedIn'
 import { compareProject } from './comparedProject'
+import { inTurn } from './inTurn'
 
 const MOST_LISTED = 500
 
@@ -38,12 +40,13 @@ async function materialOf(
 
 async function frozenOf(
   tx: EntityManager,
+  pool: AppraisalPool,
   who: SignedIn,
   projectId: string,
   input: DispatchInput,
   contact: ContactEntity,
 ): Promise<FrozenComparison> {
-  const compared = compareProject(await sheetOf(tx, who.firmId, projectId), input)
+  const compared = await compareProject(pool, await sheetOf(tx, who.firmId, projectId), input)
   const blockMaterial = await materialOf(tx, who.firmId, compared.schemes[0])
   const sending = {
     firm: { name: who.firmName, isDemo: who.isDemo },
@@ -54,6 +57,26 @@ async function frozenOf(
   return freezeComparison({ ...compared, blockMaterial }, sending, new Date().toISOString())
 }
 
+function newRow(who: SignedIn, contact: ContactEntity, frozen: FrozenComparison) {
+  return {
+    firmId: who.firmId,
+    id: v7(),
+    projectId: frozen.project.id,
+    projectName: frozen.project.name,
+    contactId: contact.id,
+    contactName: contact.name,
+    contactEmail: contact.email,
+    ribbedMark: frozen.ribbed.specification.mark,
+    solidMark: frozen.solid.specification.mark,
+    note: frozen.note,
+    state: 'queued' as const,
+    messageId: '',
+    sentBy: who.personId,
+    createdAt: new Date(frozen.frozenAt),
+    frozen: frozen as object,
+  }
+}
+
 /**
  * Sends the comparison of two schemes, as stored at this moment, to a contact: the dispatch with what is sent, and the mail, are
  * written together. The mail leaves once that is committed.
@@ -62,35 +85,20 @@ async function frozenOf(
  */
 export async function createDispatch(
   db: EntityManager,
+  pool: AppraisalPool,
   who: SignedIn,
   projectId: string,
   input: DispatchInput,
   request: CreatingRequest,
 ): Promise<Dispatch> {
   requireRole(who, 'surveyor')
-  return await createOnce(db, who, request, async (tx) => {
+  const create = async (tx: EntityManager): Promise<Dispatch> => {
     await requireProject(tx, who.firmId, projectId)
     const contact = await contactOf(tx, who.firmId, projectId, input.contactId)
-    const frozen = await frozenOf(tx, who, projectId, input, contact)
+    const frozen = await frozenOf(tx, pool, who, projectId, input, contact)
     await requireMailAllowance(tx, who.firmId)
-    const row = {
-      firmId: who.firmId,
-      id: v7(),
-      projectId,
-      projectName: frozen.project.name,
-      contactId: contact.id,
-      contactName: contact.name,
-      contactEmail: contact.email,
-      ribbedMark: frozen.ribbed.specification.mark,
-      solidMark: frozen.solid.specification.mark,
-      note: input.note,
-      state: 'queued' as const,
-      messageId: '',
-      sentBy: who.personId,
-      createdAt: new Date(frozen.frozenAt),
-      frozen,
-    }
-    await tx.insert(DispatchEntity, row as object)
+    const row = newRow(who, contact, frozen)
+    await tx.insert(DispatchEntity, row)
     const mail = {
       firmId: who.firmId,
       toName: contact.name,
@@ -98,10 +106,10 @@ export async function createDispatch(
       dispatchId: row.id,
       ...comparisonMail(frozen),
     }
-    const messageId = await queueMail(tx, mail)
-    await tx.update(DispatchEntity, { firmId: who.firmId, id: row.id }, { messageId })
+    await tx.update(DispatchEntity, { firmId: who.firmId, id: row.id }, { messageId: await queueMail(tx, mail) })
     return toDispatch(await tx.findOneByOrFail(DispatchEntity, { firmId: who.firmId, id: row.id }), who.name)
-  })
+  }
+  return await inTurn(() => createOnce(db, who, request, create))
 }
 
 function toDispatch(row: DispatchEntity, sentBy: string): Dispatch {
