@@ -22,6 +22,7 @@ const BUBBLE_CLEAR_PX = 28
 
 /** Room that chains and bubbles need around a floor. */
 export function planMargins(outlines: readonly Ring[]): PlanMargins {
+  if (outlines.length === 0) return { left: 14, right: 14, top: 14, bottom: 14 }
   const depth = (axis: 'x' | 'y') => {
     const grid = planGrid(outlines, axis)
     return FIRST_CHAIN_PX + (chainCount(grid) - 1) * NEXT_CHAIN_PX + BUBBLE_CLEAR_PX + BUBBLE_PX + 2
@@ -31,8 +32,8 @@ export function planMargins(outlines: readonly Ring[]): PlanMargins {
 
 /** Dimension chains below and to the left of a floor, the nearest the smallest, with bubbles at their lines. */
 export function planDimensions(panels: readonly Panel[], scale: PlanScale, typed: TypedLength | null): SvgNode {
-  const outlines = panels.map(({ outline }) => outline)
-  const box = boundsOf(outlines.flat())
+  if (panels.length === 0) return svgNode('g')
+  const box = boundsOf(panels.flatMap(({ outline }) => outline))
   const [left, bottom] = toPx(scale, [box.minX, box.minY])
   return svgNode('g', { class: 'plan-dimensions' }, [
     ...axisDimensions(panels, 'x', (mm) => toPx(scale, [mm, box.minY])[0], bottom, typed),

@@ -26,6 +26,8 @@ export interface PlanInput {
   readonly panels: readonly PlanPanel[]
   readonly widthPx: number
   readonly mostHeightPx: number
+  /** Ground shown around the floor on every side, to draw on, mm; a level without a panel shows twice that. */
+  readonly aroundMm?: number
 }
 
 /** A plan in layers, so that a screen redraws only what changes; `planSvg` puts them together. */
@@ -43,12 +45,19 @@ export interface PlanLayers {
 
 /**
  * A level drawn to scale from the blocks that are counted: ground, solid parts, blocks, voids, support lines, marks with span
- * arrows, scale bar. At least one panel. Dimensions are a layer of their own (`planDimensions`).
+ * arrows, scale bar. Dimensions are a layer of their own (`planDimensions`).
  */
-export function planLayers({ id, panels, widthPx, mostHeightPx }: PlanInput): PlanLayers {
+export function planLayers({ id, panels, widthPx, mostHeightPx, aroundMm = 0 }: PlanInput): PlanLayers {
   const outlines = panels.map(({ panel }) => panel.outline)
+  const corners = outlines.length === 0 ? [[aroundMm, aroundMm] as const] : outlines.flat()
+  const box = boundsOf(
+    corners.flatMap(([x, y]) => [
+      [x - aroundMm, y - aroundMm],
+      [x + aroundMm, y + aroundMm],
+    ]),
+  )
   const margins = planMargins(outlines)
-  const { scale, heightPx } = fitPlan(boundsOf(outlines.flat()), margins, widthPx, mostHeightPx)
+  const { scale, heightPx } = fitPlan(box, margins, widthPx, mostHeightPx)
   const blockCount = panels.reduce((sum, { layout }) => sum + (layout?.blocks.length ?? 0), 0)
   const each = blockCount > MOST_BLOCK_ELEMENTS ? 'subpath' : 'shape'
   return {

@@ -1,7 +1,9 @@
 import type { Ring } from '../../contracts/appraisal'
 import type { Bounds } from '../../geometry/ring'
+import { boundsOf } from '../../geometry/ring'
+import type { ReadNumber } from './readLength'
 import { readLength } from './readLength'
-import { boxLengths, rectangleRing } from './rectangle'
+import { boxLengths, isRectangle, rectangleRing } from './rectangle'
 
 /** A void's cell read: no void, one rectangle by size and place, or why not. */
 export type ReadVoid = { readonly voids: Ring[] } | { readonly reason: string }
@@ -9,29 +11,25 @@ export type ReadVoid = { readonly voids: Ring[] } | { readonly reason: string }
 const SIZE = /^(.+?)\s*[×x*]\s*(.+?)(?:\s+at\s+(.+?)\s*[;/]\s*(.+))?$/i
 
 /**
- * Rectangular void typed as `2600 × 3600`, in the middle of the panel's box, or `2600 × 3600 at 2000 / 1675`, its corner that
- * far from the box's corner of least x and y. Empty or `none`: no void.
+ * Rectangular void typed as `2600 × 3600`, or `2600 × 3600 at 2000 / 1675`, its corner that far from the corner of least x and
+ * y of the panel's box. Without offsets it keeps the corner of the void that stood there, else stands in the middle of the box.
+ * Empty or `none`: no void.
+ *
+ * @param box - of the panel's outline
+ * @param before - the void that stood there, or null
  */
-export function readVoid(text: string, box: Bounds): ReadVoid {
+export function readVoid(text: string, box: Bounds, before: Ring | null): ReadVoid {
   const typed = text.trim()
   if (typed === '' || /^(none|-|–)$/i.test(typed)) return { voids: [] }
-  const [, alongX, alongY, atX, atY] = SIZE.exec(typed) ?? []
-  if (alongX === undefined || alongY === undefined)
+  const [, sizeX, sizeY, offsetX, offsetY] = SIZE.exec(typed) ?? []
+  if (sizeX === undefined || sizeY === undefined)
     return { reason: 'void: expected its size, as 2600 × 3600, or with its offsets, as 2600 × 3600 at 2000 / 1675' }
-  const read = [readLength(alongX, 'void along x'), readLength(alongY, 'void along y')]
-  const offsets = [atX, atY].map((offset, i) =>
-    offset === undefined ? null : readLength(offset, `void offset along ${'xy'[i]}`, true),
-  )
-  const wrong = [...read, ...offsets].find((each) => each !== null && 'reason' in each)
-  if (wrong !== undefined && wrong !== null && 'reason' in wrong) return { reason: wrong.reason }
-  const [x, y] = read.map((each) => ('value' in each ? each.value : 0)) as [number, number]
-  const least = [box.minX, box.minY]
-  const lengths = [box.maxX - box.minX, box.maxY - box.minY]
-  const place = [x, y].map((length, axis) => {
-    const offset = offsets[axis]
-    return least[axis]! + (offset && 'value' in offset ? offset.value : (lengths[axis]! - length) / 2)
-  })
-  return { voids: [rectangleRing([place[0]!, place[1]!], x, y)] }
+  const kept = before === null ? null : boundsOf(before)
+  const x = readSide('x', sizeX, offsetX, [box.minX, box.maxX], kept?.minX)
+  const y = readSide('y', sizeY, offsetY, [box.minY, box.maxY], kept?.minY)
+  if ('reason' in x) return x
+  if ('reason' in y) return y
+  return { voids: [rectangleRing([x.start, y.start], x.length, y.length)] }
 }
 
 /** How a panel's voids stand in the table's cell: nothing, one rectangle's size, or how many. */
@@ -39,6 +37,23 @@ export function voidText(voids: readonly Ring[]): string {
   const [first] = voids
   if (first === undefined) return ''
   if (voids.length > 1) return `${voids.length} voids`
-  const [x, y] = boxLengths(first)
-  return first.length === 4 ? `${Number(x.toFixed(3))} × ${Number(y.toFixed(3))}` : '1 by points'
+  if (!isRectangle({ outline: first })) return 'by points'
+  return boxLengths(first)
+    .map((length) => Number(length.toFixed(1)))
+    .join('×')
+}
+
+function readSide(
+  axis: 'x' | 'y',
+  size: string,
+  offset: string | undefined,
+  [least, most]: readonly [number, number],
+  kept: number | undefined,
+): { readonly length: number; readonly start: number } | { readonly reason: string } {
+  const length = readLength(size, `void along ${axis}`)
+  if ('reason' in length) return { reason: length.reason }
+  const inMiddle = least + (most - least - length.value) / 2
+  if (offset === undefined) return { length: length.value, start: kept ?? inMiddle }
+  const from: ReadNumber = readLength(offset, `void offset along ${axis}`, true)
+  return 'reason' in from ? { reason: from.reason } : { length: length.value, start: least + from.value }
 }

@@ -1,0 +1,103 @@
+import type { Ring } from '../contracts/appraisal'
+import { boundsOf } from '../geometry/ring'
+import type { Point } from '../geometry/point'
+import { isRectangle } from '../layout/edit/rectangle'
+import type { BlockRow } from '../layout/panelLayout'
+import { dimensionChain } from './dimensionChain'
+import type { PlanPanel } from './planPanel'
+import type { PlanScale } from './planScale'
+import { toPx } from './planScale'
+import type { SvgNode } from './svgNode'
+
+const FIRST_CHAIN_PX = 22
+const NEXT_CHAIN_PX = 24
+
+/**
+ * Dimensions of an opened panel: each rectangular void's size inside it and its offset from the outline, in pencil since
+ * they are typed; and across the ribs the rows with both edge strips, of a rectangle whose ribs run along x or y.
+ */
+export function panelDimensions({ panel, layout }: PlanPanel, scale: PlanScale, clear: readonly Point[]): SvgNode[] {
+  const box = boundsOf(panel.outline)
+  const voids = panel.voids.flatMap((ring, i) => voidDimensions(ring, i, box, scale))
+  const isUpright = panel.ribDirection % 90 === 0 && isRectangle(panel)
+  if (layout === null || layout.rows.length === 0 || !isUpright) return voids
+  const isAlongY = panel.ribDirection === 90
+  return [...voids, rowDimension(layout.rows, boundsOf(clear), box, scale, isAlongY)]
+}
+
+type Box = ReturnType<typeof boundsOf>
+
+function voidDimensions(ring: Ring, index: number, box: Box, scale: PlanScale): SvgNode[] {
+  const own = boundsOf(ring)
+  const typed = new Set([0])
+  const [left, top] = toPx(scale, [own.minX, own.maxY])
+  const [right, bottom] = toPx(scale, [own.maxX, own.minY])
+  const [boxLeft, boxBottom] = toPx(scale, [box.minX, box.minY])
+  const [boxRight, boxTop] = toPx(scale, [box.maxX, box.maxY])
+  const step = index * NEXT_CHAIN_PX
+  return [
+    dimensionChain({
+      direction: 'horizontal',
+      stationsPx: [left, right],
+      figures: [figure(own.maxX - own.minX)],
+      atPx: top + 22,
+      typed,
+    }),
+    dimensionChain({
+      direction: 'vertical',
+      stationsPx: [bottom, top],
+      figures: [figure(own.maxY - own.minY)],
+      atPx: right - 14,
+      typed,
+    }),
+    dimensionChain({
+      direction: 'horizontal',
+      stationsPx: [boxLeft, left],
+      figures: [own.minX > box.minX ? figure(own.minX - box.minX) : ''],
+      atPx: boxTop - FIRST_CHAIN_PX - step,
+      objectPx: boxTop,
+      typed,
+    }),
+    dimensionChain({
+      direction: 'vertical',
+      stationsPx: [boxBottom, bottom],
+      figures: [own.minY > box.minY ? figure(own.minY - box.minY) : ''],
+      atPx: boxRight + FIRST_CHAIN_PX + step,
+      objectPx: boxRight,
+      typed,
+    }),
+  ]
+}
+
+/** Edge strip, rows, edge strip, across the ribs; the figure of the rows names their number and width. */
+function rowDimension(rows: readonly BlockRow[], clear: Box, box: Box, scale: PlanScale, isAlongY: boolean): SvgNode {
+  const [first, last] = [rows[0]!, rows.at(-1)!]
+  const width = last.bandEnd - first.bandStart
+  const [from, to] = isAlongY ? [clear.minX, clear.maxX] : [clear.minY, clear.maxY]
+  const strip = (to - from - width) / 2
+  const stations = [from, from + strip, to - strip, to]
+  const rib = rows.length > 1 ? rows[1]!.bandStart - first.bandEnd : 0
+  const middle = `${rows.length} ${rows.length === 1 ? 'row' : 'rows'} of ${figure(first.bandEnd - first.bandStart)}${
+    rib > 0 ? `, ribs of ${figure(rib)}` : ''
+  }: ${figure(width)}`
+  const figures = [figure(strip), middle, figure(strip)]
+  return isAlongY
+    ? dimensionChain({
+        direction: 'horizontal',
+        stationsPx: stations.map((x) => toPx(scale, [x, box.minY])[0]),
+        figures,
+        atPx: toPx(scale, [box.minX, box.minY])[1] + FIRST_CHAIN_PX,
+        objectPx: toPx(scale, [box.minX, box.minY])[1],
+      })
+    : dimensionChain({
+        direction: 'vertical',
+        stationsPx: stations.map((y) => toPx(scale, [box.minX, y])[1]),
+        figures,
+        atPx: toPx(scale, [box.minX, box.minY])[0] - FIRST_CHAIN_PX,
+        objectPx: toPx(scale, [box.minX, box.minY])[0],
+      })
+}
+
+function figure(lengthMm: number): string {
+  return Number(lengthMm.toFixed(1)).toLocaleString('en')
+}

@@ -1,0 +1,34 @@
+import type { StoredLevel, StoredScheme } from '#shared/contracts/project'
+import { planPanels } from '#shared/drawing/planDrawing'
+import type { Ref } from 'vue'
+import { computed, ref } from 'vue'
+import { useProjectStore } from '../../stores/project'
+
+/** The scheme that a level is drawn and counted as, and what the appraisal made of that level. */
+export function useDrawnScheme(level: Ref<StoredLevel | null>) {
+  const store = useProjectStore()
+  const chosenId = ref<string | null>(null)
+  const scheme = computed<StoredScheme | null>(
+    () => store.schemes.find(({ id }) => id === chosenId.value) ?? store.schemes[0] ?? null,
+  )
+  const schemeId = computed({ get: () => scheme.value?.id ?? null, set: (id) => (chosenId.value = id) })
+  const kind = computed(() => scheme.value?.specification.kind ?? 'ribbed')
+  const mark = computed(() => scheme.value?.specification.mark)
+  const result = computed(() => store.full?.appraisal.schemes.find((each) => each.mark === mark.value) ?? null)
+  const sized = computed(() => store.full?.sized.find((each) => each.mark === mark.value) ?? null)
+  const depths = computed(() => new Map(store.full?.appraisal.schemes.map((each) => [each.mark, each.depth])))
+
+  const levelMark = computed(() => level.value?.mark ?? '')
+  const panelResults = computed(() => result.value?.panels.filter((each) => each.level === levelMark.value) ?? [])
+  const checks = computed(() => result.value?.checks.filter((each) => each.level === levelMark.value) ?? [])
+  const drawn = computed(() => (level.value === null ? [] : planPanels(level.value, sized.value, kind.value)))
+  /** Problems of the level, by path within it. */
+  const issues = computed(() => {
+    const prefix = `levels.${store.levels.findIndex(({ id }) => id === level.value?.id)}.`
+    return store.problems
+      .filter(({ path }) => path.startsWith(prefix))
+      .map(({ path, message }) => ({ path: path.slice(prefix.length), message }))
+  })
+
+  return { scheme, schemeId, kind, result, sized, depths, panelResults, checks, drawn, issues }
+}
