@@ -1,7 +1,6 @@
 import type { EntityManager } from 'typeorm'
 import { AppError } from '../../errors'
 import { sha256 } from '../sha256'
-import { AttemptEntity } from '../../entities/session/AttemptEntity'
 
 /** At most `most` attempts of this kind by this subject within `windowS` seconds. */
 export interface AttemptRule {
@@ -13,15 +12,16 @@ export interface AttemptRule {
 
 const keyOf = ({ kind, subject }: AttemptRule) => sha256(`${kind}\n${subject}`)
 
-async function countOne(db: EntityManager, rule: AttemptRule, now: Date): Promise<AttemptEntity> {
-  const subject = keyOf(rule)
+/** This attempt's own place in the count: attempts at the same moment get different ones. */
+async function countOne(db: EntityManager, rule: AttemptRule, now: Date): Promise<{ count: number; windowStart: Date }> {
   const oldest = new Date(now.getTime() - rule.windowS * 1000)
-  await db.query(
+  const rows: { count: number; windowStart: Date }[] = await db.query(
     `INSERT INTO attempt (subject, window_start, count) VALUES (?, ?, 1)
-     ON DUPLICATE KEY UPDATE count = IF(window_start <= ?, 1, count + 1), window_start = IF(window_start <= ?, ?, window_start)`,
-    [subject, now, oldest, oldest, now],
+     ON DUPLICATE KEY UPDATE count = IF(window_start <= ?, 1, count + 1), window_start = IF(window_start <= ?, ?, window_start)
+     RETURNING count, window_start AS windowStart`,
+    [keyOf(rule), now, oldest, oldest, now],
   )
-  return await db.findOneByOrFail(AttemptEntity, { subject })
+  return rows[0]!
 }
 
 /**
