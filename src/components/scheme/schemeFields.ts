@@ -1,0 +1,20 @@
+/** Fields of a specification that its form shows a problem at. */
+export const SCHEME_FIELDS: readonly string[] = [
+  'mark',
+  'name',
+  'blockId',
+  'block',
+  'ribWidth',
+  'topping',
+  'mesh',
+  'edgeStrip',
+  'solidZone',
+  'crossRibs',
+  'trimmerWidth',
+  'leastPiece',
+  'ribBars',
+  'topBars',
+  'link',
+  'thickness',
+  'bars',
+]
