@@ -1,0 +1,38 @@
+import type { Neighbour } from '../../layout/neighbours'
+import type { EndOfSpan, SpanForces } from './spanForces'
+
+/** Hogging moment of each panel over each outline edge, N·mm per metre; edges that are not there count as 0. */
+export type EdgeMoments = readonly ReadonlyMap<number, number>[]
+
+/**
+ * Greatest moment that the panels behind some edges bring to them, N·mm per metre, 0 without any.
+ *
+ * Source: project rule, of two unequal moments at one support both sides take the larger (no distribution, on the safe side)
+ */
+export function momentFromBehind(panel: number, edges: readonly number[], moments: EdgeMoments, neighbours: readonly Neighbour[]): number {
+  return neighbours.reduce(
+    (most, each) =>
+      each.panel === panel && edges.includes(each.edge)
+        ? Math.max(most, moments[each.neighbour]?.get(each.neighbourEdge) ?? 0)
+        : most,
+    0,
+  )
+}
+
+/**
+ * Forces of a span whose support moments were raised to those of its neighbours; what is added dies out in a straight line at the
+ * far end. The sagging moment is left as it was.
+ *
+ * Source: project rule, as `momentFromBehind`; carry-over in a straight line by statics
+ * @param least - moment to reach at each end, N·mm per metre
+ */
+export function raisedTo(forces: SpanForces, spanMm: number, least: Readonly<Record<EndOfSpan, number>>): SpanForces {
+  const extra = (end: EndOfSpan) => Math.max(0, least[end] - forces.hoggingNmm(end, 0))
+  const [start, end] = [extra('start'), extra('end')]
+  if (start === 0 && end === 0) return forces
+  const added = { start, end }
+  return {
+    ...forces,
+    hoggingNmm: (at, from) => forces.hoggingNmm(at, from) + added[at] * Math.max(0, 1 - from / spanMm),
+  }
+}

@@ -1,0 +1,28 @@
+/** Which end of a span. */
+export type EndOfSpan = 'start' | 'end'
+
+/** Design forces of one span per metre of width: N·mm and N, envelopes over all load cases, all ≥ 0. */
+export interface SpanForces {
+  readonly method: 'coefficients' | 'elastic'
+  /** Whether 20 % redistribution of support moments is in the values. */
+  readonly isRedistributed: boolean
+  readonly saggingNmm: number
+  readonly hoggingNmm: (end: EndOfSpan, fromSupportMm: number) => number
+  readonly shearN: (end: EndOfSpan, fromSupportMm: number) => number
+}
+
+/**
+ * Forces of a single span on simple supports under an even load.
+ *
+ * Source: statics, w·l²/8 and w·(l/2 − x)
+ * @param load - N/mm per metre of width, which is kN/m²
+ */
+export function simpleSpanForces(load: number, spanMm: number): SpanForces {
+  return {
+    method: 'elastic',
+    isRedistributed: false,
+    saggingNmm: (load * spanMm * spanMm) / 8,
+    hoggingNmm: () => 0,
+    shearN: (_end, fromSupportMm) => load * Math.max(0, spanMm / 2 - fromSupportMm),
+  }
+}

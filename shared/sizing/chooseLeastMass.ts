@@ -1,0 +1,51 @@
+import type { Check } from '../contracts/appraisal'
+import { type Finding, isMet, utilisationOf } from './finding'
+
+/** A way to reinforce: what it weighs and what its checks find. */
+export interface Candidate<Option> {
+  readonly option: Option
+  readonly massKg: number
+  readonly findings: readonly Finding[]
+}
+
+type Name = Check['name']
+
+/** What no choice of bars may be able to mend comes first: it does not depend on load and is passed over when hopeless. */
+const FIXED: readonly Name[] = ['bars.fit', 'fire.cover']
+
+/** What load governs, in this order; where nothing passes, what comes nearest is kept. */
+const GOVERNED: readonly (readonly Name[])[] = [
+  ['flexure.midspan', 'flexure.support', 'steel.least', 'steel.most', 'bars.spacing'],
+  ['shear'],
+  ['deflection'],
+]
+
+/** Utilisations this close are equal. */
+const SAME = 1e-9
+
+/**
+ * The candidate of least mass that passes every check. Where none does, the checks are met in a fixed order and the candidate nearest to
+ * passing is kept, so that more load never ends in less steel.
+ *
+ * Source: project rule, engine design section 4 (bars: least total mass that passes every check) and section 8 (monotone)
+ * @param candidates - at least one; of equal masses the first counts
+ */
+export function chooseLeastMass<Option>(candidates: readonly Candidate<Option>[]): Candidate<Option> {
+  const worst = (each: Candidate<Option>, names: readonly Name[]) =>
+    each.findings.reduce(
+      (most, { name, demand, capacity }) => (names.includes(name) ? Math.max(most, utilisationOf(demand, capacity)) : most),
+      0,
+    )
+  const passes = (each: Candidate<Option>, names: readonly Name[]) => isMet(worst(each, names), 1)
+  let pool = candidates
+  for (const name of FIXED) {
+    const passing = pool.filter((each) => passes(each, [name]))
+    if (passing.length > 0) pool = passing
+  }
+  for (const names of GOVERNED) {
+    const passing = pool.filter((each) => passes(each, names))
+    const nearest = passing.length > 0 ? 0 : Math.min(...pool.map((each) => worst(each, names)))
+    pool = passing.length > 0 ? passing : pool.filter((each) => worst(each, names) <= nearest + SAME)
+  }
+  return pool.reduce((best, each) => (each.massKg < best.massKg - SAME ? each : best))
+}

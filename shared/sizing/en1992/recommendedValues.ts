@@ -1,0 +1,60 @@
+/** The nationally chosen values of EN 1990 and EN 1992 that the engine uses; pass another set for another country. */
+export interface NationalValues {
+  readonly gammaPermanent: number
+  readonly gammaVariable: number
+  readonly gammaConcrete: number
+  /** Design stress of steel as a share of fyk, 1/γs. */
+  readonly steelShare: number
+  /** Design stress of the concrete block as a share of fck, αcc/γc. */
+  readonly concreteShare: number
+  /** αct in fctd = αct·fctk,0.05/γc. */
+  readonly alphaCt: number
+  /** Greatest K of a singly reinforced section, without redistribution and after 20 %. */
+  readonly greatestK: { readonly elastic: number; readonly redistributed: number }
+  /** Greatest z/d. */
+  readonly greatestLeverArm: number
+  readonly shear: { readonly coefficient: number; readonly vMinCoefficient: number }
+  readonly leastSteel: { readonly tensileShare: number; readonly share: number }
+  readonly greatestSteelShare: number
+  readonly greatestSteelStressFactor: number
+  readonly flangedFactor: { readonly overWidthRatio: number; readonly factor: number }
+  /** Spacing of bars: multiples of the depth, and mm, by where they lie. */
+  readonly spacing: {
+    readonly greatestMoment: { readonly depths: number; readonly mm: number }
+    readonly principal: { readonly depths: number; readonly mm: number }
+    readonly secondary: { readonly depths: number; readonly mm: number }
+  }
+  readonly secondaryShare: number
+  /** Clear gap between bars: k1·φ, aggregate + k2, and a least, mm. */
+  readonly gap: { readonly diameters: number; readonly overAggregateMm: number; readonly leastMm: number }
+}
+
+/**
+ * Recommended values of the standards' own notes, save αcc = 0.85, the lever arm and the steel stress factor. The shares of
+ * strength are 1/1.15 and 0.85/1.5 as design aids print them, so that hand checks agree to the digit.
+ *
+ * Source: EN 1990:2002 Table A1.2(B) and EN 1992-1-1:2004 2.4.2.4, 3.1.6, 5.5, 6.2.2, 7.4.2, 8.2, 9.2.1.1, 9.3.1.1 (seen in part, see
+ * the folder's formulas); αcc 0.85, 0.95d and the cap 1.5: engine design, common practice
+ */
+export const recommendedValues = {
+  gammaPermanent: 1.35,
+  gammaVariable: 1.5,
+  gammaConcrete: 1.5,
+  steelShare: 0.87,
+  concreteShare: 0.567,
+  alphaCt: 1,
+  greatestK: { elastic: 0.167, redistributed: 0.116 },
+  greatestLeverArm: 0.95,
+  shear: { coefficient: 0.18, vMinCoefficient: 0.035 },
+  leastSteel: { tensileShare: 0.26, share: 0.0013 },
+  greatestSteelShare: 0.04,
+  greatestSteelStressFactor: 1.5,
+  flangedFactor: { overWidthRatio: 3, factor: 0.8 },
+  spacing: {
+    greatestMoment: { depths: 2, mm: 250 },
+    principal: { depths: 3, mm: 400 },
+    secondary: { depths: 3.5, mm: 450 },
+  },
+  secondaryShare: 0.2,
+  gap: { diameters: 1, overAggregateMm: 5, leastMm: 20 },
+} as const satisfies NationalValues

@@ -1,0 +1,67 @@
+import { bayAreas, type SpanLines, stripOf } from '../analysis/levelStrips'
+import { momentFromBehind, raisedTo } from '../analysis/sharedSupports'
+import type { EndOfSpan, SpanForces } from '../analysis/spanForces'
+import { positionIn, stripForces } from '../analysis/stripForces'
+import type { CodeBasis, SpanPosition } from '../codeBasis'
+import type { LevelSite } from '../panelSite'
+import type { RibbedPanel } from './ribbedPanel'
+
+/** Span and forces of a ribbed panel, per metre of width. */
+export interface RibAnalysis {
+  readonly spanMm: number
+  readonly position: SpanPosition
+  readonly forces: SpanForces
+  /** From the line of support to its face, mm. */
+  readonly faceMm: Readonly<Record<EndOfSpan, number>>
+  /** Number of ends beyond which an equal span was assumed. */
+  readonly assumedEnds: number
+}
+
+/**
+ * Effective span and forces of every ribbed panel of a level: one way along the ribs, continuous with neighbours whose ribs run
+ * the same way.
+ *
+ * Source: EN 1992-1-1:2004, 5.3.2.2, or the basis' own rule; BS 8110-1:1997, Table 3.12 or elastic analysis (engine design section 4)
+ */
+export function analyseRibs({ neighbours }: LevelSite, panels: readonly RibbedPanel[], depthMm: number, basis: CodeBasis): RibAnalysis[] {
+  const lines = spanLines(panels, depthMm, basis)
+  const bays = bayAreas(lines, neighbours)
+  const withBays = lines.map((line, i) => line && { ...line, span: { ...line.span, bayMm2: bays[i]! } })
+  const raw = panels.map((_, i) => {
+    const strip = stripOf(i, withBays, neighbours)
+    return { strip, forces: stripForces(strip, basis.loadFactors) }
+  })
+  const moments = panels.map(({ ends }, i) => {
+    const at = (end: EndOfSpan) => ends[end].edges.map((edge) => [edge, raw[i]!.forces.hoggingNmm(end, 0)] as const)
+    return new Map([...at('start'), ...at('end')])
+  })
+  return panels.map(({ ends }, i) => {
+    const { strip, forces } = raw[i]!
+    const spanMm = lines[i]!.span.spanMm
+    const behind = (end: EndOfSpan) =>
+      ends[end].isContinuous ? momentFromBehind(i, ends[end].edges, moments, neighbours) : 0
+    return {
+      spanMm,
+      position: positionIn(strip),
+      forces: raisedTo(forces, spanMm, { start: behind('start'), end: behind('end') }),
+      faceMm: faceDistances(panels[i]!, spanMm, depthMm, basis),
+      assumedEnds: strip.assumedEnds,
+    }
+  })
+}
+
+function spanLines(panels: readonly RibbedPanel[], depthMm: number, basis: CodeBasis): SpanLines {
+  return panels.map(({ direction, ends, clearMm, loads, layout }) => {
+    const span = basis.effectiveSpanMm(clearMm, depthMm, depthMm, [ends.start, ends.end])
+    return { direction, ends, span: { spanMm: span, loads, bayMm2: layout.areas.gross } }
+  })
+}
+
+/** What the effective span adds to the clear one, shared between its ends as each would add alone. */
+function faceDistances({ clearMm, ends }: RibbedPanel, spanMm: number, depthMm: number, basis: CodeBasis): Record<EndOfSpan, number> {
+  const none = { supportMm: 0, isContinuous: false }
+  const start = basis.effectiveSpanMm(clearMm, depthMm, depthMm, [ends.start, none]) - clearMm
+  const end = basis.effectiveSpanMm(clearMm, depthMm, depthMm, [none, ends.end]) - clearMm
+  const share = start + end === 0 ? 0 : (spanMm - clearMm) / (start + end)
+  return { start: start * share, end: end * share }
+}

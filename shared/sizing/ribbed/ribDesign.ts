@@ -1,0 +1,137 @@
+import type { Bar, BarDiameter, RibbedScheme } from '../../contracts/appraisal'
+import type { EndOfSpan } from '../analysis/spanForces'
+import { totalLengthMm } from '../barRuns'
+import type { BarSet } from '../barSet'
+import { type Candidate, chooseLeastMass } from '../chooseLeastMass'
+import type { Finding } from '../finding'
+import { BAR_MASS_KG_PER_M, CHOSEN_DIAMETERS } from '../tables/bars'
+import { bottomFindings } from './bottomFindings'
+import { bottomLines, type RibBarRules, topLines } from './ribBarLines'
+import type { RibContext } from './ribContext'
+import type { RibbedPanel } from './ribbedPanel'
+import { shearFindings } from './ribShear'
+import { simpleEdgeFinding, supportBending, topFindings } from './topFindings'
+
+/** The bars of a panel's ribs, and what the checks find. */
+export interface RibDesign {
+  readonly bottom: BarSet
+  readonly tops: Readonly<Record<EndOfSpan, BarSet>>
+  readonly findings: readonly Finding[]
+}
+
+const ENDS: readonly EndOfSpan[] = ['start', 'end']
+
+/**
+ * Sets a rib may be given: one bar, or two, of equal or different diameters.
+ *
+ * Source: project rule, engine design section 4 (bars computed)
+ */
+export const RIB_BAR_SETS: readonly BarSet[] = CHOSEN_DIAMETERS.flatMap((first, i): BarSet[] => [
+  [{ diameter: first, count: 1 }],
+  ...CHOSEN_DIAMETERS.slice(0, i).map((second): Bar[] => [
+    { diameter: first, count: 1 },
+    { diameter: second, count: 1 },
+  ]),
+  [{ diameter: first, count: 2 }],
+])
+
+type MassOf = (set: BarSet) => number
+
+/** Mass of a set whose lines of one bar of each diameter are known, remembered by diameter. */
+function massBy(lengthOf: (diameter: BarDiameter) => number): MassOf {
+  const known = new Map<BarDiameter, number>()
+  return (set) =>
+    set.reduce((sum, { diameter, count }) => {
+      const length = known.get(diameter) ?? lengthOf(diameter)
+      known.set(diameter, length)
+      return sum + (count * length * BAR_MASS_KG_PER_M[diameter]) / 1000
+    }, 0)
+}
+
+function choose(massOf: MassOf, findingsOf: (set: BarSet) => readonly Finding[]): BarSet {
+  const candidates = RIB_BAR_SETS.map((option): Candidate<BarSet> => ({ option, massKg: massOf(option), findings: findingsOf(option) }))
+  return chooseLeastMass(candidates).option
+}
+
+/** What the bars of one panel are chosen by. `isZoneGiven`: then bars may help shear; a zone left to the engine is widened instead. */
+export interface RibTask {
+  readonly panel: RibbedPanel
+  readonly context: RibContext
+  readonly scheme: RibbedScheme
+  readonly rules: RibBarRules
+  readonly isZoneGiven: boolean
+}
+
+/**
+ * Bottom bars of a panel's ribs: the given ones, or those of least mass. They do not depend on the width of a zone left to the engine.
+ *
+ * Source: project rule, engine design section 4
+ */
+export function chooseBottom({ panel, context, scheme, rules, isZoneGiven }: RibTask): BarSet {
+  if (scheme.ribBars !== 'computed') return scheme.ribBars
+  const simpleEnds = isZoneGiven ? ENDS.filter((end) => !panel.ends[end].isContinuous) : []
+  return choose(
+    massBy((diameter) => totalLengthMm(bottomLines(panel, diameter, 1, rules))),
+    (set) => [
+      ...bottomFindings(context, set),
+      ...simpleEnds.flatMap((end) => shearFindings(context, end, { bottom: set, top: set })),
+    ],
+  )
+}
+
+/**
+ * Top bars at one end of a panel's ribs: over a continuous end the given ones or those of least mass, at a simple end the basis' share.
+ *
+ * Source: project rule, engine design section 4
+ */
+export function chooseTop({ panel, context, scheme, rules, isZoneGiven }: RibTask, end: EndOfSpan, bottom: BarSet): BarSet {
+  const { isContinuous } = panel.ends[end]
+  if (isContinuous && scheme.topBars !== 'computed') return scheme.topBars
+  const added = context.analysis.spanMm - context.clearMm
+  const massOf = massBy((diameter) =>
+    topLines(panel, end, diameter, 1, added, rules).reduce((sum, lines) => sum + totalLengthMm(lines), 0),
+  )
+  if (!isContinuous) return choose(massOf, (set) => [simpleEdgeFinding(context, end, set)])
+  const shear = (set: BarSet) => (isZoneGiven ? shearFindings(context, end, { bottom, top: set }) : [])
+  return choose(massOf, (set) => [...topFindings(context, end, set), ...shear(set)])
+}
+
+/**
+ * Bars of a panel's ribs and every finding about them.
+ *
+ * Source: project rule, engine design section 4
+ */
+export function designRibs(task: RibTask): RibDesign {
+  const { context, panel } = task
+  const bottom = chooseBottom(task)
+  const tops = { start: chooseTop(task, 'start', bottom), end: chooseTop(task, 'end', bottom) }
+  const topOf = (end: EndOfSpan) =>
+    panel.ends[end].isContinuous ? topFindings(context, end, tops[end]) : [simpleEdgeFinding(context, end, tops[end])]
+  const borne = ENDS.filter((end) => panel.ends[end].edges.length > 0)
+  return {
+    bottom,
+    tops,
+    findings: [
+      ...bottomFindings(context, bottom),
+      ...borne.flatMap(topOf),
+      ...borne.flatMap((end) => shearFindings(context, end, { bottom, top: tops[end] })),
+    ],
+  }
+}
+
+/**
+ * What the width of the solid zone decides with the bars chosen for it: shear of the rib where the zone ends, and its bending there.
+ *
+ * Source: project rule, engine design section 4 (`"least"` lets shear widen the zone)
+ */
+export function zoneFindings(task: RibTask, bottom: BarSet): { readonly demand: number; readonly capacity: number }[] {
+  const { context, panel } = task
+  return ENDS.flatMap((end) => {
+    const top = chooseTop(task, end, bottom)
+    const shear = shearFindings(context, end, { bottom, top }).slice(0, 1)
+    if (!panel.ends[end].isContinuous) return shear
+    const { over, atRib } = supportBending(context, end, top)
+    const { k, greatestK } = atRib ?? over
+    return [...shear, { demand: k, capacity: greatestK }]
+  })
+}

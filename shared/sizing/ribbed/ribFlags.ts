@@ -1,0 +1,86 @@
+import type { RibbedScheme } from '../../contracts/appraisal'
+import type { EndOfSpan } from '../analysis/spanForces'
+import type { CodeBasis } from '../codeBasis'
+import { figure } from '../figure'
+import { isMet } from '../finding'
+import { FABRIC } from '../tables/fabric'
+import { endName } from './ribContext'
+import type { RibAnalysis } from './ribAnalysis'
+import { isMixedEnd, type RibbedPanel } from './ribbedPanel'
+import { type RibSection } from './ribSection'
+import { shapeFindings } from './shapeFindings'
+
+/** What the flags of a ribbed panel look at. */
+export interface RibFlagInput {
+  readonly panel: RibbedPanel
+  readonly scheme: RibbedScheme
+  readonly section: RibSection
+  readonly analysis: RibAnalysis
+  readonly basis: CodeBasis
+  readonly fireMinutes: number
+  readonly isWidened: boolean
+}
+
+/**
+ * Assumptions and approximations of one ribbed panel, in sentences.
+ *
+ * Source: project rule, what was assumed is stated (engine design sections 1 and 4)
+ */
+export function ribFlags(input: RibFlagInput): string[] {
+  const { panel, analysis, isWidened } = input
+  const lengths = panel.ribs.map(({ clearMm }) => clearMm)
+  const varies = Math.max(...lengths) - Math.min(...lengths) > 1
+  return [
+    methodFlag(analysis),
+    ...(analysis.assumedEnds > 0 ? ['continuous edge without a neighbour spanning the same way: an equal span is assumed behind it'] : []),
+    ...(['start', 'end'] as const).filter((end) => isMixedEnd(panel, end)).map((end) => mixedFlag(panel, end)),
+    ...(varies ? [`ribs differ in length: sized on the longest clear rib, ${figure(panel.clearMm, 0)} mm`] : []),
+    ...(panel.site.panel.voids.length > 0 ? ['ribs that end at a void hang on its trimmers; bars of trimmers are not included'] : []),
+    ...(isWidened ? [`solid zone widened to ${figure(panel.layout.solidZone, 0)} mm for shear and for bending of the ribs at supports`] : []),
+    ...crossRibFlag(input),
+    ...meshFlag(input),
+    ...fireFlags(input),
+  ]
+}
+
+function methodFlag({ position, forces }: RibAnalysis): string {
+  if (position === 'simple') return 'one way, simple span'
+  return forces.method === 'coefficients'
+    ? 'one way, coefficients of BS 8110-1 Table 3.12 (3.5.2.3 holds; 20 % redistribution included)'
+    : 'one way, elastic continuous beam with pattern loading (conditions of BS 8110-1 3.5.2.3 do not hold)'
+}
+
+function mixedFlag(panel: RibbedPanel, end: EndOfSpan): string {
+  return `${endName(panel, end)}: continuous in part only, taken as discontinuous`
+}
+
+function crossRibFlag({ panel: { layout }, basis, section }: RibFlagInput): string[] {
+  const most = basis.crossRibSpacingMm(section.heightMm)
+  const longest = Math.max(0, ...layout.rows.flatMap(({ runs }) => runs.map(({ start, end }) => end - start)))
+  if (!most || isMet(longest, most.value)) return []
+  return [
+    `clear length of ribs ${figure(longest, 0)} mm exceeds ${most.working()} (${most.clause}): ribs are analysed one way as discrete members`,
+  ]
+}
+
+function meshFlag({ scheme: { mesh }, basis, section }: RibFlagInput): string[] {
+  const { toppingMm } = section
+  if (toppingMm === 0) return []
+  const least = basis.leastSteelMm2({ widthMm: 1000, webMm: 1000, heightMm: toppingMm, depthMm: toppingMm })
+  const { areaMm2PerM } = FABRIC[mesh]
+  if (isMet(least.value, areaMm2PerM)) return []
+  return [
+    `topping: ${mesh === 'none' ? 'no mesh' : `${mesh} mesh, ${figure(areaMm2PerM, 0)} mm²/m`}, against ${figure(least.value, 0)} mm²/m as least steel of the flange (${least.clause})`,
+  ]
+}
+
+/** What would change the answer of the fire tables, where a size fails. */
+function fireFlags({ basis, section, analysis, fireMinutes }: RibFlagInput): string[] {
+  const failing = shapeFindings(basis, section, analysis, fireMinutes).filter(
+    ({ name, demand, capacity }) => name === 'fire.size' && !isMet(demand, capacity),
+  )
+  return failing.map(
+    ({ demand, capacity, clause }) =>
+      `${clause} asks ${figure(demand)} mm where there are ${figure(capacity)} mm: a larger size would change that, or test evidence for the blocks and their plaster`,
+  )
+}

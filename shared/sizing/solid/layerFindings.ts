@@ -1,0 +1,180 @@
+import type { BarDiameter, BarLayer } from '../../contracts/appraisal'
+import type { BendingSection, Flexure } from '../codeBasis'
+import { figure } from '../figure'
+import type { Finding } from '../finding'
+import { deflectionFinding, flexureFindings, steelLimitFindings } from '../flexureFindings'
+import { METRE_MM, type SlabContext, type TopPlace, isHogging, layerDepthMm, placeName } from './slabContext'
+import { layerAreaMm2, layerText } from './slabLayer'
+
+/** A metre of slab with one layer of tension bars. */
+export function slabSection(context: SlabContext, diameter: BarDiameter, outer: BarDiameter | null): BendingSection {
+  return { widthMm: METRE_MM, depthMm: layerDepthMm(context, diameter, outer), flange: null }
+}
+
+/**
+ * Bending at midspan of the short or the long direction, N·mm per metre.
+ *
+ * Source: by the basis, `flexure`
+ */
+export function midspanFlexure(context: SlabContext, direction: 'short' | 'long', diameter: BarDiameter, outer: BarDiameter | null): Flexure {
+  const span = context.analysis[direction]
+  return context.basis.flexure(slabSection(context, diameter, outer), span?.saggingNmm ?? 0, false)
+}
+
+/**
+ * Bending at one end: the hogging moment where the floor is continuous, else the share of the midspan moment of simple edges.
+ *
+ * Source: by the basis, `flexure` and `simpleEdge`
+ */
+export function topFlexure(context: SlabContext, place: TopPlace, diameter: BarDiameter, outer: BarDiameter | null): Flexure {
+  const { basis, analysis } = context
+  const section = slabSection(context, diameter, outer)
+  if (isHogging(place) && place.span) return basis.flexure(section, place.span.ends[place.end].hoggingNmm, place.span.isRedistributed)
+  const midspan = (place.span ?? analysis.short).saggingNmm
+  return basis.flexure(section, basis.simpleEdge.share * midspan, false)
+}
+
+function spacingFinding(context: SlabContext, where: string, place: 'greatestMoment' | 'principal' | 'secondary', layer: BarLayer): Finding {
+  const most = context.basis.greatestSpacingMm(place, context.heightMm)
+  return {
+    name: 'bars.spacing',
+    clause: most.clause,
+    demand: layer.spacing,
+    capacity: most.value,
+    unit: 'mm',
+    working: () => `${where}: ${most.working()}; ${layerText(layer)}`,
+  }
+}
+
+function limitFindings(context: SlabContext, where: string, depthMm: number, layer: BarLayer): Finding[] {
+  const { basis, heightMm } = context
+  const zone = { widthMm: METRE_MM, webMm: METRE_MM, heightMm, depthMm }
+  return [
+    ...steelLimitFindings(basis, where, zone, METRE_MM * heightMm, layerAreaMm2(layer)),
+    spacingFinding(context, where, 'greatestMoment', layer),
+  ]
+}
+
+/**
+ * What the checks find for the bottom bars of the direction that the panel spans first.
+ *
+ * Source: by the basis
+ */
+export function shortBottomFindings(context: SlabContext, layer: BarLayer, flexure: Flexure): Finding[] {
+  const { basis, analysis, brief } = context
+  const section = slabSection(context, layer.diameter, null)
+  const where = `short span, midspan, ${layerText(layer)}`
+  const input = {
+    position: analysis.short.position,
+    spanMm: analysis.short.spanMm,
+    section,
+    momentNmm: analysis.short.saggingNmm,
+    requiredMm2: flexure.requiredMm2,
+    providedMm2: layerAreaMm2(layer),
+    carriesPartitions: brief.partitionsLoad > 0,
+  }
+  return [
+    ...flexureFindings('flexure.midspan', where, flexure, layerAreaMm2(layer)),
+    deflectionFinding(basis, where, input),
+    ...limitFindings(context, where, section.depthMm, layer),
+    ...axisFinding(context, layer),
+  ]
+}
+
+function axisFinding({ basis, brief, analysis }: SlabContext, { diameter }: BarLayer): Finding[] {
+  if (brief.fireMinutes === 0) return []
+  const action = analysis.long === null ? 'oneWay' : analysis.aspect <= 1.5 ? 'twoWay' : 'twoWayLong'
+  const { axisMm } = basis.slabFire(brief.fireMinutes, action)
+  const axis = brief.cover + diameter / 2
+  return [
+    {
+      name: 'fire.cover',
+      clause: axisMm.clause,
+      demand: axisMm.value,
+      capacity: axis,
+      unit: 'mm',
+      working: () => `${axisMm.working()}; a = cover + φ/2 = ${figure(brief.cover)} + ${diameter}/2 = ${figure(axis)} mm`,
+    },
+  ]
+}
+
+/**
+ * What the checks find for the bottom bars across: in bending where the panel spans two ways, else as a share of the main bars.
+ *
+ * Source: by the basis, `secondary` one way
+ * @param main - bars of the direction spanned first, which lie outside these
+ */
+export function longBottomFindings(context: SlabContext, layer: BarLayer, flexure: Flexure, main: BarLayer): Finding[] {
+  const { basis, analysis } = context
+  if (analysis.long) {
+    const where = `long span, midspan, ${layerText(layer)}`
+    const depthMm = layerDepthMm(context, layer.diameter, main.diameter)
+    return [
+      ...flexureFindings('flexure.midspan', where, flexure, layerAreaMm2(layer)),
+      ...limitFindings(context, where, depthMm, layer),
+    ]
+  }
+  const { share, clause } = basis.secondary
+  const where = `across the span, ${layerText(layer)}`
+  const demand = share * layerAreaMm2(main)
+  return [
+    {
+      name: 'steel.least',
+      clause,
+      demand,
+      capacity: layerAreaMm2(layer),
+      unit: 'mm²',
+      working: () =>
+        `${where}: ${share} of the main bars = ${share}·${figure(layerAreaMm2(main), 0)} = ${figure(demand, 0)} mm²; ` +
+        `${figure(layerAreaMm2(layer), 0)} mm² provided`,
+    },
+    spacingFinding(context, where, 'secondary', layer),
+  ]
+}
+
+/**
+ * What the checks find for the top bars at one end.
+ *
+ * Source: by the basis; at edges taken as simple by its `simpleEdge`
+ * @param layer - null where bars are given and none of them lies there
+ */
+export function topLayerFindings(context: SlabContext, place: TopPlace, layer: BarLayer | null, flexure: Flexure, depthMm: number): Finding[] {
+  const where = `${placeName(place)}, ${layer ? layerText(layer) : 'no bars'}`
+  const provided = layer ? layerAreaMm2(layer) : 0
+  if (isHogging(place))
+    return [
+      ...flexureFindings('flexure.support', where, flexure, provided),
+      ...(layer ? limitFindings(context, where, depthMm, layer) : []),
+    ]
+  const { share, clause } = context.basis.simpleEdge
+  return [
+    {
+      name: 'steel.least',
+      clause,
+      demand: flexure.requiredMm2,
+      capacity: provided,
+      unit: 'mm²',
+      working: () => `${where}: ${share} of the midspan moment; ${flexure.steelWorking()}; ${figure(provided, 0)} mm² provided`,
+    },
+    ...(layer ? [spacingFinding(context, where, 'principal', layer)] : []),
+  ]
+}
+
+/**
+ * Shear at one end of a direction that carries, per metre.
+ *
+ * Source: by the basis, `shearResistanceN`; at the line of support, on the safe side
+ */
+export function slabShearFinding(context: SlabContext, place: TopPlace, depthMm: number, steelMm2: number): Finding | null {
+  if (!place.span) return null
+  const { shearN } = place.span.ends[place.end]
+  const resistance = context.basis.shearResistanceN({ widthMm: METRE_MM, depthMm, steelMm2 })
+  return {
+    name: 'shear',
+    clause: resistance.clause,
+    demand: shearN / 1000,
+    capacity: resistance.value / 1000,
+    unit: 'kN/m',
+    working: () => `${placeName(place)}: V = ${figure(shearN / 1000)} kN/m; ${resistance.working()}`,
+  }
+}

@@ -1,0 +1,177 @@
+import { OutOfScopeError } from '../../outOfScope'
+import { type FloorLoads, ultimateLoad } from '../actions'
+import { bayAreas, type SpanLine, stripOf } from '../analysis/levelStrips'
+import { type EdgeMoments, momentFromBehind } from '../analysis/sharedSupports'
+import type { EndOfSpan } from '../analysis/spanForces'
+import { positionIn, stripForces } from '../analysis/stripForces'
+import { twoWayForces } from '../analysis/twoWayForces'
+import type { CodeBasis, SpanPosition } from '../codeBasis'
+import type { LevelSite } from '../panelSite'
+import type { TwoWayCase } from '../tables/twoWayCase'
+import type { SlabAxis, SlabPlan } from './slabPlan'
+
+/** Force at one end of a span: moment, N·mm per metre, and shear, N per metre. */
+export interface EndForces {
+  readonly hoggingNmm: number
+  readonly shearN: number
+}
+
+/** One direction of a slab that carries load. */
+export interface SlabSpan {
+  readonly axis: SlabAxis
+  readonly spanMm: number
+  readonly position: SpanPosition
+  readonly isRedistributed: boolean
+  readonly saggingNmm: number
+  readonly ends: Readonly<Record<EndOfSpan, EndForces>>
+}
+
+/** How a solid panel carries. `other` is the direction across `short`; it carries (`long`) in two-way panels only. */
+export interface SlabAnalysis {
+  readonly short: SlabSpan
+  readonly long: SlabSpan | null
+  readonly other: SlabAxis
+  readonly aspect: number
+  readonly method: 'coefficients' | 'elastic' | 'twoWay'
+  readonly panelCase: TwoWayCase | null
+  readonly assumedEnds: number
+}
+
+/** Effective spans closer than this are equal, mm. */
+const EQUAL_SPANS_MM = 0.01
+
+/** A panel's two directions, the one it spans first, with their effective spans. */
+interface Spanning {
+  readonly plan: SlabPlan
+  readonly first: SlabAxis
+  readonly second: SlabAxis
+  readonly firstMm: number
+  readonly secondMm: number
+  readonly isTwoWay: boolean
+}
+
+const isFree = ({ ends }: SlabAxis) => ends.start.isFree || ends.end.isFree
+const continuousEnds = ({ ends }: SlabAxis) => Number(ends.start.isContinuous) + Number(ends.end.isContinuous)
+
+/**
+ * Which way a panel spans at a given thickness: one way past an aspect of 2, or between opposite supports where an edge is free.
+ *
+ * Source: BS 8110-1:1997, 3.5.3 and EN 1992-1-1:2004, 5.3.1(5) (engine design section 3); equal spans: the more continuous one first
+ * @throws OutOfScopeError `edges` where free edges leave no two opposite supports
+ */
+function spanning(plan: SlabPlan, heightMm: number, depthMm: number, basis: CodeBasis): Spanning {
+  const [a, b] = plan.axes
+  const spanOf = ({ clearMm, ends }: SlabAxis) => basis.effectiveSpanMm(clearMm, heightMm, depthMm, [ends.start, ends.end])
+  const [aMm, bMm] = [spanOf(a), spanOf(b)]
+  if (isFree(a) && isFree(b))
+    throw new OutOfScopeError(`${plan.site.path}.edges`, 'expected two opposite supported edges, none of them free, for a solid panel')
+  const isEqual = Math.abs(aMm - bMm) < EQUAL_SPANS_MM
+  const aFirst = isFree(b) || (!isFree(a) && (isEqual ? continuousEnds(a) > continuousEnds(b) : aMm < bMm))
+  const [first, second, firstMm, secondMm] = aFirst ? [a, b, aMm, bMm] : [b, a, bMm, aMm]
+  return { plan, first, second, firstMm, secondMm, isTwoWay: !isFree(second) && secondMm / firstMm <= 2 }
+}
+
+/**
+ * Effective spans and forces of every solid panel of a level at one thickness: two-way by coefficients, one-way along its strip. Of
+ * unequal moments at a shared support both sides take the larger.
+ *
+ * Source: engine design sections 3 and 4; BS 8110-1:1997, Tables 3.12, 3.14, 3.15; elastic analysis elsewhere
+ * @throws OutOfScopeError `levels.I.panels.J.edges` where free edges leave no two opposite supports
+ */
+export function analyseSlabs(
+  { neighbours }: LevelSite,
+  plans: readonly SlabPlan[],
+  loads: FloorLoads,
+  thickness: { readonly heightMm: number; readonly depthMm: number },
+  basis: CodeBasis,
+): SlabAnalysis[] {
+  const spannings = plans.map((plan) => spanning(plan, thickness.heightMm, thickness.depthMm, basis))
+  const lines = spannings.map((each) => spanLine(each, loads))
+  const bays = bayAreas(lines, neighbours)
+  const withBays = lines.map((line, i) => line && { ...line, span: { ...line.span, bayMm2: bays[i]! } })
+  const raw = spannings.map((each, i) =>
+    each.isTwoWay ? twoWay(each, ultimateLoad(loads, basis.loadFactors)) : oneWay(each, stripOf(i, withBays, neighbours), basis),
+  )
+  const moments = raw.map(edgeMoments)
+  return raw.map((analysis, i) => ({
+    ...analysis,
+    short: raised(analysis.short, i, moments, neighbours),
+    long: analysis.long && raised(analysis.long, i, moments, neighbours),
+  }))
+}
+
+function spanLine({ plan, first, firstMm, isTwoWay }: Spanning, loads: FloorLoads): SpanLine | null {
+  if (isTwoWay) return null
+  return { direction: first.direction, ends: first.ends, span: { spanMm: firstMm, loads, bayMm2: plan.areas.gross } }
+}
+
+function oneWay({ first, second, firstMm, secondMm }: Spanning, strip: ReturnType<typeof stripOf>, basis: CodeBasis): SlabAnalysis {
+  const forces = stripForces(strip, basis.loadFactors)
+  const at = (end: EndOfSpan): EndForces => ({ hoggingNmm: forces.hoggingNmm(end, 0), shearN: forces.shearN(end, 0) })
+  return {
+    short: {
+      axis: first,
+      spanMm: firstMm,
+      position: positionIn(strip),
+      isRedistributed: forces.isRedistributed,
+      saggingNmm: forces.saggingNmm,
+      ends: { start: at('start'), end: at('end') },
+    },
+    long: null,
+    other: second,
+    aspect: secondMm / firstMm,
+    method: forces.method,
+    panelCase: null,
+    assumedEnds: strip.assumedEnds,
+  }
+}
+
+const POSITIONS: readonly SpanPosition[] = ['simple', 'end', 'interior']
+
+function twoWay({ first, second, firstMm, secondMm }: Spanning, load: number): SlabAnalysis {
+  const continuity = ({ ends }: SlabAxis) => [ends.start.isContinuous, ends.end.isContinuous] as const
+  const forces = twoWayForces({
+    load,
+    shortMm: firstMm,
+    longMm: secondMm,
+    shortEnds: continuity(first),
+    longEnds: continuity(second),
+  })
+  const direction = (axis: SlabAxis, spanMm: number, { saggingNmm, hoggingNmm, shearN }: typeof forces.short): SlabSpan => ({
+    axis,
+    spanMm,
+    position: POSITIONS[continuousEnds(axis)]!,
+    isRedistributed: true,
+    saggingNmm,
+    ends: {
+      start: { hoggingNmm: hoggingNmm[0], shearN: shearN[0] },
+      end: { hoggingNmm: hoggingNmm[1], shearN: shearN[1] },
+    },
+  })
+  return {
+    short: direction(first, firstMm, forces.short),
+    long: direction(second, secondMm, forces.long),
+    other: second,
+    aspect: forces.aspect,
+    method: 'twoWay',
+    panelCase: forces.panelCase,
+    assumedEnds: 0,
+  }
+}
+
+function edgeMoments({ short, long }: SlabAnalysis): Map<number, number> {
+  const of = ({ axis, ends }: SlabSpan) =>
+    (['start', 'end'] as const).flatMap((end) => axis.ends[end].edges.map((edge) => [edge, ends[end].hoggingNmm] as const))
+  return new Map([...of(short), ...(long ? of(long) : [])])
+}
+
+function raised(span: SlabSpan, panel: number, moments: EdgeMoments, neighbours: LevelSite['neighbours']): SlabSpan {
+  const at = (end: EndOfSpan): EndForces => {
+    const side = span.axis.ends[end]
+    if (!side.isContinuous) return span.ends[end]
+    const behind = momentFromBehind(panel, side.edges, moments, neighbours)
+    return { ...span.ends[end], hoggingNmm: Math.max(span.ends[end].hoggingNmm, behind) }
+  }
+  return { ...span, ends: { start: at('start'), end: at('end') } }
+}
+

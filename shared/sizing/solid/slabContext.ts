@@ -1,0 +1,76 @@
+import type { BarDiameter, BarLayer, Brief, SolidScheme } from '../../contracts/appraisal'
+import type { EndOfSpan } from '../analysis/spanForces'
+import type { CodeBasis } from '../codeBasis'
+import { endName } from '../ribbed/ribContext'
+import type { SlabAnalysis, SlabSpan } from './slabAnalysis'
+import type { SlabPlan, SlabSide } from './slabPlan'
+
+/** Everything the checks of one solid panel look at, per metre of width. */
+export interface SlabContext {
+  readonly basis: CodeBasis
+  readonly brief: Brief
+  readonly given: Exclude<SolidScheme['bars'], 'computed'> | null
+  readonly plan: SlabPlan
+  readonly analysis: SlabAnalysis
+  readonly heightMm: number
+}
+
+/** Width that forces and steel are per, mm. */
+export const METRE_MM = 1000
+
+/**
+ * Effective depth of a layer, mm: nearest the face, or inside bars of the other direction.
+ *
+ * Source: engine design section 3 (dy = dx − φ); cover is to the outermost bar
+ * @param outer - diameter of the bars between the layer and the face; null for the outermost layer
+ */
+export function layerDepthMm({ heightMm, brief }: SlabContext, diameter: BarDiameter, outer: BarDiameter | null): number {
+  return heightMm - brief.cover - (outer ?? 0) - diameter / 2
+}
+
+/** A place on a slab's top: one end of one direction. */
+export interface TopPlace {
+  readonly direction: 'short' | 'long'
+  readonly end: EndOfSpan
+  readonly side: SlabSide
+  /** Span that carries there; null across a one-way panel. */
+  readonly span: SlabSpan | null
+}
+
+/**
+ * The four ends at which a panel has top bars: supported ones only.
+ *
+ * Source: project rule, engine design section 4
+ */
+export function topPlaces({ analysis }: Pick<SlabContext, 'analysis'>): TopPlace[] {
+  const { short, long, other } = analysis
+  const at = (direction: 'short' | 'long', end: EndOfSpan, side: SlabSide, span: SlabSpan | null): TopPlace[] =>
+    side.isFree ? [] : [{ direction, end, side, span }]
+  return (['start', 'end'] as const).flatMap((end) => [
+    ...at('short', end, short.axis.ends[end], short),
+    ...at('long', end, other.ends[end], long),
+  ])
+}
+
+/**
+ * Whether top bars at a place are designed for a hogging moment, not for the share that edges taken as simple get.
+ *
+ * Source: project rule, engine design section 4
+ */
+export function isHogging({ side, span }: TopPlace): boolean {
+  return side.isContinuous && span !== null
+}
+
+/**
+ * How a place is named in workings.
+ *
+ * Source: project rule
+ */
+export function placeName({ direction, side, end }: TopPlace): string {
+  return `${direction} span, ${endName({ ends: { start: side, end: side } }, end)}`
+}
+
+/** Layer given for the top at a place, null where the engine chooses. */
+export function givenTop({ given }: SlabContext, { direction }: TopPlace): BarLayer | null {
+  return (direction === 'short' ? given?.topX : given?.topY) ?? null
+}

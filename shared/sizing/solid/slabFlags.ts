@@ -1,0 +1,30 @@
+import type { SlabContext } from './slabContext'
+
+/**
+ * Assumptions and approximations of one solid panel, in sentences.
+ *
+ * Source: project rule, what was assumed is stated (engine design sections 1, 3 and 4)
+ */
+export function slabFlags(context: SlabContext): string[] {
+  const { plan, analysis } = context
+  const sides = [...Object.values(analysis.short.axis.ends), ...Object.values(analysis.other.ends)]
+  return [
+    methodFlag(context),
+    ...(plan.isRectangle ? [] : ['not a rectangle: sized on its least-area enclosing rectangle']),
+    ...(analysis.assumedEnds > 0 ? ['continuous edge without a neighbour spanning the same way: an equal span is assumed behind it'] : []),
+    ...sides
+      .filter(({ isMixed }) => isMixed)
+      .map(({ edges }) => `edges ${edges.map((edge) => edge + 1).join(', ')}: continuous in part only, taken as discontinuous`),
+    ...(plan.site.panel.voids.length > 0 ? ['bars stop at voids; trimming bars round them are not included'] : []),
+  ]
+}
+
+function methodFlag({ analysis }: SlabContext): string {
+  const { method, short, panelCase } = analysis
+  if (method === 'twoWay')
+    return `two way, coefficients of BS 8110-1 Tables 3.14 and 3.15, case ${panelCase}; of unequal support moments the larger counts on both sides`
+  if (short.position === 'simple') return 'one way, simple span'
+  return method === 'coefficients'
+    ? 'one way, coefficients of BS 8110-1 Table 3.12 (3.5.2.3 holds; 20 % redistribution included)'
+    : 'one way, elastic continuous beam with pattern loading (conditions of BS 8110-1 3.5.2.3 do not hold)'
+}
