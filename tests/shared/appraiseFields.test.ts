@@ -37,7 +37,7 @@ const OTHER_WORD: Readonly<Record<string, unknown>> = {
   solid: 'ribbed',
   USD: 'JPY',
 }
-/** Other values of single fields, where the next number or word would not do. */
+/** Other values of single fields, where the next number or word would not do, or is too near to change how many blocks fit. */
 const OTHER_VALUE: Readonly<Record<string, unknown>> = {
   mesh: 'A393',
   'crossRibs:rule': 'none',
@@ -48,6 +48,9 @@ const OTHER_VALUE: Readonly<Record<string, unknown>> = {
   'solidZone:least': 900,
   diameter: 16,
   fireMinutes: 90,
+  edgeStrip: 400,
+  every: 900,
+  leastPiece: 190,
   link: 10,
   mark: 'M9',
 }
