@@ -1,11 +1,11 @@
 import type { Check } from '../contracts/appraisal'
 import { type Finding, isMet, utilisationOf } from './finding'
 
-/** A way to reinforce: what it weighs and what its checks find. */
+/** A way to reinforce: what it weighs and what its checks find, which is asked only when needed. */
 export interface Candidate<Option> {
   readonly option: Option
   readonly massKg: number
-  readonly findings: readonly Finding[]
+  readonly findings: () => readonly Finding[]
 }
 
 type Name = Check['name']
@@ -31,21 +31,35 @@ const SAME = 1e-9
  * @param candidates - at least one; of equal masses the first counts
  */
 export function chooseLeastMass<Option>(candidates: readonly Candidate<Option>[]): Candidate<Option> {
-  const worst = (each: Candidate<Option>, names: readonly Name[]) =>
-    each.findings.reduce(
+  const judged: Judged<Option>[] = []
+  for (const candidate of [...candidates].sort((a, b) => a.massKg - b.massKg)) {
+    const findings = candidate.findings()
+    if (findings.every(({ demand, capacity }) => isMet(demand, capacity))) return candidate
+    judged.push({ candidate, findings })
+  }
+  return nearest(judged).candidate
+}
+
+interface Judged<Option> {
+  readonly candidate: Candidate<Option>
+  readonly findings: readonly Finding[]
+}
+
+/** Of candidates in order of mass of which none passes everything, the first that comes nearest. */
+function nearest<Option>(judged: readonly Judged<Option>[]): Judged<Option> {
+  const worst = ({ findings }: Judged<Option>, names: readonly Name[]) =>
+    findings.reduce(
       (most, { name, demand, capacity }) => (names.includes(name) ? Math.max(most, utilisationOf(demand, capacity)) : most),
       0,
     )
-  const passes = (each: Candidate<Option>, names: readonly Name[]) => isMet(worst(each, names), 1)
-  let pool = candidates
+  let pool = judged
   for (const name of FIXED) {
-    const passing = pool.filter((each) => passes(each, [name]))
+    const passing = pool.filter((each) => isMet(worst(each, [name]), 1))
     if (passing.length > 0) pool = passing
   }
   for (const names of GOVERNED) {
-    const passing = pool.filter((each) => passes(each, names))
-    const nearest = passing.length > 0 ? 0 : Math.min(...pool.map((each) => worst(each, names)))
-    pool = passing.length > 0 ? passing : pool.filter((each) => worst(each, names) <= nearest + SAME)
+    const least = Math.max(1, Math.min(...pool.map((each) => worst(each, names))))
+    pool = pool.filter((each) => worst(each, names) <= least + SAME)
   }
-  return pool.reduce((best, each) => (each.massKg < best.massKg - SAME ? each : best))
+  return pool[0]!
 }

@@ -119,7 +119,8 @@ export interface CodeBasis {
   mostSteelMm2(concreteMm2: number): Answer
   greatestSpacingMm(place: BarPlace, heightMm: number): Answer
   leastGapMm(diameterMm: BarDiameter, aggregateMm: number): Answer
-  anchorageMm(diameterMm: BarDiameter, isTopOfDeepSection: boolean): Answer
+  /** Of a bar stressed to a share of its design strength, 0 to 1. */
+  anchorageMm(diameterMm: BarDiameter, isTopOfDeepSection: boolean, stressShare: number): Answer
   lapMm(diameterMm: BarDiameter, isTopOfDeepSection: boolean): Answer
   ribProportions(shape: RibShape): readonly Comparison[]
   leastToppingMm(shape: RibShape): Answer

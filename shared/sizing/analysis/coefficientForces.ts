@@ -1,7 +1,7 @@
 import { ultimateLoad } from '../actions'
 import type { LoadFactors } from '../codeBasis'
 import { ONE_WAY_COEFFICIENTS, ONE_WAY_CONDITIONS } from '../tables/oneWayCoefficients'
-import type { EndOfSpan, SpanForces } from './spanForces'
+import { type EndOfSpan, forcesKey, type SpanForces } from './spanForces'
 import type { StripSpan } from './strip'
 
 /**
@@ -53,6 +53,7 @@ export function coefficientForces(spans: readonly StripSpan[], index: number, fa
   return {
     method: 'coefficients',
     isRedistributed: true,
+    key: forcesKey([load, spanMm, ...Object.values(ends).flatMap(({ momentNmm, shearN }) => [momentNmm, shearN])]),
     saggingNmm: (isEndSpan ? moment.endSpan : moment.interiorSpan) * momentUnit(index),
     hoggingNmm: (end, from) => (from < spanMm / 2 ? hoggingNmm(end, from) : 0),
     shearN: (end, from) => Math.max(0, ends[end].shearN - load * from),

@@ -1,6 +1,6 @@
 import type { LoadFactors } from '../codeBasis'
 import { type SpanCase, greatestSagging, momentAt, shearAt, supportMoments } from './continuousBeam'
-import type { SpanForces } from './spanForces'
+import { forcesKey, type SpanForces } from './spanForces'
 import type { StripSpan } from './strip'
 
 /** Where along a span, as shares of it, patterns that sag or hog most are sought. */
@@ -29,6 +29,7 @@ export function elasticForces(spans: readonly StripSpan[], index: number, factor
   return {
     method: 'elastic',
     isRedistributed: false,
+    key: forcesKey([spanMm, ...cases.flatMap(({ load, startMoment, endMoment }) => [load, startMoment, endMoment])]),
     saggingNmm: most((each) => greatestSagging(each, spanMm)),
     hoggingNmm: (end, from) => most((each) => -momentAt(each, spanMm, end === 'start' ? from : spanMm - from)),
     shearN: (end, from) =>

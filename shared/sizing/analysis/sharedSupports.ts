@@ -1,5 +1,5 @@
 import type { Neighbour } from '../../layout/neighbours'
-import type { EndOfSpan, SpanForces } from './spanForces'
+import { type EndOfSpan, forcesKey, type SpanForces } from './spanForces'
 
 /** Hogging moment of each panel over each outline edge, N·mm per metre; edges that are not there count as 0. */
 export type EdgeMoments = readonly ReadonlyMap<number, number>[]
@@ -33,6 +33,7 @@ export function raisedTo(forces: SpanForces, spanMm: number, least: Readonly<Rec
   const added = { start, end }
   return {
     ...forces,
+    key: `${forces.key};${forcesKey([start, end])}`,
     hoggingNmm: (at, from) => forces.hoggingNmm(at, from) + added[at] * Math.max(0, 1 - from / spanMm),
   }
 }

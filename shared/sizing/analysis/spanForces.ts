@@ -6,6 +6,8 @@ export interface SpanForces {
   readonly method: 'coefficients' | 'elastic'
   /** Whether 20 % redistribution of support moments is in the values. */
   readonly isRedistributed: boolean
+  /** The same for forces that are the same all along the span. */
+  readonly key: string
   readonly saggingNmm: number
   readonly hoggingNmm: (end: EndOfSpan, fromSupportMm: number) => number
   readonly shearN: (end: EndOfSpan, fromSupportMm: number) => number
@@ -21,8 +23,18 @@ export function simpleSpanForces(load: number, spanMm: number): SpanForces {
   return {
     method: 'elastic',
     isRedistributed: false,
+    key: forcesKey([load, spanMm]),
     saggingNmm: (load * spanMm * spanMm) / 8,
     hoggingNmm: () => 0,
     shearN: (_end, fromSupportMm) => load * Math.max(0, spanMm / 2 - fromSupportMm),
   }
+}
+
+/**
+ * Key of forces that follow from some numbers.
+ *
+ * Source: project rule, ten significant digits tell load cases apart
+ */
+export function forcesKey(numbers: readonly number[]): string {
+  return numbers.map((number) => number.toPrecision(10)).join()
 }

@@ -17,19 +17,20 @@ function requiredMm(diameterMm: BarDiameter, isPoor: boolean, strengths: Strengt
 }
 
 /**
- * Design anchorage length lbd of a fully stressed straight bar, mm, every α taken as 1.
+ * Design anchorage length lbd of a straight bar in tension, mm, every α taken as 1.
  *
  * Source: EN 1992-1-1:2004, 8.4.2, 8.4.3, 8.4.4, Expressions (8.2), (8.3), (8.6) (from memory, confirmed by evaluation)
  * @param isPoor - top bars of sections over 250 mm deep
+ * @param stressShare - stress of the bar over its design strength, 0 to 1
  */
-export function anchorageMm(diameterMm: BarDiameter, isPoor: boolean, strengths: Strengths): Answer {
+export function anchorageMm(diameterMm: BarDiameter, isPoor: boolean, stressShare: number, strengths: Strengths): Answer {
   const basic = requiredMm(diameterMm, isPoor, strengths)
-  const value = Math.max(basic, 10 * diameterMm, 100)
+  const value = Math.max(stressShare * basic, 0.3 * basic, 10 * diameterMm, 100)
   return {
     value,
     clause: 'EN 1992-1-1 8.4.4',
     working: () =>
-      `lbd = φ/4·fyd/fbd = ${diameterMm}/4·${figure(strengths.values.steelShare * strengths.fykMpa)}/` +
+      `lbd = φ/4·σsd/fbd = ${diameterMm}/4·${figure(stressShare * strengths.values.steelShare * strengths.fykMpa)}/` +
       `${figure(bondMpa(diameterMm, isPoor, strengths), 2)} = ${figure(value, 0)} mm`,
   }
 }

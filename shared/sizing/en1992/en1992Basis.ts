@@ -41,7 +41,7 @@ export function en1992Basis({ fck, fyk }: EuropeanBrief, values: NationalValues 
     mostSteelMm2: (concrete) => mostSteelMm2(concrete, strengths),
     greatestSpacingMm: (place, height) => greatestSpacingMm(place, height, strengths),
     leastGapMm: (diameter, aggregate) => leastGapMm(diameter, aggregate, strengths),
-    anchorageMm: (diameter, isPoor) => anchorageMm(diameter, isPoor, strengths),
+    anchorageMm: (diameter, isPoor, stressShare) => anchorageMm(diameter, isPoor, stressShare, strengths),
     lapMm: (diameter, isPoor) => lapMm(diameter, isPoor, strengths),
     ribProportions,
     leastToppingMm,

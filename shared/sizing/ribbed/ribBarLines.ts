@@ -53,7 +53,7 @@ export function topLines(
 ): BarLines[] {
   const { basis, heightMm } = rules
   const isPoor = heightMm > GOOD_BOND_MM
-  const anchorage = basis.anchorageMm(diameter, isPoor)
+  const anchorage = basis.anchorageMm(diameter, isPoor, 1)
   const { reach, clause } = basis.simpleEdge
   const isContinuous = ends[end].isContinuous
   return ends[end].edges.map((edge) => ({

@@ -49,7 +49,7 @@ function massBy(lengthOf: (diameter: BarDiameter) => number): MassOf {
 }
 
 function choose(massOf: MassOf, findingsOf: (set: BarSet) => readonly Finding[]): BarSet {
-  const candidates = RIB_BAR_SETS.map((option): Candidate<BarSet> => ({ option, massKg: massOf(option), findings: findingsOf(option) }))
+  const candidates = RIB_BAR_SETS.map((option): Candidate<BarSet> => ({ option, massKg: massOf(option), findings: () => findingsOf(option) }))
   return chooseLeastMass(candidates).option
 }
 

@@ -13,7 +13,7 @@ export interface RibBars {
 
 /**
  * Shear at one end of a rib: where the solid zone ends, on the rib; and at the face of the support, on the whole spacing, where there is
- * a zone. Tension steel at a continuous end are top bars that run an anchorage and d past the section, else bottom bars.
+ * a zone. Tension steel where the rib hogs are top bars that run an anchorage and d past the section, elsewhere bottom bars.
  *
  * Source: by the basis, `shearResistanceN` (engine design section 4: at the zone's inner face, not a further d away; no links)
  */
@@ -29,16 +29,14 @@ export function shearFindings(context: RibContext, end: EndOfSpan, bars: RibBars
 function shearFinding(
   context: RibContext,
   end: EndOfSpan,
-  { bottom, top }: RibBars,
+  bars: RibBars,
   fromFaceMm: number,
   widthMm: number,
   place: string,
 ): Finding {
-  const { basis, section, analysis, ends } = context
-  const acting = ends[end].isContinuous ? top : bottom
-  const depthMm = effectiveDepthMm(section, acting)
-  const steelMm2 = !ends[end].isContinuous || isAnchored(context, top, fromFaceMm) ? areaOf(acting) : 0
+  const { basis, analysis } = context
   const fromSupportMm = analysis.faceMm[end] + fromFaceMm
+  const { depthMm, steelMm2 } = tensionSteel(context, end, bars, fromFaceMm)
   const shearN = perRib(context, analysis.forces.shearN(end, fromSupportMm))
   const resistance = basis.shearResistanceN({ widthMm, depthMm, steelMm2 })
   return {
@@ -49,11 +47,26 @@ function shearFinding(
     unit: 'kN',
     working: () =>
       `${endName(context, end)}, ${place}, ${figure(fromSupportMm, 0)} mm from the line of support: V = ${figure(shearN / 1000)} kN a rib; ` +
-      resistance.working(),
+      `Asl ${figure(steelMm2, 0)} mm²; ${resistance.working()}`,
   }
 }
 
-function isAnchored({ basis, section, clearMm }: RibContext, top: BarSet, fromFaceMm: number): boolean {
-  const anchorage = basis.anchorageMm(thickest(top), section.heightMm > 250).value
-  return fromFaceMm + anchorage + effectiveDepthMm(section, top) <= TOP_REACH * clearMm
+/** Bars in tension at a section and anchored there: top bars where it hogs, bottom bars, which run on to the support, elsewhere. */
+function tensionSteel(context: RibContext, end: EndOfSpan, { bottom, top }: RibBars, fromFaceMm: number) {
+  const { section, analysis } = context
+  const hoggingNmm = perRib(context, analysis.forces.hoggingNmm(end, analysis.faceMm[end] + fromFaceMm))
+  if (hoggingNmm === 0) return { depthMm: effectiveDepthMm(section, bottom), steelMm2: areaOf(bottom) }
+  const steelMm2 = isAnchored(context, top, hoggingNmm, fromFaceMm) ? areaOf(top) : 0
+  return { depthMm: effectiveDepthMm(section, top), steelMm2 }
+}
+
+/** Whether top bars, as far as they are stressed, run an anchorage and d past a section. */
+function isAnchored({ basis, section, analysis, clearMm }: RibContext, top: BarSet, hoggingNmm: number, fromFaceMm: number): boolean {
+  if (top.length === 0) return false
+  const depthMm = effectiveDepthMm(section, top)
+  const rib = { widthMm: section.ribMm, depthMm, flange: null }
+  const { requiredMm2 } = basis.flexure(rib, hoggingNmm, analysis.forces.isRedistributed)
+  const stressShare = Math.min(1, requiredMm2 / areaOf(top))
+  const anchorage = basis.anchorageMm(thickest(top), section.heightMm > 250, stressShare).value
+  return fromFaceMm + anchorage + depthMm <= TOP_REACH * clearMm
 }

@@ -3,9 +3,11 @@ import type { EndOfSpan } from '../analysis/spanForces'
 import { barRuns } from '../barRuns'
 import { areaOf } from '../barSet'
 import type { CodeBasis } from '../codeBasis'
+import { figure } from '../figure'
 import { checkRow } from '../finding'
 import { atPath, type LevelSite } from '../panelSite'
 import type { BarRun, SizedPanel } from '../sizedPanel'
+import { remember } from '../remember'
 import { midspanBending } from './bottomFindings'
 import { analyseRibs, type RibAnalysis } from './ribAnalysis'
 import { bottomLines, type RibBarRules, topLines } from './ribBarLines'
@@ -28,6 +30,8 @@ interface Job {
   readonly level: LevelSite
   readonly depthMm: number
   readonly rules: RibBarRules
+  readonly zoneFor: ReturnType<typeof remember<number>>
+  readonly designFor: ReturnType<typeof remember<RibDesign>>
 }
 
 /**
@@ -43,7 +47,7 @@ interface Job {
 export function sizeRibbed(level: LevelSite, scheme: RibbedScheme, brief: Brief, basis: CodeBasis): SizedPanel[] {
   const depthMm = scheme.block.height + scheme.topping
   const rules = { basis, coverMm: brief.cover, trimmerMm: scheme.trimmerWidth, heightMm: depthMm }
-  const job: Job = { scheme, brief, basis, level, depthMm, rules }
+  const job: Job = { scheme, brief, basis, level, depthMm, rules, zoneFor: remember(), designFor: remember() }
   const isLeast = scheme.solidZone === 'least'
   const first = scheme.solidZone === 'least' ? 0 : scheme.solidZone
   let panels = level.panels.map((site) => laidOut(job, site, first))
@@ -76,8 +80,16 @@ function contextOf({ scheme, brief, basis }: Job, { ends, clearMm }: RibbedPanel
 /** Width of zone that the panel needs under the loads of its present layout; never less than it has. */
 function widened(job: Job, panel: RibbedPanel, analysis: RibAnalysis): number {
   const taskAt = (zoneMm: number) => taskOf(job, panel, analysis, zoneMm)
-  const bottom = chooseBottom(taskAt(panel.layout.solidZone))
-  return leastZoneMm(panel.layout.solidZone, panel.clearMm, (zoneMm) => zoneFindings(taskAt(zoneMm), bottom))
+  return job.zoneFor(keyOf(panel, analysis), () => {
+    const bottom = chooseBottom(taskAt(panel.layout.solidZone))
+    return leastZoneMm(panel.layout.solidZone, panel.clearMm, (zoneMm) => zoneFindings(taskAt(zoneMm), bottom))
+  })
+}
+
+/** The same for panels of one level that are reinforced alike. */
+function keyOf({ ribs, ends, layout }: RibbedPanel, { forces, spanMm, position, faceMm }: RibAnalysis): string {
+  const lines = ribs.flatMap(({ clearMm, start, end }) => [figure(clearMm, 6), start.edge, start.supportMm, end.edge, end.supportMm])
+  return JSON.stringify([forces.key, spanMm.toPrecision(10), position, faceMm, ends, layout.solidZone, lines])
 }
 
 function taskOf(job: Job, panel: RibbedPanel, analysis: RibAnalysis, zoneMm: number): RibTask {
@@ -90,7 +102,7 @@ function sizedPanel(job: Job, panel: RibbedPanel, analysis: RibAnalysis): SizedP
   const { layout, site } = panel
   const task = taskOf(job, panel, analysis, layout.solidZone)
   const { context } = task
-  const design = designRibs(task)
+  const design = job.designFor(keyOf(panel, analysis), () => designRibs(task))
   const findings = [...shapeFindings(basis, context.section, analysis, brief.fireMinutes), ...design.findings]
   const isWidened = scheme.solidZone === 'least' && layout.solidZone > 0
   const flagInput = { panel, scheme, section: context.section, analysis, basis, fireMinutes: brief.fireMinutes, isWidened }

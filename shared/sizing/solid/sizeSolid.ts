@@ -4,12 +4,13 @@ import { barRuns } from '../barRuns'
 import type { CodeBasis } from '../codeBasis'
 import { type Finding, checkRow, isMet, utilisationOf } from '../finding'
 import type { LevelSite } from '../panelSite'
+import { remember } from '../remember'
 import type { SizedPanel } from '../sizedPanel'
 import { figure } from '../figure'
 import { chooseSlabBars, type SlabBars } from './chooseSlabBars'
 import { analyseSlabs } from './slabAnalysis'
 import { bottomBarLines, topBarLines, torsionBarLines } from './slabBarLines'
-import { isHogging, type SlabContext } from './slabContext'
+import { isHogging, type SlabContext, slabKey } from './slabContext'
 import { slabFlags } from './slabFlags'
 import { layerAreaMm2 } from './slabLayer'
 import { type SlabPlan, slabPlan } from './slabPlan'
@@ -20,6 +21,8 @@ import { type SlabPlan, slabPlan } from './slabPlan'
  * Source: project rule, engine design section 3 (5 mm steps from 100 mm); greatest as the contract allows
  */
 const THICKNESS = { least: 100, step: 5, most: 1500 } as const
+
+type BarsFor = ReturnType<typeof remember<SlabBars>>
 
 /** All levels of a solid scheme while it is sized. */
 interface Job {
@@ -42,7 +45,8 @@ export function sizeSolid(sites: readonly LevelSite[], scheme: SolidScheme, brie
   const levels = sites.map((site) => ({ site, plans: site.panels.map(slabPlan) }))
   const job: Job = { levels, scheme, brief, basis }
   const heightMm = scheme.thickness === 'least' ? leastThickness(job) : scheme.thickness
-  return contextsAt(job, heightMm).flatMap(({ mark, contexts }) => contexts.map((context) => sizedPanel(context, mark)))
+  const barsFor: BarsFor = remember()
+  return contextsAt(job, heightMm).flatMap(({ mark, contexts }) => contexts.map((context) => sizedPanel(context, mark, barsFor)))
 }
 
 function contextsAt({ levels, scheme, brief, basis }: Job, heightMm: number): { mark: string; contexts: SlabContext[] }[] {
@@ -65,10 +69,11 @@ function leastThickness(job: Job): number {
   let first = 0
   for (let heightMm: number = THICKNESS.least; heightMm <= THICKNESS.most; heightMm += THICKNESS.step) {
     const contexts = contextsAt(job, heightMm).flatMap((level) => level.contexts)
+    const worstFor = remember<number>()
     let worst = 0
     for (let i = 0; i < contexts.length && isMet(worst, 1); i += 1) {
       const at = (first + i) % contexts.length
-      worst = Math.max(worst, worstOf(contexts[at]!))
+      worst = Math.max(worst, worstFor(slabKey(contexts[at]!), () => worstOf(contexts[at]!)))
       if (!isMet(worst, 1)) first = at
     }
     if (isMet(worst, 1)) return heightMm
@@ -89,10 +94,10 @@ function sizeFindings({ basis, brief, heightMm }: SlabContext): Finding[] {
   return [{ name: 'fire.size', clause: size.clause, demand: size.value, capacity: heightMm, unit: 'mm', working }]
 }
 
-function sizedPanel(context: SlabContext, level: string): SizedPanel {
+function sizedPanel(context: SlabContext, level: string, barsFor: BarsFor): SizedPanel {
   const { plan, heightMm } = context
   const { mark } = plan.site.panel
-  const bars = chooseSlabBars(context)
+  const bars = barsFor(slabKey(context), () => chooseSlabBars(context))
   const lines = [
     ...bottomBarLines(context, bars),
     ...bars.tops.flatMap((top) => topBarLines(context, top)),

@@ -1,7 +1,8 @@
 import type { BarLayer } from '../../contracts/appraisal'
 import { type BarLines, pastFaceMm } from '../barRuns'
 import type { LineEndOnEdge } from '../lineEndAt'
-import type { SlabBars, TopBars } from './chooseSlabBars'
+import type { SlabBars } from './chooseSlabBars'
+import type { TopBars } from './chooseTopBars'
 import { isHogging, type SlabContext } from './slabContext'
 import { layerText, type StripLayers } from './slabLayer'
 import { type SlabLine, slabLines } from './slabLines'
@@ -89,7 +90,7 @@ export function topBarLines(context: SlabContext, { place, layers }: TopBars): B
     const { edge, supportMm } = line[place.end]
     if (edge === null || !place.side.edges.includes(edge)) return []
     if (hogging) return [[supportMm / 2, SLAB_TOP_REACH * line.clearMm]]
-    return [[basis.anchorageMm(diameter, isPoorBond(heightMm)).value, basis.simpleEdge.reach * spanMm]]
+    return [[basis.anchorageMm(diameter, isPoorBond(heightMm), 1).value, basis.simpleEdge.reach * spanMm]]
   }
   const edges = place.side.edges.map((edge) => edge + 1).join(', ')
   const position = `top, edge ${edges}`

@@ -3,7 +3,7 @@ import type { EndOfSpan } from '../analysis/spanForces'
 import type { CodeBasis } from '../codeBasis'
 import { endName } from '../ribbed/ribContext'
 import type { SlabAnalysis, SlabSpan } from './slabAnalysis'
-import type { SlabPlan, SlabSide } from './slabPlan'
+import type { SlabAxis, SlabPlan, SlabSide } from './slabPlan'
 
 /** Everything the checks of one solid panel look at, per metre of width. */
 export interface SlabContext {
@@ -73,4 +73,19 @@ export function placeName({ direction, side, end }: TopPlace): string {
 /** Layer given for the top at a place, null where the engine chooses. */
 export function givenTop({ given }: SlabContext, { direction }: TopPlace): BarLayer | null {
   return (direction === 'short' ? given?.topX : given?.topY) ?? null
+}
+
+/**
+ * The same for panels of one scheme and thickness that are reinforced alike.
+ *
+ * Source: project rule, identical panels are sized once
+ */
+export function slabKey({ analysis: { short, long, other, aspect, method, panelCase } }: SlabContext): string {
+  const spanKey = (span: SlabSpan | null) => span && [span.spanMm, span.position, span.isRedistributed, span.saggingNmm, span.ends]
+  const axisKey = ({ clearMm, ends }: SlabAxis) => [clearMm, ends]
+  const round = (_: string, value: unknown) => (typeof value === 'number' ? Number(value.toPrecision(10)) : value)
+  return JSON.stringify(
+    [spanKey(short), spanKey(long), axisKey(short.axis), axisKey(other), aspect, method, panelCase],
+    round,
+  )
 }

@@ -52,7 +52,7 @@ export function topParts(context: SlabContext, place: TopPlace, { diameter }: Ba
   const { basis, analysis, heightMm } = context
   if (isHogging(place)) return [place.side.supportMm / 2, SLAB_TOP_REACH * clearMm]
   const { spanMm } = place.span ?? analysis.short
-  return [basis.anchorageMm(diameter, isPoorBond(heightMm)).value, basis.simpleEdge.reach * spanMm]
+  return [basis.anchorageMm(diameter, isPoorBond(heightMm), 1).value, basis.simpleEdge.reach * spanMm]
 }
 
 /**

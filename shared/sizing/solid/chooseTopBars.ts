@@ -1,0 +1,71 @@
+import type { BarDiameter, BarLayer } from '../../contracts/appraisal'
+import { type Candidate, chooseLeastMass } from '../chooseLeastMass'
+import type { Flexure } from '../codeBasis'
+import type { Finding } from '../finding'
+import { CHOSEN_DIAMETERS } from '../tables/bars'
+import { firstMeeting, inStrips, layersGiving, leastMm2 } from './firstMeeting'
+import { slabShearFinding, topFlexure, topLayerFindings } from './layerFindings'
+import { givenTop, isHogging, layerDepthMm, type SlabContext, type TopPlace } from './slabContext'
+import { layerAreaMm2, type StripLayers } from './slabLayer'
+import { stripsMassKg, topParts } from './slabMass'
+
+/** Top bars at one end with their findings; `layers` null where bars are given and none lies there. */
+export interface TopBars {
+  readonly place: TopPlace
+  readonly layers: StripLayers | null
+  readonly flexure: Flexure
+  readonly findings: readonly Finding[]
+}
+
+/** Diameter of what lies between a top layer and the face: bars of the short direction over those of the long. */
+function outerOf({ given }: SlabContext, { direction }: TopPlace, diameter: BarDiameter): BarDiameter | null {
+  return direction === 'short' ? null : (given?.topX?.diameter ?? diameter)
+}
+
+function shearOf(context: SlabContext, place: TopPlace, depthMm: number, layer: BarLayer | null): Finding[] {
+  if (!place.side.isContinuous) return []
+  const finding = slabShearFinding(context, place, depthMm, layer ? layerAreaMm2(layer) : 0)
+  return finding ? [finding] : []
+}
+
+function judged(context: SlabContext, place: TopPlace, layer: BarLayer | null, layers: StripLayers | null): TopBars {
+  const diameter = layer?.diameter ?? CHOSEN_DIAMETERS[0]
+  const outer = outerOf(context, place, diameter)
+  const flexure = topFlexure(context, place, diameter, outer)
+  const depthMm = layerDepthMm(context, diameter, outer)
+  const findings = [...topLayerFindings(context, place, layer, flexure, depthMm), ...shearOf(context, place, depthMm, layer)]
+  return { place, layers, flexure, findings }
+}
+
+/** The lightest layer of one diameter that carries what a place asks. */
+function candidateOf(context: SlabContext, place: TopPlace, diameter: BarDiameter): Candidate<TopBars> {
+  const { basis, heightMm, analysis } = context
+  const outer = outerOf(context, place, diameter)
+  const depthMm = layerDepthMm(context, diameter, outer)
+  const { requiredMm2 } = topFlexure(context, place, diameter, outer)
+  const hogging = isHogging(place)
+  const needed = hogging ? Math.max(requiredMm2, leastMm2(context, depthMm)) : requiredMm2
+  const greatest = basis.greatestSpacingMm(hogging ? 'greatestMoment' : 'principal', heightMm).value
+  const layer = firstMeeting(layersGiving(diameter, needed, greatest), (each) => shearOf(context, place, depthMm, each))
+  const layers = hogging ? inStrips(context, layer, depthMm) : { middle: layer, edge: null }
+  const { short, other } = analysis
+  const [along, across] = place.direction === 'short' ? [short.axis, other] : [other, short.axis]
+  const option = judged(context, place, layer, layers)
+  return {
+    option,
+    findings: () => option.findings,
+    massKg: stripsMassKg(context, layers, topParts(context, place, layer, along.clearMm), across.clearMm, true),
+  }
+}
+
+/**
+ * Top bars at one end: the given layer, or the one of least mass. Given bars without a layer there leave continuous ends bare.
+ *
+ * Source: project rule, engine design section 4
+ */
+export function chooseTopBars(context: SlabContext, place: TopPlace): TopBars {
+  const given = givenTop(context, place)
+  if (given) return judged(context, place, given, { middle: given, edge: null })
+  if (context.given && isHogging(place)) return judged(context, place, null, null)
+  return chooseLeastMass(CHOSEN_DIAMETERS.map((diameter) => candidateOf(context, place, diameter))).option
+}

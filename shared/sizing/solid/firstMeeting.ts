@@ -1,0 +1,52 @@
+import type { BarDiameter, BarLayer } from '../../contracts/appraisal'
+import { type Finding, isMet, utilisationOf } from '../finding'
+import { METRE_MM, type SlabContext } from './slabContext'
+import { layerAreaMm2, layerFor, layersOf, type StripLayers } from './slabLayer'
+
+/**
+ * Layers of one diameter, widest spacing first, that give at least an area; the closest alone where none does.
+ *
+ * Source: project rule, engine design section 4
+ * @param neededMm2 - per metre
+ */
+export function layersGiving(diameter: BarDiameter, neededMm2: number, greatestMm: number): BarLayer[] {
+  const layers = layersOf(diameter, greatestMm)
+  const enough = layers.filter((layer) => layerAreaMm2(layer) >= neededMm2)
+  return enough.length > 0 ? enough : layers.slice(-1)
+}
+
+/**
+ * Of layers in order, the first that meets every finding of `judge`; where none does, the first of those nearest to it.
+ *
+ * Source: project rule, engine design sections 4 and 8 (more load never ends in less steel)
+ */
+export function firstMeeting(layers: readonly BarLayer[], judge: (layer: BarLayer) => readonly Finding[]): BarLayer {
+  let [best, least] = [layers[0]!, Infinity]
+  for (const layer of layers) {
+    const utilisation = judge(layer).reduce((most, { demand, capacity }) => Math.max(most, utilisationOf(demand, capacity)), 0)
+    if (isMet(utilisation, 1)) return layer
+    if (utilisation < least - 1e-9) [best, least] = [layer, utilisation]
+  }
+  return best
+}
+
+/**
+ * Least steel of a metre of slab, mm².
+ *
+ * Source: by the basis, `leastSteelMm2`
+ */
+export function leastMm2({ basis, heightMm }: SlabContext, depthMm: number): number {
+  return basis.leastSteelMm2({ widthMm: METRE_MM, webMm: METRE_MM, heightMm, depthMm }).value
+}
+
+/**
+ * A layer in the middle strip with least steel in the edge strips of two-way panels; across the whole width of others.
+ *
+ * Source: BS 8110-1:1997, 3.5.3.5, rules 1 to 3 (from memory, engine design section 4)
+ */
+export function inStrips(context: SlabContext, middle: BarLayer, depthMm: number): StripLayers {
+  if (!context.analysis.long) return { middle, edge: null }
+  const greatest = context.basis.greatestSpacingMm('principal', context.heightMm).value
+  const edge = layerFor(middle.diameter, leastMm2(context, depthMm), greatest)
+  return { middle, edge: edge.spacing > middle.spacing ? edge : middle }
+}
