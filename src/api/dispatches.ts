@@ -19,3 +19,6 @@ export const createDispatch = (projectId: string, input: DispatchInput, idempote
   request(dispatch, 'POST', `/api/projects/${projectId}/dispatches`, { body: input, idempotencyKey })
 
 export const reportAddress = (dispatchId: string): string => `/api/dispatches/${dispatchId}/report.pdf`
+
+/** The report as a page; the server puts it into a sandbox. */
+export const reportPageAddress = (dispatchId: string): string => `/api/dispatches/${dispatchId}/report.html`
