@@ -9,6 +9,7 @@ const SIGNIFICANT_DIGITS = 12
  * @param decimals - 0 to 6
  */
 export function roundAsPrinted(value: number, decimals: number): number {
+  if (Number.isInteger(value)) return value
   const scale = 10 ** decimals
   const scaled = Number((Math.abs(value) * scale).toPrecision(SIGNIFICANT_DIGITS))
   const rounded = Math.floor(scaled + 0.5) / scale
