@@ -30,11 +30,15 @@ interface Task {
   readonly reject: (error: Error) => void
 }
 
+const WORKER = new URL('./appraisalWorker.ts', import.meta.url).href
+/** Threads do not take over how their process loads TypeScript: each is told so itself, and says when it is ready for work. */
+const BEGIN = `
+import('tsx/esm/api')
+  .then(({ register }) => { register(); return import(${JSON.stringify(WORKER)}) })
+  .then(() => require('node:worker_threads').parentPort.postMessage('ready'))`
+
 function startWorker(): Worker {
-  const worker = new Worker(new URL('./appraisalWorker.ts', import.meta.url), {
-    execArgv: ['--import', 'tsx'],
-    resourceLimits: { maxOldGenerationSizeMb: MEMORY_MB },
-  })
+  const worker = new Worker(BEGIN, { eval: true, resourceLimits: { maxOldGenerationSizeMb: MEMORY_MB } })
   worker.unref()
   return worker
 }
@@ -66,13 +70,24 @@ export function createAppraisalPool(bounds: PoolBounds = BOUNDS): AppraisalPool 
     void worker.terminate()
   }
 
+  function start(): void {
+    const worker = startWorker()
+    all.add(worker)
+    worker.once('message', () => {
+      worker.removeAllListeners()
+      idle.push(worker)
+      next()
+    })
+    worker.once('error', (error) => {
+      drop(worker)
+      waiting.shift()?.reject(error)
+      next()
+    })
+  }
+
   function next(): void {
     if (waiting.length === 0) return
-    if (idle.length === 0 && all.size < bounds.threads) {
-      const worker = startWorker()
-      all.add(worker)
-      idle.push(worker)
-    }
+    if (idle.length === 0 && all.size < bounds.threads) start()
     const worker = idle.pop()
     if (worker) run(worker, waiting.shift()!)
   }
