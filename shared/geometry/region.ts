@@ -63,14 +63,14 @@ export function areaOf(region: Region, window?: Window): number {
 /** Integral over y from `low` to `high` of the edge's x, held between `least` and `most`. */
 function areaLeftOf(edge: SlabEdge, low: number, high: number, least: number, most: number): number {
   const [a, b] = [xAt(edge, low), xAt(edge, high)]
-  if (a >= least && b >= least && a <= most && b <= most) return ((a + b) / 2) * (high - low)
-  if (a <= least && b <= least) return least * (high - low)
-  if (a >= most && b >= most) return most * (high - low)
   const [small, large] = [Math.min(a, b), Math.max(a, b)]
+  if (small >= least && large <= most) return ((a + b) / 2) * (high - low)
+  if (large <= least) return least * (high - low)
+  if (small >= most) return most * (high - low)
   const [from, to] = [Math.max(small, least), Math.min(large, most)]
-  const share = (high - low) / (large - small)
-  const held = (from - small) * least + (large - to) * most
-  return (held + ((from + to) / 2) * (to - from)) * share
+  const atLeast = from > small ? (from - small) * least : 0
+  const atMost = large > to ? (large - to) * most : 0
+  return ((atLeast + ((from + to) / 2) * (to - from) + atMost) * (high - low)) / (large - small)
 }
 
 /** An interval of x over which a level band lies wholly inside a region, and the edges that end it. */

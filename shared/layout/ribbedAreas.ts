@@ -30,8 +30,12 @@ export function ribbedAreas(
     trimmers: Math.max(0, field.trimmersArea),
     voids: Math.max(0, field.voidsArea),
   }
-  for (const window of windows) parts[window.kind] += Math.max(0, areaOf(field.free, window))
+  for (const window of windows) parts[window.kind] += window.isWhole ? fullArea(window) : Math.max(0, areaOf(field.free, window))
   return { gross, ...strips, clear: field.clearArea, ...settled(parts, field.clearArea) }
+}
+
+function fullArea({ left, right, bottom, top }: KindWindow): number {
+  return (right - left) * (top - bottom)
 }
 
 function blockArea(rows: readonly LaidRow[]): number {

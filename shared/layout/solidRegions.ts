@@ -10,13 +10,18 @@ import type { KindWindow } from './solidWindows'
 export function solidRegions(field: PanelField, windows: readonly KindWindow[]): SolidRegion[] {
   const holes = [...field.voidRings, ...field.grownRings]
   const { minX, maxX } = boundsOf(field.outlineRing)
-  const toLevel = (rings: [number, number][][]): Ring[] =>
+  const toLevel = (rings: readonly (readonly Point[])[]): Ring[] =>
     rings.map((ring) => ring.map((point): [number, number] => [...field.frame.toLevel(point)]))
   const kinds = ['edgeStrips', 'solidZones', 'crossRibs', 'fillers'] as const
   const regions = kinds.map((kind): SolidRegion => {
     const own = windows.filter((window) => window.kind === kind)
-    const rings = own.map(({ left, right, bottom, top }) => rectangle(Math.max(left, minX), Math.min(right, maxX), bottom, top))
-    return { kind, rings: rings.length === 0 ? [] : toLevel(clipped(rings, [field.outlineRing], holes)) }
+    const rectangles = (isWhole: boolean) =>
+      own
+        .filter((window) => window.isWhole === isWhole)
+        .map(({ left, right, bottom, top }) => rectangle(Math.max(left, minX), Math.min(right, maxX), bottom, top))
+    const partly = rectangles(false)
+    const cut = partly.length === 0 ? [] : clipped(partly, [field.outlineRing], holes)
+    return { kind, rings: toLevel([...rectangles(true), ...cut]) }
   })
   const trimmers: SolidRegion = {
     kind: 'trimmers',

@@ -8,6 +8,8 @@ import type { SolidRegion } from './panelLayout'
 /** An upright window of the local frame; what of it lies inside the clear outline, clear of voids and trimmers, is of one kind. */
 export interface KindWindow extends Window {
   readonly kind: Exclude<SolidRegion['kind'], 'trimmers'> | 'ribs'
+  /** Known to lie wholly inside the clear outline, clear of voids and trimmers. */
+  readonly isWhole: boolean
 }
 
 /**
@@ -21,10 +23,10 @@ export interface KindWindow extends Window {
 export function solidWindows(field: PanelField, rows: readonly LaidRow[]): KindWindow[] {
   const [first, last] = [rows[0], rows[rows.length - 1]]
   const everywhere = { left: -Infinity, right: Infinity }
-  if (!first || !last) return [{ ...everywhere, bottom: field.bottom, top: field.top, kind: 'solidZones' }]
+  if (!first || !last) return [{ ...everywhere, bottom: field.bottom, top: field.top, kind: 'solidZones', isWhole: false }]
   const windows: KindWindow[] = [
-    { ...everywhere, bottom: field.bottom, top: first.bandStart, kind: 'edgeStrips' },
-    { ...everywhere, bottom: last.bandEnd, top: field.top, kind: 'edgeStrips' },
+    { ...everywhere, bottom: field.bottom, top: first.bandStart, kind: 'edgeStrips', isWhole: false },
+    { ...everywhere, bottom: last.bandEnd, top: field.top, kind: 'edgeStrips', isWhole: false },
   ]
   rows.forEach((row, i) => {
     windows.push(...windowsOfRow(row))
@@ -35,18 +37,18 @@ export function solidWindows(field: PanelField, rows: readonly LaidRow[]): KindW
 }
 
 function windowsOfRow(row: LaidRow): KindWindow[] {
-  const [bottom, top] = [row.bandStart, row.bandEnd]
-  const across = (kind: KindWindow['kind']) => (stretch: Stretch) => ({
+  const window = (stretch: Stretch, kind: KindWindow['kind'], isWhole: boolean): KindWindow => ({
     left: stretch.start,
     right: stretch.end,
-    bottom,
-    top,
+    bottom: row.bandStart,
+    top: row.bandEnd,
     kind,
+    isWhole,
   })
   return [
-    ...row.filled.flatMap(({ crossRibs }) => crossRibs).map(across('crossRibs')),
-    ...row.filled.flatMap(({ fillers }) => fillers).map(across('fillers')),
-    ...gapsBetween(row.usable).map((gap) => across(kindOfGap(gap, [row]))(gap)),
+    ...row.filled.flatMap(({ crossRibs }) => crossRibs.map((stretch) => window(stretch, 'crossRibs', true))),
+    ...row.filled.flatMap(({ fillers }) => fillers.map((stretch) => window(stretch, 'fillers', true))),
+    ...gapsBetween(row.usable).map((gap) => window(gap, kindOfGap(gap, [row]), false)),
   ]
 }
 
@@ -54,13 +56,14 @@ function windowsOfRib(row: LaidRow, next: LaidRow): KindWindow[] {
   const [bottom, top] = [row.bandEnd, next.bandStart]
   const covered = union([...row.usable, ...next.usable])
   return [
-    ...covered.map(({ start, end }) => ({ left: start, right: end, bottom, top, kind: 'ribs' as const })),
+    ...covered.map(({ start, end }) => ({ left: start, right: end, bottom, top, kind: 'ribs' as const, isWhole: false })),
     ...gapsBetween(covered).map((gap) => ({
       left: gap.start,
       right: gap.end,
       bottom,
       top,
       kind: kindOfGap(gap, [row, next]),
+      isWhole: false,
     })),
   ]
 }
