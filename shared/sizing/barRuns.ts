@@ -12,7 +12,7 @@ export interface BarLines {
   /** What is counted, as `ribs`. */
   readonly lines: string
   readonly pieces: readonly (readonly number[])[]
-  readonly lapMm: number
+  readonly lapMm: () => number
   readonly clause: string
 }
 
@@ -22,8 +22,15 @@ const MOST_LENGTHS = 3
 const sumOf = (parts: readonly number[]) => parts.reduce((sum, part) => sum + part, 0)
 
 /** Laps that a bar of a given length needs because stock is shorter. */
-function lapsIn(lengthMm: number, lapMm: number): number {
-  return lengthMm <= STOCK_LENGTH_MM ? 0 : Math.ceil((lengthMm - STOCK_LENGTH_MM) / (STOCK_LENGTH_MM - lapMm))
+function lapsIn(lengthMm: number, lapMm: () => number): number {
+  return lengthMm <= STOCK_LENGTH_MM ? 0 : Math.ceil((lengthMm - STOCK_LENGTH_MM) / (STOCK_LENGTH_MM - lapMm()))
+}
+
+/** Length of a bar with its laps. */
+function lappedMm(parts: readonly number[], lapMm: () => number): number {
+  const length = sumOf(parts)
+  const laps = lapsIn(length, lapMm)
+  return laps === 0 ? length : length + laps * lapMm()
 }
 
 /**
@@ -41,7 +48,7 @@ export function pastFaceMm(diameter: BarDiameter, supportMm: number, coverMm: nu
  * Source: project rule, engine design section 4 (laps only beyond the stock length)
  */
 export function totalLengthMm({ pieces, each, lapMm }: Pick<BarLines, 'pieces' | 'each' | 'lapMm'>): number {
-  return each * pieces.reduce((sum, parts) => sum + sumOf(parts) + lapMm * lapsIn(sumOf(parts), lapMm), 0)
+  return each * pieces.reduce((sum, parts) => sum + lappedMm(parts, lapMm), 0)
 }
 
 /**
@@ -66,9 +73,9 @@ function countWorking({ each, lines }: BarLines, count: number): string {
 function equalRun(bars: BarLines, pieces: readonly (readonly number[])[]): BarRun {
   const parts = pieces[0]!
   const laps = lapsIn(sumOf(parts), bars.lapMm)
-  const lengthMm = sumOf(parts) + laps * bars.lapMm
+  const lengthMm = lappedMm(parts, bars.lapMm)
   const terms = parts.map((part, i) => (i === 0 ? figure(part, 3) : part < 0 ? `− ${figure(-part, 3)}` : `+ ${figure(part, 3)}`))
-  const lapped = laps === 0 ? [] : [`+ ${laps} × ${figure(bars.lapMm, 3)}`]
+  const lapped = laps === 0 ? [] : [`+ ${laps} × ${figure(bars.lapMm(), 3)}`]
   return {
     position: bars.position,
     diameter: bars.diameter,

@@ -15,7 +15,9 @@ export function sizeScheme(scheme: Scheme, { brief, levels }: Pick<AppraisalFile
   const basis = codeBasisOf(brief)
   const sites = levelSites(levels)
   const panels: readonly SizedPanel[] =
-    scheme.kind === 'ribbed' ? sites.flatMap((level) => sizeRibbed(level, scheme, brief, basis)) : sizeSolid(sites, scheme, brief, basis)
+    scheme.kind === 'ribbed'
+      ? sites.flatMap((level) => sizeRibbed(level, scheme, brief, basis))
+      : sizeSolid(sites, scheme, brief, basis)
   return {
     mark: scheme.mark,
     kind: scheme.kind,

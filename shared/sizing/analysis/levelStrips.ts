@@ -32,7 +32,8 @@ function panelBehind(panel: number, end: EndOfSpan, lines: SpanLines, neighbours
   const overlaps = new Map<number, number>()
   for (const { panel: from, edge, neighbour, overlap } of neighbours) {
     const behind = lines[neighbour]
-    if (from !== panel || !line.ends[end].edges.includes(edge) || !behind || !isParallel(line.direction, behind.direction)) continue
+    if (from !== panel || !line.ends[end].edges.includes(edge) || !behind || !isParallel(line.direction, behind.direction))
+      continue
     overlaps.set(neighbour, (overlaps.get(neighbour) ?? 0) + overlap)
   }
   const spanOf = (each: number) => lines[each]!.span.spanMm

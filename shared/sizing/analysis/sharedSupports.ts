@@ -9,7 +9,12 @@ export type EdgeMoments = readonly ReadonlyMap<number, number>[]
  *
  * Source: project rule, of two unequal moments at one support both sides take the larger (no distribution, on the safe side)
  */
-export function momentFromBehind(panel: number, edges: readonly number[], moments: EdgeMoments, neighbours: readonly Neighbour[]): number {
+export function momentFromBehind(
+  panel: number,
+  edges: readonly number[],
+  moments: EdgeMoments,
+  neighbours: readonly Neighbour[],
+): number {
   return neighbours.reduce(
     (most, each) =>
       each.panel === panel && edges.includes(each.edge)

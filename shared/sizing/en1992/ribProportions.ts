@@ -20,7 +20,8 @@ export function ribProportions({ clearMm, ribMm, blockHeightMm }: RibShape): rea
       capacity: GREATEST_SPACING_MM,
       unit: 'mm',
       clause: CLAUSE,
-      working: () => `spacing of ribs = ${figure(clearMm)} + ${figure(ribMm)} = ${figure(clearMm + ribMm)} ≤ ${GREATEST_SPACING_MM} mm`,
+      working: () =>
+        `spacing of ribs = ${figure(clearMm)} + ${figure(ribMm)} = ${figure(clearMm + ribMm)} ≤ ${GREATEST_SPACING_MM} mm`,
     },
     {
       demand: blockHeightMm,
@@ -42,7 +43,8 @@ export function leastToppingMm({ clearMm }: RibShape): Answer {
   return {
     value,
     clause: CLAUSE,
-    working: () => `hf ≥ max(clear/10; ${LEAST_TOPPING_MM}) = max(${figure(clearMm)}/10; ${LEAST_TOPPING_MM}) = ${figure(value)} mm`,
+    working: () =>
+      `hf ≥ max(clear/10; ${LEAST_TOPPING_MM}) = max(${figure(clearMm)}/10; ${LEAST_TOPPING_MM}) = ${figure(value)} mm`,
   }
 }
 

@@ -32,7 +32,8 @@ export function mostSteelMm2(concreteMm2: number, { values }: Strengths): Answer
   return {
     value,
     clause: 'EN 1992-1-1 9.2.1.1(3)',
-    working: () => `As,max = ${values.greatestSteelShare}·Ac = ${values.greatestSteelShare}·${figure(concreteMm2, 0)} = ${figure(value, 0)} mm²`,
+    working: () =>
+      `As,max = ${values.greatestSteelShare}·Ac = ${values.greatestSteelShare}·${figure(concreteMm2, 0)} = ${figure(value, 0)} mm²`,
   }
 }
 
@@ -62,6 +63,7 @@ export function leastGapMm(diameterMm: BarDiameter, aggregateMm: number, { value
   return {
     value,
     clause: 'EN 1992-1-1 8.2(2)',
-    working: () => `gap = max(φ; dg + ${overAggregateMm}; ${leastMm}) = max(${diameterMm}; ${aggregateMm + overAggregateMm}; ${leastMm}) = ${value} mm`,
+    working: () =>
+      `gap = max(φ; dg + ${overAggregateMm}; ${leastMm}) = max(${diameterMm}; ${aggregateMm + overAggregateMm}; ${leastMm}) = ${value} mm`,
   }
 }

@@ -49,7 +49,10 @@ export function midspanBending(context: RibContext, bars: BarSet) {
 }
 
 /** Width the bars take up side by side: bars and gaps between, mm. */
-function barsWidthMm({ basis }: RibContext, bars: BarSet): { readonly widthMm: number; readonly gapMm: number; readonly clause: string } {
+function barsWidthMm(
+  { basis }: RibContext,
+  bars: BarSet,
+): { readonly widthMm: number; readonly gapMm: number; readonly clause: string } {
   const gap = basis.leastGapMm(thickest(bars), RIB_AGGREGATE_MM)
   const diameters = bars.reduce((sum, { diameter, count }) => sum + count * diameter, 0)
   return { widthMm: diameters + Math.max(0, countOf(bars) - 1) * gap.value, gapMm: gap.value, clause: gap.clause }

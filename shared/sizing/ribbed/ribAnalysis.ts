@@ -23,7 +23,12 @@ export interface RibAnalysis {
  *
  * Source: EN 1992-1-1:2004, 5.3.2.2, or the basis' own rule; BS 8110-1:1997, Table 3.12 or elastic analysis (engine design section 4)
  */
-export function analyseRibs({ neighbours }: LevelSite, panels: readonly RibbedPanel[], depthMm: number, basis: CodeBasis): RibAnalysis[] {
+export function analyseRibs(
+  { neighbours }: LevelSite,
+  panels: readonly RibbedPanel[],
+  depthMm: number,
+  basis: CodeBasis,
+): RibAnalysis[] {
   const lines = spanLines(panels, depthMm, basis)
   const bays = bayAreas(lines, neighbours)
   const withBays = lines.map((line, i) => line && { ...line, span: { ...line.span, bayMm2: bays[i]! } })
@@ -38,8 +43,7 @@ export function analyseRibs({ neighbours }: LevelSite, panels: readonly RibbedPa
   return panels.map(({ ends }, i) => {
     const { strip, forces } = raw[i]!
     const spanMm = lines[i]!.span.spanMm
-    const behind = (end: EndOfSpan) =>
-      ends[end].isContinuous ? momentFromBehind(i, ends[end].edges, moments, neighbours) : 0
+    const behind = (end: EndOfSpan) => (ends[end].isContinuous ? momentFromBehind(i, ends[end].edges, moments, neighbours) : 0)
     return {
       spanMm,
       position: positionIn(strip),
@@ -51,14 +55,19 @@ export function analyseRibs({ neighbours }: LevelSite, panels: readonly RibbedPa
 }
 
 function spanLines(panels: readonly RibbedPanel[], depthMm: number, basis: CodeBasis): SpanLines {
-  return panels.map(({ direction, ends, clearMm, loads, layout }) => {
+  return panels.map(({ direction, ends, clearMm, loads, grossMm2 }) => {
     const span = basis.effectiveSpanMm(clearMm, depthMm, depthMm, [ends.start, ends.end])
-    return { direction, ends, span: { spanMm: span, loads, bayMm2: layout.areas.gross } }
+    return { direction, ends, span: { spanMm: span, loads, bayMm2: grossMm2 } }
   })
 }
 
 /** What the effective span adds to the clear one, shared between its ends as each would add alone. */
-function faceDistances({ clearMm, ends }: RibbedPanel, spanMm: number, depthMm: number, basis: CodeBasis): Record<EndOfSpan, number> {
+function faceDistances(
+  { clearMm, ends }: RibbedPanel,
+  spanMm: number,
+  depthMm: number,
+  basis: CodeBasis,
+): Record<EndOfSpan, number> {
   const none = { supportMm: 0, isContinuous: false }
   const start = basis.effectiveSpanMm(clearMm, depthMm, depthMm, [ends.start, none]) - clearMm
   const end = basis.effectiveSpanMm(clearMm, depthMm, depthMm, [none, ends.end]) - clearMm

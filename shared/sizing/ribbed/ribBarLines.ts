@@ -31,7 +31,7 @@ export function bottomLines({ ribs }: RibbedPanel, diameter: BarDiameter, each: 
     each,
     lines: 'ribs',
     pieces: ribs.map(({ clearMm, start, end }) => [clearMm, past(start), past(end)]),
-    lapMm: rules.basis.lapMm(diameter, false).value,
+    lapMm: () => rules.basis.lapMm(diameter, false).value,
     clause: 'EN 1992-1-1 9.3.1.2(1)',
   }
 }
@@ -64,11 +64,9 @@ export function topLines(
     pieces: ribs
       .filter((rib) => rib[end].edge === edge)
       .map((rib) =>
-        isContinuous
-          ? [rib[end].supportMm / 2, TOP_REACH * rib.clearMm]
-          : [anchorage.value, reach * (rib.clearMm + spanAddedMm)],
+        isContinuous ? [rib[end].supportMm / 2, TOP_REACH * rib.clearMm] : [anchorage.value, reach * (rib.clearMm + spanAddedMm)],
       ),
-    lapMm: basis.lapMm(diameter, isPoor).value,
+    lapMm: () => basis.lapMm(diameter, isPoor).value,
     clause: isContinuous ? 'common practice' : clause,
   }))
 }

@@ -3,13 +3,14 @@ import type { EndOfSpan } from '../analysis/spanForces'
 import { totalLengthMm } from '../barRuns'
 import type { BarSet } from '../barSet'
 import { type Candidate, chooseLeastMass } from '../chooseLeastMass'
-import type { Finding } from '../finding'
+import { type Finding, isMet } from '../finding'
 import { BAR_MASS_KG_PER_M, CHOSEN_DIAMETERS } from '../tables/bars'
 import { bottomFindings } from './bottomFindings'
 import { bottomLines, type RibBarRules, topLines } from './ribBarLines'
 import type { RibContext } from './ribContext'
 import type { RibbedPanel } from './ribbedPanel'
 import { shearFindings } from './ribShear'
+import type { Compared } from './solidZones'
 import { simpleEdgeFinding, supportBending, topFindings } from './topFindings'
 
 /** The bars of a panel's ribs, and what the checks find. */
@@ -49,7 +50,11 @@ function massBy(lengthOf: (diameter: BarDiameter) => number): MassOf {
 }
 
 function choose(massOf: MassOf, findingsOf: (set: BarSet) => readonly Finding[]): BarSet {
-  const candidates = RIB_BAR_SETS.map((option): Candidate<BarSet> => ({ option, massKg: massOf(option), findings: () => findingsOf(option) }))
+  const candidates = RIB_BAR_SETS.map((option): Candidate<BarSet> => ({
+    option,
+    massKg: massOf(option),
+    findings: () => findingsOf(option),
+  }))
   return chooseLeastMass(candidates).option
 }
 
@@ -120,16 +125,30 @@ export function designRibs(task: RibTask): RibDesign {
 }
 
 /**
+ * Top bars over the ends of a panel whose solid zone reaches past all hogging: the lightest any zone can have.
+ *
+ * Source: project rule, a wider zone never asks for more top bars
+ */
+export function lightestTops(task: RibTask, bottom: BarSet): Readonly<Record<EndOfSpan, BarSet>> {
+  const whole = { ...task, context: { ...task.context, solidZoneMm: task.context.clearMm } }
+  return { start: chooseTop(whole, 'start', bottom), end: chooseTop(whole, 'end', bottom) }
+}
+
+/**
  * What the width of the solid zone decides with the bars chosen for it: shear of the rib where the zone ends, and its bending there.
  *
  * Source: project rule, engine design section 4 (`"least"` lets shear widen the zone)
+ * @param lightest - as `lightestTops`, kept wherever they do
  */
-export function zoneFindings(task: RibTask, bottom: BarSet): { readonly demand: number; readonly capacity: number }[] {
+export function zoneFindings(task: RibTask, bottom: BarSet, lightest: Readonly<Record<EndOfSpan, BarSet>>): Compared[] {
   const { context, panel } = task
   return ENDS.flatMap((end) => {
-    const top = chooseTop(task, end, bottom)
+    const { isContinuous } = panel.ends[end]
+    const does =
+      !isContinuous || topFindings(context, end, lightest[end]).every(({ demand, capacity }) => isMet(demand, capacity))
+    const top = does ? lightest[end] : chooseTop(task, end, bottom)
     const shear = shearFindings(context, end, { bottom, top }).slice(0, 1)
-    if (!panel.ends[end].isContinuous) return shear
+    if (!isContinuous) return shear
     const { over, atRib } = supportBending(context, end, top)
     const { k, greatestK } = atRib ?? over
     return [...shear, { demand: k, capacity: greatestK }]

@@ -21,7 +21,10 @@ export function ribLineEnds(site: PanelSite, { ribLines }: PanelLayout): RibLine
   const supported = (at: Point, direction: Point): LineEndOnEdge => {
     const found = lineEndAt(site, at, direction)
     if (found.edge !== null && site.edges[found.edge]!.continuity === 'free')
-      throw new OutOfScopeError('edges', `ribs end on free edge ${found.edge + 1}: expected ribs that run from support to support`)
+      throw new OutOfScopeError(
+        'edges',
+        `ribs end on free edge ${found.edge + 1}: expected ribs that run from support to support`,
+      )
     return found
   }
   return ribLines.map(({ start, end, length }) => {

@@ -1,45 +1,40 @@
-import type { RibbedScheme } from '../../contracts/appraisal'
 import type { EndOfSpan } from '../analysis/spanForces'
-import type { CodeBasis } from '../codeBasis'
 import { figure } from '../figure'
 import { isMet } from '../finding'
 import { FABRIC } from '../tables/fabric'
-import { endName } from './ribContext'
+import { endName, type RibContext } from './ribContext'
 import type { RibAnalysis } from './ribAnalysis'
 import { isMixedEnd, type RibbedPanel } from './ribbedPanel'
-import { type RibSection } from './ribSection'
+import type { RibTask } from './ribDesign'
 import { shapeFindings } from './shapeFindings'
-
-/** What the flags of a ribbed panel look at. */
-export interface RibFlagInput {
-  readonly panel: RibbedPanel
-  readonly scheme: RibbedScheme
-  readonly section: RibSection
-  readonly analysis: RibAnalysis
-  readonly basis: CodeBasis
-  readonly fireMinutes: number
-  readonly isWidened: boolean
-}
 
 /**
  * Assumptions and approximations of one ribbed panel, in sentences.
  *
  * Source: project rule, what was assumed is stated (engine design sections 1 and 4)
  */
-export function ribFlags(input: RibFlagInput): string[] {
-  const { panel, analysis, isWidened } = input
+export function ribFlags(task: RibTask): string[] {
+  const { panel, context, scheme } = task
+  const { analysis } = context
   const lengths = panel.ribs.map(({ clearMm }) => clearMm)
   const varies = Math.max(...lengths) - Math.min(...lengths) > 1
+  const isWidened = scheme.solidZone === 'least' && panel.solidZoneMm > 0
   return [
     methodFlag(analysis),
-    ...(analysis.assumedEnds > 0 ? ['continuous edge without a neighbour spanning the same way: an equal span is assumed behind it'] : []),
+    ...(analysis.assumedEnds > 0
+      ? ['continuous edge without a neighbour spanning the same way: an equal span is assumed behind it']
+      : []),
     ...(['start', 'end'] as const).filter((end) => isMixedEnd(panel, end)).map((end) => mixedFlag(panel, end)),
     ...(varies ? [`ribs differ in length: sized on the longest clear rib, ${figure(panel.clearMm, 0)} mm`] : []),
-    ...(panel.site.panel.voids.length > 0 ? ['ribs that end at a void hang on its trimmers; bars of trimmers are not included'] : []),
-    ...(isWidened ? [`solid zone widened to ${figure(panel.layout.solidZone, 0)} mm for shear and for bending of the ribs at supports`] : []),
-    ...crossRibFlag(input),
-    ...meshFlag(input),
-    ...fireFlags(input),
+    ...(panel.site.panel.voids.length > 0
+      ? ['ribs that end at a void hang on its trimmers; bars of trimmers are not included']
+      : []),
+    ...(isWidened
+      ? [`solid zone widened to ${figure(panel.solidZoneMm, 0)} mm for shear and for bending of the ribs at supports`]
+      : []),
+    ...crossRibFlag(task),
+    ...meshFlag(task),
+    ...fireFlags(context),
   ]
 }
 
@@ -54,7 +49,7 @@ function mixedFlag(panel: RibbedPanel, end: EndOfSpan): string {
   return `${endName(panel, end)}: continuous in part only, taken as discontinuous`
 }
 
-function crossRibFlag({ panel: { layout }, basis, section }: RibFlagInput): string[] {
+function crossRibFlag({ panel: { layout }, context: { basis, section } }: RibTask): string[] {
   const most = basis.crossRibSpacingMm(section.heightMm)
   const longest = Math.max(0, ...layout.rows.flatMap(({ runs }) => runs.map(({ start, end }) => end - start)))
   if (!most || isMet(longest, most.value)) return []
@@ -63,7 +58,7 @@ function crossRibFlag({ panel: { layout }, basis, section }: RibFlagInput): stri
   ]
 }
 
-function meshFlag({ scheme: { mesh }, basis, section }: RibFlagInput): string[] {
+function meshFlag({ scheme: { mesh }, context: { basis, section } }: RibTask): string[] {
   const { toppingMm } = section
   if (toppingMm === 0) return []
   const least = basis.leastSteelMm2({ widthMm: 1000, webMm: 1000, heightMm: toppingMm, depthMm: toppingMm })
@@ -75,7 +70,7 @@ function meshFlag({ scheme: { mesh }, basis, section }: RibFlagInput): string[] 
 }
 
 /** What would change the answer of the fire tables, where a size fails. */
-function fireFlags({ basis, section, analysis, fireMinutes }: RibFlagInput): string[] {
+function fireFlags({ basis, section, analysis, fireMinutes }: RibContext): string[] {
   const failing = shapeFindings(basis, section, analysis, fireMinutes).filter(
     ({ name, demand, capacity }) => name === 'fire.size' && !isMet(demand, capacity),
   )

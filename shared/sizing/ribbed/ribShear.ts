@@ -61,7 +61,12 @@ function tensionSteel(context: RibContext, end: EndOfSpan, { bottom, top }: RibB
 }
 
 /** Whether top bars, as far as they are stressed, run an anchorage and d past a section. */
-function isAnchored({ basis, section, analysis, clearMm }: RibContext, top: BarSet, hoggingNmm: number, fromFaceMm: number): boolean {
+function isAnchored(
+  { basis, section, analysis, clearMm }: RibContext,
+  top: BarSet,
+  hoggingNmm: number,
+  fromFaceMm: number,
+): boolean {
   if (top.length === 0) return false
   const depthMm = effectiveDepthMm(section, top)
   const rib = { widthMm: section.ribMm, depthMm, flange: null }

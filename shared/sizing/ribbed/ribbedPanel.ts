@@ -1,6 +1,6 @@
 import type { Brief, RibbedScheme } from '../../contracts/appraisal'
-import type { Point } from '../../geometry/point'
 import { frameAt } from '../../geometry/frame'
+import type { Point } from '../../geometry/point'
 import { layOutPanel } from '../../layout/layOutPanel'
 import type { PanelLayout } from '../../layout/panelLayout'
 import { OutOfScopeError } from '../../outOfScope'
@@ -8,30 +8,50 @@ import { type FloorLoads, floorLoads, selfWeightKnPerM2 } from '../actions'
 import type { LineEnd } from '../analysis/levelStrips'
 import type { EndOfSpan } from '../analysis/spanForces'
 import type { CodeBasis } from '../codeBasis'
+import { figure } from '../figure'
 import type { PanelSite } from '../panelSite'
 import { type RibLineEnds, ribLineEnds } from './ribEnds'
 
-/** A ribbed panel laid out with one width of solid zone, before it is analysed. */
+/** A ribbed panel laid out with one width of solid zone, before it is analysed: what does not depend on where it stands. */
 export interface RibbedPanel {
-  readonly site: PanelSite
-  readonly layout: PanelLayout
+  /** As `shapeKey`. */
+  readonly key: string
   readonly ribs: readonly RibLineEnds[]
   readonly direction: Point
   readonly clearMm: number
   readonly ends: Readonly<Record<EndOfSpan, LineEnd>>
   readonly loads: FloorLoads
+  readonly grossMm2: number
+  readonly solidZoneMm: number
+  /** The panel it was laid out for, and how. */
+  readonly site: PanelSite
+  readonly layout: PanelLayout
 }
 
 /**
- * A panel laid out with a solid zone of a given width, with its rib ends and loads.
+ * A panel laid out with a solid zone of a given width.
+ *
+ * Source: project rule, engine design section 2
+ */
+export function laidOut(site: PanelSite, scheme: RibbedScheme, basis: CodeBasis, solidZoneMm: number): PanelLayout {
+  const crossRibs = basis.crossRibSpacingMm(scheme.block.height + scheme.topping)?.value ?? null
+  return layOutPanel(site.panel, scheme, solidZoneMm, crossRibs, site.sharedEdges)
+}
+
+/**
+ * A panel laid out, with its rib ends and loads.
  *
  * Source: project rule, engine design sections 2 and 4 (self-weight of all concrete and blocks inside the clear outline)
- * @throws OutOfScopeError `ribDirection` where no row of blocks fits, `edges` where ribs end on a free edge
+ * @throws OutOfScopeError `outline` where no row of blocks fits, `edges` where ribs end on a free edge
  */
-export function ribbedPanel(site: PanelSite, scheme: RibbedScheme, brief: Brief, basis: CodeBasis, solidZoneMm: number): RibbedPanel {
-  const depthMm = scheme.block.height + scheme.topping
-  const crossRibs = basis.crossRibSpacingMm(depthMm)?.value ?? null
-  const layout = layOutPanel(site.panel, scheme, solidZoneMm, crossRibs, site.sharedEdges)
+export function ribbedPanel(
+  site: PanelSite,
+  scheme: RibbedScheme,
+  brief: Brief,
+  basis: CodeBasis,
+  solidZoneMm: number,
+): RibbedPanel {
+  const layout = laidOut(site, scheme, basis, solidZoneMm)
   const ribs = ribLineEnds(site, layout)
   if (layout.longestRib === 0 || ribs.length === 0)
     throw new OutOfScopeError('outline', 'no row of blocks fits: expected a wider panel, smaller blocks or another rib direction')
@@ -39,19 +59,33 @@ export function ribbedPanel(site: PanelSite, scheme: RibbedScheme, brief: Brief,
   const blocksLongMm = layout.blocksWhole * length + layout.cutLength
   const selfWeight = selfWeightKnPerM2(
     layout.areas.clear - layout.areas.voids,
-    depthMm,
+    height + scheme.topping,
     blocksLongMm * width * height,
     (blocksLongMm / length) * mass,
   )
   return {
-    site,
-    layout,
+    key: shapeKey(site, solidZoneMm),
     ribs,
     direction: frameAt([0, 0], site.panel.ribDirection).toLevel([1, 0]),
     clearMm: layout.longestRib,
     ends: { start: lineEnd(site, ribs, 'start'), end: lineEnd(site, ribs, 'end') },
     loads: floorLoads(selfWeight, brief),
+    grossMm2: layout.areas.gross,
+    solidZoneMm,
+    site,
+    layout,
   }
+}
+
+/**
+ * The same for panels that differ only in mark, repeat and place.
+ *
+ * Source: project rule, identical panels are laid out once for sizing
+ */
+export function shapeKey({ panel, edges, sharedEdges }: PanelSite, solidZoneMm: number): string {
+  const [originX, originY] = panel.outline[0]!
+  const ring = (points: readonly Point[]) => points.map(([x, y]) => `${figure(x - originX, 4)},${figure(y - originY, 4)}`)
+  return JSON.stringify([solidZoneMm, panel.ribDirection, ring(panel.outline), panel.voids.map(ring), edges, sharedEdges])
 }
 
 /** One end of the panel's ribs as a whole: continuous only where every edge they end on is; the widest support counts. */

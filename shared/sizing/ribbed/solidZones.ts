@@ -8,7 +8,7 @@ import { isMet } from '../finding'
 export const ZONE_STEP_MM = 25
 
 /** Something with demand and capacity. */
-interface Compared {
+export interface Compared {
   readonly demand: number
   readonly capacity: number
 }

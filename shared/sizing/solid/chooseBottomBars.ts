@@ -2,18 +2,14 @@ import type { BarDiameter, BarLayer } from '../../contracts/appraisal'
 import { type Candidate, chooseLeastMass } from '../chooseLeastMass'
 import type { Finding } from '../finding'
 import { CHOSEN_DIAMETERS } from '../tables/bars'
-import { firstMeeting, inStrips, layersGiving, leastMm2 } from './firstMeeting'
-import { longBottomFindings, midspanFlexure, shortBottomFindings, slabShearFinding } from './layerFindings'
+import { firstMeeting, inStrips, leastMm2 } from './firstMeeting'
+import { longBottomFindings, midspanFlexure, shortBottomFindings, slabDeflection, slabShearFinding } from './layerFindings'
 import { layerDepthMm, type SlabContext, topPlaces } from './slabContext'
 import { layerAreaMm2, layerFor, type StripLayers } from './slabLayer'
 import { bottomParts, stripsMassKg } from './slabMass'
 
-/**
- * Shear at the ends of one direction where bottom bars are the tension steel.
- *
- * Source: by the basis, `shearResistanceN`
- */
-export function bottomShears(context: SlabContext, direction: 'short' | 'long', depthMm: number, layer: BarLayer): Finding[] {
+/** Shear at the ends of one direction where bottom bars are the tension steel. */
+function bottomShears(context: SlabContext, direction: 'short' | 'long', depthMm: number, layer: BarLayer): Finding[] {
   return topPlaces(context)
     .filter((place) => place.direction === direction && !place.side.isContinuous)
     .flatMap((place) => slabShearFinding(context, place, depthMm, layerAreaMm2(layer)) ?? [])
@@ -29,11 +25,27 @@ export function shortLayer(context: SlabContext, diameter: BarDiameter): BarLaye
   const depthMm = layerDepthMm(context, diameter, null)
   const needed = Math.max(flexure.requiredMm2, leastMm2(context, depthMm))
   const greatest = context.basis.greatestSpacingMm('greatestMoment', context.heightMm).value
-  const deflects = (layer: BarLayer) => shortBottomFindings(context, layer, flexure).filter(({ name }) => name === 'deflection')
-  return firstMeeting(layersGiving(diameter, needed, greatest), (layer) => [
-    ...deflects(layer),
+  return firstMeeting(layerFor(diameter, needed, greatest), (layer) => [
+    slabDeflection(context, layer, flexure),
     ...bottomShears(context, 'short', depthMm, layer),
   ])
+}
+
+/**
+ * What the checks find for bottom bars in the direction spanned first, shear at simple ends included.
+ *
+ * Source: by the basis
+ */
+export function shortFindings(context: SlabContext, layer: BarLayer): Finding[] {
+  const midspan = midspanFlexure(context, 'short', layer.diameter, null)
+  const depthMm = layerDepthMm(context, layer.diameter, null)
+  return [...shortBottomFindings(context, layer, midspan), ...bottomShears(context, 'short', depthMm, layer)]
+}
+
+function longFindings(context: SlabContext, layer: BarLayer, main: BarLayer): Finding[] {
+  const flexure = midspanFlexure(context, 'long', layer.diameter, main.diameter)
+  const depthMm = layerDepthMm(context, layer.diameter, main.diameter)
+  return [...longBottomFindings(context, layer, flexure, main), ...bottomShears(context, 'long', depthMm, layer)]
 }
 
 function longCandidate(context: SlabContext, layer: BarLayer, main: BarLayer): Candidate<StripLayers> {
@@ -42,10 +54,7 @@ function longCandidate(context: SlabContext, layer: BarLayer, main: BarLayer): C
   const option = given ? { middle: layer, edge: null } : inStrips(context, layer, depthMm)
   return {
     option,
-    findings: () => [
-      ...longBottomFindings(context, layer, midspanFlexure(context, 'long', layer.diameter, main.diameter), main),
-      ...bottomShears(context, 'long', depthMm, layer),
-    ],
+    findings: () => longFindings(context, layer, main),
     massKg: stripsMassKg(context, option, bottomParts(analysis.other, layer, brief.cover), analysis.short.axis.clearMm, false),
   }
 }
@@ -59,8 +68,31 @@ function longLayer(context: SlabContext, diameter: BarDiameter, main: BarLayer):
   const depthMm = layerDepthMm(context, diameter, main.diameter)
   const { requiredMm2 } = midspanFlexure(context, 'long', diameter, main.diameter)
   const needed = Math.max(requiredMm2, leastMm2(context, depthMm))
-  const layers = layersGiving(diameter, needed, basis.greatestSpacingMm('greatestMoment', heightMm).value)
-  return firstMeeting(layers, (layer) => bottomShears(context, 'long', depthMm, layer))
+  const widest = layerFor(diameter, needed, basis.greatestSpacingMm('greatestMoment', heightMm).value)
+  return firstMeeting(widest, (layer) => bottomShears(context, 'long', depthMm, layer))
+}
+
+/**
+ * Findings of the bottom bars that any one diameter in the direction spanned first would give, and of those across it; the given bars'
+ * alone where bars are given.
+ *
+ * Source: project rule, engine design section 3 (least thickness)
+ */
+export function bottomAlternatives(
+  context: SlabContext,
+): { readonly short: () => Finding[]; readonly long: (() => Finding[])[] }[] {
+  const { given } = context
+  const diameters = given ? [given.bottomX.diameter] : CHOSEN_DIAMETERS
+  return diameters.map((diameter) => {
+    const main = given?.bottomX ?? shortLayer(context, diameter)
+    const across = given ? [given.bottomY] : null
+    return {
+      short: () => shortFindings(context, main),
+      long: across
+        ? across.map((layer) => () => longFindings(context, layer, main))
+        : CHOSEN_DIAMETERS.map((each) => () => longFindings(context, longLayer(context, each, main), main)),
+    }
+  })
 }
 
 /**

@@ -3,10 +3,10 @@ import { type Candidate, chooseLeastMass } from '../chooseLeastMass'
 import type { Flexure } from '../codeBasis'
 import type { Finding } from '../finding'
 import { CHOSEN_DIAMETERS } from '../tables/bars'
-import { bottomShears, chooseLongBottom, shortLayer } from './chooseBottomBars'
+import { chooseLongBottom, shortFindings, shortLayer } from './chooseBottomBars'
 import { chooseTopBars, type TopBars } from './chooseTopBars'
 import { inStrips } from './firstMeeting'
-import { midspanFlexure, shortBottomFindings } from './layerFindings'
+import { midspanFlexure } from './layerFindings'
 import { layerDepthMm, type SlabContext, topPlaces } from './slabContext'
 import type { StripLayers } from './slabLayer'
 import { bottomParts, stripsMassKg } from './slabMass'
@@ -36,11 +36,7 @@ function candidateOf(context: SlabContext, layer: BarLayer, tops: readonly TopBa
   return {
     option: { bottom, torsion, midspan },
     massKg: own + across.massKg + torsion.reduce((sum, each) => sum + each.massKg, 0),
-    findings: () => [
-      ...shortBottomFindings(context, layer, midspan),
-      ...bottomShears(context, 'short', depthMm, layer),
-      ...across.findings(),
-    ],
+    findings: () => [...shortFindings(context, layer), ...across.findings()],
   }
 }
 

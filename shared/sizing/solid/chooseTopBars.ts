@@ -3,10 +3,10 @@ import { type Candidate, chooseLeastMass } from '../chooseLeastMass'
 import type { Flexure } from '../codeBasis'
 import type { Finding } from '../finding'
 import { CHOSEN_DIAMETERS } from '../tables/bars'
-import { firstMeeting, inStrips, layersGiving, leastMm2 } from './firstMeeting'
+import { firstMeeting, inStrips, leastMm2 } from './firstMeeting'
 import { slabShearFinding, topFlexure, topLayerFindings } from './layerFindings'
 import { givenTop, isHogging, layerDepthMm, type SlabContext, type TopPlace } from './slabContext'
-import { layerAreaMm2, type StripLayers } from './slabLayer'
+import { layerAreaMm2, layerFor, type StripLayers } from './slabLayer'
 import { stripsMassKg, topParts } from './slabMass'
 
 /** Top bars at one end with their findings; `layers` null where bars are given and none lies there. */
@@ -38,17 +38,21 @@ function judged(context: SlabContext, place: TopPlace, layer: BarLayer | null, l
 }
 
 /** The lightest layer of one diameter that carries what a place asks. */
-function candidateOf(context: SlabContext, place: TopPlace, diameter: BarDiameter): Candidate<TopBars> {
-  const { basis, heightMm, analysis } = context
+function topLayer(context: SlabContext, place: TopPlace, diameter: BarDiameter): BarLayer {
   const outer = outerOf(context, place, diameter)
   const depthMm = layerDepthMm(context, diameter, outer)
   const { requiredMm2 } = topFlexure(context, place, diameter, outer)
   const hogging = isHogging(place)
   const needed = hogging ? Math.max(requiredMm2, leastMm2(context, depthMm)) : requiredMm2
-  const greatest = basis.greatestSpacingMm(hogging ? 'greatestMoment' : 'principal', heightMm).value
-  const layer = firstMeeting(layersGiving(diameter, needed, greatest), (each) => shearOf(context, place, depthMm, each))
-  const layers = hogging ? inStrips(context, layer, depthMm) : { middle: layer, edge: null }
-  const { short, other } = analysis
+  const greatest = context.basis.greatestSpacingMm(hogging ? 'greatestMoment' : 'principal', context.heightMm).value
+  return firstMeeting(layerFor(diameter, needed, greatest), (each) => shearOf(context, place, depthMm, each))
+}
+
+function candidateOf(context: SlabContext, place: TopPlace, diameter: BarDiameter): Candidate<TopBars> {
+  const layer = topLayer(context, place, diameter)
+  const depthMm = layerDepthMm(context, diameter, outerOf(context, place, diameter))
+  const layers = isHogging(place) ? inStrips(context, layer, depthMm) : { middle: layer, edge: null }
+  const { short, other } = context.analysis
   const [along, across] = place.direction === 'short' ? [short.axis, other] : [other, short.axis]
   const option = judged(context, place, layer, layers)
   return {
@@ -56,6 +60,16 @@ function candidateOf(context: SlabContext, place: TopPlace, diameter: BarDiamete
     findings: () => option.findings,
     massKg: stripsMassKg(context, layers, topParts(context, place, layer, along.clearMm), across.clearMm, true),
   }
+}
+
+/**
+ * Findings of the top bars at one end that any one diameter would give; the given bars' alone where bars are given.
+ *
+ * Source: project rule, engine design section 3 (least thickness)
+ */
+export function topAlternatives(context: SlabContext, place: TopPlace): (() => readonly Finding[])[] {
+  if (context.given && (isHogging(place) || givenTop(context, place))) return [() => chooseTopBars(context, place).findings]
+  return CHOSEN_DIAMETERS.map((diameter) => () => judged(context, place, topLayer(context, place, diameter), null).findings)
 }
 
 /**

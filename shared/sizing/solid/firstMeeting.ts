@@ -1,28 +1,17 @@
-import type { BarDiameter, BarLayer } from '../../contracts/appraisal'
+import type { BarLayer } from '../../contracts/appraisal'
 import { type Finding, isMet, utilisationOf } from '../finding'
 import { METRE_MM, type SlabContext } from './slabContext'
-import { layerAreaMm2, layerFor, layersOf, type StripLayers } from './slabLayer'
+import { closerLayer, layerFor, type StripLayers } from './slabLayer'
 
 /**
- * Layers of one diameter, widest spacing first, that give at least an area; the closest alone where none does.
- *
- * Source: project rule, engine design section 4
- * @param neededMm2 - per metre
- */
-export function layersGiving(diameter: BarDiameter, neededMm2: number, greatestMm: number): BarLayer[] {
-  const layers = layersOf(diameter, greatestMm)
-  const enough = layers.filter((layer) => layerAreaMm2(layer) >= neededMm2)
-  return enough.length > 0 ? enough : layers.slice(-1)
-}
-
-/**
- * Of layers in order, the first that meets every finding of `judge`; where none does, the first of those nearest to it.
+ * Of a layer and closer ones of its diameter, the first that meets every finding of `judge`; where none does, the first of those
+ * nearest to it.
  *
  * Source: project rule, engine design sections 4 and 8 (more load never ends in less steel)
  */
-export function firstMeeting(layers: readonly BarLayer[], judge: (layer: BarLayer) => readonly Finding[]): BarLayer {
-  let [best, least] = [layers[0]!, Infinity]
-  for (const layer of layers) {
+export function firstMeeting(widest: BarLayer, judge: (layer: BarLayer) => readonly Finding[]): BarLayer {
+  let [best, least] = [widest, Infinity]
+  for (let layer: BarLayer | null = widest; layer; layer = closerLayer(layer)) {
     const utilisation = judge(layer).reduce((most, { demand, capacity }) => Math.max(most, utilisationOf(demand, capacity)), 0)
     if (isMet(utilisation, 1)) return layer
     if (utilisation < least - 1e-9) [best, least] = [layer, utilisation]

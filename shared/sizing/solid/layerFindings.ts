@@ -16,7 +16,12 @@ export function slabSection(context: SlabContext, diameter: BarDiameter, outer: 
  *
  * Source: by the basis, `flexure`
  */
-export function midspanFlexure(context: SlabContext, direction: 'short' | 'long', diameter: BarDiameter, outer: BarDiameter | null): Flexure {
+export function midspanFlexure(
+  context: SlabContext,
+  direction: 'short' | 'long',
+  diameter: BarDiameter,
+  outer: BarDiameter | null,
+): Flexure {
   const span = context.analysis[direction]
   return context.basis.flexure(slabSection(context, diameter, outer), span?.saggingNmm ?? 0, false)
 }
@@ -29,12 +34,18 @@ export function midspanFlexure(context: SlabContext, direction: 'short' | 'long'
 export function topFlexure(context: SlabContext, place: TopPlace, diameter: BarDiameter, outer: BarDiameter | null): Flexure {
   const { basis, analysis } = context
   const section = slabSection(context, diameter, outer)
-  if (isHogging(place) && place.span) return basis.flexure(section, place.span.ends[place.end].hoggingNmm, place.span.isRedistributed)
+  if (isHogging(place) && place.span)
+    return basis.flexure(section, place.span.ends[place.end].hoggingNmm, place.span.isRedistributed)
   const midspan = (place.span ?? analysis.short).saggingNmm
   return basis.flexure(section, basis.simpleEdge.share * midspan, false)
 }
 
-function spacingFinding(context: SlabContext, where: string, place: 'greatestMoment' | 'principal' | 'secondary', layer: BarLayer): Finding {
+function spacingFinding(
+  context: SlabContext,
+  where: string,
+  place: 'greatestMoment' | 'principal' | 'secondary',
+  layer: BarLayer,
+): Finding {
   const most = context.basis.greatestSpacingMm(place, context.heightMm)
   return {
     name: 'bars.spacing',
@@ -56,27 +67,34 @@ function limitFindings(context: SlabContext, where: string, depthMm: number, lay
 }
 
 /**
+ * Deflection of a slab, by the direction it spans first.
+ *
+ * Source: by the basis, `spanDepthLimit` (short span of two-way panels)
+ */
+export function slabDeflection(context: SlabContext, layer: BarLayer, flexure: Flexure): Finding {
+  const { basis, analysis, brief } = context
+  return deflectionFinding(basis, `short span, midspan, ${layerText(layer)}`, {
+    position: analysis.short.position,
+    spanMm: analysis.short.spanMm,
+    section: slabSection(context, layer.diameter, null),
+    momentNmm: analysis.short.saggingNmm,
+    requiredMm2: flexure.requiredMm2,
+    providedMm2: layerAreaMm2(layer),
+    carriesPartitions: brief.partitionsLoad > 0,
+  })
+}
+
+/**
  * What the checks find for the bottom bars of the direction that the panel spans first.
  *
  * Source: by the basis
  */
 export function shortBottomFindings(context: SlabContext, layer: BarLayer, flexure: Flexure): Finding[] {
-  const { basis, analysis, brief } = context
-  const section = slabSection(context, layer.diameter, null)
   const where = `short span, midspan, ${layerText(layer)}`
-  const input = {
-    position: analysis.short.position,
-    spanMm: analysis.short.spanMm,
-    section,
-    momentNmm: analysis.short.saggingNmm,
-    requiredMm2: flexure.requiredMm2,
-    providedMm2: layerAreaMm2(layer),
-    carriesPartitions: brief.partitionsLoad > 0,
-  }
   return [
     ...flexureFindings('flexure.midspan', where, flexure, layerAreaMm2(layer)),
-    deflectionFinding(basis, where, input),
-    ...limitFindings(context, where, section.depthMm, layer),
+    slabDeflection(context, layer, flexure),
+    ...limitFindings(context, where, layerDepthMm(context, layer.diameter, null), layer),
     ...axisFinding(context, layer),
   ]
 }
@@ -138,7 +156,13 @@ export function longBottomFindings(context: SlabContext, layer: BarLayer, flexur
  * Source: by the basis; at edges taken as simple by its `simpleEdge`
  * @param layer - null where bars are given and none of them lies there
  */
-export function topLayerFindings(context: SlabContext, place: TopPlace, layer: BarLayer | null, flexure: Flexure, depthMm: number): Finding[] {
+export function topLayerFindings(
+  context: SlabContext,
+  place: TopPlace,
+  layer: BarLayer | null,
+  flexure: Flexure,
+  depthMm: number,
+): Finding[] {
   const where = `${placeName(place)}, ${layer ? layerText(layer) : 'no bars'}`
   const provided = layer ? layerAreaMm2(layer) : 0
   if (isHogging(place))
@@ -177,4 +201,16 @@ export function slabShearFinding(context: SlabContext, place: TopPlace, depthMm:
     unit: 'kN/m',
     working: () => `${placeName(place)}: V = ${figure(shearN / 1000)} kN/m; ${resistance.working()}`,
   }
+}
+
+/**
+ * Least thickness of a slab in fire.
+ *
+ * Source: by the basis, `slabFire`
+ */
+export function sizeFindings({ basis, brief, heightMm }: SlabContext): Finding[] {
+  if (brief.fireMinutes === 0) return []
+  const { size } = basis.slabFire(brief.fireMinutes, 'oneWay')
+  const working = () => `${size.working()}; slab ${figure(heightMm)} mm`
+  return [{ name: 'fire.size', clause: size.clause, demand: size.value, capacity: heightMm, unit: 'mm', working }]
 }

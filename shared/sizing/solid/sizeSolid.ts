@@ -2,25 +2,19 @@ import type { Brief, SolidScheme } from '../../contracts/appraisal'
 import { floorLoads, REINFORCED_CONCRETE_KN_PER_M3 } from '../actions'
 import { barRuns } from '../barRuns'
 import type { CodeBasis } from '../codeBasis'
-import { type Finding, checkRow, isMet, utilisationOf } from '../finding'
+import { checkRow } from '../finding'
 import type { LevelSite } from '../panelSite'
 import { remember } from '../remember'
 import type { SizedPanel } from '../sizedPanel'
-import { figure } from '../figure'
 import { chooseSlabBars, type SlabBars } from './chooseSlabBars'
 import { analyseSlabs } from './slabAnalysis'
 import { bottomBarLines, topBarLines, torsionBarLines } from './slabBarLines'
+import { sizeFindings } from './layerFindings'
+import { leastThickness } from './leastThickness'
 import { isHogging, type SlabContext, slabKey } from './slabContext'
 import { slabFlags } from './slabFlags'
 import { layerAreaMm2 } from './slabLayer'
 import { type SlabPlan, slabPlan } from './slabPlan'
-
-/**
- * Least thickness, step and greatest thickness that the engine chooses from, mm.
- *
- * Source: project rule, engine design section 3 (5 mm steps from 100 mm); greatest as the contract allows
- */
-const THICKNESS = { least: 100, step: 5, most: 1500 } as const
 
 type BarsFor = ReturnType<typeof remember<SlabBars>>
 
@@ -44,7 +38,8 @@ interface Job {
 export function sizeSolid(sites: readonly LevelSite[], scheme: SolidScheme, brief: Brief, basis: CodeBasis): SizedPanel[] {
   const levels = sites.map((site) => ({ site, plans: site.panels.map(slabPlan) }))
   const job: Job = { levels, scheme, brief, basis }
-  const heightMm = scheme.thickness === 'least' ? leastThickness(job) : scheme.thickness
+  const all = (heightMm: number) => contextsAt(job, heightMm).flatMap(({ contexts }) => contexts)
+  const heightMm = scheme.thickness === 'least' ? leastThickness(all) : scheme.thickness
   const barsFor: BarsFor = remember()
   return contextsAt(job, heightMm).flatMap(({ mark, contexts }) => contexts.map((context) => sizedPanel(context, mark, barsFor)))
 }
@@ -58,40 +53,6 @@ function contextsAt({ levels, scheme, brief, basis }: Job, heightMm: number): { 
     const contexts = plans.map((plan, i) => ({ basis, brief, given, plan, analysis: analyses[i]!, heightMm }))
     return { mark: site.mark, contexts }
   })
-}
-
-/** What a thicker slab can mend; the axis distance of bars in fire is for cover and diameter. */
-const isForThickness = ({ name }: Finding) => name !== 'fire.cover'
-
-/** First thickness at which every panel passes; where none does, the first of those that come nearest. */
-function leastThickness(job: Job): number {
-  let best: { heightMm: number; worst: number } = { heightMm: THICKNESS.most, worst: Infinity }
-  let first = 0
-  for (let heightMm: number = THICKNESS.least; heightMm <= THICKNESS.most; heightMm += THICKNESS.step) {
-    const contexts = contextsAt(job, heightMm).flatMap((level) => level.contexts)
-    const worstFor = remember<number>()
-    let worst = 0
-    for (let i = 0; i < contexts.length && isMet(worst, 1); i += 1) {
-      const at = (first + i) % contexts.length
-      worst = Math.max(worst, worstFor(slabKey(contexts[at]!), () => worstOf(contexts[at]!)))
-      if (!isMet(worst, 1)) first = at
-    }
-    if (isMet(worst, 1)) return heightMm
-    if (worst < best.worst - 1e-9) best = { heightMm, worst }
-  }
-  return best.heightMm
-}
-
-function worstOf(context: SlabContext): number {
-  const findings = [...chooseSlabBars(context).findings, ...sizeFindings(context)].filter(isForThickness)
-  return findings.reduce((most, { demand, capacity }) => Math.max(most, utilisationOf(demand, capacity)), 0)
-}
-
-function sizeFindings({ basis, brief, heightMm }: SlabContext): Finding[] {
-  if (brief.fireMinutes === 0) return []
-  const { size } = basis.slabFire(brief.fireMinutes, 'oneWay')
-  const working = () => `${size.working()}; slab ${figure(heightMm)} mm`
-  return [{ name: 'fire.size', clause: size.clause, demand: size.value, capacity: heightMm, unit: 'mm', working }]
 }
 
 function sizedPanel(context: SlabContext, level: string, barsFor: BarsFor): SizedPanel {
@@ -128,7 +89,10 @@ function steelOf({ bottom, tops, midspan }: SlabBars): SizedPanel['steel'] {
   const supports = tops
     .filter(({ place }) => place.direction === 'short' && isHogging(place))
     .map(({ flexure, layers }) => ({ required: flexure.requiredMm2, provided: layers ? layerAreaMm2(layers.middle) : 0 }))
-  const worst = supports.reduce((most, each) => (each.required > most.required ? each : most), supports[0] ?? { required: 0, provided: 0 })
+  const worst = supports.reduce(
+    (most, each) => (each.required > most.required ? each : most),
+    supports[0] ?? { required: 0, provided: 0 },
+  )
   return {
     midspanRequired: midspan.requiredMm2,
     midspanProvided: layerAreaMm2(bottom.short.middle),

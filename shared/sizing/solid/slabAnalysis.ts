@@ -64,7 +64,10 @@ function spanning(plan: SlabPlan, heightMm: number, depthMm: number, basis: Code
   const spanOf = ({ clearMm, ends }: SlabAxis) => basis.effectiveSpanMm(clearMm, heightMm, depthMm, [ends.start, ends.end])
   const [aMm, bMm] = [spanOf(a), spanOf(b)]
   if (isFree(a) && isFree(b))
-    throw new OutOfScopeError(`${plan.site.path}.edges`, 'expected two opposite supported edges, none of them free, for a solid panel')
+    throw new OutOfScopeError(
+      `${plan.site.path}.edges`,
+      'expected two opposite supported edges, none of them free, for a solid panel',
+    )
   const isEqual = Math.abs(aMm - bMm) < EQUAL_SPANS_MM
   const aFirst = isFree(b) || (!isFree(a) && (isEqual ? continuousEnds(a) > continuousEnds(b) : aMm < bMm))
   const [first, second, firstMm, secondMm] = aFirst ? [a, b, aMm, bMm] : [b, a, bMm, aMm]
@@ -105,7 +108,11 @@ function spanLine({ plan, first, firstMm, isTwoWay }: Spanning, loads: FloorLoad
   return { direction: first.direction, ends: first.ends, span: { spanMm: firstMm, loads, bayMm2: plan.areas.gross } }
 }
 
-function oneWay({ first, second, firstMm, secondMm }: Spanning, strip: ReturnType<typeof stripOf>, basis: CodeBasis): SlabAnalysis {
+function oneWay(
+  { first, second, firstMm, secondMm }: Spanning,
+  strip: ReturnType<typeof stripOf>,
+  basis: CodeBasis,
+): SlabAnalysis {
   const forces = stripForces(strip, basis.loadFactors)
   const at = (end: EndOfSpan): EndForces => ({ hoggingNmm: forces.hoggingNmm(end, 0), shearN: forces.shearN(end, 0) })
   return {
@@ -174,4 +181,3 @@ function raised(span: SlabSpan, panel: number, moments: EdgeMoments, neighbours:
   }
   return { ...span, ends: { start: at('start'), end: at('end') } }
 }
-

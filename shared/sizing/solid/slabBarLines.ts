@@ -44,7 +44,7 @@ function linesIn(
       each: 1,
       lines: `bars, ${layerText(layer)}`,
       pieces: lines.flatMap((line) => partsOf(line, layer)),
-      lapMm: context.basis.lapMm(layer.diameter, bars.isTop && isPoorBond(context.heightMm)).value,
+      lapMm: () => context.basis.lapMm(layer.diameter, bars.isTop && isPoorBond(context.heightMm)).value,
       clause: bars.clause,
     }
   })
@@ -71,7 +71,14 @@ export function bottomBarLines(context: SlabContext, { bottom }: SlabBars): BarL
   const named = (position: string) => ({ position, clause, isTop: false })
   return [
     ...linesIn(context, short.axis, other.clearMm, bottom.short, named('bottom, short span'), partsOf),
-    ...linesIn(context, other, short.axis.clearMm, bottom.long, named(`bottom, ${context.analysis.long ? 'long span' : 'distribution'}`), partsOf),
+    ...linesIn(
+      context,
+      other,
+      short.axis.clearMm,
+      bottom.long,
+      named(`bottom, ${context.analysis.long ? 'long span' : 'distribution'}`),
+      partsOf,
+    ),
   ]
 }
 
@@ -83,7 +90,8 @@ export function bottomBarLines(context: SlabContext, { bottom }: SlabBars): BarL
 export function topBarLines(context: SlabContext, { place, layers }: TopBars): BarLines[] {
   if (!layers) return []
   const { basis, analysis, heightMm } = context
-  const [axis, across] = place.direction === 'short' ? [analysis.short.axis, analysis.other] : [analysis.other, analysis.short.axis]
+  const [axis, across] =
+    place.direction === 'short' ? [analysis.short.axis, analysis.other] : [analysis.other, analysis.short.axis]
   const hogging = isHogging(place)
   const { spanMm } = place.span ?? analysis.short
   const partsOf = (line: SlabLine, { diameter }: BarLayer): number[][] => {
@@ -116,7 +124,7 @@ export function torsionBarLines(context: SlabContext, torsion: readonly TorsionB
       each: 1,
       lines: `bars, ${layerText(layer)}`,
       pieces: [...(before?.pieces ?? []), ...pieces],
-      lapMm: context.basis.lapMm(layer.diameter, face === 'top' && isPoorBond(context.heightMm)).value,
+      lapMm: () => context.basis.lapMm(layer.diameter, face === 'top' && isPoorBond(context.heightMm)).value,
       clause: 'BS 8110-1 3.5.3.5',
     })
   }

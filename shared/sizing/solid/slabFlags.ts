@@ -11,7 +11,9 @@ export function slabFlags(context: SlabContext): string[] {
   return [
     methodFlag(context),
     ...(plan.isRectangle ? [] : ['not a rectangle: sized on its least-area enclosing rectangle']),
-    ...(analysis.assumedEnds > 0 ? ['continuous edge without a neighbour spanning the same way: an equal span is assumed behind it'] : []),
+    ...(analysis.assumedEnds > 0
+      ? ['continuous edge without a neighbour spanning the same way: an equal span is assumed behind it']
+      : []),
     ...sides
       .filter(({ isMixed }) => isMixed)
       .map(({ edges }) => `edges ${edges.map((edge) => edge + 1).join(', ')}: continuous in part only, taken as discontinuous`),

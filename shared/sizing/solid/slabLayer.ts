@@ -25,26 +25,24 @@ export function layerAreaMm2({ diameter, spacing }: BarLayer): number {
 }
 
 /**
- * Layers of one diameter that a slab may be given, widest spacing first.
- *
- * Source: project rule, engine design section 4 (25 mm spacing steps)
- * @param greatestMm - greatest spacing the basis allows
- */
-export function layersOf(diameter: BarDiameter, greatestMm: number): BarLayer[] {
-  const widest = Math.max(CLOSEST_MM, Math.floor(greatestMm / SPACING_STEP_MM + 1e-9) * SPACING_STEP_MM)
-  const count = (widest - CLOSEST_MM) / SPACING_STEP_MM + 1
-  return Array.from({ length: count }, (_, i) => ({ diameter, spacing: widest - i * SPACING_STEP_MM }))
-}
-
-/**
  * Layer of one diameter with the widest spacing that gives an area; the closest where none does.
  *
  * Source: project rule, engine design section 4
  * @param neededMm2 - per metre
+ * @param greatestMm - greatest spacing the basis allows
  */
 export function layerFor(diameter: BarDiameter, neededMm2: number, greatestMm: number): BarLayer {
-  const layers = layersOf(diameter, greatestMm)
-  return layers.find((layer) => layerAreaMm2(layer) >= neededMm2) ?? layers.at(-1)!
+  const widest = neededMm2 > 0 ? Math.min(greatestMm, (barAreaMm2(diameter) * 1000) / neededMm2) : greatestMm
+  return { diameter, spacing: Math.max(CLOSEST_MM, Math.floor(widest / SPACING_STEP_MM + 1e-9) * SPACING_STEP_MM) }
+}
+
+/**
+ * The same layer one step closer; null where it is the closest.
+ *
+ * Source: project rule, engine design section 4 (25 mm spacing steps)
+ */
+export function closerLayer({ diameter, spacing }: BarLayer): BarLayer | null {
+  return spacing > CLOSEST_MM ? { diameter, spacing: spacing - SPACING_STEP_MM } : null
 }
 
 /**

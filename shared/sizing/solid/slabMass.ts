@@ -70,8 +70,14 @@ export function isPoorBond(heightMm: number): boolean {
  * Source: BS 4449, nominal masses
  * @param widthMm - clear width that the layer covers
  */
-export function layerMassKg(context: SlabContext, layer: BarLayer, parts: readonly number[], widthMm: number, isTop: boolean): number {
-  const lapMm = context.basis.lapMm(layer.diameter, isTop && isPoorBond(context.heightMm)).value
+export function layerMassKg(
+  context: SlabContext,
+  layer: BarLayer,
+  parts: readonly number[],
+  widthMm: number,
+  isTop: boolean,
+): number {
+  const lapMm = () => context.basis.lapMm(layer.diameter, isTop && isPoorBond(context.heightMm)).value
   const lengthMm = totalLengthMm({ pieces: [parts], each: lineCount(widthMm, layer.spacing), lapMm })
   return (lengthMm * BAR_MASS_KG_PER_M[layer.diameter]) / 1000
 }

@@ -71,12 +71,11 @@ function added(
   if (missingMm2 <= 1e-9) return []
   const widthMm = EXTENT * context.analysis.short.spanMm
   const greatest = context.basis.greatestSpacingMm('principal', context.heightMm).value
-  const options = CHOSEN_DIAMETERS.map((diameter): TorsionBars => {
-    const layer = layerFor(diameter, missingMm2, greatest)
+  const options = CHOSEN_DIAMETERS.map((diameter) => ({ layer: layerFor(diameter, missingMm2, greatest), diameter }))
+  const enough = options.filter(({ layer }) => layerAreaMm2(layer) >= missingMm2)
+  const made = (enough.length > 0 ? enough : options.slice(-1)).map(({ layer, diameter }): TorsionBars => {
     const parts = [widthMm, pastFaceMm(diameter, supportMm, context.brief.cover)]
     return { ...where, layer, parts, widthMm, massKg: layerMassKg(context, layer, parts, widthMm, where.face === 'top') }
   })
-  const enough = options.filter(({ layer }) => layerAreaMm2(layer) >= missingMm2)
-  const pool = enough.length > 0 ? enough : options.slice(-1)
-  return [pool.reduce((best, each) => (each.massKg < best.massKg ? each : best))]
+  return [made.reduce((best, each) => (each.massKg < best.massKg ? each : best))]
 }

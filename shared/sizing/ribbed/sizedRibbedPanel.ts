@@ -1,0 +1,75 @@
+import type { PanelLayout } from '../../layout/panelLayout'
+import type { EndOfSpan } from '../analysis/spanForces'
+import { barRuns } from '../barRuns'
+import { areaOf } from '../barSet'
+import { checkRow } from '../finding'
+import type { BarRun, SizedPanel } from '../sizedPanel'
+import { midspanBending } from './bottomFindings'
+import { bottomLines, topLines } from './ribBarLines'
+import { perRib, type RibContext } from './ribContext'
+import type { RibDesign, RibTask } from './ribDesign'
+import { ribFlags } from './ribFlags'
+import { shapeFindings } from './shapeFindings'
+import { supportBending } from './topFindings'
+
+const ENDS: readonly EndOfSpan[] = ['start', 'end']
+
+/**
+ * A designed ribbed panel as the take-off and the checks read it.
+ *
+ * Source: project rule, engine design section 9
+ */
+export function sizedRibbedPanel(
+  task: RibTask,
+  design: RibDesign,
+  { level, mark }: { readonly level: string; readonly mark: string },
+  layout: PanelLayout,
+): SizedPanel {
+  const { context } = task
+  const { basis, section, analysis, fireMinutes } = context
+  const findings = [...shapeFindings(basis, section, analysis, fireMinutes), ...design.findings]
+  return {
+    level,
+    mark,
+    depth: section.heightMm,
+    areas: layout.areas,
+    layout,
+    checks: findings.map((finding) => checkRow(finding, level, mark)),
+    moments: momentsOf(context),
+    steel: steelOf(context, design),
+    bars: runsOf(task, design),
+    flags: ribFlags(task),
+  }
+}
+
+function momentsOf(context: RibContext): SizedPanel['moments'] {
+  const { forces } = context.analysis
+  const supports = ENDS.map((end) => (context.ends[end].isContinuous ? forces.hoggingNmm(end, 0) : 0))
+  return { midspan: perRib(context, forces.saggingNmm) / 1e6, support: perRib(context, Math.max(...supports)) / 1e6 }
+}
+
+/** Steel at midspan, and at the continuous end that asks most; zeros without one. */
+function steelOf(context: RibContext, { bottom, tops }: RibDesign): SizedPanel['steel'] {
+  const supports = ENDS.filter((end) => context.ends[end].isContinuous).map((end) => ({
+    required: supportBending(context, end, tops[end]).requiredMm2,
+    provided: areaOf(tops[end]),
+  }))
+  const none = { required: 0, provided: 0 }
+  const worst = supports.reduce((most, each) => (each.required > most.required ? each : most), supports[0] ?? none)
+  return {
+    midspanRequired: midspanBending(context, bottom).flexure.requiredMm2,
+    midspanProvided: areaOf(bottom),
+    supportRequired: worst.required,
+    supportProvided: worst.provided,
+  }
+}
+
+function runsOf({ panel, context, rules }: RibTask, { bottom, tops }: RibDesign): BarRun[] {
+  const added = context.analysis.spanMm - panel.clearMm
+  return [
+    ...bottom.flatMap(({ diameter, count }) => barRuns(bottomLines(panel, diameter, count, rules))),
+    ...ENDS.flatMap((end) =>
+      tops[end].flatMap(({ diameter, count }) => topLines(panel, end, diameter, count, added, rules).flatMap(barRuns)),
+    ),
+  ]
+}
