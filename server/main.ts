@@ -1,13 +1,16 @@
 import { createServer, type Server } from 'node:http'
+import type { DataSource } from 'typeorm'
 import { createApp } from './app'
 import { createDataSource } from './dataSource'
 import { EnvError, readEnv, type Env } from './env'
-import { createLog } from './log'
-import { startMail } from './startMail'
+import { createLog, type Log } from './log'
 import { createPdfPrinter } from './reports/pdfPrinter'
 import { createAppraisalPool } from './services/appraisal/appraisalPool'
+import { tidy } from './services/tidy'
+import { startMail } from './startMail'
 
 const DRAIN_MS = 10_000
+const HOUR_MS = 3_600_000
 
 /** Told to whoever started the server, without a stack. */
 class StartError extends Error {}
@@ -33,11 +36,20 @@ async function drain(server: Server): Promise<void> {
   clearTimeout(late)
 }
 
+function tidyNowAndHourly(db: DataSource, log: Log): NodeJS.Timeout {
+  const run = () => void tidy(db.manager, new Date()).catch((cause: unknown) => log.error({ err: cause }, 'tidying failed'))
+  run()
+  return setInterval(run, HOUR_MS)
+}
+
 async function main(): Promise<void> {
   const env = readEnv(process.env)
   const log = createLog(env.logLevel)
   const db = createDataSource(env.database)
-  await db.initialize()
+  await db.initialize().catch((cause: Error) => {
+    throw new StartError(`The database cannot be reached: ${cause.message}`)
+  })
+  const tidying = tidyNowAndHourly(db, log)
   const appraisals = createAppraisalPool()
   const printer = createPdfPrinter(env.chromiumPath)
   const mail = await startMail({ db, env, log, printer })
@@ -49,6 +61,7 @@ async function main(): Promise<void> {
   const stop = async () => {
     if (isDraining) return
     isDraining = true
+    clearInterval(tidying)
     await drain(server)
     await mail.stop()
     await printer.close()

@@ -4,7 +4,7 @@ import { ribbedScheme, solidScheme } from './demoSchemes'
 
 const BEAM = 300
 
-/** Offices with longer spans round a court: an L-shaped corner bay with a stair in it. */
+/** Offices with longer spans one way, on frames 7.2 m apart: an L-shaped end bay with a stair in it. */
 export const GANNET_HOUSE: DemoProject = {
   region: 'Norvane',
   project: {
@@ -31,22 +31,21 @@ export const GANNET_HOUSE: DemoProject = {
       name: 'Office floors',
       repeat: 3,
       panels: [
-        panelOf('P1', rectangle(0, 0, 7200, 7500), edgesOf('dccd', BEAM)),
-        panelOf('P2', rectangle(7200, 0, 7200, 7500), edgesOf('dcdc', BEAM)),
+        panelOf('P1', rectangle(0, 0, 7200, 15_000), edgesOf('dcdd', BEAM), { ribDirection: 0 }),
+        panelOf('P2', rectangle(7200, 0, 7200, 15_000), edgesOf('dcdc', BEAM), { ribDirection: 0 }),
         panelOf(
           'P3',
           [
             [14_400, 0],
             [21_600, 0],
-            [21_600, 7500],
-            [17_400, 7500],
-            [17_400, 10_500],
-            [14_400, 10_500],
+            [21_600, 9000],
+            [18_600, 9000],
+            [18_600, 15_000],
+            [14_400, 15_000],
           ],
           edgesOf('dddddc', BEAM),
-          { voids: [rectangle(15_000, 7400, 1500, 2300)] },
+          { ribDirection: 0, voids: [rectangle(15_600, 10_400, 1800, 3200)] },
         ),
-        panelOf('P4', rectangle(0, 7500, 7200, 7500), edgesOf('cddd', BEAM)),
       ],
     },
   ],

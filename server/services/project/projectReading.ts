@@ -1,4 +1,4 @@
-import { compareMarks } from '#shared/comparison/compareSchemes'
+import { compareAllIn } from '#shared/comparison/compareAllIn'
 import type { Appraisal } from '#shared/contracts/appraisal'
 import type { ProjectReading } from '#shared/contracts/projectReading'
 import { allInCost } from '#shared/pricing/allInCost'
@@ -13,11 +13,13 @@ import { sheetOf } from './projectService'
 
 const NOTHING: Appraisal = { format: 'bothways.appraisal-result/1', schemes: [], comparison: null }
 
-/** Rates with every markup folded in, and the comparison made of those. */
+/** Rates with every markup folded in, and the comparison as readers outside the office see it. */
 function withAllInRates(appraisal: Appraisal): Appraisal {
   const schemes = appraisal.schemes.map((scheme) => ({ ...scheme, cost: scheme.cost && allInCost(scheme.cost) }))
-  const between = appraisal.comparison?.between
-  return { ...appraisal, schemes, comparison: between ? compareMarks(schemes, between) : null }
+  const [first, second] = (appraisal.comparison?.between ?? []).map((mark) =>
+    appraisal.schemes.find((scheme) => scheme.mark === mark),
+  )
+  return { ...appraisal, schemes, comparison: first && second ? compareAllIn(first, second) : null }
 }
 
 function withoutMoney(appraisal: Appraisal): Appraisal {
