@@ -43,6 +43,12 @@ function startWorker(): Worker {
   return worker
 }
 
+/** Takes our listeners off, by name: the thread keeps listeners of its own, without which no message arrives. */
+function quiet(worker: Worker): void {
+  worker.removeAllListeners('message')
+  worker.removeAllListeners('error')
+}
+
 /** What the outcome holds. @throws AppError where it holds the reasons why there is none */
 function required(outcome: AppraisalOutcome): ComparedAppraisal {
   switch (outcome.kind) {
@@ -74,7 +80,7 @@ export function createAppraisalPool(bounds: PoolBounds = BOUNDS): AppraisalPool 
     const worker = startWorker()
     all.add(worker)
     worker.once('message', () => {
-      worker.removeAllListeners()
+      quiet(worker)
       idle.push(worker)
       next()
     })
@@ -95,7 +101,7 @@ export function createAppraisalPool(bounds: PoolBounds = BOUNDS): AppraisalPool 
   function run(worker: Worker, { job, resolve, reject }: Task): void {
     const end = (settle: () => void, isSound: boolean) => {
       clearTimeout(late)
-      worker.removeAllListeners()
+      quiet(worker)
       if (isSound) idle.push(worker)
       else drop(worker)
       settle()
