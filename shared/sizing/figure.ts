@@ -4,8 +4,7 @@
  * Source: project rule, workings must be read by people and evaluated by tests
  */
 export function figure(value: number, decimals = 1): string {
-  const text = value.toFixed(decimals)
-  return decimals > 0 ? text.replace(/\.?0+$/, '') : text
+  return String(Number(value.toFixed(decimals)))
 }
 
 /**

@@ -7,11 +7,11 @@ import type { Finding } from './finding'
  * The two findings of a section in bending: K against the greatest K, and steel required against provided.
  *
  * Source: by the basis, `flexure`
- * @param where - opens the working, as `midspan`
+ * @param where - opens the working, as `midspan`; asked only when shown
  */
 export function flexureFindings(
   name: 'flexure.midspan' | 'flexure.support',
-  where: string,
+  where: () => string,
   { k, greatestK, requiredMm2, clause, kWorking, steelWorking }: Flexure,
   providedMm2: number,
 ): Finding[] {
@@ -23,7 +23,7 @@ export function flexureFindings(
       demand: k,
       capacity: greatestK,
       unit: '-',
-      working: () => `${where}: ${kWorking()} ${sign(k <= greatestK)} ${greatestK}`,
+      working: () => `${where()}: ${kWorking()} ${sign(k <= greatestK)} ${greatestK}`,
     },
     {
       name,
@@ -31,7 +31,7 @@ export function flexureFindings(
       demand: requiredMm2,
       capacity: providedMm2,
       unit: 'mm²',
-      working: () => `${where}: ${steelWorking()} ${sign(requiredMm2 <= providedMm2)} ${figure(providedMm2, 0)} mm² provided`,
+      working: () => `${where()}: ${steelWorking()} ${sign(requiredMm2 <= providedMm2)} ${figure(providedMm2, 0)} mm² provided`,
     },
   ]
 }
@@ -44,7 +44,7 @@ export function flexureFindings(
  */
 export function steelLimitFindings(
   basis: CodeBasis,
-  where: string,
+  where: () => string,
   zone: TensionZone,
   concreteMm2: number,
   providedMm2: number,
@@ -58,7 +58,7 @@ export function steelLimitFindings(
       demand: least.value,
       capacity: providedMm2,
       unit: 'mm²',
-      working: () => `${where}: ${least.working()}; ${provided()}`,
+      working: () => `${where()}: ${least.working()}; ${provided()}`,
     },
     {
       name: 'steel.most',
@@ -66,7 +66,7 @@ export function steelLimitFindings(
       demand: providedMm2,
       capacity: most.value,
       unit: 'mm²',
-      working: () => `${where}: ${most.working()}; ${provided()}`,
+      working: () => `${where()}: ${most.working()}; ${provided()}`,
     },
   ]
 }
@@ -78,7 +78,7 @@ export function steelLimitFindings(
  */
 export function deflectionFinding(
   basis: CodeBasis,
-  where: string,
+  where: () => string,
   input: Parameters<CodeBasis['spanDepthLimit']>[0] & { readonly section: BendingSection },
 ): Finding {
   const limit = basis.spanDepthLimit(input)
@@ -90,6 +90,6 @@ export function deflectionFinding(
     demand: actual,
     capacity: limit.value,
     unit: '-',
-    working: () => `${where}: l/d = ${figure(spanMm, 0)}/${figure(section.depthMm)} = ${figure(actual)}; ${limit.working()}`,
+    working: () => `${where()}: l/d = ${figure(spanMm, 0)}/${figure(section.depthMm)} = ${figure(actual)}; ${limit.working()}`,
   }
 }

@@ -16,7 +16,7 @@ function periodOf(minutes: number): FirePeriod {
   return minutes
 }
 
-const answer = (value: number, clause: string, text: string): Answer => ({ value, clause, working: () => text })
+const answer = (value: number, clause: string, working: () => string): Answer => ({ value, clause, working })
 
 /**
  * Least thickness and axis distance of a solid slab, or of the flange of a ribbed one, in fire.
@@ -28,8 +28,8 @@ export function slabFire(minutes: number, action: SlabAction): FireDemand {
   const row = SLAB_FIRE_SIZES[periodOf(minutes)]
   const clause = 'EN 1992-1-2 5.7.2, Table 5.8'
   return {
-    size: answer(row.thicknessMm, clause, `REI ${minutes}: hs ≥ ${row.thicknessMm} mm`),
-    axisMm: answer(row[action], clause, `REI ${minutes}: a ≥ ${row[action]} mm`),
+    size: answer(row.thicknessMm, clause, () => `REI ${minutes}: hs ≥ ${row.thicknessMm} mm`),
+    axisMm: answer(row[action], clause, () => `REI ${minutes}: a ≥ ${row[action]} mm`),
     sideAxisMm: null,
   }
 }
@@ -52,9 +52,11 @@ export function ribFire(minutes: number, ribMm: number, isContinuous: boolean, i
   const clause = `EN 1992-1-2 5.7.5, Table ${byTable56 ? '5.6' : '5.5'}`
   const side = axis + SIDE_AXIS_ADDITION_MM
   return {
-    size: answer(widths[0]!, clause, `R ${minutes}: b ≥ ${widths[0]} mm`),
-    axisMm: answer(axis, clause, `R ${minutes}, b = ${figure(ribMm)}: a ≥ ${figure(axis)} mm`),
+    size: answer(widths[0]!, clause, () => `R ${minutes}: b ≥ ${widths[0]} mm`),
+    axisMm: answer(axis, clause, () => `R ${minutes}, b = ${figure(ribMm)}: a ≥ ${figure(axis)} mm`),
     sideAxisMm:
-      ribMm <= widths[1]! ? answer(side, clause, `R ${minutes}: asd ≥ a + ${SIDE_AXIS_ADDITION_MM} = ${figure(side)} mm`) : null,
+      ribMm <= widths[1]!
+        ? answer(side, clause, () => `R ${minutes}: asd ≥ a + ${SIDE_AXIS_ADDITION_MM} = ${figure(side)} mm`)
+        : null,
   }
 }

@@ -12,7 +12,7 @@ import { axisDistanceMm, concreteAreaMm2, effectiveDepthMm, midspanSection } fro
  */
 export function bottomFindings(context: RibContext, bars: BarSet): Finding[] {
   const { basis, section, analysis } = context
-  const where = `midspan, ${setText(bars)} a rib`
+  const where = () => `midspan, ${setText(bars)} a rib`
   const bending = midspanBending(context, bars)
   const { flexure, momentNmm, bendingSection } = bending
   const providedMm2 = areaOf(bars)

@@ -36,12 +36,12 @@ export function supportBending(context: RibContext, end: EndOfSpan, bars: BarSet
  */
 export function topFindings(context: RibContext, end: EndOfSpan, bars: BarSet): Finding[] {
   const { basis, section } = context
-  const where = `${endName(context, end)}, ${setText(bars)} a rib`
+  const where = () => `${endName(context, end)}, ${setText(bars)} a rib`
   const { over, atRib } = supportBending(context, end, bars)
   const provided = areaOf(bars)
   return [
     ...flexureFindings('flexure.support', where, over, provided),
-    ...(atRib ? flexureFindings('flexure.support', `${where}, where the solid zone ends`, atRib, provided) : []),
+    ...(atRib ? flexureFindings('flexure.support', () => `${where()}, where the solid zone ends`, atRib, provided) : []),
     ...steelLimitFindings(basis, where, tensionZone(context, bars), supportAreaMm2(context), provided),
     ...(section.toppingMm >= section.coverMm + section.linkMm + thickest(bars) ? [] : [topFitFinding(context, end, bars)]),
   ]

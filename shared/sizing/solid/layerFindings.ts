@@ -42,7 +42,7 @@ export function topFlexure(context: SlabContext, place: TopPlace, diameter: BarD
 
 function spacingFinding(
   context: SlabContext,
-  where: string,
+  where: () => string,
   place: 'greatestMoment' | 'principal' | 'secondary',
   layer: BarLayer,
 ): Finding {
@@ -53,11 +53,11 @@ function spacingFinding(
     demand: layer.spacing,
     capacity: most.value,
     unit: 'mm',
-    working: () => `${where}: ${most.working()}; ${layerText(layer)}`,
+    working: () => `${where()}: ${most.working()}; ${layerText(layer)}`,
   }
 }
 
-function limitFindings(context: SlabContext, where: string, depthMm: number, layer: BarLayer): Finding[] {
+function limitFindings(context: SlabContext, where: () => string, depthMm: number, layer: BarLayer): Finding[] {
   const { basis, heightMm } = context
   const zone = { widthMm: METRE_MM, webMm: METRE_MM, heightMm, depthMm }
   return [
@@ -73,7 +73,7 @@ function limitFindings(context: SlabContext, where: string, depthMm: number, lay
  */
 export function slabDeflection(context: SlabContext, layer: BarLayer, flexure: Flexure): Finding {
   const { basis, analysis, brief } = context
-  return deflectionFinding(basis, `short span, midspan, ${layerText(layer)}`, {
+  return deflectionFinding(basis, () => `short span, midspan, ${layerText(layer)}`, {
     position: analysis.short.position,
     spanMm: analysis.short.spanMm,
     section: slabSection(context, layer.diameter, null),
@@ -90,7 +90,7 @@ export function slabDeflection(context: SlabContext, layer: BarLayer, flexure: F
  * Source: by the basis
  */
 export function shortBottomFindings(context: SlabContext, layer: BarLayer, flexure: Flexure): Finding[] {
-  const where = `short span, midspan, ${layerText(layer)}`
+  const where = () => `short span, midspan, ${layerText(layer)}`
   return [
     ...flexureFindings('flexure.midspan', where, flexure, layerAreaMm2(layer)),
     slabDeflection(context, layer, flexure),
@@ -125,7 +125,7 @@ function axisFinding({ basis, brief, analysis }: SlabContext, { diameter }: BarL
 export function longBottomFindings(context: SlabContext, layer: BarLayer, flexure: Flexure, main: BarLayer): Finding[] {
   const { basis, analysis } = context
   if (analysis.long) {
-    const where = `long span, midspan, ${layerText(layer)}`
+    const where = () => `long span, midspan, ${layerText(layer)}`
     const depthMm = layerDepthMm(context, layer.diameter, main.diameter)
     return [
       ...flexureFindings('flexure.midspan', where, flexure, layerAreaMm2(layer)),
@@ -133,7 +133,7 @@ export function longBottomFindings(context: SlabContext, layer: BarLayer, flexur
     ]
   }
   const { share, clause } = basis.secondary
-  const where = `across the span, ${layerText(layer)}`
+  const where = () => `across the span, ${layerText(layer)}`
   const demand = share * layerAreaMm2(main)
   return [
     {
@@ -143,7 +143,7 @@ export function longBottomFindings(context: SlabContext, layer: BarLayer, flexur
       capacity: layerAreaMm2(layer),
       unit: 'mm²',
       working: () =>
-        `${where}: ${share} of the main bars = ${share}·${figure(layerAreaMm2(main), 0)} = ${figure(demand, 0)} mm²; ` +
+        `${where()}: ${share} of the main bars = ${share}·${figure(layerAreaMm2(main), 0)} = ${figure(demand, 0)} mm²; ` +
         `${figure(layerAreaMm2(layer), 0)} mm² provided`,
     },
     spacingFinding(context, where, 'secondary', layer),
@@ -163,7 +163,7 @@ export function topLayerFindings(
   flexure: Flexure,
   depthMm: number,
 ): Finding[] {
-  const where = `${placeName(place)}, ${layer ? layerText(layer) : 'no bars'}`
+  const where = () => `${placeName(place)}, ${layer ? layerText(layer) : 'no bars'}`
   const provided = layer ? layerAreaMm2(layer) : 0
   if (isHogging(place))
     return [
@@ -178,7 +178,7 @@ export function topLayerFindings(
       demand: flexure.requiredMm2,
       capacity: provided,
       unit: 'mm²',
-      working: () => `${where}: ${share} of the midspan moment; ${flexure.steelWorking()}; ${figure(provided, 0)} mm² provided`,
+      working: () => `${where()}: ${share} of the midspan moment; ${flexure.steelWorking()}; ${figure(provided, 0)} mm² provided`,
     },
     ...(layer ? [spacingFinding(context, where, 'principal', layer)] : []),
   ]
