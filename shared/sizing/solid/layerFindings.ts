@@ -6,7 +6,11 @@ import { deflectionFinding, flexureFindings, steelLimitFindings } from '../flexu
 import { METRE_MM, type SlabContext, type TopPlace, isHogging, layerDepthMm, placeName } from './slabContext'
 import { layerAreaMm2, layerText } from './slabLayer'
 
-/** A metre of slab with one layer of tension bars. */
+/**
+ * A metre of slab with one layer of tension bars.
+ *
+ * Source: statics, effective depth as `layerDepthMm`
+ */
 export function slabSection(context: SlabContext, diameter: BarDiameter, outer: BarDiameter | null): BendingSection {
   return { widthMm: METRE_MM, depthMm: layerDepthMm(context, diameter, outer), flange: null }
 }

@@ -70,7 +70,11 @@ export function placeName({ direction, side, end }: TopPlace): string {
   return `${direction} span, ${endName({ ends: { start: side, end: side } }, end)}`
 }
 
-/** Layer given for the top at a place, null where the engine chooses. */
+/**
+ * Layer given for the top at a place, null where the engine chooses.
+ *
+ * Source: project rule, given X is the direction spanned first
+ */
 export function givenTop({ given }: SlabContext, { direction }: TopPlace): BarLayer | null {
   return (direction === 'short' ? given?.topX : given?.topY) ?? null
 }
