@@ -83,6 +83,7 @@ export function ledgerDrawing(
     },
     [
       patternDefinitions(id, ['chartRibbed', 'chartSolid']),
+      ...entries.map((_, index) => rowLine((index + 1) * rowPx, widthPx)),
       ...scale.ticks.map((tick) => gridLine(scale.x(tick), height, tick === 0)),
       ...entries.flatMap((entry, index) => bar(entry, index * rowPx, scale, id, rowPx)),
       runningLine(entries, scale, rowPx),
@@ -105,6 +106,10 @@ function gridLine(x: number, height: number, isZero: boolean): SvgNode {
     stroke: isZero ? 'var(--ink)' : 'var(--hair)',
     'stroke-width': isZero ? 1.25 : 1,
   })
+}
+
+function rowLine(y: number, widthPx: number): SvgNode {
+  return svgNode('line', { x1: 0, y1: y - 0.5, x2: widthPx, y2: y - 0.5, stroke: 'var(--hair)', 'stroke-width': 1 })
 }
 
 function bar({ difference }: LedgerEntry, top: number, scale: LedgerScale, id: string, rowPx: number): SvgNode[] {

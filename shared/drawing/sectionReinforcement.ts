@@ -49,9 +49,17 @@ function sizedRibBars(panel: SizedPanel): Bar[] {
   return [...counts].map(([diameter, count]) => ({ diameter, count: Math.max(1, Math.round(count / ribs)) }))
 }
 
+/** The short span's bars lie lowest; the other direction's are the first whose position says so. */
 function sizedLayers(panel: SizedPanel): Pick<SectionReinforcement, 'cutLayer' | 'lyingLayer'> {
-  const [main] = bottomRuns(panel)
+  const [main, ...others] = bottomRuns(panel)
   if (main === undefined || panel.steel.midspanProvided === 0) return { cutLayer: null, lyingLayer: null }
   const spacing = Math.round((area(main.diameter) * 1000) / panel.steel.midspanProvided)
-  return { cutLayer: { diameter: main.diameter, spacing }, lyingLayer: null }
+  const across = others.find(({ position }) => !position.startsWith('bottom, short span'))
+  return { cutLayer: { diameter: main.diameter, spacing }, lyingLayer: across ? layerOf(across) : null }
+}
+
+/** The layer that a run's working names, as `24 bars, φ8 at 200`; null where it names none. */
+function layerOf({ diameter, countWorking }: BarRun): BarLayer | null {
+  const [, spacing] = /\bat (\d+)/.exec(countWorking) ?? []
+  return spacing === undefined ? null : { diameter, spacing: Number(spacing) }
 }

@@ -3,7 +3,7 @@ import type { Rate } from '#shared/contracts/rateBook'
 import { Decimal } from '#shared/pricing/decimal'
 import { unitOf } from '#shared/takeoff/measurementRules'
 import { formatDecimal } from '../base/formatDecimal'
-import { itemInWords } from '../quantity/itemInWords'
+import { itemInSentence } from '../quantity/itemInWords'
 import { costDifference } from './compareAnswer'
 import type { Pair } from './phrase'
 
@@ -43,15 +43,17 @@ export function compareStandfirst(pair: Pair<SchemeResult>, comparison: Comparis
 function saving(pair: Pair<SchemeResult>): string {
   const difference = costDifference(pair)
   const [ribbed, solid] = [pair.ribbed.cost!, pair.solid.cost!]
-  const totals = `${formatDecimal(ribbed.total, { decimals: 0 })} against ${formatDecimal(solid.total, { decimals: 0 })} ${ribbed.currency}`
-  if (difference === null || difference.isZero()) return `Ribbed and solid total the same: ${totals}.`
-  const dearer = Decimal.max(ribbed.total, solid.total)
-  const share = difference.abs().div(dearer).times(100).toNumber()
-  return `The saving is ${share < 10 ? share.toFixed(1) : Math.round(share)}% of the dearer floors: ribbed ${totals}, at the rates of today.`
+  if (difference === null || difference.isZero())
+    return `Both total ${formatDecimal(ribbed.total, { decimals: 0 })} ${ribbed.currency}.`
+  const isRibbed = difference.isNegative()
+  const [cheaper, dearer] = isRibbed ? [ribbed, solid] : [solid, ribbed]
+  const totals = `${formatDecimal(cheaper.total, { decimals: 0 })} against ${formatDecimal(dearer.total, { decimals: 0 })} ${ribbed.currency}`
+  const share = difference.abs().div(dearer.total).times(100).toNumber()
+  return `${isRibbed ? 'Ribbed' : 'Solid'} saves ${share < 10 ? share.toFixed(1) : Math.round(share)}% of the dearer floors: ${totals}, at the likely rates of the book.`
 }
 
 function turn({ point, change, isInsideBook }: Tip, currency: string): string {
-  const name = itemInWords(point.item).toLowerCase()
+  const name = itemInSentence(point.item)
   const at = `${formatDecimal(point.value, { decimals: 2 })} ${currency}/${unitOf(point.item)}`
   const way = change > 0 ? 'rises' : 'falls'
   const inside = isInsideBook ? ' That lies inside the range of the book.' : ''

@@ -20,6 +20,7 @@ export interface ChartColours {
 }
 
 type Kind = 'ribbed' | 'solid'
+const FONT = '"Source Sans 3", sans-serif'
 
 /** Cost by work section as pairs of bars in the schemes' colours and hatches, each with its own label. */
 export function costChartOption(
@@ -28,7 +29,7 @@ export function costChartOption(
   colours: ChartColours,
   isNarrow: boolean,
 ): CostChartOption {
-  const axisText = { color: colours.ink2, fontSize: 13, fontFamily: 'Source Sans 3' }
+  const axisText = { color: colours.ink2, fontSize: 13, fontFamily: FONT }
   return {
     animation: false,
     aria: { enabled: false, decal: { show: true } },
@@ -44,7 +45,7 @@ export function costChartOption(
       type: 'category',
       inverse: true,
       data: sections.map(({ name }) => name),
-      axisLabel: { ...axisText, color: colours.ink, fontSize: isNarrow ? 12 : 14, width: isNarrow ? 88 : 170, overflow: 'break' },
+      axisLabel: { ...axisText, color: colours.ink, fontSize: isNarrow ? 12 : 14, width: isNarrow ? 88 : 200, overflow: 'break' },
       axisLine: { lineStyle: { color: colours.ink, width: 1.5 } },
       axisTick: { show: false },
     },
@@ -82,7 +83,7 @@ function series(kind: Kind, sections: readonly SectionCost[], colours: ChartColo
       show: true,
       position: 'right',
       color: isRibbed ? colours.clayInk : colours.slate,
-      fontFamily: 'Source Sans 3',
+      fontFamily: FONT,
       fontSize: 13,
       formatter: ({ dataIndex }) => label(kind, sections[dataIndex]),
     },
@@ -102,7 +103,7 @@ function tooltipOf(colours: ChartColours, currency: string): TooltipComponentOpt
     borderColor: colours.ink,
     borderRadius: 0,
     shadowBlur: 0,
-    textStyle: { color: colours.ink, fontFamily: 'Source Sans 3', fontSize: 13 },
+    textStyle: { color: colours.ink, fontFamily: FONT, fontSize: 13 },
     valueFormatter: (value) => `${formatDecimal(String(value), { decimals: 2 })} ${currency}`,
   }
 }

@@ -45,7 +45,7 @@ export function ledgerRows(comparison: Comparison, pair: Pair<SchemeResult>): Le
       same.length === 0
         ? null
         : {
-            names: same.map(({ name }) => name.toLowerCase()).join(', '),
+            names: same.map(({ name }) => name.charAt(0).toLowerCase() + name.slice(1)).join(', '),
             amount: sumOf(same.map(({ first }) => new Decimal(first))).toFixed(),
           },
     total: {
@@ -61,10 +61,10 @@ function named(item: string, ribbed: Cost, solid: Cost): { name: string; working
   if (!code.success) {
     const percent =
       ribbed.markups.find(({ name }) => name === item)?.percent ?? solid.markups.find(({ name }) => name === item)?.percent
-    return { name: `${MARKUPS[item] ?? item}, ${percent} %`, working: 'on every item, those that cost the same included' }
+    return { name: `${MARKUPS[item] ?? item}, ${percent} %`, working: 'on every item, same ones included' }
   }
   const lines = [ribbed, solid].map(({ lines: all }) => all.find((line) => line.item === item))
-  const quantities = lines.map((line) => (line ? formatDecimal(line.quantity) : 'none'))
+  const quantities = lines.flatMap((line) => (line ? [formatDecimal(line.quantity)] : []))
   const rates = [...new Set(lines.flatMap((line) => (line ? [formatDecimal(line.rate)] : [])))]
   return { name: itemInWords(code.data), working: `${quantities.join(' and ')} ${unitOf(code.data)} at ${rates.join(' and ')}` }
 }

@@ -23,6 +23,12 @@ export function itemInWords(item: ItemCode): string {
   return NAMES[item] ?? item
 }
 
+/** The same inside a sentence: 'mesh A142', 'bars, 8 mm'. */
+export function itemInSentence(item: ItemCode): string {
+  const words = itemInWords(item)
+  return words.charAt(0).toLowerCase() + words.slice(1)
+}
+
 /** Work section that an item is billed under. */
 export function workSectionOf(item: ItemCode): WorkSection {
   if (item.startsWith('blocks.')) return 'Blocks'
