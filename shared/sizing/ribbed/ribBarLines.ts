@@ -1,8 +1,8 @@
 import type { BarDiameter } from '../../contracts/appraisal'
 import type { EndOfSpan } from '../analysis/spanForces'
-import { type BarLines, pastFaceMm } from '../barRuns'
+import { type BarLines, pastFaceMm } from '../bars/barRuns'
 import type { CodeBasis } from '../codeBasis'
-import type { LineEndOnEdge } from '../lineEndAt'
+import type { LineEndOnEdge } from '../bars/lineEndAt'
 import { TOP_REACH } from './ribContext'
 import type { RibbedPanel } from './ribbedPanel'
 

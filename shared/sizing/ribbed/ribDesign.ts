@@ -1,17 +1,17 @@
 import type { Bar, BarDiameter, RibbedScheme } from '../../contracts/appraisal'
 import type { EndOfSpan } from '../analysis/spanForces'
-import { totalLengthMm } from '../barRuns'
-import type { BarSet } from '../barSet'
-import { type Candidate, chooseLeastMass } from '../chooseLeastMass'
+import { totalLengthMm } from '../bars/barRuns'
+import type { BarSet } from '../bars/barSet'
+import { type Candidate, chooseLeastMass } from '../bars/chooseLeastMass'
 import { type Finding, isMet } from '../finding'
 import { BAR_MASS_KG_PER_M, CHOSEN_DIAMETERS } from '../tables/bars'
-import { bottomFindings } from './bottomFindings'
+import { bottomFindings } from './checks/bottomFindings'
 import { bottomLines, type RibBarRules, topLines } from './ribBarLines'
 import type { RibContext } from './ribContext'
 import type { RibbedPanel } from './ribbedPanel'
-import { shearFindings } from './ribShear'
+import { shearFindings } from './checks/ribShear'
 import type { Compared } from './solidZones'
-import { simpleEdgeFinding, supportBending, topFindings } from './topFindings'
+import { simpleEdgeFinding, supportBending, topFindings } from './checks/topFindings'
 
 /** The bars of a panel's ribs, and what the checks find. */
 export interface RibDesign {

@@ -1,7 +1,7 @@
 import type { Point } from '../../geometry/point'
 import type { PanelLayout } from '../../layout/panelLayout'
 import { OutOfScopeError } from '../../outOfScope'
-import { type LineEndOnEdge, lineEndAt } from '../lineEndAt'
+import { type LineEndOnEdge, lineEndAt } from '../bars/lineEndAt'
 import type { PanelSite } from '../panelSite'
 
 /** A line of rib bars with its ends; start and end in rib direction. */

@@ -6,7 +6,7 @@ import { endName, type RibContext } from './ribContext'
 import type { RibAnalysis } from './ribAnalysis'
 import { isMixedEnd, type RibbedPanel } from './ribbedPanel'
 import type { RibTask } from './ribDesign'
-import { shapeFindings } from './shapeFindings'
+import { shapeFindings } from './checks/shapeFindings'
 
 /**
  * Assumptions and approximations of one ribbed panel, in sentences.

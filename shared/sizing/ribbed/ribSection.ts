@@ -1,5 +1,5 @@
 import type { Brief, RibbedScheme } from '../../contracts/appraisal'
-import { type BarSet, centroidMm } from '../barSet'
+import { type BarSet, centroidMm } from '../bars/barSet'
 import type { BendingSection, RibShape } from '../codeBasis'
 
 /** Cross-section of one rib with its share of the topping, mm. */

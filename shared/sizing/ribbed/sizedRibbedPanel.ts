@@ -1,16 +1,16 @@
 import type { PanelLayout } from '../../layout/panelLayout'
 import type { EndOfSpan } from '../analysis/spanForces'
-import { barRuns } from '../barRuns'
-import { areaOf } from '../barSet'
+import { barRuns } from '../bars/barRuns'
+import { areaOf } from '../bars/barSet'
 import { checkRow } from '../finding'
 import type { BarRun, SizedPanel } from '../sizedPanel'
-import { midspanBending } from './bottomFindings'
+import { midspanBending } from './checks/bottomFindings'
 import { bottomLines, topLines } from './ribBarLines'
 import { perRib, type RibContext } from './ribContext'
 import type { RibDesign, RibTask } from './ribDesign'
 import { ribFlags } from './ribFlags'
-import { shapeFindings } from './shapeFindings'
-import { supportBending } from './topFindings'
+import { shapeFindings } from './checks/shapeFindings'
+import { supportBending } from './checks/topFindings'
 
 const ENDS: readonly EndOfSpan[] = ['start', 'end']
 

@@ -4,7 +4,7 @@ import { figure } from '../figure'
 import type { Finding } from '../finding'
 import { deflectionFinding, flexureFindings, steelLimitFindings } from '../flexureFindings'
 import { METRE_MM, type SlabContext, type TopPlace, isHogging, layerDepthMm, placeName } from './slabContext'
-import { layerAreaMm2, layerText } from './slabLayer'
+import { layerAreaMm2, layerText } from './bars/slabLayer'
 
 /**
  * A metre of slab with one layer of tension bars.

@@ -1,8 +1,8 @@
 import { type Finding, isMet, utilisationOf } from '../finding'
 import { remember } from '../remember'
-import { bottomAlternatives } from './chooseBottomBars'
-import { chooseSlabBars } from './chooseSlabBars'
-import { topAlternatives } from './chooseTopBars'
+import { bottomAlternatives } from './bars/chooseBottomBars'
+import { chooseSlabBars } from './bars/chooseSlabBars'
+import { topAlternatives } from './bars/chooseTopBars'
 import { sizeFindings } from './layerFindings'
 import { type SlabContext, slabKey, topPlaces } from './slabContext'
 

@@ -12,7 +12,7 @@ import { simpleSpanForces } from '#shared/sizing/analysis/spanForces'
 import { en1992Basis } from '#shared/sizing/en1992/en1992Basis'
 import { effectiveFlangeWidth } from '#shared/sizing/en1992/flangeWidth'
 import { basicSpanDepth, spanDepthRatioOfSteel, STRUCTURAL_SYSTEM } from '#shared/sizing/en1992/spanDepthLimit'
-import { layerAreaMm2 } from '#shared/sizing/solid/slabLayer'
+import { layerAreaMm2 } from '#shared/sizing/solid/bars/slabLayer'
 
 /** The tolerances of the case sheet. */
 const TWO_PERCENT = 0.02

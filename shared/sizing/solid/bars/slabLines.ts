@@ -1,9 +1,9 @@
-import { chordsAt } from '../../geometry/region'
-import { boundsOf } from '../../geometry/ring'
-import { FIT_TOLERANCE_MM } from '../../geometry/tolerance'
-import { panelField } from '../../layout/panelField'
-import { type LineEndOnEdge, lineEndAt } from '../lineEndAt'
-import type { SlabAxis, SlabPlan } from './slabPlan'
+import { chordsAt } from '../../../geometry/region'
+import { boundsOf } from '../../../geometry/ring'
+import { FIT_TOLERANCE_MM } from '../../../geometry/tolerance'
+import { panelField } from '../../../layout/panelField'
+import { type LineEndOnEdge, lineEndAt } from '../../bars/lineEndAt'
+import type { SlabAxis, SlabPlan } from '../slabPlan'
 
 /** A line of bars inside the clear outline, voids left out. */
 export interface SlabLine {

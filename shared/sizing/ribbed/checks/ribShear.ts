@@ -1,9 +1,9 @@
-import type { EndOfSpan } from '../analysis/spanForces'
-import { type BarSet, areaOf, thickest } from '../barSet'
-import { figure } from '../figure'
-import type { Finding } from '../finding'
-import { type RibContext, TOP_REACH, endName, perRib } from './ribContext'
-import { effectiveDepthMm } from './ribSection'
+import type { EndOfSpan } from '../../analysis/spanForces'
+import { type BarSet, areaOf, thickest } from '../../bars/barSet'
+import { figure } from '../../figure'
+import type { Finding } from '../../finding'
+import { type RibContext, TOP_REACH, endName, perRib } from '../ribContext'
+import { effectiveDepthMm } from '../ribSection'
 
 /** Bottom bars of a rib and its top bars at one end. */
 export interface RibBars {

@@ -1,8 +1,8 @@
-import type { CodeBasis } from '../codeBasis'
-import { figure } from '../figure'
-import type { Finding } from '../finding'
-import type { RibAnalysis } from './ribAnalysis'
-import type { RibSection } from './ribSection'
+import type { CodeBasis } from '../../codeBasis'
+import { figure } from '../../figure'
+import type { Finding } from '../../finding'
+import type { RibAnalysis } from '../ribAnalysis'
+import type { RibSection } from '../ribSection'
 
 /**
  * What the checks find for the shape of the ribs: spacing and slenderness, topping, and sizes in fire.

@@ -1,11 +1,11 @@
-import type { BarLayer } from '../../contracts/appraisal'
-import type { EndOfSpan } from '../analysis/spanForces'
-import { pastFaceMm } from '../barRuns'
-import { CHOSEN_DIAMETERS } from '../tables/bars'
-import type { SlabContext, TopPlace } from './slabContext'
+import type { BarLayer } from '../../../contracts/appraisal'
+import type { EndOfSpan } from '../../analysis/spanForces'
+import { pastFaceMm } from '../../bars/barRuns'
+import { CHOSEN_DIAMETERS } from '../../tables/bars'
+import type { SlabContext, TopPlace } from '../slabContext'
 import { layerAreaMm2, layerFor, type StripLayers } from './slabLayer'
 import { layerMassKg } from './slabMass'
-import type { SlabSide } from './slabPlan'
+import type { SlabSide } from '../slabPlan'
 
 /** Corner steel as a share of the short midspan steel, by how many of its two edges are discontinuous. */
 const SHARES = [0, 0.375, 0.75] as const

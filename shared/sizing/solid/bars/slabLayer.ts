@@ -1,5 +1,5 @@
-import type { BarDiameter, BarLayer } from '../../contracts/appraisal'
-import { barAreaMm2 } from '../tables/bars'
+import type { BarDiameter, BarLayer } from '../../../contracts/appraisal'
+import { barAreaMm2 } from '../../tables/bars'
 
 /**
  * Step of bar spacings, and the closest, mm.

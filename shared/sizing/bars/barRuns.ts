@@ -1,7 +1,7 @@
-import type { BarDiameter } from '../contracts/appraisal'
-import { figure } from './figure'
-import type { BarRun } from './sizedPanel'
-import { STOCK_LENGTH_MM } from './tables/bars'
+import type { BarDiameter } from '../../contracts/appraisal'
+import { figure } from '../figure'
+import type { BarRun } from '../sizedPanel'
+import { STOCK_LENGTH_MM } from '../tables/bars'
 
 /** Bars of one position to be scheduled: each piece is one line of bars, its length as the parts it adds up from, mm. */
 export interface BarLines {

@@ -1,9 +1,9 @@
-import { type BarSet, areaOf, countOf, setText, thickest } from '../barSet'
-import { figure } from '../figure'
-import type { Finding } from '../finding'
-import { deflectionFinding, flexureFindings, steelLimitFindings } from '../flexureFindings'
-import { type RibContext, RIB_AGGREGATE_MM, perRib } from './ribContext'
-import { axisDistanceMm, concreteAreaMm2, effectiveDepthMm, midspanSection } from './ribSection'
+import { type BarSet, areaOf, countOf, setText, thickest } from '../../bars/barSet'
+import { figure } from '../../figure'
+import type { Finding } from '../../finding'
+import { deflectionFinding, flexureFindings, steelLimitFindings } from '../../flexureFindings'
+import { type RibContext, RIB_AGGREGATE_MM, perRib } from '../ribContext'
+import { axisDistanceMm, concreteAreaMm2, effectiveDepthMm, midspanSection } from '../ribSection'
 
 /**
  * What the checks find for the bottom bars of a rib: bending at midspan, deflection, least and most steel, room, axis distance in fire.

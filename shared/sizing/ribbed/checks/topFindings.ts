@@ -1,11 +1,11 @@
-import type { EndOfSpan } from '../analysis/spanForces'
-import { type BarSet, areaOf, countOf, setText, thickest } from '../barSet'
-import type { BendingSection } from '../codeBasis'
-import { figure } from '../figure'
-import type { Finding } from '../finding'
-import { flexureFindings, steelLimitFindings } from '../flexureFindings'
-import { type RibContext, RIB_AGGREGATE_MM, endName, perRib, zoneFaceMm } from './ribContext'
-import { concreteAreaMm2, effectiveDepthMm } from './ribSection'
+import type { EndOfSpan } from '../../analysis/spanForces'
+import { type BarSet, areaOf, countOf, setText, thickest } from '../../bars/barSet'
+import type { BendingSection } from '../../codeBasis'
+import { figure } from '../../figure'
+import type { Finding } from '../../finding'
+import { flexureFindings, steelLimitFindings } from '../../flexureFindings'
+import { type RibContext, RIB_AGGREGATE_MM, endName, perRib, zoneFaceMm } from '../ribContext'
+import { concreteAreaMm2, effectiveDepthMm } from '../ribSection'
 
 /** Compression at the bottom of a support: the whole spacing inside a solid zone, the rib alone without one. */
 function supportSection({ section, solidZoneMm }: RibContext, bars: BarSet): BendingSection {

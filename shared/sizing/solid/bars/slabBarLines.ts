@@ -1,13 +1,13 @@
-import type { BarLayer } from '../../contracts/appraisal'
-import { type BarLines, pastFaceMm } from '../barRuns'
-import type { LineEndOnEdge } from '../lineEndAt'
+import type { BarLayer } from '../../../contracts/appraisal'
+import { type BarLines, pastFaceMm } from '../../bars/barRuns'
+import type { LineEndOnEdge } from '../../bars/lineEndAt'
 import type { SlabBars } from './chooseSlabBars'
 import type { TopBars } from './chooseTopBars'
-import { isHogging, type SlabContext } from './slabContext'
+import { isHogging, type SlabContext } from '../slabContext'
 import { layerText, type StripLayers } from './slabLayer'
 import { type SlabLine, slabLines } from './slabLines'
 import { EDGE_STRIP, isPoorBond, lineCount, SLAB_TOP_REACH } from './slabMass'
-import type { SlabAxis } from './slabPlan'
+import type { SlabAxis } from '../slabPlan'
 import type { TorsionBars } from './torsionBars'
 
 /** A strip of the panel across the bars, shares of the clear width, and the layer that lies in it. */

@@ -1,5 +1,5 @@
-import type { Check } from '../contracts/appraisal'
-import { type Finding, isMet, utilisationOf } from './finding'
+import type { Check } from '../../contracts/appraisal'
+import { type Finding, isMet, utilisationOf } from '../finding'
 
 /** A way to reinforce: what it weighs and what its checks find, which is asked only when needed. */
 export interface Candidate<Option> {

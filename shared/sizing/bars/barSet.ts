@@ -1,5 +1,5 @@
-import type { Bar, BarDiameter } from '../contracts/appraisal'
-import { BAR_MASS_KG_PER_M, barAreaMm2 } from './tables/bars'
+import type { Bar, BarDiameter } from '../../contracts/appraisal'
+import { BAR_MASS_KG_PER_M, barAreaMm2 } from '../tables/bars'
 
 /** Bars lying side by side in one layer, one entry a diameter. */
 export type BarSet = readonly Bar[]

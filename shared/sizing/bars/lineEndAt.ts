@@ -1,8 +1,8 @@
-import type { Point } from '../geometry/point'
-import { distance, edgeOfRing } from '../geometry/ring'
-import { distanceToSegment } from '../geometry/segment'
-import { DRAWN_TOLERANCE_MM } from '../geometry/tolerance'
-import type { PanelSite } from './panelSite'
+import type { Point } from '../../geometry/point'
+import { distance, edgeOfRing } from '../../geometry/ring'
+import { distanceToSegment } from '../../geometry/segment'
+import { DRAWN_TOLERANCE_MM } from '../../geometry/tolerance'
+import type { PanelSite } from '../panelSite'
 
 /** Where a line of bars ends: on an edge of the outline, or at a void. */
 export interface LineEndOnEdge {

@@ -1,6 +1,6 @@
-import type { BarLayer } from '../../contracts/appraisal'
-import { type Finding, isMet, utilisationOf } from '../finding'
-import { METRE_MM, type SlabContext } from './slabContext'
+import type { BarLayer } from '../../../contracts/appraisal'
+import { type Finding, isMet, utilisationOf } from '../../finding'
+import { METRE_MM, type SlabContext } from '../slabContext'
 import { closerLayer, layerFor, type StripLayers } from './slabLayer'
 
 /**

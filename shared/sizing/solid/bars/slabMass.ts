@@ -1,10 +1,10 @@
-import type { BarLayer } from '../../contracts/appraisal'
-import type { EndOfSpan } from '../analysis/spanForces'
-import { pastFaceMm, totalLengthMm } from '../barRuns'
-import { BAR_MASS_KG_PER_M } from '../tables/bars'
-import { isHogging, type SlabContext, type TopPlace } from './slabContext'
+import type { BarLayer } from '../../../contracts/appraisal'
+import type { EndOfSpan } from '../../analysis/spanForces'
+import { pastFaceMm, totalLengthMm } from '../../bars/barRuns'
+import { BAR_MASS_KG_PER_M } from '../../tables/bars'
+import { isHogging, type SlabContext, type TopPlace } from '../slabContext'
 import type { StripLayers } from './slabLayer'
-import type { SlabAxis } from './slabPlan'
+import type { SlabAxis } from '../slabPlan'
 
 /** A section deeper than this has poor bond at its top, mm. Source: EN 1992-1-1:2004, 8.4.2, Figure 8.2 */
 const GOOD_BOND_MM = 250
