@@ -111,9 +111,13 @@ export async function repeatInvitation(db: EntityManager, who: SignedIn, origin:
   })
 }
 
-/** Refuses to leave the firm without an admin who can sign in. Holds the firm's row, so that two admins cannot remove each other. */
-async function requireOtherAdmin(tx: EntityManager, firmId: string, id: string): Promise<void> {
+/** Holds the firm's row to the end of the transaction. To be the first read of it, so that all others see what came before. */
+async function holdFirm(tx: EntityManager, firmId: string): Promise<void> {
   await tx.findOne(FirmEntity, { where: { id: firmId }, lock: { mode: 'pessimistic_write' } })
+}
+
+/** Refuses to leave the firm without an admin who can sign in. The firm's row is held, so that two admins cannot remove each other. */
+async function requireOtherAdmin(tx: EntityManager, firmId: string, id: string): Promise<void> {
   const admins = await tx.findBy(PersonRoleEntity, { firmId, role: 'admin', personId: Not(id) })
   for (const { personId } of admins) if (await tx.existsBy(PersonEntity, { firmId, id: personId, state: 'active' })) return
   throw new AppError('conflict', 'The firm would be left without an admin.', [
@@ -139,6 +143,7 @@ export async function changePerson(
   requireRole(who, 'admin')
   const { firmId } = who
   return await inTransaction(db, async (tx) => {
+    await holdFirm(tx, firmId)
     const before = await readPerson(tx, firmId, id)
     requireReachableState(await requirePerson(tx, firmId, id), input)
     const staysAdmin = input.state === 'active' && input.roles.includes('admin')

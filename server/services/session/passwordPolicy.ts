@@ -5,7 +5,7 @@ import { COMMON_PASSWORDS } from './commonPasswords'
 const LEAST_OF_ITS_OWN = 8
 const SHORTEST_WORD = 4
 const LONGEST_PIECE = 6
-const RUNS = ['abcdefghijklmnopqrstuvwxyz', '01234567890', '09876543210', 'qwertyuiop', 'asdfghjkl', 'zxcvbnm']
+const RUNS = ['abcdefghijklmnopqrstuvwxyz', '0123456789', '9876543210', 'qwertyuiop', 'asdfghjkl', 'zxcvbnm']
 
 const bare = (text: string): string => text.toLowerCase().replace(/[^\p{L}\p{N}]/gu, '')
 
