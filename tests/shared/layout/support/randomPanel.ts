@@ -3,21 +3,23 @@ import type { Panel, RibbedScheme } from '#shared/contracts/appraisal'
 import { checkPanel } from '#shared/layout/checks/checkPanel'
 import { panelOf, rectangle, ribbedScheme } from './floorParts'
 
-const millimetres = (min: number, max: number) => fc.double({ min, max, noNaN: true, noDefaultInfinity: true })
+/** Numbers that meet no whole millimetre or thousandth but at 0: exact fits are tried on purpose, not by chance. */
+const uneven = (min: number, max: number) =>
+  fc.integer({ min: Math.ceil(min * 1009), max: Math.floor(max * 1009) }).map((part) => part / 1009)
 type Outline = [number, number][]
 
-const rectangles = fc.tuple(millimetres(2500, 9000), millimetres(2500, 9000)).map(([x, y]) => rectangle(0, 0, x, y))
+const rectangles = fc.tuple(uneven(2500, 9000), uneven(2500, 9000)).map(([x, y]) => rectangle(0, 0, x, y))
 
 const wholeRectangles = fc
   .tuple(fc.integer({ min: 5, max: 18 }), fc.integer({ min: 5, max: 18 }))
   .map(([x, y]) => rectangle(0, 0, x * 500, y * 500))
 
 const rectanglesWithJointOnSide = fc
-  .tuple(millimetres(4000, 9000), millimetres(2500, 9000), millimetres(0.2, 0.8))
+  .tuple(uneven(4000, 9000), uneven(2500, 9000), uneven(0.2, 0.8))
   .map(([x, y, share]): Outline => [[0, 0], [x * share, 0], ...rectangle(0, 0, x, y).slice(1)])
 
 const lShapes = fc
-  .tuple(millimetres(5000, 10_000), millimetres(5000, 10_000), millimetres(0.3, 0.7), millimetres(0.3, 0.7))
+  .tuple(uneven(5000, 10_000), uneven(5000, 10_000), uneven(0.3, 0.7), uneven(0.3, 0.7))
   .map(([x, y, shareX, shareY]): Outline => [
     [0, 0],
     [x, 0],
@@ -28,13 +30,7 @@ const lShapes = fc
   ])
 
 const skewQuads = fc
-  .tuple(
-    millimetres(3000, 9000),
-    millimetres(3000, 9000),
-    millimetres(-1500, 1500),
-    millimetres(-1500, 1500),
-    millimetres(-1000, 1000),
-  )
+  .tuple(uneven(3000, 9000), uneven(3000, 9000), uneven(-1500, 1500), uneven(-1500, 1500), uneven(-1000, 1000))
   .map(([x, y, a, b, c]): Outline => [
     [0, 0],
     [x, c],
@@ -42,16 +38,14 @@ const skewQuads = fc
     [a, y - c],
   ])
 
-const triangles = fc
-  .tuple(millimetres(4000, 9000), millimetres(0, 8000), millimetres(3000, 8000))
-  .map(([x, apexX, y]): Outline => [
-    [0, 0],
-    [x, 0],
-    [apexX, y],
-  ])
+const triangles = fc.tuple(uneven(4000, 9000), uneven(0, 8000), uneven(3000, 8000)).map(([x, apexX, y]): Outline => [
+  [0, 0],
+  [x, 0],
+  [apexX, y],
+])
 
 const stars = fc
-  .array(millimetres(2200, 5500), { minLength: 5, maxLength: 11 })
+  .array(uneven(2200, 5500), { minLength: 5, maxLength: 11 })
   .map((radii): Outline =>
     radii.map((radius, i) => {
       const angle = (2 * Math.PI * i) / radii.length + 0.05
@@ -72,7 +66,7 @@ const edgeRecords = (count: number) =>
     fc.oneof(
       {
         weight: 4,
-        arbitrary: fc.record({ supportWidth: millimetres(0, 400), continuity: fc.constantFrom('continuous', 'discontinuous') }),
+        arbitrary: fc.record({ supportWidth: uneven(0, 400), continuity: fc.constantFrom('continuous', 'discontinuous') }),
       },
       { weight: 1, arbitrary: fc.constant({ supportWidth: 0, continuity: 'free' }) },
     ),
@@ -83,9 +77,9 @@ const edgeRecords = (count: number) =>
 const voids = fc.array(
   fc
     .record({
-      at: fc.tuple(millimetres(-4000, 8000), millimetres(-4000, 8000)),
-      size: millimetres(150, 1200),
-      turn: fc.oneof(fc.constant(0), millimetres(0, 360)),
+      at: fc.tuple(uneven(-4000, 8000), uneven(-4000, 8000)),
+      size: uneven(150, 1200),
+      turn: fc.oneof(fc.constant(0), uneven(0, 360)),
       corners: fc.integer({ min: 2, max: 6 }),
     })
     .map(({ at: [x, y], size, turn, corners }): Outline => {
@@ -112,7 +106,7 @@ export const randomPanel: fc.Arbitrary<Panel> = fc
     fc.record({
       outline: fc.constant(outline),
       edges: fc.oneof(edgeRecords(1), edgeRecords(outline.length)),
-      ribDirection: fc.oneof(fc.constantFrom(0, 45, 90), fc.double({ min: 0, max: 180, maxExcluded: true, noNaN: true })),
+      ribDirection: fc.oneof(fc.constantFrom(0, 45, 90), uneven(0, 179.9)),
       voids,
     }),
   )
@@ -136,10 +130,10 @@ export const randomScheme: fc.Arbitrary<RibbedScheme> = fc
     }),
     ribWidth: fc.constantFrom(100, 120, 150),
     edgeStrip: fc.constantFrom(0, 100, 215.5),
-    solidZone: fc.oneof(fc.constantFrom(0, 300), millimetres(0, 900)),
+    solidZone: fc.oneof(fc.constantFrom(0, 300), uneven(0, 900)),
     crossRibs: fc.oneof(
       fc.constantFrom('none', 'rule'),
-      fc.record({ every: millimetres(500, 3000), width: fc.constantFrom(50, 100, 150) }),
+      fc.record({ every: uneven(500, 3000), width: fc.constantFrom(50, 100, 150) }),
     ),
     trimmerWidth: fc.constantFrom(0, 100, 180),
     cutBlocks: fc.boolean(),
