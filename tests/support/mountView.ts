@@ -15,9 +15,13 @@ export interface Mounted {
 const NAMES = ['signIn', 'passwordReset', 'invitation', 'projects', 'brief', 'levels', 'received', 'people', 'rates'] as const
 
 /** Mounts a view at an address, in the document, with a router that knows every name and shows only this view. */
-export async function mountView(view: Component, at = '/view', props: Record<string, unknown> = {}): Promise<Mounted> {
+export async function mountView(
+  view: Component,
+  at = '/view',
+  props: Record<string, unknown> = {},
+  pinia = createPinia(),
+): Promise<Mounted> {
   document.body.innerHTML = ''
-  const pinia = createPinia()
   setActivePinia(pinia)
   const elsewhere = { render: () => h('p', 'elsewhere') }
   const router = createRouter({

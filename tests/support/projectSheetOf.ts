@@ -75,6 +75,7 @@ export function aSummary(given: Partial<ProjectSummary> = {}): ProjectSummary {
     place: 'Ostrel Isles',
     levelCount: 1,
     panelCount: 7,
+    canOpen: true,
     edition: { region: 'Eastmere', number: 4, currency: 'USD' },
     totals: [
       { mark: 'R1', kind: 'ribbed', total: '80030.08' },
