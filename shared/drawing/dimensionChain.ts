@@ -19,16 +19,17 @@ export interface DimensionChain {
 const THIN = 0.75
 const CLEAR_PX = 6
 const FIGURE_PX = 13
-/** Mean advance of a figure at 13 px: a figure wider than its stretch is left away, its total still stands. */
+/** Mean advance of a figure at 13 px: one wider than its stretch stands outside the chain's end, or is left to the total. */
 const ADVANCE_PX = 6.6
 
 /** Thin line with oblique ticks, the figures over it (to its left when vertical), extension lines 6 clear and 6 over. */
 export function dimensionChain(chain: DimensionChain): SvgNode {
   const { stationsPx, figures, typed } = chain
-  const stretches = figures.flatMap((figure, i) => {
-    if (figure === '') return []
+  const given = figures.flatMap((figure, i) => (figure === '' ? [] : [i]))
+  const stretches = given.map((i) => {
     const colour = typed?.has(i) === true ? 'var(--pencil)' : 'var(--ink)'
-    return [stretch(chain, stationsPx[i]!, stationsPx[i + 1]!, figure, colour)]
+    const outside = i === given.at(-1) ? 'after' : i === given[0] ? 'before' : null
+    return stretch(chain, [stationsPx[i]!, stationsPx[i + 1]!], figures[i]!, colour, outside)
   })
   const used = stationsPx.filter((_, i) => (figures[i] ?? '') !== '' || (figures[i - 1] ?? '') !== '')
   return svgNode('g', { class: 'dimension-chain' }, [...used.flatMap((at) => extension(chain, at)), ...stretches])
@@ -40,7 +41,13 @@ function extension(chain: DimensionChain, stationPx: number): SvgNode[] {
   return [across(chain, stationPx, chain.objectPx + toward * CLEAR_PX, chain.atPx + toward * CLEAR_PX, 'var(--ink-3)')]
 }
 
-function stretch(chain: DimensionChain, from: number, to: number, figure: string, colour: string): SvgNode {
+function stretch(
+  chain: DimensionChain,
+  [from, to]: readonly [number, number],
+  figure: string,
+  colour: string,
+  outside: 'before' | 'after' | null,
+): SvgNode {
   const { atPx, direction } = chain
   const isHorizontal = direction === 'horizontal'
   const ends = isHorizontal ? { x1: from - 4, y1: atPx, x2: to + 4, y2: atPx } : { x1: atPx, y1: from, x2: atPx, y2: to }
@@ -48,9 +55,13 @@ function stretch(chain: DimensionChain, from: number, to: number, figure: string
     svgNode('line', { ...ends, stroke: colour, 'stroke-width': THIN }),
     ...[from, to].map((at) => tick(chain, at, colour)),
   ]
-  const middle = round((from + to) / 2)
-  if (Math.abs(to - from) < figure.length * ADVANCE_PX + 4) return svgNode('g', {}, lines)
-  const [x, y] = isHorizontal ? [middle, atPx - 5] : [atPx - 5, middle]
+  const isNarrow = Math.abs(to - from) < figure.length * ADVANCE_PX + 4
+  if (isNarrow && outside === null) return svgNode('g', {}, lines)
+  const half = (figure.length * ADVANCE_PX) / 2 + 7
+  const onward = Math.sign(to - from)
+  const along = !isNarrow ? (from + to) / 2 : outside === 'after' ? to + onward * half : from - onward * half
+  const across = isNarrow ? atPx + 4 : atPx - 5
+  const [x, y] = isHorizontal ? [round(along), across] : [across, round(along)]
   const turn = isHorizontal ? undefined : `rotate(-90 ${x} ${y})`
   const attributes = { x, y, 'text-anchor': 'middle', 'font-size': FIGURE_PX, fill: colour, transform: turn }
   return svgNode('g', {}, [...lines, svgNode('text', attributes, [figure])])

@@ -43,16 +43,16 @@ export function panelDrawing({ id, panel: input, widthPx, mostHeightPx, margins 
   const { panel, kind, layout } = input
   const half = edgeRecords(panel).map(({ supportWidth }) => supportWidth / 2)
   const { scale, heightPx } = fitPlan(boundsOf(panel.outline), margins, widthPx, mostHeightPx)
-  const clear =
-    layout?.clear ??
-    offsetRing(
-      panel.outline,
-      half.map((width) => width),
-    ).ring
+  const clear = layout?.clear ?? offsetRing(panel.outline, half).ring
   const colour = kind === 'ribbed' ? 'var(--clay)' : 'var(--slate)'
   const body =
     layout === null
-      ? [svgNode('polygon', { points: pointsText(scale, panel.outline), fill: patternFill(id, 'chartSolid') })]
+      ? [
+          svgNode('polygon', {
+            points: pointsText(scale, panel.outline),
+            fill: kind === 'solid' ? patternFill(id, 'chartSolid') : 'var(--paper)',
+          }),
+        ]
       : [
           svgNode('polygon', { points: pointsText(scale, panel.outline), fill: 'var(--paper)' }),
           ...solidParts(panel, layout, scale, id),

@@ -18,7 +18,7 @@ export interface TypedLength {
 const FIRST_CHAIN_PX = 26
 const NEXT_CHAIN_PX = 26
 const BUBBLE_PX = 10
-const BUBBLE_CLEAR_PX = 28
+const BUBBLE_CLEAR_PX = 34
 
 /** Room that chains and bubbles need around a floor. */
 export function planMargins(outlines: readonly Ring[]): PlanMargins {
@@ -27,7 +27,8 @@ export function planMargins(outlines: readonly Ring[]): PlanMargins {
     const grid = planGrid(outlines, axis)
     return FIRST_CHAIN_PX + (chainCount(grid) - 1) * NEXT_CHAIN_PX + BUBBLE_CLEAR_PX + BUBBLE_PX + 2
   }
-  return { left: depth('y'), right: 14, top: 14, bottom: depth('x') }
+  const { corners, lines } = planGrid(outlines, 'x')
+  return { left: depth('y'), right: corners.length > lines.length ? 40 : 14, top: 28, bottom: depth('x') }
 }
 
 /** Dimension chains below and to the left of a floor, the nearest the smallest, with bubbles at their lines. */

@@ -93,7 +93,7 @@ export function planSvg(layers: PlanLayers, panels: readonly Panel[], title: str
   ])
 }
 
-/** Panels of a level with what one sized scheme makes of them; one that was not sized is drawn as not counted. */
+/** Panels of a level with what one sized scheme makes of them; one that was left out is drawn as not counted, all of them plain while `sized` is null. */
 export function planPanels(
   level: Pick<Level, 'mark' | 'panels'>,
   sized: SizedScheme | null,
@@ -102,7 +102,7 @@ export function planPanels(
   return level.panels.map((panel) => {
     const found = sized?.panels.find((each) => each.level === level.mark && each.mark === panel.mark)
     const isBothWays = found?.moments.midspanLong !== undefined
-    return { panel, kind, layout: found?.layout ?? null, isCounted: found !== undefined, isBothWays }
+    return { panel, kind, layout: found?.layout ?? null, isCounted: sized === null || found !== undefined, isBothWays }
   })
 }
 

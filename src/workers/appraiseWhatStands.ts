@@ -5,6 +5,7 @@ import type { AppraisalFile } from '#shared/contracts/appraisal'
 import { OutOfScopeError } from '#shared/outOfScope'
 import type { TracedFile } from './fileRows'
 import { namesFloor, pathInSheet, rowCount, withoutRows } from './fileRows'
+import { panelMisfits } from './panelMisfits'
 
 type Appraise = (file: AppraisalFile) => FullAppraisal
 
@@ -26,8 +27,12 @@ function attempt(appraise: Appraise, file: AppraisalFile): { full: FullAppraisal
  * so that the schemes still answer the same floor.
  */
 export function appraiseWhatStands(appraise: Appraise, given: TracedFile): { full: FullAppraisal | null; problems: ApiIssue[] } {
-  const problems: ApiIssue[] = []
-  let traced = given
+  const misfits = panelMisfits(given.file)
+  const problems: ApiIssue[] = misfits.map(({ path, message }) => ({ path: pathInSheet(path, given.origin), message }))
+  let traced = withoutRows(
+    given,
+    misfits.map(({ path }) => path),
+  )
   while (traced.file.levels.length > 0 && traced.file.schemes.length > 0) {
     const { full, issues } = attempt(appraise, traced.file)
     const { origin } = traced

@@ -1,10 +1,11 @@
 import type { Edge, Panel } from '../../contracts/appraisal'
+import { findNeighbours } from '../neighbours'
 import { edgeRecords } from './edgeRecords'
-import { meetingEdges } from './meetingEdges'
 
 /**
- * Panels with one edge's record changed; where neighbours share the edge, theirs change with it, so that both sides of a
- * support line agree. A free edge has no support, so its width becomes 0; an edge that stops being free takes `usualWidthMm`.
+ * Panels with one edge's record changed; where neighbours stand on the same support, theirs change with it, so that both sides
+ * of a support line agree. A free edge has no support, so its width becomes 0; an edge that stops being free takes
+ * `usualWidthMm`.
  *
  * @param change - what was typed: any of width, kind, continuity
  * @param usualWidthMm - width for an edge that stops being free without a width of its own
@@ -22,7 +23,8 @@ export function setEdge(
     const width = before.continuity === 'free' ? (change.supportWidth ?? usualWidthMm) : after.supportWidth
     return { ...after, supportWidth: width }
   }
-  const targets = [{ panel, edge }, ...meetingEdges(panels, panel, edge)]
+  const met = findNeighbours({ panels: [...panels] }).filter((each) => each.panel === panel && each.edge === edge)
+  const targets = [{ panel, edge }, ...met.map(({ neighbour, neighbourEdge }) => ({ panel: neighbour, edge: neighbourEdge }))]
   return panels.map((each, p) => {
     const edges = targets.filter((target) => target.panel === p).map((target) => target.edge)
     if (edges.length === 0) return each

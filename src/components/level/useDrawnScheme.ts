@@ -22,13 +22,13 @@ export function useDrawnScheme(level: Ref<StoredLevel | null>) {
   const panelResults = computed(() => result.value?.panels.filter((each) => each.level === levelMark.value) ?? [])
   const checks = computed(() => result.value?.checks.filter((each) => each.level === levelMark.value) ?? [])
   const drawn = computed(() => (level.value === null ? [] : planPanels(level.value, sized.value, kind.value)))
-  /** Problems of the level, by path within it. */
-  const issues = computed(() => {
-    const prefix = `levels.${store.levels.findIndex(({ id }) => id === level.value?.id)}.`
-    return store.problems
+  /** Problems under a path, by path within it. */
+  const issuesUnder = (prefix: string) =>
+    store.problems
       .filter(({ path }) => path.startsWith(prefix))
       .map(({ path, message }) => ({ path: path.slice(prefix.length), message }))
-  })
+  const issues = computed(() => issuesUnder(`levels.${store.levels.findIndex(({ id }) => id === level.value?.id)}.`))
+  const schemeIssues = computed(() => issuesUnder(`schemes.${store.schemes.findIndex(({ id }) => id === schemeId.value)}.`))
 
-  return { scheme, schemeId, kind, result, sized, depths, panelResults, checks, drawn, issues }
+  return { scheme, schemeId, kind, result, sized, depths, panelResults, checks, drawn, issues, schemeIssues }
 }
