@@ -1,6 +1,6 @@
 import { beforeEach, describe, expect, it } from 'vitest'
 import { z } from 'zod'
-import { ApiFailure } from '../../../src/api/apiFailure'
+import type { ApiFailure } from '../../../src/api/apiFailure'
 import { onUnauthenticated, request } from '../../../src/api/http'
 import { failing, fakeApi } from '../../support/fakeApi'
 

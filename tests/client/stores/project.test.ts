@@ -164,7 +164,8 @@ describe('project store', () => {
   it('gives a reader what the server appraised and sends nothing', async () => {
     const workers = stillWorkers()
     const { project, levels, schemes, edition } = aSheet()
-    const { markups: _markups, editionId: _editionId, ...shown } = project
+    const { id, version, name, reference, place, use, brief, updatedAt, updatedBy } = project
+    const shown = { id, version, name, reference, place, use, brief, updatedAt, updatedBy }
     const { region, number, currency, baseDate } = edition!
     const reading = {
       project: shown,
