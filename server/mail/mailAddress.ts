@@ -8,9 +8,9 @@ export interface Mailbox {
 
 /** `Name <name@example.com>` or a bare address. @throws RangeError when the address is not one plain address */
 export function parseMailbox(text: string): Mailbox {
-  const named = /^\s*"?([^"<>]*?)"?\s*<([^<>]+)>\s*$/.exec(text)
+  const named = /^\s*"?([^"<>]*?)"?\s*<([^<>]+)>\s*$/.exec(requireLine(text))
   const address = requireAddress(named ? named[2]! : text)
-  return { name: requireLine(named ? named[1]! : ''), address }
+  return { name: named ? named[1]! : '', address }
 }
 
 /** One plain address in lower case. @throws RangeError for anything else: a list, a group, a line break, a quoted part */

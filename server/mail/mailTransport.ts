@@ -30,7 +30,7 @@ const TIMEOUTS = { connectionTimeout: 10_000, greetingTimeout: 10_000, socketTim
 const LOOPBACK = /^(127\.\d+\.\d+\.\d+|localhost|\[::1\])$/
 
 /** Settings of a server by its address: TLS is required, unless nothing leaves this machine. */
-function serverOptions(smtpUrl: string): SMTPTransport.Options {
+export function serverOptions(smtpUrl: string): SMTPTransport.Options {
   const url = new URL(smtpUrl)
   const isSecure = url.protocol === 'smtps:'
   const isLoopback = LOOPBACK.test(url.hostname)

@@ -38,8 +38,11 @@ async function printPage(browser: Browser, page: string): Promise<Buffer> {
   }
 }
 
-/** Starts Chromium at the first print and again after it has ended; it ends with us, since it is led through a pipe. */
-export function createPdfPrinter(chromiumPath: string): PdfPrinter {
+/**
+ * Starts Chromium at the first print and again after it has ended; it ends with us, since it is led through a pipe.
+ * @param mostWaiting - pages that may wait or be printed at once
+ */
+export function createPdfPrinter(chromiumPath: string, mostWaiting: number = MOST_WAITING): PdfPrinter {
   let starting: Promise<Browser> | null = null
   let last: Promise<unknown> = Promise.resolve()
   let waiting = 0
@@ -81,7 +84,7 @@ export function createPdfPrinter(chromiumPath: string): PdfPrinter {
 
   return {
     async print(page) {
-      if (waiting >= MOST_WAITING)
+      if (waiting >= mostWaiting)
         throw new AppError('limited', 'Too many reports wait to be printed. Try again shortly.', undefined, 10)
       waiting += 1
       const turn = last.then(() => printOnce(page))
