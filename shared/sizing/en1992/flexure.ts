@@ -48,8 +48,8 @@ function rectangle(widthMm: number, depthMm: number, momentNmm: number, isRedist
 
 function inFlange(whole: Flexure, thicknessMm: number, depthMm: number): Flexure {
   const block = 0.8 * neutralAxisMm(whole, depthMm)
-  const note = () => `; stress block 0.8x = ${figure(block)} ≤ hf = ${figure(thicknessMm)}: in the flange`
-  return { ...whole, steelWorking: () => whole.steelWorking() + note() }
+  const note = () => `0.8x = ${figure(block)} ≤ hf = ${figure(thicknessMm)}, in the flange; `
+  return { ...whole, steelWorking: () => note() + whole.steelWorking() }
 }
 
 /** Flange overhangs carry what they can at full stress; the web carries the rest as a rectangle. */

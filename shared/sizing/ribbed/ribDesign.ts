@@ -1,9 +1,9 @@
 import type { Bar, BarDiameter, RibbedScheme } from '../../contracts/appraisal'
 import type { EndOfSpan } from '../analysis/spanForces'
 import { totalLengthMm } from '../bars/barRuns'
-import type { BarSet } from '../bars/barSet'
+import { areaOf, type BarSet } from '../bars/barSet'
 import { type Candidate, chooseLeastMass } from '../bars/chooseLeastMass'
-import { type Finding, isMet } from '../finding'
+import type { Finding } from '../finding'
 import { BAR_MASS_KG_PER_M, CHOSEN_DIAMETERS } from '../tables/bars'
 import { bottomFindings } from './checks/bottomFindings'
 import { bottomLines, type RibBarRules, topLines } from './ribBarLines'
@@ -58,29 +58,24 @@ function choose(massOf: MassOf, findingsOf: (set: BarSet) => readonly Finding[])
   return chooseLeastMass(candidates).option
 }
 
-/** What the bars of one panel are chosen by. `isZoneGiven`: then bars may help shear; a zone left to the engine is widened instead. */
+/** What the bars of one panel are chosen by. */
 export interface RibTask {
   readonly panel: RibbedPanel
   readonly context: RibContext
   readonly scheme: RibbedScheme
   readonly rules: RibBarRules
-  readonly isZoneGiven: boolean
 }
 
 /**
- * Bottom bars of a panel's ribs: the given ones, or those of least mass. They do not depend on the width of a zone left to the engine.
+ * Bottom bars of a panel's ribs: the given ones, or those of least mass. Bars are not added for shear: a solid zone is widened for it.
  *
  * Source: project rule, engine design section 4
  */
-export function chooseBottom({ panel, context, scheme, rules, isZoneGiven }: RibTask): BarSet {
+export function chooseBottom({ panel, context, scheme, rules }: RibTask): BarSet {
   if (scheme.ribBars !== 'computed') return scheme.ribBars
-  const simpleEnds = isZoneGiven ? ENDS.filter((end) => !panel.ends[end].isContinuous) : []
   return choose(
     massBy((diameter) => totalLengthMm(bottomLines(panel, diameter, 1, rules))),
-    (set) => [
-      ...bottomFindings(context, set),
-      ...simpleEnds.flatMap((end) => shearFindings(context, end, { bottom: set, top: set })),
-    ],
+    (set) => bottomFindings(context, set),
   )
 }
 
@@ -89,16 +84,14 @@ export function chooseBottom({ panel, context, scheme, rules, isZoneGiven }: Rib
  *
  * Source: project rule, engine design section 4
  */
-export function chooseTop({ panel, context, scheme, rules, isZoneGiven }: RibTask, end: EndOfSpan, bottom: BarSet): BarSet {
+export function chooseTop({ panel, context, scheme, rules }: RibTask, end: EndOfSpan): BarSet {
   const { isContinuous } = panel.ends[end]
   if (isContinuous && scheme.topBars !== 'computed') return scheme.topBars
   const added = context.analysis.spanMm - context.clearMm
   const massOf = massBy((diameter) =>
     topLines(panel, end, diameter, 1, added, rules).reduce((sum, lines) => sum + totalLengthMm(lines), 0),
   )
-  if (!isContinuous) return choose(massOf, (set) => [simpleEdgeFinding(context, end, set)])
-  const shear = (set: BarSet) => (isZoneGiven ? shearFindings(context, end, { bottom, top: set }) : [])
-  return choose(massOf, (set) => [...topFindings(context, end, set), ...shear(set)])
+  return choose(massOf, (set) => (isContinuous ? topFindings(context, end, set) : [simpleEdgeFinding(context, end, set)]))
 }
 
 /**
@@ -109,7 +102,7 @@ export function chooseTop({ panel, context, scheme, rules, isZoneGiven }: RibTas
 export function designRibs(task: RibTask): RibDesign {
   const { context, panel } = task
   const bottom = chooseBottom(task)
-  const tops = { start: chooseTop(task, 'start', bottom), end: chooseTop(task, 'end', bottom) }
+  const tops = { start: chooseTop(task, 'start'), end: chooseTop(task, 'end') }
   const topOf = (end: EndOfSpan) =>
     panel.ends[end].isContinuous ? topFindings(context, end, tops[end]) : [simpleEdgeFinding(context, end, tops[end])]
   const borne = ENDS.filter((end) => panel.ends[end].edges.length > 0)
@@ -125,32 +118,29 @@ export function designRibs(task: RibTask): RibDesign {
 }
 
 /**
- * Top bars over the ends of a panel whose solid zone reaches past all hogging: the lightest any zone can have.
+ * Top bars of a panel whose solid zone reaches past all hogging: the lightest any zone can have.
  *
  * Source: project rule, a wider zone never asks for more top bars
  */
-export function lightestTops(task: RibTask, bottom: BarSet): Readonly<Record<EndOfSpan, BarSet>> {
-  const whole = { ...task, context: { ...task.context, solidZoneMm: task.context.clearMm } }
-  return { start: chooseTop(whole, 'start', bottom), end: chooseTop(whole, 'end', bottom) }
+export function lightestTops(task: RibTask): Readonly<Record<EndOfSpan, BarSet>> {
+  const whole = { ...task, context: { ...task.context, solidZoneMm: task.context.clearMm / 2 } }
+  return { start: chooseTop(whole, 'start'), end: chooseTop(whole, 'end') }
 }
 
 /**
- * What the width of the solid zone decides with the bars chosen for it: shear of the rib where the zone ends, and its bending there.
+ * What the width of the solid zone decides with the lightest top bars: shear of the rib where the zone ends, and its bending there. That
+ * the lightest bars must do keeps more load from ending in less steel through a wider zone.
  *
- * Source: project rule, engine design section 4 (`"least"` lets shear widen the zone)
- * @param lightest - as `lightestTops`, kept wherever they do
+ * Source: project rule, engine design sections 4 (`"least"` lets shear widen the zone) and 8 (monotone)
  */
-export function zoneFindings(task: RibTask, bottom: BarSet, lightest: Readonly<Record<EndOfSpan, BarSet>>): Compared[] {
-  const { context, panel } = task
+export function zoneFindings(task: RibTask, bottom: BarSet, tops: Readonly<Record<EndOfSpan, BarSet>>): Compared[] {
+  const { context, panel, scheme } = task
   return ENDS.flatMap((end) => {
-    const { isContinuous } = panel.ends[end]
-    const does =
-      !isContinuous || topFindings(context, end, lightest[end]).every(({ demand, capacity }) => isMet(demand, capacity))
-    const top = does ? lightest[end] : chooseTop(task, end, bottom)
+    const top = tops[end]
     const shear = shearFindings(context, end, { bottom, top }).slice(0, 1)
-    if (!isContinuous) return shear
-    const { over, atRib } = supportBending(context, end, top)
-    const { k, greatestK } = atRib ?? over
-    return [...shear, { demand: k, capacity: greatestK }]
+    if (!panel.ends[end].isContinuous) return shear
+    const { k, greatestK, requiredMm2 } = supportBending(context, end, top).atRib
+    const steel = scheme.topBars === 'computed' ? [{ demand: requiredMm2, capacity: areaOf(top) }] : []
+    return [...shear, { demand: k, capacity: greatestK }, ...steel]
   })
 }

@@ -60,7 +60,7 @@ function widened(job: Job, panel: RibbedPanel, analysis: RibAnalysis): number {
   const { solidZoneMm, clearMm } = panel
   return job.zoneFor(keyOf(panel, analysis), () => {
     const bottom = chooseBottom(taskAt(solidZoneMm))
-    const lightest = lightestTops(taskAt(solidZoneMm), bottom)
+    const lightest = lightestTops(taskAt(solidZoneMm))
     return leastZoneMm(solidZoneMm, clearMm, (zoneMm) => zoneFindings(taskAt(zoneMm), bottom, lightest))
   })
 }
@@ -80,7 +80,7 @@ function taskOf({ scheme, brief, basis, rules }: Job, panel: RibbedPanel, analys
     fireMinutes: brief.fireMinutes,
     carriesPartitions: brief.partitionsLoad > 0,
   }
-  return { panel, context, scheme, rules, isZoneGiven: scheme.solidZone !== 'least' }
+  return { panel, context, scheme, rules }
 }
 
 function finished(job: Job, site: PanelSite, panel: RibbedPanel, analysis: RibAnalysis): SizedPanel {

@@ -5,28 +5,29 @@ import { figure } from '../../figure'
 import type { Finding } from '../../finding'
 import { flexureFindings, steelLimitFindings } from '../../flexureFindings'
 import { type RibContext, RIB_AGGREGATE_MM, endName, perRib, zoneFaceMm } from '../ribContext'
-import { concreteAreaMm2, effectiveDepthMm } from '../ribSection'
+import { effectiveDepthMm } from '../ribSection'
 
-/** Compression at the bottom of a support: the whole spacing inside a solid zone, the rib alone without one. */
-function supportSection({ section, solidZoneMm }: RibContext, bars: BarSet): BendingSection {
-  const widthMm = solidZoneMm > 0 ? section.spacingMm : section.ribMm
-  return { widthMm, depthMm: effectiveDepthMm(section, bars), flange: null }
-}
+/** A section whose compression face, at the bottom, is as wide as the spacing (solid over a support) or the rib. */
+const hoggingSection = ({ section }: RibContext, widthMm: number, bars: BarSet): BendingSection => ({
+  widthMm,
+  depthMm: effectiveDepthMm(section, bars),
+  flange: null,
+})
 
 /**
- * Bending over a continuous end: over the support, and where the solid zone ends and the rib takes over.
+ * Bending over a continuous end: over the support, where all is solid, and where the solid zone ends and the rib takes over, which is
+ * the face of the support where there is no zone.
  *
  * Source: by the basis, `flexure` (engine design section 4: full spacing inside the solid zone, rib width where it ends)
  */
 export function supportBending(context: RibContext, end: EndOfSpan, bars: BarSet) {
-  const { basis, section, analysis, solidZoneMm } = context
+  const { basis, section, analysis } = context
   const { forces } = analysis
-  const momentNmm = perRib(context, forces.hoggingNmm(end, 0))
-  const over = basis.flexure(supportSection(context, bars), momentNmm, forces.isRedistributed)
-  const atRibNmm = perRib(context, forces.hoggingNmm(end, zoneFaceMm(context, end)))
-  const ribSection = { widthMm: section.ribMm, depthMm: effectiveDepthMm(section, bars), flange: null }
-  const atRib = solidZoneMm > 0 ? basis.flexure(ribSection, atRibNmm, forces.isRedistributed) : null
-  return { momentNmm, over, atRib, requiredMm2: Math.max(over.requiredMm2, atRib?.requiredMm2 ?? 0) }
+  const momentAt = (fromMm: number) => perRib(context, forces.hoggingNmm(end, fromMm))
+  const over = basis.flexure(hoggingSection(context, section.spacingMm, bars), momentAt(0), forces.isRedistributed)
+  const atRibNmm = momentAt(zoneFaceMm(context, end))
+  const atRib = basis.flexure(hoggingSection(context, section.ribMm, bars), atRibNmm, forces.isRedistributed)
+  return { over, atRib, requiredMm2: Math.max(over.requiredMm2, atRib.requiredMm2) }
 }
 
 /**
@@ -36,29 +37,18 @@ export function supportBending(context: RibContext, end: EndOfSpan, bars: BarSet
  */
 export function topFindings(context: RibContext, end: EndOfSpan, bars: BarSet): Finding[] {
   const { basis, section } = context
+  const { spacingMm, ribMm, heightMm } = section
   const where = () => `${endName(context, end)}, ${setText(bars)} a rib`
   const { over, atRib } = supportBending(context, end, bars)
   const provided = areaOf(bars)
+  const zone = { widthMm: spacingMm, webMm: ribMm, heightMm, depthMm: effectiveDepthMm(section, bars) }
   return [
-    ...flexureFindings('flexure.support', where, over, provided),
-    ...(atRib ? flexureFindings('flexure.support', () => `${where()}, where the solid zone ends`, atRib, provided) : []),
-    ...steelLimitFindings(basis, where, tensionZone(context, bars), supportAreaMm2(context), provided),
+    ...flexureFindings('flexure.support', () => `over ${where()}`, over, provided),
+    ...flexureFindings('flexure.support', () => `${where()}, where the rib begins`, atRib, provided),
+    ...steelLimitFindings(basis, where, zone, spacingMm * heightMm, provided),
     ...(section.toppingMm >= section.coverMm + section.linkMm + thickest(bars) ? [] : [topFitFinding(context, end, bars)]),
   ]
 }
-
-/** Mean width of the upper half in tension: the spacing in the topping and in solid zones, the rib below. */
-function tensionZone({ section, solidZoneMm }: RibContext, bars: BarSet) {
-  const { spacingMm, ribMm, heightMm, toppingMm } = section
-  const half = heightMm / 2
-  const flange = Math.min(toppingMm, half)
-  const meanMm = (spacingMm * flange + ribMm * (half - flange)) / half
-  const widthMm = solidZoneMm > 0 ? spacingMm : meanMm
-  return { widthMm, webMm: ribMm, heightMm, depthMm: effectiveDepthMm(section, bars) }
-}
-
-const supportAreaMm2 = ({ section, solidZoneMm }: RibContext) =>
-  solidZoneMm > 0 ? section.spacingMm * section.heightMm : concreteAreaMm2(section)
 
 function topFitFinding(context: RibContext, end: EndOfSpan, bars: BarSet): Finding {
   const { ribMm, coverMm, linkMm } = context.section
@@ -85,7 +75,7 @@ export function simpleEdgeFinding(context: RibContext, end: EndOfSpan, bars: Bar
   const { basis, analysis } = context
   const { share, clause } = basis.simpleEdge
   const momentNmm = share * perRib(context, analysis.forces.saggingNmm)
-  const flexure = basis.flexure(supportSection(context, bars), momentNmm, false)
+  const flexure = basis.flexure(hoggingSection(context, context.section.ribMm, bars), momentNmm, false)
   return {
     name: 'steel.least',
     clause,
