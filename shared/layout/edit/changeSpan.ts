@@ -32,7 +32,10 @@ export function changeSpan(panels: readonly Panel[], index: number, axis: 'x' | 
     outline: moveRing(panel.outline),
     voids: panel.voids.map(moveVoid),
   }))
-  const fault = floorFault(moved)
+  const after = boundsOf(moved[index]!.outline)
+  const reached = axis === 'x' ? after.maxX - after.minX : after.maxY - after.minY
+  const isReached = Math.abs(reached - lengthMm) <= DRAWN_TOLERANCE_MM
+  const fault = isReached ? floorFault(moved) : `a corner of ${panels[index]!.mark} stands in its way`
   if (fault === null) return { panels: settleContinuity(panels, moved) }
   const asTyped = `${lengthMm.toLocaleString('en')} would move this support line by ${Math.abs(shift).toLocaleString('en')}`
   return { refused: `${asTyped}: ${fault}. Change the panels one by one, or by their points` }
