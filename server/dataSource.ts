@@ -3,6 +3,7 @@ import { DataSource } from 'typeorm'
 import { ENTITIES } from './entities/entityList'
 import type { DatabaseSettings } from './env'
 import { MIGRATIONS } from './migrations/migrationList'
+import { QUIET_DATABASE } from './quietDatabase'
 import { QueryTimeLimit } from './queryTimeLimit'
 
 /** Bounds of the pool: what does not fit is refused at once, what takes too long is cut off with its connection. */
@@ -25,6 +26,7 @@ export function createDataSource(settings: DatabaseSettings, limits: PoolLimits 
     supportBigNumbers: true,
     synchronize: false,
     logging: false,
+    logger: QUIET_DATABASE,
     entities: ENTITIES,
     migrations: MIGRATIONS,
     migrationsTableName: 'migration',

@@ -11,6 +11,7 @@ import { isUnavailable } from '../services/unavailable'
 function fromFramework(error: unknown): AppError | null {
   if (!(error instanceof Error) || !('status' in error) || typeof error.status !== 'number') return null
   if (error.status < 400 || error.status > 499) return null
+  if (error.status === 403 || error.status === 404) return new AppError('not_found')
   if (error.status === 413) return new AppError('too_large')
   if (error.status === 415) return new AppError('unsupported_media_type')
   const reason = 'type' in error && error.type === 'entity.parse.failed' ? 'The body is not JSON.' : undefined

@@ -16,7 +16,6 @@ export function requestLog(log: Log): RequestHandler {
         path: request.url.split('?')[0],
       }),
       res: (response: { statusCode: number }) => ({ status: response.statusCode }),
-      err: ({ type, message }: { type: string; message: string }) => ({ type, message }),
     },
   })
 }
