@@ -48,14 +48,14 @@ export function coefficientForces(spans: readonly StripSpan[], index: number, fa
       shearN: (isFirst ? shear.firstInteriorSupport : shear.interiorSupport) * load * spanMm,
     }
   }
-  const hoggingNmm = (end: EndOfSpan, from: number) =>
-    Math.max(0, ends[end].momentNmm - ends[end].shearN * from + (load * from ** 2) / 2)
+  const hoggingNmm = (end: EndOfSpan, from: number) => ends[end].momentNmm - ends[end].shearN * from + (load * from ** 2) / 2
   return {
     method: 'coefficients',
     isRedistributed: true,
     key: forcesKey([load, spanMm, ...Object.values(ends).flatMap(({ momentNmm, shearN }) => [momentNmm, shearN])]),
     saggingNmm: (isEndSpan ? moment.endSpan : moment.interiorSpan) * momentUnit(index),
-    hoggingNmm: (end, from) => (from < spanMm / 2 ? hoggingNmm(end, from) : 0),
+    hoggingNmm: (end, from) => (from < spanMm / 2 ? Math.max(0, hoggingNmm(end, from)) : 0),
     shearN: (end, from) => Math.max(0, ends[end].shearN - load * from),
+    casesAt: (end, from) => [{ hoggingNmm: hoggingNmm(end, from), shearN: ends[end].shearN - load * from }],
   }
 }

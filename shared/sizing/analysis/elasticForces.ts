@@ -32,6 +32,12 @@ export function elasticForces(spans: readonly StripSpan[], index: number, factor
     key: forcesKey([spanMm, ...cases.flatMap(({ load, startMoment, endMoment }) => [load, startMoment, endMoment])]),
     saggingNmm: most((each) => greatestSagging(each, spanMm)),
     hoggingNmm: (end, from) => most((each) => -momentAt(each, spanMm, end === 'start' ? from : spanMm - from)),
+    casesAt: (end, from) =>
+      cases.map((each) => {
+        const fromStartMm = end === 'start' ? from : spanMm - from
+        const shear = shearAt(each, spanMm, fromStartMm)
+        return { hoggingNmm: -momentAt(each, spanMm, fromStartMm), shearN: end === 'start' ? shear : -shear }
+      }),
     shearN: (end, from) =>
       most((each) => (end === 'start' ? shearAt(each, spanMm, from) : -shearAt(each, spanMm, spanMm - from))),
   }

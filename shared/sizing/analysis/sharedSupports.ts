@@ -36,9 +36,11 @@ export function raisedTo(forces: SpanForces, spanMm: number, least: Readonly<Rec
   const [start, end] = [extra('start'), extra('end')]
   if (start === 0 && end === 0) return forces
   const added = { start, end }
+  const carried = (at: EndOfSpan, from: number) => added[at] * Math.max(0, 1 - from / spanMm)
   return {
     ...forces,
     key: `${forces.key};${forcesKey([start, end])}`,
-    hoggingNmm: (at, from) => forces.hoggingNmm(at, from) + added[at] * Math.max(0, 1 - from / spanMm),
+    hoggingNmm: (at, from) => forces.hoggingNmm(at, from) + carried(at, from),
+    casesAt: (at, from) => forces.casesAt(at, from).map((each) => ({ ...each, hoggingNmm: each.hoggingNmm + carried(at, from) })),
   }
 }

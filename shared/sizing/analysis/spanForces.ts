@@ -1,6 +1,12 @@
 /** Which end of a span. */
 export type EndOfSpan = 'start' | 'end'
 
+/** Moment, N·mm, hogging positive, and shear, N, at one section under one load case, per metre of width. */
+export interface SectionForces {
+  readonly hoggingNmm: number
+  readonly shearN: number
+}
+
 /** Design forces of one span per metre of width: N·mm and N, envelopes over all load cases, all ≥ 0. */
 export interface SpanForces {
   readonly method: 'coefficients' | 'elastic'
@@ -11,6 +17,8 @@ export interface SpanForces {
   readonly saggingNmm: number
   readonly hoggingNmm: (end: EndOfSpan, fromSupportMm: number) => number
   readonly shearN: (end: EndOfSpan, fromSupportMm: number) => number
+  /** The same section under each load case by itself; shear positive upwards on the side of `end`. */
+  readonly casesAt: (end: EndOfSpan, fromSupportMm: number) => readonly SectionForces[]
 }
 
 /**
@@ -27,6 +35,9 @@ export function simpleSpanForces(load: number, spanMm: number): SpanForces {
     saggingNmm: (load * spanMm * spanMm) / 8,
     hoggingNmm: () => 0,
     shearN: (_end, fromSupportMm) => load * Math.max(0, spanMm / 2 - fromSupportMm),
+    casesAt: (_end, fromSupportMm) => [
+      { hoggingNmm: (-load * fromSupportMm * (spanMm - fromSupportMm)) / 2, shearN: load * (spanMm / 2 - fromSupportMm) },
+    ],
   }
 }
 

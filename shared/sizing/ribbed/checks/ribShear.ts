@@ -13,7 +13,8 @@ export interface RibBars {
 
 /**
  * Shear at one end of a rib: where the solid zone ends, on the rib; and at the face of the support, on the whole spacing, where there is
- * a zone. Tension steel where the rib hogs are top bars that run an anchorage and d past the section, elsewhere bottom bars.
+ * a zone. Moment and shear are of one load case; tension steel where it hogs are top bars that run an anchorage and d past the section,
+ * elsewhere bottom bars.
  *
  * Source: by the basis, `shearResistanceN` (engine design section 4: at the zone's inner face, not a further d away; no links)
  */
@@ -36,9 +37,14 @@ function shearFinding(
 ): Finding {
   const { basis, analysis } = context
   const fromSupportMm = analysis.faceMm[end] + fromFaceMm
-  const { depthMm, steelMm2 } = tensionSteel(context, end, bars, fromFaceMm)
-  const shearN = perRib(context, analysis.forces.shearN(end, fromSupportMm))
-  const resistance = basis.shearResistanceN({ widthMm, depthMm, steelMm2 })
+  const judged = analysis.forces.casesAt(end, fromSupportMm).map((forces) => {
+    const { depthMm, steelMm2 } = tensionSteel(context, bars, perRib(context, forces.hoggingNmm), fromFaceMm)
+    const resistance = basis.shearResistanceN({ widthMm, depthMm, steelMm2 })
+    return { shearN: Math.max(0, perRib(context, forces.shearN)), steelMm2, resistance }
+  })
+  const { shearN, steelMm2, resistance } = judged.reduce((worst, each) =>
+    each.shearN * worst.resistance.value > worst.shearN * each.resistance.value ? each : worst,
+  )
   return {
     name: 'shear',
     clause: resistance.clause,
@@ -52,10 +58,9 @@ function shearFinding(
 }
 
 /** Bars in tension at a section and anchored there: top bars where it hogs, bottom bars, which run on to the support, elsewhere. */
-function tensionSteel(context: RibContext, end: EndOfSpan, { bottom, top }: RibBars, fromFaceMm: number) {
-  const { section, analysis } = context
-  const hoggingNmm = perRib(context, analysis.forces.hoggingNmm(end, analysis.faceMm[end] + fromFaceMm))
-  if (hoggingNmm === 0) return { depthMm: effectiveDepthMm(section, bottom), steelMm2: areaOf(bottom) }
+function tensionSteel(context: RibContext, { bottom, top }: RibBars, hoggingNmm: number, fromFaceMm: number) {
+  const { section } = context
+  if (hoggingNmm <= 0) return { depthMm: effectiveDepthMm(section, bottom), steelMm2: areaOf(bottom) }
   const steelMm2 = isAnchored(context, top, hoggingNmm, fromFaceMm) ? areaOf(top) : 0
   return { depthMm: effectiveDepthMm(section, top), steelMm2 }
 }
