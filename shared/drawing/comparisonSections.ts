@@ -104,7 +104,7 @@ function heading(subject: SectionSubject, frame: SectionFrame, isWide: boolean):
   const depth = sectionDepthMm(subject)
   const overall = depth === null ? 'thickness not known yet' : `${depth} overall`
   const note = scheme.kind === 'ribbed' ? `blocks ${scheme.block.height}, topping ${scheme.topping}, ${overall}` : overall
-  const narrow = scheme.kind === 'ribbed' ? 'hollow blocks between ribs' : 'concrete'
+  const narrow = scheme.kind === 'solid' ? 'concrete' : frame.widthPx < 170 ? 'hollow blocks' : 'hollow blocks between ribs'
   const textX = isWide ? x + 34 : x
   const swatch = svgNode('rect', {
     x,

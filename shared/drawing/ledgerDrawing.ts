@@ -17,6 +17,13 @@ export interface LedgerScale {
   readonly x: (amount: number) => number
 }
 
+/** `id` unique in the page; `rowPx` the height of a row of the table beside. */
+export interface LedgerSize {
+  readonly id: string
+  readonly widthPx: number
+  readonly rowPx: number
+}
+
 const MARGIN_PX = 22
 const BAR_PX = 16
 
@@ -64,10 +71,7 @@ export function ledgerAxis(entries: readonly LedgerEntry[], { widthPx }: { reado
  * Rows are `rowPx` high, so that it can stand in a table whose rows are as high.
  * @param id - unique in the page
  */
-export function ledgerDrawing(
-  entries: readonly LedgerEntry[],
-  { id, widthPx, rowPx }: { readonly id: string; readonly widthPx: number; readonly rowPx: number },
-): SvgNode {
+export function ledgerDrawing(entries: readonly LedgerEntry[], { id, widthPx, rowPx }: LedgerSize): SvgNode {
   const scale = ledgerScale(entries, widthPx)
   const height = entries.length * rowPx
   const last = entries.at(-1)
@@ -88,6 +92,36 @@ export function ledgerDrawing(
       ...entries.flatMap((entry, index) => bar(entry, index * rowPx, scale, id, rowPx)),
       runningLine(entries, scale, rowPx),
       ...entries.map((entry, index) => diamond(scale.x(entry.running), diamondY(index, rowPx), index === entries.length - 1)),
+    ],
+  )
+}
+
+/**
+ * Bars only, low in their rows, so that a name and an amount have room above each: for narrow pages.
+ * @param size - `id` unique in the page
+ */
+export function ledgerBarList(entries: readonly LedgerEntry[], { id, widthPx, rowPx }: LedgerSize): SvgNode {
+  const scale = ledgerScale(entries, widthPx)
+  const height = entries.length * rowPx
+  const shiftPx = round(rowPx * 0.3)
+  const zero = scale.x(0)
+  return svgNode(
+    'svg',
+    { class: 'drawing ledger-bar-list', viewBox: `0 0 ${widthPx} ${height}`, width: widthPx, height, 'aria-hidden': 'true' },
+    [
+      patternDefinitions(id, ['chartRibbed', 'chartSolid']),
+      ...entries.flatMap((entry, index) => bar(entry, index * rowPx + shiftPx, scale, id, rowPx)),
+      ...entries.map((_, index) => {
+        const middle = round(index * rowPx + shiftPx + rowPx * 0.37)
+        return svgNode('line', {
+          x1: zero,
+          y1: middle - 12,
+          x2: zero,
+          y2: middle + 12,
+          stroke: 'var(--ink)',
+          'stroke-width': 1.25,
+        })
+      }),
     ],
   )
 }

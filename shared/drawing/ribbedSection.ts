@@ -113,39 +113,31 @@ export function ribbedSection(
 ): SvgNode {
   const { block, ribWidth, topping } = scheme
   const scale = frame.pxPerMm
-  const starts = ribStarts(scheme, frame.widthPx / scale)
+  const lengthMm = frame.widthPx / scale
+  const starts = ribStarts(scheme, lengthMm)
   const top = heightPx(frame, block.height + topping)
-  const clip = `${frame.id}-clip`
+  const right = frame.leftPx + frame.widthPx
+  const place = { topPx: heightPx(frame, block.height), pxPerMm: scale, fromPx: frame.leftPx, toPx: right }
   return svgNode('g', { class: 'section-ribbed' }, [
-    svgNode('clipPath', { id: clip }, [
-      svgNode('rect', { x: frame.leftPx, y: top - 4, width: frame.widthPx, height: frame.soffitPx - top + 4 }),
-    ]),
-    svgNode('g', { 'clip-path': `url(#${clip})` }, [
-      svgNode('rect', {
-        x: frame.leftPx,
-        y: top,
-        width: frame.widthPx,
-        height: round(frame.soffitPx - top),
-        fill: fills.concrete,
-      }),
-      ...starts.map((start) =>
-        hollowBlock(
-          frame.leftPx + (start + ribWidth) * scale,
-          heightPx(frame, block.height),
-          block.width,
-          block.height,
-          scale,
-          fills.block,
-        ),
-      ),
-      ...meshNodes(scheme, frame),
-      ...starts.flatMap((start) => ribNodes(scheme, frame, start, reinforcement)),
-    ]),
+    svgNode('rect', {
+      x: frame.leftPx,
+      y: top,
+      width: frame.widthPx,
+      height: round(frame.soffitPx - top),
+      fill: fills.concrete,
+    }),
+    ...starts.map((start) =>
+      hollowBlock({ ...place, leftPx: frame.leftPx + (start + ribWidth) * scale }, block.width, block.height, fills.block),
+    ),
+    ...meshNodes(scheme, frame),
+    ...starts
+      .filter((start) => start >= 0 && start + ribWidth <= lengthMm)
+      .flatMap((start) => ribNodes(scheme, frame, start, reinforcement)),
     svgNode('line', {
       class: 'section-top',
       x1: frame.leftPx,
       y1: top,
-      x2: round(frame.leftPx + frame.widthPx),
+      x2: round(right),
       y2: top,
       stroke: 'var(--clay)',
       'stroke-width': 2,

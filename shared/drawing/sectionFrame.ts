@@ -1,6 +1,6 @@
 /** Where a section stands on the drawing: x to the right, y down, px; the soffit is its base line. */
 export interface SectionFrame {
-  /** Unique in the page: prefix of the hatches and clips. */
+  /** Unique in the page: prefix of the hatches. */
   readonly id: string
   readonly leftPx: number
   readonly widthPx: number
