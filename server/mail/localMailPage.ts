@@ -12,11 +12,10 @@ export interface ArrivedMail {
   readonly mail: ParsedMail
 }
 
+/** Names and addresses as a reader wants them: `Cleo Client, cleo@example.test`. */
 function addressText(address: AddressObject | AddressObject[] | undefined): string {
-  return [address ?? []]
-    .flat()
-    .map(({ text }) => text)
-    .join(', ')
+  const boxes = [address ?? []].flat().flatMap(({ value }) => value)
+  return boxes.map((box) => [box.name, box.address ?? ''].filter((part) => part !== '').join(', ')).join('; ')
 }
 
 function momentText(date: Date | undefined): string {

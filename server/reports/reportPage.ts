@@ -2,6 +2,7 @@ import { createHash } from 'node:crypto'
 import { readFileSync } from 'node:fs'
 import { svgText } from '#shared/drawing/svgText'
 import { reportContent, type ReportContent } from './content/reportContent'
+import type { ReportFact } from './content/reportFact'
 import { barHatches } from './differenceBar'
 import { dayText } from './figureText'
 import type { FrozenComparison } from './frozenComparison'
@@ -68,17 +69,22 @@ function differences(content: ReportContent): Markup {
         ? ''
         : markup`<section class="no-break">
             <h2>What would turn it</h2>
-            ${plainList(content.turning.map(({ text }) => text))}
+            ${plainList(content.turning)}
             <p class="note">One group at a time, with sizes and quantities held as they are.</p>
           </section>`
     }`
 }
 
-function behind(content: ReportContent): Markup {
+function better(heading: string, facts: readonly ReportFact[]): Markup {
+  if (facts.length === 0) return markup``
   return markup`<section class="no-break">
-      <h2>Where solid is better</h2>
-      ${factList(content.solidIsBetter)}
-    </section>
+    <h2>${heading}</h2>
+    ${factList(facts)}
+  </section>`
+}
+
+function behind(content: ReportContent): Markup {
+  return markup`${better('Where solid is better', content.better.solid)} ${better('Where ribbed is better', content.better.ribbed)}
     <section>
       <h2>What stands behind it</h2>
       ${factList(content.basis)}

@@ -47,6 +47,10 @@ function factRows(facts: readonly ReportFact[]): Markup {
   )}</table>`
 }
 
+function better(heading: string, facts: readonly ReportFact[]): Markup {
+  return facts.length === 0 ? markup`` : markup`${mailHeading(heading)}${factRows(facts)}`
+}
+
 function lines(texts: readonly string[]): Markup {
   return markup`<table ${TABLE}>${texts.map(
     (text) =>
@@ -59,7 +63,7 @@ function differences(content: ReportContent): Markup {
 <table ${TABLE}>${differenceBarHead()}${content.bars.map(differenceBarRow)}
 <tr><td style="padding:8px 0;border-bottom:3px double ${ink};${MAIL_FONT}font-size:14px;line-height:20px;font-weight:600;">Ribbed less solid, ${content.currency}</td><td align="right" style="padding:8px 0;border-bottom:3px double ${ink};${MAIL_FONT}font-size:14px;line-height:20px;font-weight:600;white-space:nowrap;">${content.totalDifference}</td></tr>
 </table>
-${content.turning.length === 0 ? '' : markup`${mailHeading('What would turn it')}${lines(content.turning.map(({ text }) => text))}`}`
+${content.turning.length === 0 ? '' : markup`${mailHeading('What would turn it')}${lines(content.turning)}`}`
 }
 
 function opening(frozen: FrozenComparison, content: ReportContent): Markup {
@@ -84,7 +88,8 @@ ${totalBars({ ribbed: total('ribbed'), solid: total('solid') })}
 ${figureTable(content)}
 ${mailNote('The lesser figure is set heavier. Dead load is concrete and blocks only. Both floors are drawn in the attached PDF.')}
 ${differences(content)}
-${mailHeading('Where solid is better')}${factRows(content.solidIsBetter)}
+${better('Where solid is better', content.better.solid)}
+${better('Where ribbed is better', content.better.ribbed)}
 ${mailHeading('What stands behind it')}${factRows(content.basis)}
 ${mailHeading('What is left out')}${lines(content.leftOut)}
 ${mailHeading('Checks')}${lines(content.checked.map(({ kind, mark, summary }) => `${kind === 'ribbed' ? 'Ribbed' : 'Solid'}, ${mark}: ${summary.replace(/[:;].*$/, '')}. The PDF lists them.`))}

@@ -16,6 +16,10 @@ function factLines(facts: readonly ReportFact[]): string[] {
   return facts.map(({ title, text }) => `${title}: ${text}`)
 }
 
+function better(heading: string, facts: readonly ReportFact[]): string[] {
+  return facts.length === 0 ? [] : part(heading, factLines(facts))
+}
+
 function figureLines({ figures }: ReportContent): string[] {
   const row = (label: string, ribbed: string, solid: string) =>
     label.padEnd(LABEL_WIDTH) + ribbed.padStart(FIGURE_WIDTH) + solid.padStart(FIGURE_WIDTH)
@@ -54,13 +58,9 @@ export function comparisonText(frozen: FrozenComparison, content: ReportContent)
     ...(content.note === '' ? [] : ['', content.note]),
     ...part('What each makes', figureLines(content)),
     ...part('Where the difference comes from', differenceLines(content)),
-    ...(content.turning.length === 0
-      ? []
-      : part(
-          'What would turn it',
-          content.turning.map(({ text }) => text),
-        )),
-    ...part('Where solid is better', factLines(content.solidIsBetter)),
+    ...(content.turning.length === 0 ? [] : part('What would turn it', content.turning)),
+    ...better('Where solid is better', content.better.solid),
+    ...better('Where ribbed is better', content.better.ribbed),
     ...part('What stands behind it', factLines(content.basis)),
     ...part('What is left out', content.leftOut),
     ...part('Checks', content.checked.flatMap(checkLines)),

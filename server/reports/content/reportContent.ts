@@ -3,14 +3,14 @@ import { Decimal } from '#shared/pricing/decimal'
 import { signedDecimalText } from '../figureText'
 import type { FrozenComparison } from '../frozenComparison'
 import { basisFacts } from './basisFacts'
+import { besideTheCost } from './besideTheCost'
 import { CAUTIONS } from './cautions'
 import { comparedFigures, type ComparedFigure } from './comparedFigures'
 import { headline, standfirst, wholeTotal, type SchemeKind, type Sentence } from './headline'
 import { leftOut } from './leftOut'
 import type { ReportFact } from './reportFact'
-import { solidIsBetter } from './solidIsBetter'
 import { titleBlock } from './titleBlock'
-import { turningPoints, type TurningPoint } from './turningPoints'
+import { turningSentences } from './turningPoints'
 import { wholeParts } from './wholeParts'
 
 /** A bar of the chart of differences: `share` of the longest bar, negative where ribbed is the cheaper there. */
@@ -38,8 +38,9 @@ export interface ReportContent {
   readonly figures: readonly ComparedFigure[]
   readonly bars: readonly DifferenceBar[]
   readonly totalDifference: string
-  readonly turning: readonly TurningPoint[]
-  readonly solidIsBetter: readonly ReportFact[]
+  readonly turning: readonly string[]
+  /** Where each is the better floor beside the cost. */
+  readonly better: Readonly<Record<SchemeKind, readonly ReportFact[]>>
   readonly basis: readonly ReportFact[]
   readonly leftOut: readonly string[]
   readonly checked: readonly CheckedScheme[]
@@ -78,8 +79,8 @@ export function reportContent(frozen: FrozenComparison): ReportContent {
     figures: comparedFigures(frozen),
     bars: differenceBars(frozen, total),
     totalDifference: signedDecimalText(total.toFixed()),
-    turning: turningPoints(frozen),
-    solidIsBetter: solidIsBetter(frozen),
+    turning: turningSentences(frozen),
+    better: { ribbed: besideTheCost(frozen, 'ribbed'), solid: besideTheCost(frozen, 'solid') },
     basis: basisFacts(frozen),
     leftOut: leftOut(frozen),
     checked: [checkedScheme(frozen, 'ribbed'), checkedScheme(frozen, 'solid')],

@@ -1,4 +1,5 @@
 import type { Check } from '#shared/contracts/appraisal'
+import { CHECK_NAMES } from './checkNames'
 
 /** Failing checks listed at most; the report says how many there are in all. */
 const MOST_FAILING = 200
@@ -10,7 +11,8 @@ export function tightestChecks(checks: readonly Check[]): Check[] {
     const tightest = byKind.get(check.name)
     if (!tightest || isTighter(check, tightest)) byKind.set(check.name, check)
   }
-  const tightest = [...byKind.values()]
+  const order = Object.keys(CHECK_NAMES)
+  const tightest = [...byKind.values()].sort((a, b) => order.indexOf(a.name) - order.indexOf(b.name))
   const failing = checks
     .filter((check) => !check.pass && !tightest.includes(check))
     .sort((a, b) => b.utilisation - a.utilisation)

@@ -33,8 +33,8 @@ describe('the mail that brings a comparison', () => {
       expect(text).toContain(`${label} ${amount}`)
     }
     const sentences = [
-      ...content.turning.map((turn) => turn.text),
-      ...content.solidIsBetter.map((fact) => fact.text),
+      ...content.turning,
+      ...content.better.solid.map((fact) => fact.text),
       ...content.basis.map((fact) => fact.text),
       ...content.leftOut,
       ...content.cautions,

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { headline, sentenceText, standfirst } from '../../../server/reports/content/headline'
-import { turningPoints } from '../../../server/reports/content/turningPoints'
+import { turningPoints, turningSentences } from '../../../server/reports/content/turningPoints'
 import { frozenExample } from './frozenExample'
 
 const base = frozenExample()
@@ -72,5 +72,9 @@ describe('what would turn it', () => {
     expect(turningPoints(group('2000'))).toEqual([])
     expect(turningPoints(group('0'))).toEqual([])
     expect(turningPoints(costs('80030.08', '80030.40'))).toEqual([])
+    expect(turningSentences(group('2000'))).toEqual([
+      'No group of prices alone, falling to nothing or trebling, would make solid the cheaper floor.',
+    ])
+    expect(turningSentences(costs('80030.08', '80030.40'))).toEqual([])
   })
 })
