@@ -14,13 +14,17 @@ function property(error: unknown, name: string): unknown {
   return typeof error === 'object' && error !== null && name in error ? (error as Record<string, unknown>)[name] : undefined
 }
 
-/** Reads an error of the transport: a 5xx answer to the mail itself is for good, all else is worth another try (RFC 5321, 4.2.1). */
+/**
+ * Reads an error of the transport: a 5xx answer to the mail itself is for good, all else is worth another try (RFC 5321, 4.2.1).
+ * Where no server spoke, its address and ours stay in the log.
+ */
 export function mailFailure(error: unknown): MailFailure {
   const code = property(error, 'responseCode')
   const command = property(error, 'command')
   const response = property(error, 'response')
-  const message = error instanceof Error ? error.message : 'The mail could not be sent.'
-  const answer = (typeof response === 'string' && response !== '' ? response : message).replace(/[\p{Cc}\s]+/gu, ' ').trim()
+  const reason = property(error, 'code')
+  const ours = `The mail server could not be spoken with${typeof reason === 'string' ? ` (${reason})` : ''}.`
+  const answer = (typeof response === 'string' && response !== '' ? response : ours).replace(/[\p{Cc}\s]+/gu, ' ').trim()
   const isMail = typeof command === 'string' && MAIL_COMMANDS.has(command)
   return {
     isForGood: isMail && typeof code === 'number' && code >= 500 && code < 600 && !SIGN_IN_ANSWERS.has(code),

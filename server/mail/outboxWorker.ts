@@ -2,7 +2,7 @@ import { setTimeout as rest } from 'node:timers/promises'
 import type { DataSource } from 'typeorm'
 import type { OutboxEntity } from '../entities/dispatch/OutboxEntity'
 import type { Log } from '../log'
-import { mailFailure } from './mailFailure'
+import { mailFailure, type MailFailure } from './mailFailure'
 import type { Attachment, MailTransport } from './mailTransport'
 import { claimMail, markMail, type Outcome } from './outboxClaim'
 import { OutboxSignal } from './outboxSignal'
@@ -31,6 +31,7 @@ const LEASE_MS = 300_000
 const POLL_MS = 2_000
 const LANES = 3
 const MARK_PAUSE_MS = 500
+const NOT_PRINTED: MailFailure = { isForGood: false, answer: 'The report that goes with it could not be printed yet.' }
 
 /** A pause that ends early when it is woken; a call while nobody waits shortens the next pause to nothing. */
 class Pause {
@@ -59,12 +60,14 @@ class Pause {
 
 async function outcomeOf(mail: OutboxEntity, settings: OutboxWorkerSettings): Promise<Outcome> {
   const plan = settings.retry ?? RETRY_PLAN
+  let isPrinted = false
   try {
     const attachments = await settings.attachmentsOf(mail)
+    isPrinted = true
     await settings.transport.send({ ...mail, date: mail.createdAt, attachments })
     return { state: 'sent' }
   } catch (error) {
-    const { isForGood, answer } = mailFailure(error)
+    const { isForGood, answer } = isPrinted ? mailFailure(error) : NOT_PRINTED
     settings.log.warn({ mailId: mail.id, tries: mail.tries, isForGood, err: error }, 'a mail was not accepted')
     if (isForGood) return { state: 'refused', answer }
     if (mail.tries >= plan.mostTries) return { state: 'failed', answer }

@@ -246,3 +246,11 @@ describe('who may read what was sent', () => {
     expect((await admin.client.get('/api/dispatches')).status).toBe(403)
   })
 })
+
+describe('local mail', () => {
+  it('is not there without the local set-up', async () => {
+    const { client } = await signedIn(server, 'admin')
+    const answer = await client.get('/mail')
+    expect([answer.status, answer.error.code]).toEqual([404, 'not_found'])
+  })
+})

@@ -124,9 +124,20 @@ describe('a mail failure', () => {
     expect(mailFailure(error)).toMatchObject({ isForGood: true })
   })
 
-  it('without a server is worth another try, and is told on one line', () => {
-    expect(mailFailure(new Error('connect\nECONNREFUSED'))).toEqual({ isForGood: false, answer: 'connect ECONNREFUSED' })
-    expect(mailFailure('x').answer).not.toBe('')
+  it('without a server is worth another try, and tells no address', async () => {
+    const gone = await startSmtpStandIn()
+    await gone.close()
+    const error: unknown = await createMailTransport(gone.url, FROM)
+      .send(MAIL)
+      .catch((cause: unknown) => cause)
+    expect(mailFailure(error)).toEqual({ isForGood: false, answer: 'The mail server could not be spoken with (ESOCKET).' })
+    expect(mailFailure('x')).toEqual({ isForGood: false, answer: 'The mail server could not be spoken with.' })
+  })
+
+  it('is told on one line of at most 500 characters', () => {
+    const long = Object.assign(new Error('x'), { response: `451 try\r\nlater ${'x'.repeat(900)}` })
+    const { answer } = mailFailure(long)
+    expect([answer.length, answer.slice(0, 13)]).toEqual([500, '451 try later'])
   })
 })
 
