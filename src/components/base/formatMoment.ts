@@ -18,6 +18,8 @@ export function formatAge(isoDate: string, now: Date): string {
   if (days < 0) return 'for a day to come'
   if (days === 0) return 'of today'
   if (days < 60) return days === 1 ? '1 day old' : `${days} days old`
-  const months = Math.floor(days / 30.44)
+  const then = new Date(isoDate)
+  const started = (now.getUTCFullYear() - then.getUTCFullYear()) * 12 + now.getUTCMonth() - then.getUTCMonth()
+  const months = now.getUTCDate() < then.getUTCDate() ? started - 1 : started
   return months < 24 ? `${months} months old` : `${Math.floor(months / 12)} years old`
 }

@@ -22,17 +22,20 @@ export function projectTotals({ totals }: Pick<ProjectSummary, 'totals'>): Proje
 const NUMBERS = ['no', 'one', 'two', 'three', 'four', 'five', 'six', 'seven', 'eight', 'nine', 'ten', 'eleven', 'twelve']
 export const numberInWords = (count: number): string => NUMBERS[count] ?? String(count)
 
-/** The list in one sentence: where which floor costs less. */
+const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1)
+const many = (count: number) => `${numberInWords(count)} project${count === 1 ? '' : 's'}`
+
+/** The list in one sentence: which floor costs less, and where. */
 export function projectsInWords(projects: readonly ProjectSummary[]): string {
-  const totals = projects.map(projectTotals)
-  const priced = totals.filter(({ cheaper }) => cheaper !== null)
-  const ribbed = priced.filter(({ cheaper }) => cheaper === 'ribbed').length
-  const many = (count: number) => `${numberInWords(count)} project${count === 1 ? '' : 's'}`
-  const capital = (text: string) => text.charAt(0).toUpperCase() + text.slice(1)
-  if (priced.length === 0) return capital(many(projects.length))
-  if (ribbed === priced.length)
-    return `Ribbed costs less in ${priced.length === 1 ? 'the one project priced' : `all ${many(ribbed)}`}`
-  return ribbed === 0
-    ? `Ribbed costs less in none of ${many(priced.length)}`
-    : `Ribbed costs less in ${numberInWords(ribbed)} of ${many(priced.length)}`
+  const cheaper = projects.map((project) => projectTotals(project).cheaper).filter((kind) => kind !== null)
+  const counts = {
+    ribbed: cheaper.filter((kind) => kind === 'ribbed').length,
+    solid: cheaper.filter((kind) => kind === 'solid').length,
+  }
+  if (counts.ribbed + counts.solid === 0) return capital(many(projects.length))
+  const winner = counts.ribbed >= counts.solid ? 'ribbed' : 'solid'
+  if (cheaper.length === 1) return `${capital(winner)} costs less in the one project priced`
+  return counts[winner] === cheaper.length
+    ? `${capital(winner)} costs less in ${cheaper.length === 2 ? 'both' : 'all ' + numberInWords(cheaper.length)} projects`
+    : `${capital(winner)} costs less in ${numberInWords(counts[winner])} of ${many(cheaper.length)}`
 }
