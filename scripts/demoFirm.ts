@@ -1,5 +1,6 @@
 import type { EntityManager } from 'typeorm'
 import { v7 } from 'uuid'
+import { ContactEntity } from '../server/entities/dispatch/ContactEntity'
 import { FirmEntity } from '../server/entities/firm/FirmEntity'
 import { PersonEntity } from '../server/entities/firm/PersonEntity'
 import { PersonRoleEntity } from '../server/entities/firm/PersonRoleEntity'
@@ -125,6 +126,7 @@ async function makeProject(tx: EntityManager, made: Made, { project, region, lev
     ProjectShareEntity,
     readers.map((personId) => ({ ...of, personId })),
   )
+  await tx.insert(ContactEntity, { ...of, id: v7(), name: 'Demo client', email: 'client@example.test', createdAt: now })
 }
 
 /** Makes the demo firm with its people, prices, blocks and projects, unless it is there. Everything in it is invented. */
