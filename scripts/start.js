@@ -70,7 +70,8 @@ function holdDataFolder(dataFolder) {
   running.push(async () => rmSync(path, { force: true }))
 }
 
-async function databaseSettings(dataFolder) {
+/** Starts the local database; commands find it by `connection.json`, which only the owner can read, while it runs. */
+async function databaseSettings(dataFolder, origin) {
   const database = await step('Starting MariaDB', () =>
     startDatabase({
       dataFolder: join(dataFolder, 'database'),
@@ -81,12 +82,17 @@ async function databaseSettings(dataFolder) {
     }),
   )
   running.push(database.stop)
-  return {
+  const settings = {
     DATABASE_SOCKET: database.socketPath,
     DATABASE_NAME: database.database,
     DATABASE_USER: database.user,
     DATABASE_PASSWORD: database.password,
   }
+  const path = join(dataFolder, 'connection.json')
+  rmSync(path, { force: true })
+  writeFileSync(path, JSON.stringify({ ...settings, ORIGIN: origin }), { mode: 0o600 })
+  running.push(async () => rmSync(path, { force: true }))
+  return settings
 }
 
 /** Starts a long-lived child that ends with us; its own end stops everything. */
@@ -131,14 +137,15 @@ async function main() {
   if (!isDevelopment) await ensureClientBuild(root)
   const address = `http://127.0.0.1:${port}`
   const apiPort = isDevelopment ? await freePort() : port
+  const origin = process.env.ORIGIN ?? address
   const env = {
     ...process.env,
     NODE_ENV: process.env.NODE_ENV ?? (isDevelopment ? 'development' : 'production'),
     PORT: String(apiPort),
-    ORIGIN: process.env.ORIGIN ?? address,
+    ORIGIN: origin,
     SESSION_SECRET: process.env.SESSION_SECRET ?? ensureSecrets(dataFolder).sessionSecret,
     DATA_FOLDER: dataFolder,
-    ...(isLocal ? { LOCAL_MAIL_FOLDER: join(dataFolder, 'mail'), ...(await databaseSettings(dataFolder)) } : {}),
+    ...(isLocal ? { LOCAL_MAIL_FOLDER: join(dataFolder, 'mail'), ...(await databaseSettings(dataFolder, origin)) } : {}),
   }
   await step('Preparing the database', () =>
     runCommand(process.execPath, ['--import', 'tsx', 'scripts/prepareDatabase.ts'], { cwd: root, env }),

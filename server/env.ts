@@ -70,7 +70,12 @@ export class EnvError extends Error {
   }
 }
 
-function databaseOf(given: Variables, lines: string[]): DatabaseSettings {
+type DatabaseVariables = Pick<
+  Variables,
+  'DATABASE_URL' | 'DATABASE_SOCKET' | 'DATABASE_NAME' | 'DATABASE_USER' | 'DATABASE_PASSWORD'
+>
+
+function databaseOf(given: DatabaseVariables, lines: string[]): DatabaseSettings {
   if (given.DATABASE_URL !== undefined) {
     const url = new URL(given.DATABASE_URL)
     const database = decodeURIComponent(url.pathname.slice(1))
@@ -94,11 +99,33 @@ function databaseOf(given: Variables, lines: string[]): DatabaseSettings {
   }
 }
 
+function readVariables<T extends z.ZodType>(schema: T, source: Readonly<Record<string, string | undefined>>): z.infer<T> {
+  const given = schema.safeParse(Object.fromEntries(Object.entries(source).filter(([, value]) => value !== '')))
+  if (given.success) return given.data
+  throw new EnvError(given.error.issues.map(({ path, message }) => `${path.join('.')}: ${message}`))
+}
+
+const originOf = ({ ORIGIN, PORT }: Pick<Variables, 'ORIGIN' | 'PORT'>) => new URL(ORIGIN ?? `http://127.0.0.1:${PORT}`).origin
+
+/** Where the database is, and the address that links in mails begin with: all that a command needs. @throws EnvError */
+export function readDatabaseEnv(source: Readonly<Record<string, string | undefined>>): Pick<Env, 'database' | 'origin'> {
+  const names = {
+    DATABASE_URL: true,
+    DATABASE_SOCKET: true,
+    DATABASE_NAME: true,
+    DATABASE_USER: true,
+    DATABASE_PASSWORD: true,
+  } as const
+  const given = readVariables(variables.pick({ ...names, ORIGIN: true, PORT: true }), source)
+  const lines: string[] = []
+  const database = databaseOf(given, lines)
+  if (lines.length > 0) throw new EnvError(lines)
+  return { database, origin: originOf(given) }
+}
+
 /** Settings read once from `source`; empty variables count as absent. @throws EnvError naming every variable that is wrong */
 export function readEnv(source: Readonly<Record<string, string | undefined>>): Env {
-  const given = variables.safeParse(Object.fromEntries(Object.entries(source).filter(([, value]) => value !== '')))
-  if (!given.success) throw new EnvError(given.error.issues.map(({ path, message }) => `${path.join('.')}: ${message}`))
-  const settings = given.data
+  const settings = readVariables(variables, source)
   const lines: string[] = []
   const database = databaseOf(settings, lines)
   if (settings.SMTP_URL === undefined && settings.LOCAL_MAIL_FOLDER === undefined) {
@@ -108,7 +135,7 @@ export function readEnv(source: Readonly<Record<string, string | undefined>>): E
     lines.push('MAIL_FROM: expected the address mails are sent from, since SMTP_URL is set')
   }
   if (lines.length > 0) throw new EnvError(lines)
-  const origin = new URL(settings.ORIGIN ?? `http://127.0.0.1:${settings.PORT}`).origin
+  const origin = originOf(settings)
   return {
     host: settings.HOST,
     port: settings.PORT,
