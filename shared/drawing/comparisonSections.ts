@@ -146,9 +146,11 @@ function tops(ribbed: SectionSubject, solid: SectionSubject, ribbedFrame: Sectio
   if (roomPx < 1) return []
   const above = roomPx < 20
   const y = heightPx(frame, drawnDepthMm(higher)) + (above ? -5 : 15)
-  const label = svgNode('text', { x: round(frame.leftPx + 8), y, 'font-size': 13, fill: schemeInk(higher.scheme.kind) }, [
-    `top of ${higher.scheme.kind}`,
-  ])
+  const label = svgNode(
+    'text',
+    { x: round(frame.leftPx + frame.widthPx), y, 'text-anchor': 'end', 'font-size': 13, fill: schemeInk(higher.scheme.kind) },
+    [`top of ${higher.scheme.kind}`],
+  )
   return [...lines, label]
 }
 

@@ -96,10 +96,12 @@ function labels(
   isOff: boolean,
 ): SvgNode[] {
   const nowWords = `now ${nowText}`
-  const tipWords = `tips at ${tipText}${isOff ? ', off the line' : ''}`
   const nowHalf = (nowWords.length * ADVANCE) / 2
-  const tipWidth = tipWords.length * ADVANCE
   const isRight = tip > now
+  const roomPx = (isRight ? widthPx - nowX : nowX) - nowHalf - 8
+  const full = `tips at ${tipText}${isOff ? ', off the line' : ''}`
+  const tipWords = full.length * ADVANCE > roomPx ? `tips ${tipText}` : full
+  const tipWidth = tipWords.length * ADVANCE
   const start = isRight ? nowX + nowHalf + 8 : nowX - nowHalf - 8 - tipWidth
   const wanted = tipX - tipWidth / 2
   const placed = isRight ? Math.min(Math.max(wanted, start), widthPx - tipWidth) : Math.max(Math.min(wanted, start), 0)
