@@ -14,6 +14,8 @@ export interface DimensionChain {
   readonly objectPx?: number
   /** Stretches drawn in pencil: those being typed. */
   readonly typed?: ReadonlySet<number>
+  /** Of a vertical chain: figures are words and stand upright, to its right. */
+  readonly isWorded?: boolean
 }
 
 const THIN = 0.75
@@ -55,6 +57,10 @@ function stretch(
     svgNode('line', { ...ends, stroke: colour, 'stroke-width': THIN }),
     ...[from, to].map((at) => tick(chain, at, colour)),
   ]
+  if (chain.isWorded === true) {
+    const words = { x: atPx + 8, y: round((from + to) / 2 + 4.5), 'font-size': FIGURE_PX, fill: colour }
+    return svgNode('g', {}, [...lines, svgNode('text', words, [figure])])
+  }
   const isNarrow = Math.abs(to - from) < figure.length * ADVANCE_PX + 4
   if (isNarrow && outside === null) return svgNode('g', {}, lines)
   const half = (figure.length * ADVANCE_PX) / 2 + 7

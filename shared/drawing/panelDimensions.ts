@@ -2,32 +2,96 @@ import type { Ring } from '../contracts/appraisal'
 import { boundsOf } from '../geometry/ring'
 import type { Point } from '../geometry/point'
 import { isRectangle } from '../layout/edit/rectangle'
-import type { BlockRow } from '../layout/panelLayout'
+import type { BlockRow, PanelLayout } from '../layout/panelLayout'
 import { dimensionChain } from './dimensionChain'
 import type { PlanPanel } from './planPanel'
 import type { PlanScale } from './planScale'
 import { toPx } from './planScale'
 import type { SvgNode } from './svgNode'
+import { svgNode } from './svgNode'
 
 const FIRST_CHAIN_PX = 22
 const NEXT_CHAIN_PX = 24
 
+/** Room right of the panel for the words of solid zones and trimmers, px. */
+const WORDS_PX = 92
+
 /**
  * Dimensions of an opened panel: each rectangular void's size inside it and its offset from the outline, in pencil since
- * they are typed; and across the ribs the rows with both edge strips, of a rectangle whose ribs run along x or y.
+ * they are typed; of a rectangle whose ribs run along x or y also the rows with both edge strips, across the ribs, and the
+ * solid zones and trimmers along them.
+ *
+ * @param trimmerMm - width of the solid strip around voids
  */
-export function panelDimensions({ panel, layout }: PlanPanel, scale: PlanScale, clear: readonly Point[]): SvgNode[] {
+export function panelDimensions(
+  { panel, layout }: PlanPanel,
+  scale: PlanScale,
+  clear: readonly Point[],
+  trimmerMm: number,
+): SvgNode[] {
   const box = boundsOf(panel.outline)
-  const voids = panel.voids.flatMap((ring, i) => voidDimensions(ring, i, box, scale))
   const isUpright = panel.ribDirection % 90 === 0 && isRectangle(panel)
-  if (layout === null || layout.rows.length === 0 || !isUpright) return voids
+  const hasRows = layout !== null && layout.rows.length > 0 && isUpright
   const isAlongY = panel.ribDirection === 90
-  return [...voids, rowDimension(layout.rows, boundsOf(clear), box, scale, isAlongY)]
+  const voids = panel.voids.flatMap((ring, i) => voidDimensions(ring, i, box, scale, hasRows && isAlongY ? WORDS_PX : 0))
+  if (!hasRows) return voids
+  const face = boundsOf(clear)
+  return [
+    ...voids,
+    rowDimension(layout.rows, face, box, scale, isAlongY),
+    solidDimension(panel.voids, layout, face, box, scale, isAlongY, trimmerMm),
+  ]
+}
+
+/** Solid zones at supported ends, and the trimmers below voids: along ribs that run along y, else the zones alone. */
+function solidDimension(
+  voids: readonly Ring[],
+  layout: PanelLayout,
+  face: Box,
+  box: Box,
+  scale: PlanScale,
+  isAlongY: boolean,
+  trimmerMm: number,
+): SvgNode {
+  const [from, to] = isAlongY ? [face.minY, face.maxY] : [face.minX, face.maxX]
+  const isSupported = (end: 'startsAt' | 'endsAt') =>
+    layout.rows.some(({ lengths }) => (end === 'startsAt' ? lengths[0] : lengths.at(-1))?.[end] === 'support')
+  const zone = layout.solidZone
+  const stretches = [
+    ...(isSupported('startsAt') && zone > 0 ? [{ from, to: from + zone, words: `solid ${figure(zone)}` }] : []),
+    ...(isAlongY && trimmerMm > 0 ? voids.slice(0, 1).map((ring) => trimmerBelow(ring, trimmerMm)) : []),
+    ...(isSupported('endsAt') && zone > 0 ? [{ from: to - zone, to, words: `solid ${figure(zone)}` }] : []),
+  ]
+  const [boxRight, boxBottom] = toPx(scale, [box.maxX, box.minY])
+  const nodes = stretches.map((stretch) =>
+    isAlongY
+      ? dimensionChain({
+          direction: 'vertical',
+          stationsPx: [stretch.from, stretch.to].map((y) => toPx(scale, [box.maxX, y])[1]),
+          figures: [stretch.words],
+          atPx: boxRight + FIRST_CHAIN_PX,
+          objectPx: boxRight,
+          isWorded: true,
+        })
+      : dimensionChain({
+          direction: 'horizontal',
+          stationsPx: [stretch.from, stretch.to].map((x) => toPx(scale, [x, box.minY])[0]),
+          figures: [stretch.words],
+          atPx: boxBottom + FIRST_CHAIN_PX,
+          objectPx: boxBottom,
+        }),
+  )
+  return svgNode('g', { class: 'solid-dimensions' }, nodes)
+}
+
+function trimmerBelow(ring: Ring, trimmerMm: number): { from: number; to: number; words: string } {
+  const { minY } = boundsOf(ring)
+  return { from: minY - trimmerMm, to: minY, words: `trimmer ${figure(trimmerMm)}` }
 }
 
 type Box = ReturnType<typeof boundsOf>
 
-function voidDimensions(ring: Ring, index: number, box: Box, scale: PlanScale): SvgNode[] {
+function voidDimensions(ring: Ring, index: number, box: Box, scale: PlanScale, wordsPx: number): SvgNode[] {
   const own = boundsOf(ring)
   const typed = new Set([0])
   const [left, top] = toPx(scale, [own.minX, own.maxY])
@@ -62,7 +126,7 @@ function voidDimensions(ring: Ring, index: number, box: Box, scale: PlanScale): 
       direction: 'vertical',
       stationsPx: [boxBottom, bottom],
       figures: [own.minY > box.minY ? figure(own.minY - box.minY) : ''],
-      atPx: boxRight + FIRST_CHAIN_PX + step,
+      atPx: boxRight + FIRST_CHAIN_PX + wordsPx + step,
       objectPx: boxRight,
       typed,
     }),

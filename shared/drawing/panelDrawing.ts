@@ -34,12 +34,14 @@ export interface PanelDrawingInput {
   readonly mostHeightPx: number
   /** Room for the fields around the drawing: left, right, above and below, px. */
   readonly margins: PlanMargins
+  /** Width of the solid strip around voids, mm; 0 for a solid scheme. */
+  readonly trimmerMm: number
 }
 
 const SCALE_BAR_PX = 34
 
 /** A panel opened: support strips, clear outline, every block, solid parts, voids and their dimensions. */
-export function panelDrawing({ id, panel: input, widthPx, mostHeightPx, margins }: PanelDrawingInput): PanelDrawing {
+export function panelDrawing({ id, panel: input, widthPx, mostHeightPx, margins, trimmerMm }: PanelDrawingInput): PanelDrawing {
   const { panel, kind, layout } = input
   const half = edgeRecords(panel).map(({ supportWidth }) => supportWidth / 2)
   const { scale, heightPx } = fitPlan(boundsOf(panel.outline), margins, widthPx, mostHeightPx)
@@ -72,7 +74,7 @@ export function panelDrawing({ id, panel: input, widthPx, mostHeightPx, margins 
       'stroke-width': 0.75,
       'stroke-dasharray': '10 3 2 3',
     }),
-    ...panelDimensions(input, scale, clear),
+    ...panelDimensions(input, scale, clear, trimmerMm),
     scaleBar(widthPx - 8, heightPx + 4, Math.min(240, widthPx * 0.4), scale.pxPerMm),
   ])
   return { node, widthPx, heightPx: fullHeightPx, edges: panel.outline.map((_, i) => edgePlace(panel.outline, i, scale)) }

@@ -1,5 +1,5 @@
 import type { ApiIssue } from '#shared/contracts/apiError'
-import type { Panel, PanelResult, Scheme } from '#shared/contracts/appraisal'
+import type { Panel, PanelResult, RibbedScheme } from '#shared/contracts/appraisal'
 import type { CellProblem, PanelColumn, PanelRowText } from '#shared/layout/edit/panelRowText'
 import { EMPTY_ROW } from '#shared/layout/edit/panelRowText'
 import { rectangleFit } from '#shared/layout/edit/rectangleFit'
@@ -30,7 +30,8 @@ export interface PanelRowsInput {
   readonly results: readonly PanelResult[]
   /** Problems of this level, by path within it: `panels.2.outline`. */
   readonly issues: readonly ApiIssue[]
-  readonly scheme: Scheme | null
+  /** Ribbed schemes of the project: a panel that one of them cannot cover is left out of all. */
+  readonly ribbed: readonly RibbedScheme[]
 }
 
 const NOT_COUNTED = 'Not counted until it is put right.'
@@ -41,12 +42,12 @@ export function panelRows(input: PanelRowsInput): PanelRow[] {
   return [...rows, ...input.drafts.rows.map(draftRow), emptyRow()]
 }
 
-function panelRow(panel: Panel, index: number, { drafts, results, issues, scheme }: PanelRowsInput): PanelRow {
+function panelRow(panel: Panel, index: number, { drafts, results, issues, ribbed }: PanelRowsInput): PanelRow {
   const cells = drafts.cells.get(panel.mark) ?? {}
   const typed = Object.entries(cells).map(([column, { text }]) => [column, text])
   const result = results.find(({ mark }) => mark === panel.mark) ?? null
   const own = issues.filter(({ path }) => path === `panels.${index}` || path.startsWith(`panels.${index}.`))
-  const refused = own.length === 0 ? [] : refusals(panel, own, scheme)
+  const refused = own.length === 0 ? [] : refusals(panel, own, ribbed)
   return {
     kind: 'panel',
     index,
@@ -60,9 +61,9 @@ function panelRow(panel: Panel, index: number, { drafts, results, issues, scheme
 }
 
 /** Reasons why the engine leaves a panel out: told by its typed lengths where they can be, else in the engine's words. */
-function refusals(panel: Panel, issues: readonly ApiIssue[], scheme: Scheme | null): CellProblem[] {
-  const fit = scheme?.kind === 'ribbed' ? rectangleFit(panel, scheme) : null
-  if (fit !== null) return [fit]
+function refusals(panel: Panel, issues: readonly ApiIssue[], ribbed: readonly RibbedScheme[]): CellProblem[] {
+  const fit = ribbed.map((scheme) => rectangleFit(panel, scheme)).find((problem) => problem !== null)
+  if (fit !== undefined) return [fit]
   return issues.map(({ path, message }) => ({ column: columnOf(path), reason: message }))
 }
 

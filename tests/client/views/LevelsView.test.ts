@@ -32,6 +32,7 @@ describe('LevelsView', () => {
     const stored = { ...sheet.levels[0]!, version: 5 }
     const api = fakeApi({
       [`GET /api/projects/${projectId}`]: () => ({ status: 200, json: sheet }),
+      'GET /api/blocks': () => ({ status: 200, json: [] }),
       [`PUT ${LEVELS}/${levelId}`]: ({ body }) => ({ status: 200, json: { ...stored, ...(body as LevelInput) } }),
       [`POST ${LEVELS}`]: ({ body }) => ({
         status: 201,
