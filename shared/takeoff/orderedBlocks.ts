@@ -14,6 +14,6 @@ export function orderedBlocks(
   net: number,
   { breakagePercent, palletCount }: Pick<CatalogueBlock, 'breakagePercent' | 'palletCount'>,
 ): number {
-  const whole = Math.ceil(net * (1 + Number(breakagePercent) / 100) - ROUNDING)
+  const whole = Math.max(0, Math.ceil(net * (1 + Number(breakagePercent) / 100) - ROUNDING))
   return palletCount === null ? whole : Math.ceil(whole / palletCount) * palletCount
 }
