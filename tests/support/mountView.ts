@@ -12,7 +12,23 @@ export interface Mounted {
   readonly unmount: () => void
 }
 
-const NAMES = ['signIn', 'passwordReset', 'invitation', 'projects', 'brief', 'levels', 'received', 'people', 'rates'] as const
+const NAMES = [
+  'signIn',
+  'passwordReset',
+  'invitation',
+  'projects',
+  'brief',
+  'levels',
+  'schemes',
+  'quantities',
+  'bill',
+  'compare',
+  'checks',
+  'sent',
+  'received',
+  'people',
+  'rates',
+] as const
 
 /** Mounts a view at an address, in the document, with a router that knows every name and shows only this view. */
 export async function mountView(

@@ -1,3 +1,4 @@
+import { minorUnit } from '#shared/pricing/minorUnit'
 import { formatDecimal } from '../base/formatDecimal'
 
 const symbols = new Map<string, string>()
@@ -16,5 +17,5 @@ function symbolOf(currency: string): string {
 export function moneyInWords(amount: string, currency: string): string {
   const size = amount.replace(/^-/, '')
   const isLarge = (size.split('.')[0] ?? '').length >= 3
-  return symbolOf(currency) + formatDecimal(size, isLarge ? { decimals: 0 } : {})
+  return symbolOf(currency) + formatDecimal(size, { decimals: isLarge ? 0 : minorUnit(currency) })
 }

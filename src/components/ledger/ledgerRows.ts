@@ -1,6 +1,7 @@
 import type { Comparison, Cost, SchemeResult } from '#shared/contracts/appraisal'
 import { itemCode } from '#shared/contracts/appraisal'
 import { Decimal, sumOf } from '#shared/pricing/decimal'
+import { printMoney } from '#shared/pricing/money'
 import { unitOf } from '#shared/takeoff/measurementRules'
 import { formatDecimal } from '../base/formatDecimal'
 import type { Pair } from '../compare/phrase'
@@ -21,7 +22,7 @@ export interface LedgerRow {
 export interface LedgerRows {
   readonly rows: readonly LedgerRow[]
   /** What costs the same in both, taken together; null where there is none. */
-  readonly same: { readonly names: string; readonly amount: string } | null
+  readonly same: { readonly names: string; readonly amount: string; readonly difference: string } | null
   readonly total: Pair<string> & { readonly difference: string }
 }
 
@@ -38,6 +39,7 @@ export function ledgerRows(comparison: Comparison, pair: Pair<SchemeResult>): Le
     solid: line.second,
     ...named(line.item, ribbed, solid),
   }))
+  const print = (amount: Decimal) => printMoney(amount, ribbed.currency)
   const same = lines.filter(({ difference }) => Number(difference) === 0)
   return {
     rows: lines.filter(({ difference }) => Number(difference) !== 0),
@@ -46,12 +48,13 @@ export function ledgerRows(comparison: Comparison, pair: Pair<SchemeResult>): Le
         ? null
         : {
             names: same.map(({ name }) => name.charAt(0).toLowerCase() + name.slice(1)).join(', '),
-            amount: sumOf(same.map(({ first }) => new Decimal(first))).toFixed(),
+            difference: print(new Decimal(0)),
+            amount: print(sumOf(same.map(({ first }) => new Decimal(first)))),
           },
     total: {
       ribbed: ribbed.total,
       solid: solid.total,
-      difference: new Decimal(ribbed.total).minus(solid.total).toFixed(),
+      difference: print(new Decimal(ribbed.total).minus(solid.total)),
     },
   }
 }
