@@ -10,17 +10,20 @@ export interface SpanMark {
   /** Direction of the span, degrees from x, anticlockwise. */
   readonly directionDegrees: number
   readonly isBothWays: boolean
-  /** Room around the place, px: without enough of it the arrows are left away. */
+  /** Room around the place, px: without enough of it the arrows are left away, and then the mark. */
   readonly roomPx: number
 }
 
 const HALF_TEXT_HEIGHT = 9
 const ARROW_PX = 20
 const LEAST_ARROW_PX = 8
+/** Part of a mark's half width that must be clear on every side, or marks of narrow panels would cover each other. */
+const LEAST_ROOM = 0.55
 
 /** The mark on a ground of paper, so that it is read over blocks. */
 export function spanMark({ text, placePx, directionDegrees, isBothWays, roomPx }: SpanMark): SvgNode {
   const halfText = text.length * 4 + 4
+  if (roomPx < halfText * LEAST_ROOM) return svgNode('g', { class: 'span-mark' })
   const directions = isBothWays ? [directionDegrees, directionDegrees + 90] : [directionDegrees]
   const arms = directions.map((degrees) => arm(degrees, halfText, roomPx))
   const [x, y] = placePx

@@ -9,6 +9,13 @@ import { settleContinuity } from './settleContinuity'
 /** Support width of the first panel of a level, mm, until another is typed. Source: project rule, a usual beam width */
 const FIRST_SUPPORT_WIDTH_MM = 250
 
+/**
+ * Panels typed one after the other stand in rows of up to this length, mm, or of the level's own length where that is more.
+ *
+ * Source: project rule, a sheet of panels is read best in rows, and few buildings are longer between joints
+ */
+const ROW_MM = 36_000
+
 /** A panel typed as two lengths. Lengths in mm, rib direction in degrees from x, 0 ≤ d < 180. */
 export interface RectangleInput {
   readonly mark: string
@@ -19,8 +26,8 @@ export interface RectangleInput {
 }
 
 /**
- * Panels with a rectangle added: beside the last one where that place is free, else to the right of the level, on the last
- * one's lower line. Edges that meet a neighbour are continuous on both sides; the others discontinuous, as wide and of the
+ * Panels with a rectangle added: beside the last one, on its lower line, where that place is free and the row not too long;
+ * else at the left, above the level. Edges that meet a neighbour are continuous on both sides; the others discontinuous, as wide and of the
  * kind most edges of the level are.
  */
 export function addRectangle(panels: readonly Panel[], input: RectangleInput): Panel[] {
@@ -48,5 +55,6 @@ function freePlace(panels: readonly Panel[], alongX: number, alongY: number): Po
   const { maxX, minY } = boundsOf(last.outline)
   const beside = boundsOf(rectangleRing([maxX, minY], alongX, alongY))
   const isTaken = panels.some(({ outline }) => boundsOverlap(beside, boundsOf(outline), DRAWN_TOLERANCE_MM))
-  return [isTaken ? level.maxX : maxX, minY]
+  const isTooLong = beside.maxX - level.minX > Math.max(ROW_MM, level.maxX - level.minX)
+  return isTaken || isTooLong ? [level.minX, level.maxY] : [maxX, minY]
 }

@@ -32,10 +32,17 @@ describe('addRectangle', () => {
     expect(edgeRecords(added)[0]).toEqual({ supportWidth: 250, kind: 'beam', continuity: 'discontinuous' })
   })
 
-  it('goes to the right of the level when the place beside the last panel is taken', () => {
+  it('begins a row above the level when the place beside the last panel is taken', () => {
     const [first, second, third] = gridPanels([6000, 6000], [5000, 5000])
     const panels = addRectangle([second!, third!, first!], row('P9', 4000, 5000))
-    expect(panels[3]!.outline[0]).toEqual([12_000, 0])
+    expect(panels[3]!.outline[0]).toEqual([0, 10_000])
+    expect(floorFault(panels)).toBeNull()
+  })
+
+  it('begins a row above the level when the row would be longer than 36 m', () => {
+    const marks = Array.from({ length: 14 }, (_, i) => `P${i + 1}`)
+    const panels = marks.reduce((made, mark) => addRectangle(made, row(mark, 7000, 6000)), gridPanels([], []))
+    expect(panels.map(({ outline }) => outline[0])).toEqual(marks.map((_, i) => [(i % 5) * 7000, Math.floor(i / 5) * 6000]))
     expect(floorFault(panels)).toBeNull()
   })
 })
