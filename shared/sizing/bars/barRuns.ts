@@ -67,7 +67,8 @@ export function barRuns(bars: BarLines): BarRun[] {
 }
 
 function countWorking({ each, lines }: BarLines, count: number): string {
-  return each === 1 ? `${count} ${lines}` : `${count} ${lines} × ${each} = ${count * each}`
+  const counted = `${count} ${count === 1 ? lines.replace(/^(\w+)s\b/, '$1') : lines}`
+  return each === 1 ? counted : `${counted} × ${each} = ${count * each}`
 }
 
 function equalRun(bars: BarLines, pieces: readonly (readonly number[])[]): BarRun {

@@ -1,19 +1,19 @@
 import type { EndOfSpan } from '../analysis/spanForces'
 import { figure } from '../figure'
-import { isMet } from '../finding'
+import { fireFlags } from '../fireFlags'
+import { type Finding, isMet } from '../finding'
 import { FABRIC } from '../tables/fabric'
-import { endName, type RibContext } from './ribContext'
+import { endName } from './ribContext'
 import type { RibAnalysis } from './ribAnalysis'
 import { isMixedEnd, type RibbedPanel } from './ribbedPanel'
 import type { RibTask } from './ribDesign'
-import { shapeFindings } from './checks/shapeFindings'
 
 /**
  * Assumptions and approximations of one ribbed panel, in sentences.
  *
  * Source: project rule, what was assumed is stated (engine design sections 1 and 4)
  */
-export function ribFlags(task: RibTask): string[] {
+export function ribFlags(task: RibTask, findings: readonly Finding[]): string[] {
   const { panel, context, scheme } = task
   const { analysis } = context
   const lengths = panel.ribs.map(({ clearMm }) => clearMm)
@@ -34,7 +34,7 @@ export function ribFlags(task: RibTask): string[] {
       : []),
     ...crossRibFlag(task),
     ...meshFlag(task),
-    ...fireFlags(context),
+    ...fireFlags(findings),
   ]
 }
 
@@ -67,15 +67,4 @@ function meshFlag({ scheme: { mesh }, context: { basis, section } }: RibTask): s
   return [
     `topping: ${mesh === 'none' ? 'no mesh' : `${mesh} mesh, ${figure(areaMm2PerM, 0)} mm²/m`}, against ${figure(least.value, 0)} mm²/m as least steel of the flange (${least.clause})`,
   ]
-}
-
-/** What would change the answer of the fire tables, where a size fails. */
-function fireFlags({ basis, section, analysis, fireMinutes }: RibContext): string[] {
-  const failing = shapeFindings(basis, section, analysis, fireMinutes).filter(
-    ({ name, demand, capacity }) => name === 'fire.size' && !isMet(demand, capacity),
-  )
-  return failing.map(
-    ({ demand, capacity, clause }) =>
-      `${clause} asks ${figure(demand)} mm where there are ${figure(capacity)} mm: a larger size would change that, or test evidence for the blocks and their plaster`,
-  )
 }

@@ -1,6 +1,7 @@
 import type { Brief, RibbedScheme } from '../../contracts/appraisal'
 import { type BarSet, centroidMm } from '../bars/barSet'
 import type { BendingSection, RibShape } from '../codeBasis'
+import { depthLeft } from '../sectionDepth'
 
 /** Cross-section of one rib with its share of the topping, mm. */
 export interface RibSection extends RibShape {
@@ -43,7 +44,7 @@ export function axisDistanceMm({ coverMm, linkMm }: RibSection, bars: BarSet): n
  * Source: statics; a mesh in the topping lies below the top bars: common practice, no source
  */
 export function effectiveDepthMm(section: RibSection, bars: BarSet): number {
-  return section.heightMm - axisDistanceMm(section, bars)
+  return depthLeft(section.heightMm, axisDistanceMm(section, bars))
 }
 
 /**

@@ -1,7 +1,9 @@
 import type { Brief, RibbedScheme } from '../../contracts/appraisal'
 import type { CodeBasis } from '../codeBasis'
 import type { LevelSite } from '../panelSite'
+import { refuseCoverThroughSection } from '../sectionDepth'
 import type { SizedPanel } from '../sizedPanel'
+import { CHOSEN_DIAMETERS } from '../tables/bars'
 import { designRibs } from './ribDesign'
 import { laidOut } from './ribbedPanel'
 import { reinforcementKey, ribbedJob, taskOf } from './ribbedJob'
@@ -15,9 +17,10 @@ import { sizedRibbedPanel } from './sizedRibbedPanel'
  * `perRib` makes them those of one rib.
  *
  * Source: project rule, engine design sections 2 and 4
- * @throws OutOfScopeError where ribs do not run from support to support, or no block fits
+ * @throws OutOfScopeError where ribs do not run from support to support, no block fits, or the cover takes up the depth
  */
 export function sizeRibbed(level: LevelSite, scheme: RibbedScheme, brief: Brief, basis: CodeBasis): SizedPanel[] {
+  refuseCoverThroughSection(scheme.block.height + scheme.topping, brief.cover + scheme.link + CHOSEN_DIAMETERS[0])
   const job = ribbedJob(level, scheme, brief, basis)
   const { panels, analyses } = settleZones(job)
   return level.panels.map((site, i) => {

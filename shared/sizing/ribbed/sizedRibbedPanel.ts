@@ -38,7 +38,7 @@ export function sizedRibbedPanel(
     moments: momentsOf(context),
     steel: steelOf(context, design),
     bars: runsOf(task, design),
-    flags: ribFlags(task),
+    flags: ribFlags(task, findings),
   }
 }
 

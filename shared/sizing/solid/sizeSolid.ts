@@ -5,7 +5,9 @@ import type { CodeBasis } from '../codeBasis'
 import { checkRow } from '../finding'
 import type { LevelSite } from '../panelSite'
 import { remember } from '../remember'
+import { refuseCoverThroughSection } from '../sectionDepth'
 import type { SizedPanel } from '../sizedPanel'
+import { CHOSEN_DIAMETERS } from '../tables/bars'
 import { chooseSlabBars, type SlabBars } from './bars/chooseSlabBars'
 import { analyseSlabs } from './slabAnalysis'
 import { bottomBarLines, topBarLines, torsionBarLines } from './bars/slabBarLines'
@@ -33,13 +35,14 @@ interface Job {
  * is the direction spanned first, whose bars lie nearest the faces; `long` the other.
  *
  * Source: project rule, engine design sections 3 and 4
- * @throws OutOfScopeError where free edges leave a panel no two opposite supports
+ * @throws OutOfScopeError where free edges leave a panel no two opposite supports, or the cover takes up the depth
  */
 export function sizeSolid(sites: readonly LevelSite[], scheme: SolidScheme, brief: Brief, basis: CodeBasis): SizedPanel[] {
   const levels = sites.map((site) => ({ site, plans: site.panels.map(slabPlan) }))
   const job: Job = { levels, scheme, brief, basis }
   const all = (heightMm: number) => contextsAt(job, heightMm).flatMap(({ contexts }) => contexts)
   const heightMm = scheme.thickness === 'least' ? leastThickness(all) : scheme.thickness
+  refuseCoverThroughSection(heightMm, brief.cover + 2 * CHOSEN_DIAMETERS[0])
   const barsFor: BarsFor = remember()
   return contextsAt(job, heightMm).flatMap(({ mark, contexts }) => contexts.map((context) => sizedPanel(context, mark, barsFor)))
 }
@@ -59,6 +62,7 @@ function sizedPanel(context: SlabContext, level: string, barsFor: BarsFor): Size
   const { plan, heightMm } = context
   const { mark } = plan.site.panel
   const bars = barsFor(slabKey(context), () => chooseSlabBars(context))
+  const findings = [...bars.findings, ...sizeFindings(context)]
   const lines = [
     ...bottomBarLines(context, bars),
     ...bars.tops.flatMap((top) => topBarLines(context, top)),
@@ -70,11 +74,11 @@ function sizedPanel(context: SlabContext, level: string, barsFor: BarsFor): Size
     depth: heightMm,
     areas: plan.areas,
     layout: null,
-    checks: [...bars.findings, ...sizeFindings(context)].map((finding) => checkRow(finding, level, mark)),
+    checks: findings.map((finding) => checkRow(finding, level, mark)),
     moments: momentsOf(context),
     steel: steelOf(bars),
     bars: lines.flatMap(barRuns),
-    flags: slabFlags(context),
+    flags: slabFlags(context, findings),
   }
 }
 

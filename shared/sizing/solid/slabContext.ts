@@ -2,6 +2,7 @@ import type { BarDiameter, BarLayer, Brief, SolidScheme } from '../../contracts/
 import type { EndOfSpan } from '../analysis/spanForces'
 import type { CodeBasis } from '../codeBasis'
 import { endName } from '../ribbed/ribContext'
+import { depthLeft } from '../sectionDepth'
 import type { SlabAnalysis, SlabSpan } from './slabAnalysis'
 import type { SlabAxis, SlabPlan, SlabSide } from './slabPlan'
 
@@ -25,7 +26,7 @@ export const METRE_MM = 1000
  * @param outer - diameter of the bars between the layer and the face; null for the outermost layer
  */
 export function layerDepthMm({ heightMm, brief }: SlabContext, diameter: BarDiameter, outer: BarDiameter | null): number {
-  return heightMm - brief.cover - (outer ?? 0) - diameter / 2
+  return depthLeft(heightMm, brief.cover + (outer ?? 0) + diameter / 2)
 }
 
 /** A place on a slab's top: one end of one direction. */

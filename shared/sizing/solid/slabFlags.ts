@@ -1,3 +1,5 @@
+import type { Finding } from '../finding'
+import { fireFlags } from '../fireFlags'
 import type { SlabContext } from './slabContext'
 
 /**
@@ -5,7 +7,7 @@ import type { SlabContext } from './slabContext'
  *
  * Source: project rule, what was assumed is stated (engine design sections 1, 3 and 4)
  */
-export function slabFlags(context: SlabContext): string[] {
+export function slabFlags(context: SlabContext, findings: readonly Finding[]): string[] {
   const { plan, analysis } = context
   const sides = [...Object.values(analysis.short.axis.ends), ...Object.values(analysis.other.ends)]
   return [
@@ -17,7 +19,10 @@ export function slabFlags(context: SlabContext): string[] {
     ...sides
       .filter(({ isMixed }) => isMixed)
       .map(({ edges }) => `edges ${edges.map((edge) => edge + 1).join(', ')}: continuous in part only, taken as discontinuous`),
-    ...(plan.site.panel.voids.length > 0 ? ['bars stop at voids; trimming bars round them are not included'] : []),
+    ...(plan.site.panel.voids.length > 0
+      ? ['sized as without its voids; bars stop at them, trimming bars round them are not included']
+      : []),
+    ...fireFlags(findings),
   ]
 }
 

@@ -5,16 +5,9 @@ type PanelInput = AppraisalFileInput['levels'][number]['panels'][number]
 type SchemeInput = AppraisalFileInput['schemes'][number]
 type Basis = Extract<AppraisalFileInput['brief'], { basis: 'EN1992' }>
 
-export const brief: Basis = {
-  basis: 'EN1992',
-  imposedLoad: 2,
-  finishesLoad: 1.5,
-  partitionsLoad: 0.8,
-  cover: 25,
-  fireMinutes: 30,
-  fck: 30,
-  fyk: 500,
-}
+export const loads = { imposedLoad: 2, finishesLoad: 1.5, partitionsLoad: 0.8, cover: 25, fireMinutes: 30 } as const
+
+export const brief: Basis = { basis: 'EN1992', ...loads, fck: 30, fyk: 500 }
 
 export const ribbed: Extract<SchemeInput, { kind: 'ribbed' }> = {
   mark: 'R1',
