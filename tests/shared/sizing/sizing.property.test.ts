@@ -29,6 +29,13 @@ const massOf = ({ panels }: SizedScheme) =>
 
 const methodOf = ({ panels }: SizedScheme) => panels.map(({ flags }) => flags[0]).join()
 
+/**
+ * Whether a solid zone left to the engine became narrower, which heavier bars can bring about: they carry more shear, and the floor gets
+ * lighter. Then the floors compared are not of one shape.
+ */
+const isNarrower = (most: SizedScheme, less: SizedScheme) =>
+  most.panels.some(({ layout }, i) => layout !== null && layout.solidZone < (less.panels[i]?.layout?.solidZone ?? 0))
+
 function moved(file: AppraisalFile, degrees: number, [dx, dy]: readonly [number, number]): AppraisalFile {
   const [cosine, sine] = [Math.cos((degrees * Math.PI) / 180), Math.sin((degrees * Math.PI) / 180)]
   const levels = file.levels.map((level) => ({
@@ -82,7 +89,7 @@ describe.each(schemes)('%s', (_, scheme) => {
       fc.property(spans, height, load, fc.double({ min: 0.01, max: 6, noNaN: true }), (widths, deep, imposedLoad, more) => {
         const less = sizeScheme(scheme, fileOf(row(widths, deep), { imposedLoad }))
         const most = sizeScheme(scheme, fileOf(row(widths, deep), { imposedLoad: imposedLoad + more }))
-        fc.pre(methodOf(less) === methodOf(most))
+        fc.pre(methodOf(less) === methodOf(most) && !isNarrower(most, less))
         expect(most.depth).toBeGreaterThanOrEqual(less.depth)
         if (most.depth === less.depth) expect(massOf(most)).toBeGreaterThanOrEqual(massOf(less) * (1 - RELATIVE))
       }),
