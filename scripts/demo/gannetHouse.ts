@@ -4,20 +4,20 @@ import { ribbedScheme, solidScheme } from './demoSchemes'
 
 const BEAM = 300
 
-/** Offices with longer spans one way, on frames 7.2 m apart: an L-shaped end bay with a stair in it. */
+/** Offices with longer spans one way, on frames 7.5 and 8.1 m apart: an L-shaped end bay with a stair in it. */
 export const GANNET_HOUSE: DemoProject = {
-  region: 'Norvane',
+  region: 'Caldrith',
   project: {
     name: 'Gannet House',
     reference: 'GH-05',
-    place: 'Ostrel Isles, Norvane',
+    place: 'Ostrel Isles, Caldrith',
     use: 'B',
     brief: {
       basis: 'EN1992',
-      imposedLoad: 3,
+      imposedLoad: 2.5,
       finishesLoad: 1,
-      servicesLoad: 0.5,
-      partitionsLoad: 1,
+      servicesLoad: 0.3,
+      partitionsLoad: 0.8,
       cover: 25,
       fireMinutes: 60,
       fck: 35,
@@ -31,26 +31,27 @@ export const GANNET_HOUSE: DemoProject = {
       name: 'Office floors',
       repeat: 3,
       panels: [
-        panelOf('P1', rectangle(0, 0, 7200, 15_000), edgesOf('dcdd', BEAM), { ribDirection: 0 }),
-        panelOf('P2', rectangle(7200, 0, 7200, 15_000), edgesOf('dcdc', BEAM), { ribDirection: 0 }),
+        panelOf('P1', rectangle(0, 0, 7500, 18_000), edgesOf('dcdd', BEAM), { ribDirection: 0 }),
+        panelOf('P2', rectangle(7500, 0, 8100, 18_000), edgesOf('dcdc', BEAM), { ribDirection: 0 }),
         panelOf(
           'P3',
           [
-            [14_400, 0],
-            [21_600, 0],
-            [21_600, 9000],
-            [18_600, 9000],
-            [18_600, 15_000],
-            [14_400, 15_000],
+            [15_600, 0],
+            [23_100, 0],
+            [23_100, 12_000],
+            [20_100, 12_000],
+            [20_100, 18_000],
+            [15_600, 18_000],
           ],
           edgesOf('dddddc', BEAM),
-          { ribDirection: 0, voids: [rectangle(15_600, 10_400, 1800, 3200)] },
+          { ribDirection: 0, voids: [rectangle(16_800, 13_200, 2000, 3600)] },
         ),
       ],
     },
   ],
   schemes: [
-    ribbedScheme('R1', 'Ribbed, 250 mm clay blocks', 'HC 250', { ribWidth: 140, topping: 80, mesh: 'A142' }),
+    ribbedScheme('R1', 'Ribbed, 240 mm lightweight blocks', 'LA 240', { ribWidth: 160, topping: 80, mesh: 'A142' }),
+    ribbedScheme('R2', 'Ribbed, 250 mm clay blocks', 'HC 250', { ribWidth: 140, topping: 80, mesh: 'A142' }),
     solidScheme('S1', 'Solid, least thickness'),
   ],
 }

@@ -6,11 +6,11 @@ const BEAM = 300
 
 /** Three storeys of treatment rooms on a corridor: two rows of bays with a narrow one between. */
 export const MILLRACE_CLINIC: DemoProject = {
-  region: 'Caldrith',
+  region: 'Norvane',
   project: {
     name: 'Millrace Clinic',
     reference: 'MC-11',
-    place: 'Ostrel Isles, Caldrith',
+    place: 'Ostrel Isles, Norvane',
     use: 'A',
     brief: {
       basis: 'EN1992',
