@@ -161,11 +161,12 @@ describe('hostile input', () => {
   )
 
   it('in headers and query is no fault of ours', async () => {
-    for (const headers of [
+    const odd: Record<string, string>[] = [
       { 'If-Match': '"99999999999999999999"' },
       { 'Idempotency-Key': '\u00e9' },
       { Cookie: 'bothways-access=%E0%A4%A' },
-    ]) {
+    ]
+    for (const headers of odd) {
       expect((await client.call('post', '/api/projects', { headers, body: sampleProject() })).status).toBeLessThan(500)
     }
     expect((await client.get('/api/projects?a[]=1&__proto__[x]=1&%E0%A4%A')).status).toBe(200)
