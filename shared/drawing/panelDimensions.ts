@@ -21,25 +21,27 @@ const WORDS_PX = 92
  * they are typed; of a rectangle whose ribs run along x or y also the rows with both edge strips, across the ribs, and the
  * solid zones and trimmers along them.
  *
- * @param trimmerMm - width of the solid strip around voids
+ * @param trimmerMm - width of the solid strip around voids; null: neither it nor the solid zones are dimensioned
  */
 export function panelDimensions(
   { panel, layout }: PlanPanel,
   scale: PlanScale,
   clear: readonly Point[],
-  trimmerMm: number,
+  trimmerMm: number | null,
 ): SvgNode[] {
   const box = boundsOf(panel.outline)
   const isUpright = panel.ribDirection % 90 === 0 && isRectangle(panel)
   const hasRows = layout !== null && layout.rows.length > 0 && isUpright
   const isAlongY = panel.ribDirection === 90
-  const voids = panel.voids.flatMap((ring, i) => voidDimensions(ring, i, box, scale, hasRows && isAlongY ? WORDS_PX : 0))
+  const voids = panel.voids.flatMap((ring, i) =>
+    voidDimensions(ring, i, box, scale, hasRows && isAlongY && trimmerMm !== null ? WORDS_PX : 0),
+  )
   if (!hasRows) return voids
   const face = boundsOf(clear)
   return [
     ...voids,
     rowDimension(layout.rows, face, box, scale, isAlongY),
-    solidDimension(panel.voids, layout, face, box, scale, isAlongY, trimmerMm),
+    ...(trimmerMm === null ? [] : [solidDimension(panel.voids, layout, face, box, scale, isAlongY, trimmerMm)]),
   ]
 }
 

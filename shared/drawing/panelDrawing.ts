@@ -34,8 +34,8 @@ export interface PanelDrawingInput {
   readonly mostHeightPx: number
   /** Room for the fields around the drawing: left, right, above and below, px. */
   readonly margins: PlanMargins
-  /** Width of the solid strip around voids, mm; 0 for a solid scheme. */
-  readonly trimmerMm: number
+  /** Width of the solid strip around voids, mm; null: there is no room to dimension it and the solid zones. */
+  readonly trimmerMm: number | null
 }
 
 const SCALE_BAR_PX = 34
