@@ -1,7 +1,6 @@
 import type { BillLine, Cost } from '#shared/contracts/appraisal'
 import type { Rate } from '#shared/contracts/rateBook'
 import { Decimal, sumOf } from '#shared/pricing/decimal'
-import { minorUnit } from '#shared/pricing/minorUnit'
 import type { WorkSection } from '../quantity/itemInWords'
 import { byWorkSection } from '../quantity/itemInWords'
 
@@ -18,11 +17,6 @@ const amountOf = (rows: readonly { readonly amount: string }[]): Decimal => sumO
 export function billSections({ lines }: Cost, rates: readonly Rate[]): BillSection[] {
   const sourced = lines.map((line) => ({ ...line, source: rates.find(({ item }) => item === line.item)?.source ?? null }))
   return byWorkSection(sourced).map(({ section, rows }) => ({ section, lines: rows, amount: amountOf(rows).toFixed() }))
-}
-
-/** Decimals that a rate is printed with: its own, but never fewer than the currency's. */
-export function rateDecimals(rate: string, currency: string): number {
-  return Math.max(minorUnit(currency), rate.split('.')[1]?.length ?? 0)
 }
 
 /** Sum of the measured work, before any markup. */

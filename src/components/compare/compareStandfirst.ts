@@ -57,5 +57,5 @@ function turn({ point, change, isInsideBook }: Tip, currency: string): string {
   const at = `${formatDecimal(point.value, { decimals: 2 })} ${currency}/${unitOf(point.item)}`
   const way = change > 0 ? 'rises' : 'falls'
   const inside = isInsideBook ? ' That lies inside the range of the book.' : ''
-  return `The order turns if ${name} ${way} by ${Math.abs(change * 100).toFixed(0)}%, to ${at}, all else as it is.${inside}`
+  return `The order turns if the rate of ${name} ${way} by ${Math.abs(change * 100).toFixed(0)}%, to ${at}, all else as it is.${inside}`
 }

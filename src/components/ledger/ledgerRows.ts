@@ -4,6 +4,7 @@ import { Decimal, sumOf } from '#shared/pricing/decimal'
 import { printMoney } from '#shared/pricing/money'
 import { unitOf } from '#shared/takeoff/measurementRules'
 import { formatDecimal } from '../base/formatDecimal'
+import { rateDecimals } from '../bill/rateDecimals'
 import type { Pair } from '../compare/phrase'
 import { itemInWords } from '../quantity/itemInWords'
 
@@ -68,6 +69,10 @@ function named(item: string, ribbed: Cost, solid: Cost): { name: string; working
   }
   const lines = [ribbed, solid].map(({ lines: all }) => all.find((line) => line.item === item))
   const quantities = lines.flatMap((line) => (line ? [formatDecimal(line.quantity)] : []))
-  const rates = [...new Set(lines.flatMap((line) => (line ? [formatDecimal(line.rate)] : [])))]
+  const rates = [
+    ...new Set(
+      lines.flatMap((line) => (line ? [formatDecimal(line.rate, { decimals: rateDecimals(line.rate, ribbed.currency) })] : [])),
+    ),
+  ]
   return { name: itemInWords(code.data), working: `${quantities.join(' and ')} ${unitOf(code.data)} at ${rates.join(' and ')}` }
 }

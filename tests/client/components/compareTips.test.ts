@@ -62,7 +62,7 @@ describe('tipping points', () => {
   it('give the standfirst its doubt', () => {
     expect(compareStandfirst(pair, comparison, [])).toEqual([
       'Ribbed saves 6.5% of the dearer floors: 1,450 against 1,550 USD, at the likely rates of the book.',
-      'The order turns if concrete in slabs falls by 33%, to 100.00 USD/m³, all else as it is.',
+      'The order turns if the rate of concrete in slabs falls by 33%, to 100.00 USD/m³, all else as it is.',
     ])
   })
 
@@ -84,7 +84,7 @@ describe('the ledger as it is read', () => {
   })
 
   it('shows how each amount came about', () => {
-    expect(ledger.rows.map(({ working }) => working)).toEqual(['8 and 10 m³ at 150', '100 nr at 2'])
+    expect(ledger.rows.map(({ working }) => working)).toEqual(['8 and 10 m³ at 150.00', '100 nr at 2.00'])
   })
 
   it('takes together what costs the same in both', () => {
