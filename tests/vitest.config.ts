@@ -9,13 +9,14 @@ export default defineConfig({
   root,
   plugins: [vue()],
   test: {
+    setupFiles: ['tests/support/seed.ts'],
     projects: [
       {
         extends: true,
         test: {
           name: 'shared',
           include: ['tests/*.test.ts', 'tests/shared/**/*.test.ts', 'tests/scripts/**/*.test.ts'],
-          testTimeout: 60_000,
+          testTimeout: 180_000,
         },
       },
       {
@@ -24,8 +25,8 @@ export default defineConfig({
           name: 'server',
           include: ['tests/server/**/*.test.ts'],
           globalSetup: ['tests/support/startDatabase.ts'],
-          testTimeout: 30_000,
-          hookTimeout: 60_000,
+          testTimeout: 90_000,
+          hookTimeout: 120_000,
         },
       },
       {
@@ -34,9 +35,9 @@ export default defineConfig({
           name: 'client',
           include: ['tests/client/**/*.test.ts'],
           environment: 'jsdom',
-          setupFiles: ['tests/support/browserGaps.ts'],
+          setupFiles: ['tests/support/seed.ts', 'tests/support/browserGaps.ts'],
           server: { deps: { inline: ['element-plus'] } },
-          testTimeout: 30_000,
+          testTimeout: 90_000,
         },
       },
       {
@@ -44,8 +45,8 @@ export default defineConfig({
         test: {
           name: 'e2e',
           include: ['tests/e2e/**/*.test.ts'],
-          testTimeout: 180_000,
-          hookTimeout: 180_000,
+          testTimeout: 300_000,
+          hookTimeout: 300_000,
           fileParallelism: false,
         },
       },
