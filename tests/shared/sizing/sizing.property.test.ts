@@ -36,10 +36,6 @@ const methodOf = ({ panels }: SizedScheme) => panels.map(({ flags }) => flags[0]
 const isNarrower = (most: SizedScheme, less: SizedScheme) =>
   most.panels.some(({ layout }, i) => layout !== null && layout.solidZone < (less.panels[i]?.layout?.solidZone ?? 0))
 
-/** Whether bars can be found at all: where none bend or deflect little enough, the set shown is the nearest, not the lightest. */
-const isPossible = ({ panels }: SizedScheme) =>
-  panels.every(({ checks }) => checks.every(({ name, pass }) => pass || (name !== 'deflection' && name !== 'flexure.midspan')))
-
 function moved(file: AppraisalFile, degrees: number, [dx, dy]: readonly [number, number]): AppraisalFile {
   const [cosine, sine] = [Math.cos((degrees * Math.PI) / 180), Math.sin((degrees * Math.PI) / 180)]
   const levels = file.levels.map((level) => ({
@@ -93,7 +89,7 @@ describe.each(schemes)('%s', (_, scheme) => {
       fc.property(spans, height, load, fc.double({ min: 0.01, max: 6, noNaN: true }), (widths, deep, imposedLoad, more) => {
         const less = sizeScheme(scheme, fileOf(row(widths, deep), { imposedLoad }))
         const most = sizeScheme(scheme, fileOf(row(widths, deep), { imposedLoad: imposedLoad + more }))
-        fc.pre(methodOf(less) === methodOf(most) && !isNarrower(most, less) && isPossible(most))
+        fc.pre(methodOf(less) === methodOf(most) && !isNarrower(most, less))
         expect(most.depth).toBeGreaterThanOrEqual(less.depth)
         if (most.depth === less.depth) expect(massOf(most)).toBeGreaterThanOrEqual(massOf(less) * (1 - RELATIVE))
       }),

@@ -24,14 +24,14 @@ export interface SlabBars {
 /** Bottom bars with one layer in the direction spanned first, and all that follows from it. */
 type BottomBars = Omit<SlabBars, 'tops' | 'findings'>
 
-function candidateOf(context: SlabContext, layer: BarLayer, tops: readonly TopBars[]): Candidate<BottomBars> {
+function candidateOf(context: SlabContext, layer: BarLayer): Candidate<BottomBars> {
   const { analysis, given, brief } = context
   const midspan = midspanFlexure(context, 'short', layer.diameter, null)
   const depthMm = layerDepthMm(context, layer.diameter, null)
   const short = given ? { middle: layer, edge: null } : inStrips(context, layer, depthMm)
   const across = chooseLongBottom(context, layer)
   const bottom = { short, long: across.option }
-  const torsion = torsionBars(context, midspan.requiredMm2, { bottom, tops })
+  const torsion = torsionBars(context, midspan.requiredMm2)
   const own = stripsMassKg(context, short, bottomParts(analysis.short.axis, layer, brief.cover), analysis.other.clearMm, false)
   return {
     option: { bottom, torsion, midspan },
@@ -48,8 +48,8 @@ function candidateOf(context: SlabContext, layer: BarLayer, tops: readonly TopBa
 export function chooseSlabBars(context: SlabContext): SlabBars {
   const tops = topPlaces(context).map((place) => chooseTopBars(context, place))
   const candidates = context.given
-    ? [candidateOf(context, context.given.bottomX, tops)]
-    : CHOSEN_DIAMETERS.map((diameter) => candidateOf(context, shortLayer(context, diameter), tops))
+    ? [candidateOf(context, context.given.bottomX)]
+    : CHOSEN_DIAMETERS.map((diameter) => candidateOf(context, shortLayer(context, diameter)))
   const best = chooseLeastMass(candidates)
   return { ...best.option, tops, findings: [...best.findings(), ...tops.flatMap(({ findings }) => findings)] }
 }

@@ -2,8 +2,10 @@ import type { BarLayer } from '../../../contracts/appraisal'
 import type { EndOfSpan } from '../../analysis/spanForces'
 import { pastFaceMm } from '../../bars/barRuns'
 import { CHOSEN_DIAMETERS } from '../../tables/bars'
-import type { SlabContext, TopPlace } from '../slabContext'
-import { layerAreaMm2, layerFor, type StripLayers } from './slabLayer'
+import { topFlexure } from '../layerFindings'
+import { givenTop, isHogging, layerDepthMm, type SlabContext, type TopPlace, topPlaces } from '../slabContext'
+import { leastMm2 } from './firstMeeting'
+import { layerAreaMm2, layerFor } from './slabLayer'
 import { layerMassKg } from './slabMass'
 import type { SlabSide } from '../slabPlan'
 
@@ -13,53 +15,69 @@ const SHARES = [0, 0.375, 0.75] as const
 /** Side of the square it covers, as a share of the short span. */
 const EXTENT = 1 / 5
 
+type Direction = 'short' | 'long'
+
 /** Bars added in one layer at one corner, beside what lies there already. */
 export interface TorsionBars {
   readonly face: 'bottom' | 'top'
-  readonly direction: 'short' | 'long'
-  readonly corner: Readonly<Record<'short' | 'long', EndOfSpan>>
+  readonly direction: Direction
+  readonly corner: Readonly<Record<Direction, EndOfSpan>>
   readonly layer: BarLayer
   readonly parts: readonly number[]
   readonly widthMm: number
   readonly massKg: number
 }
 
-/** Layers that cross a panel's corners already. */
-export interface CornerSteel {
-  readonly bottom: Readonly<Record<'short' | 'long', StripLayers>>
-  readonly tops: readonly { readonly place: TopPlace; readonly layers: StripLayers | null }[]
-}
-
 const ENDS: readonly EndOfSpan[] = ['start', 'end']
-const areaIn = (layers: StripLayers | null) => (layers ? layerAreaMm2(layers.edge ?? layers.middle) : 0)
+const [THINNEST, THICKEST] = [CHOSEN_DIAMETERS[0], CHOSEN_DIAMETERS[CHOSEN_DIAMETERS.length - 1]!]
 
 /**
  * Torsion steel of a two-way panel with corners held down: in four layers, each three quarters of the short midspan steel where both
- * edges of a corner are discontinuous, half of that where one is, over a fifth of the short span; less what crosses the corner already.
+ * edges of a corner are discontinuous, half of that where one is, over a fifth of the short span; less what crosses the corner anyway.
  *
  * Source: BS 8110-1:1997, 3.5.3.5, rules 4 to 6 (from memory, engine design section 4)
  * @param midspanMm2 - required at midspan of the short direction, per metre
  */
-export function torsionBars(context: SlabContext, midspanMm2: number, present: CornerSteel): TorsionBars[] {
+export function torsionBars(context: SlabContext, midspanMm2: number): TorsionBars[] {
   const { analysis } = context
   if (!analysis.long) return []
-  const sides = { short: analysis.short.axis.ends, long: analysis.other.ends }
+  const places = topPlaces(context)
+  const placeAt = (direction: Direction, end: EndOfSpan) =>
+    places.find((each) => each.direction === direction && each.end === end)
   return ENDS.flatMap((short) =>
     ENDS.flatMap((long) => {
       const corner = { short, long }
-      const loose = Number(!sides.short[short].isContinuous) + Number(!sides.long[long].isContinuous)
+      const meeting = { short: placeAt('short', short), long: placeAt('long', long) }
+      if (!meeting.short || !meeting.long) return []
+      const loose = Number(!meeting.short.side.isContinuous) + Number(!meeting.long.side.isContinuous)
       const neededMm2 = SHARES[loose as 0 | 1 | 2] * midspanMm2
-      const add = (face: 'bottom' | 'top', direction: 'short' | 'long') => {
-        const there = face === 'bottom' ? present.bottom[direction] : topAt(present, direction, corner[direction])
-        return added(context, { face, direction, corner }, neededMm2 - areaIn(there), sides[direction][corner[direction]])
-      }
-      return [add('bottom', 'short'), add('bottom', 'long'), add('top', 'short'), add('top', 'long')].flat()
+      const sides = { short: meeting.short, long: meeting.long }
+      return (['bottom', 'top'] as const).flatMap((face) =>
+        (['short', 'long'] as const).flatMap((direction) => {
+          const crossing = face === 'bottom' ? bottomCrossing(context, direction) : topCrossing(context, sides[direction])
+          return added(context, { face, direction, corner }, neededMm2 - crossing, sides[direction].side)
+        }),
+      )
     }),
   )
 }
 
-function topAt({ tops }: CornerSteel, direction: 'short' | 'long', end: EndOfSpan): StripLayers | null {
-  return tops.find(({ place }) => place.direction === direction && place.end === end)?.layers ?? null
+/** Steel that any bars there must have, whatever their diameter: so that more load never ends in less corner steel. */
+function leastCrossing(context: SlabContext): number {
+  return leastMm2(context, layerDepthMm(context, THICKEST, THICKEST))
+}
+
+function bottomCrossing(context: SlabContext, direction: Direction): number {
+  const { given } = context
+  if (given) return layerAreaMm2(direction === 'short' ? given.bottomX : given.bottomY)
+  return leastCrossing(context)
+}
+
+function topCrossing(context: SlabContext, place: TopPlace): number {
+  const given = givenTop(context, place)
+  if (given) return layerAreaMm2(given)
+  if (isHogging(place)) return context.given ? 0 : leastCrossing(context)
+  return topFlexure(context, place, THINNEST, place.direction === 'short' ? null : THINNEST).requiredMm2
 }
 
 function added(
