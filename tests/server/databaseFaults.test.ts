@@ -16,31 +16,35 @@ import { TestClient } from '../support/testClient'
 import { openTestDatabase, testDatabaseSettings } from '../support/testDatabase'
 import { testEnv } from '../support/testServer'
 
-/** A line to the database that can be cut, or left open with nothing coming through. */
+/** A line to the database that can be cut, or whose present connections can be left open with nothing coming through. */
 class Line {
   readonly folder = mkdtempSync(join(tmpdir(), 'bothways-line-'))
   readonly path = join(this.folder, 'db.sock')
   private readonly sockets = new Set<Socket>()
-  private isDead = false
+  private silent: { isSilent: boolean } = { isSilent: false }
   private server: Server | undefined
 
   constructor(private readonly target: string) {}
 
   async open(): Promise<void> {
-    this.isDead = false
     this.server = createServer((near) => {
       const far = connect(this.target)
+      const state = this.silent
       for (const socket of [near, far]) {
         this.sockets.add(socket)
         socket.on('error', () => socket.destroy()).on('close', () => this.sockets.delete(socket))
       }
-      near.on('data', (bytes) => this.isDead || far.write(bytes)).on('end', () => far.end())
-      far.on('data', (bytes) => this.isDead || near.write(bytes)).on('end', () => near.end())
+      near.on('data', (bytes) => state.isSilent || far.write(bytes)).on('end', () => far.end())
+      far.on('data', (bytes) => state.isSilent || near.write(bytes)).on('end', () => near.end())
     }).listen(this.path)
     await once(this.server, 'listening')
   }
 
-  silence = () => (this.isDead = true)
+  /** Nothing comes through any connection made so far; later ones work. */
+  silence(): void {
+    this.silent.isSilent = true
+    this.silent = { isSilent: false }
+  }
 
   async cut(): Promise<void> {
     for (const socket of this.sockets) socket.destroy()
@@ -104,9 +108,7 @@ describe('the database', () => {
     const { answer, tookMs } = await timed('/api/projects')
     expect(answer.status).toBe(503)
     expect(tookMs).toBeLessThan(POOL_LIMITS.queryMs + 1_000)
-    await line.cut()
-    await line.open()
-    await expect.poll(async () => (await client.get('/api/projects')).status, { timeout: 5_000 }).toBe(200)
+    await Promise.all(Array.from({ length: 30 }, () => client.get('/api/projects')))
     const many = await Promise.all(Array.from({ length: 30 }, () => client.get('/api/projects')))
     expect(new Set(many.map(({ status }) => status))).toEqual(new Set([200]))
   })

@@ -133,9 +133,12 @@ describe('totals in the list', () => {
   })
 
   it('are null where an item lacks a rate or no edition is chosen, rather than too small', async () => {
-    const { client, at, id, input } = await pricedProject()
+    const { client, at, id, input, firmId } = await pricedProject()
     await client.put(at, { ...input, editionId: null }, 1)
     expect((await totalsOf(client, id)).map(({ total }) => total)).toEqual([null, null])
+    const editionId = await makeEdition(server, firmId, 'published', 'blocks.whole')
+    await client.put(at, { ...input, editionId }, 2)
+    expect((await totalsOf(client, id)).map(({ total }) => total)).toEqual([null, expect.any(String)])
   })
 
   it('are kept from engineers and given to estimators', async () => {

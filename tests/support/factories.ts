@@ -84,14 +84,20 @@ const RATES: Partial<Record<ItemCode, string>> = {
 for (const diameter of [6, 8, 10, 12, 16, 20, 25, 32, 40] as const) RATES[`steel.bar.${diameter}`] = '1450'
 for (const mesh of ['A98', 'A142', 'A193', 'A252', 'A393'] as const) RATES[`steel.mesh.${mesh}`] = '4.45'
 
-/** An edition with a price for every item, in a book of its own. */
-export async function makeEdition({ db }: TestServer, firmId: string, state: EditionState = 'published'): Promise<string> {
+/** An edition with a price for every item but `without`, in a book of its own. */
+export async function makeEdition(
+  { db }: TestServer,
+  firmId: string,
+  state: EditionState = 'published',
+  without?: ItemCode,
+): Promise<string> {
   const bookId = v7()
   const id = v7()
   await db.manager.insert(RateBookEntity, { firmId, id: bookId, region: `Region ${bookId}`, currency: 'USD' })
   const texts = { compiledBy: 'A', checkedBy: 'B', taxBasis: 'before tax', note: '', baseDate: '2026-09-01', validUntil: null }
   await db.manager.insert(EditionEntity, { firmId, id, bookId, number: 1, state: 'draft', ...texts })
-  const rates = Object.entries(RATES).map(([item, likely]) => ({
+  const priced = Object.entries(RATES).filter(([item]) => item !== without)
+  const rates = priced.map(([item, likely]) => ({
     firmId,
     editionId: id,
     item: item as ItemCode,
