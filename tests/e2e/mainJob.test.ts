@@ -8,6 +8,8 @@ let product: Product
 let browser: Browser
 let page: Page
 const complaints: string[] = []
+/** Blocks drawn on the plan of each level, as last counted. */
+const drawnBlocks: Record<string, number> = {}
 
 beforeAll(async () => {
   product = await startProduct()
@@ -46,6 +48,7 @@ async function drawnAndCounted(level: string): Promise<readonly [drawn: number, 
     .locator('.block')
     .count()
   const counted = await grid(level).locator('tfoot td').last().innerText()
+  drawnBlocks[level] = drawn
   return [drawn, Number(counted.replaceAll(',', ''))]
 }
 
@@ -128,6 +131,13 @@ describe('the main job', () => {
     await page.getByRole('link', { name: /Bill$/ }).click()
     const bill = page.getByRole('table').first()
     await bill.waitFor()
+    const blocks = await bill
+      .getByRole('row', { name: /^Hollow blocks, whole/ })
+      .locator('td')
+      .nth(1)
+      .innerText()
+    // level L1 is timesed 4
+    expect(Number(blocks.replaceAll(',', ''))).toBe(4 * drawnBlocks['L1']! + drawnBlocks['L2']!)
     const cents = async (rows: string) =>
       (await bill.locator(`${rows} td.number:last-child`).allInnerTexts()).map((text) => Number(text.replace(/[^\d]/g, '')))
     const lines = await cents('tbody tr:not(.sum)')
