@@ -6,6 +6,7 @@ import { EnvError, readEnv, type Env } from './env'
 import { createLog, type Log } from './log'
 import { createPdfPrinter } from './reports/pdfPrinter'
 import { createAppraisalPool } from './services/appraisal/appraisalPool'
+import { refreshAllTotals } from './services/project/projectTotals'
 import { tidy } from './services/tidy'
 import { startMail } from './startMail'
 
@@ -58,6 +59,9 @@ async function main(): Promise<void> {
   server.requestTimeout = 30_000
   await listen(server, env)
   log.info({ origin: env.origin, port: env.port }, 'listening')
+  refreshAllTotals(db.manager, appraisals, () => isDraining).catch((cause: unknown) => {
+    if (!isDraining) log.error({ err: cause }, 'totals not refreshed')
+  })
   const stop = async () => {
     if (isDraining) return
     isDraining = true

@@ -55,6 +55,18 @@ describe('the threads that appraise', () => {
     expect(await codeOf(pool.appraiseSent({}))).toBe('invalid_request')
   })
 
+  it('leave one thread to stored projects while heavy files are sent', async () => {
+    open({ threads: 2, timeMs: 3_000 })
+    const warm = fileOf(1)
+    await Promise.all([pool.appraiseStored(warm), pool.appraiseStored(warm)])
+    const heavy = { ...fileOf(160), schemes: Array.from({ length: 20 }, (_, run) => sampleRibbed(`R${run}`).specification) }
+    const sent = [1, 2].map(() => codeOf(pool.appraiseSent(heavy)))
+    const begun = performance.now()
+    await pool.appraiseStored(warm)
+    expect(performance.now() - begun).toBeLessThan(2_500)
+    expect(await Promise.all(sent)).toEqual(['too_large', 'too_large'])
+  })
+
   it('turn away what does not fit into the queue', async () => {
     open({ waiting: 3 })
     const answers = await Promise.all(Array.from({ length: 6 }, () => codeOf(pool.appraiseSent({}))))

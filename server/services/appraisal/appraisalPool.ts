@@ -70,6 +70,7 @@ export function createAppraisalPool(bounds: PoolBounds = BOUNDS): AppraisalPool 
   const idle: Worker[] = []
   const all = new Set<Worker>()
   const waiting: Task[] = []
+  let sentRunning = 0
 
   function drop(worker: Worker): void {
     all.delete(worker)
@@ -91,16 +92,24 @@ export function createAppraisalPool(bounds: PoolBounds = BOUNDS): AppraisalPool 
     })
   }
 
+  /** Place of the first task that may begin: files that were sent leave one thread to the others. */
+  function placeOfNext(): number {
+    const isFull = sentRunning >= Math.max(1, bounds.threads - 1)
+    return waiting.findIndex(({ job }) => job.kind !== 'sent' || !isFull)
+  }
+
   function next(): void {
-    if (waiting.length === 0) return
+    const place = placeOfNext()
+    if (place < 0) return
     if (idle.length === 0 && all.size < bounds.threads) start()
     const worker = idle.pop()
-    if (worker) run(worker, waiting.shift()!)
+    if (worker) run(worker, waiting.splice(place, 1)[0]!)
   }
 
   function run(worker: Worker, { job, resolve, reject }: Task): void {
     const end = (settle: () => void, isSound: boolean) => {
       clearTimeout(late)
+      if (job.kind === 'sent') sentRunning--
       quiet(worker)
       if (isSound) idle.push(worker)
       else drop(worker)
@@ -114,6 +123,7 @@ export function createAppraisalPool(bounds: PoolBounds = BOUNDS): AppraisalPool 
     worker.once('error', (error: NodeJS.ErrnoException) => {
       end(() => reject(error.code === 'ERR_WORKER_OUT_OF_MEMORY' ? tooMuch('memory') : error), false)
     })
+    if (job.kind === 'sent') sentRunning++
     worker.postMessage(job)
   }
 

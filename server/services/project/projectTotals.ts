@@ -1,3 +1,4 @@
+import { setTimeout as pause } from 'node:timers/promises'
 import type { ProjectSheet, ProjectSummary } from '#shared/contracts/project'
 import type { EntityManager } from 'typeorm'
 import { ProjectEntity } from '../../entities/project/ProjectEntity'
@@ -8,7 +9,7 @@ import { sheetOf } from './projectService'
 
 type Totals = ProjectSummary['totals']
 
-/** Longest time that a list waits for totals; what is not done by then shows without and is done by a later list. */
+/** Longest time that a list waits for totals. */
 const PATIENCE_MS = 2_000
 
 /** A scheme's total, or null: it cannot stand, has no prices, or lacks the price of an item it needs. */
@@ -31,9 +32,37 @@ async function totalsOrNone(pool: AppraisalPool, sheet: ProjectSheet): Promise<T
   }
 }
 
+/** Appraisals of stored content under way, by project and content: asked for twice, done once. */
+const underWay = new Map<string, Promise<Totals>>()
+
+async function refreshed(db: EntityManager, pool: AppraisalPool, row: ProjectEntity): Promise<Totals> {
+  const { firmId, id, contentVersion } = row
+  const totals = await totalsOrNone(pool, await sheetOf(db, firmId, id))
+  await db.update(ProjectEntity, { firmId, id, contentVersion }, { totals, totalsVersion: contentVersion })
+  return totals
+}
+
+function refreshOnce(db: EntityManager, pool: AppraisalPool, row: ProjectEntity): Promise<Totals> {
+  const key = `${row.id}/${row.contentVersion}`
+  const work = underWay.get(key) ?? refreshed(db, pool, row).finally(() => underWay.delete(key))
+  underWay.set(key, work)
+  return work
+}
+
+/** What `work` yields, or null when `ms` pass first. A failure after that is met again by whoever asks next. */
+async function within<T>(work: Promise<T>, ms: number): Promise<T | null> {
+  const waiting = new AbortController()
+  try {
+    return await Promise.race([work, pause(ms, null, { signal: waiting.signal })])
+  } finally {
+    waiting.abort()
+    work.catch(() => null)
+  }
+}
+
 /**
  * Totals of each project by its id. Those stored for the present content are taken as they are; others are appraised anew and
- * stored, unless the content changed again meanwhile.
+ * stored, unless the content changed again meanwhile. What is not done within 2 s is left out, and stored when it is done.
  */
 export async function currentTotals(
   db: EntityManager,
@@ -42,15 +71,25 @@ export async function currentTotals(
 ): Promise<Map<string, Totals>> {
   const deadline = Date.now() + PATIENCE_MS
   const found = new Map<string, Totals>()
-  for (const { firmId, id, totals, totalsVersion, contentVersion } of rows) {
-    if (totalsVersion === contentVersion) {
-      found.set(id, totals)
-    } else if (Date.now() < deadline) {
-      const fresh = await totalsOrNone(pool, await sheetOf(db, firmId, id))
-      const change = { totals: fresh, totalsVersion: contentVersion }
-      await db.update(ProjectEntity, { firmId, id, contentVersion }, change)
-      found.set(id, fresh)
-    }
+  for (const row of rows) {
+    const isCurrent = row.totalsVersion === row.contentVersion
+    const leftMs = deadline - Date.now()
+    if (!isCurrent && leftMs <= 0) continue
+    const totals = isCurrent ? row.totals : await within(refreshOnce(db, pool, row), leftMs)
+    if (totals !== null) found.set(row.id, totals)
   }
   return found
+}
+
+/** Brings every stored total up to date, one after the other, so that the first lists after a start need not wait. */
+export async function refreshAllTotals(db: EntityManager, pool: AppraisalPool, isStopping: () => boolean): Promise<void> {
+  const stale = await db
+    .createQueryBuilder(ProjectEntity, 'project')
+    .where('project.totalsVersion <> project.contentVersion')
+    .orderBy('project.updatedAt', 'DESC')
+    .getMany()
+  for (const row of stale) {
+    if (isStopping()) return
+    await refreshOnce(db, pool, row)
+  }
 }
