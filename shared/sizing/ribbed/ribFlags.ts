@@ -1,6 +1,7 @@
 import type { EndOfSpan } from '../analysis/spanForces'
 import { figure } from '../figure'
 import { fireFlags } from '../fireFlags'
+import { slenderFlags } from '../slenderFlags'
 import { type Finding, isMet } from '../finding'
 import { FABRIC } from '../tables/fabric'
 import { endName } from './ribContext'
@@ -35,6 +36,7 @@ export function ribFlags(task: RibTask, findings: readonly Finding[]): string[] 
     ...crossRibFlag(task),
     ...meshFlag(task),
     ...fireFlags(findings),
+    ...slenderFlags(findings),
   ]
 }
 

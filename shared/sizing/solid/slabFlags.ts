@@ -1,5 +1,6 @@
 import type { Finding } from '../finding'
 import { fireFlags } from '../fireFlags'
+import { slenderFlags } from '../slenderFlags'
 import type { SlabContext } from './slabContext'
 
 /**
@@ -23,6 +24,7 @@ export function slabFlags(context: SlabContext, findings: readonly Finding[]): s
       ? ['sized as without its voids; bars stop at them, trimming bars round them are not included']
       : []),
     ...fireFlags(findings),
+    ...slenderFlags(findings),
   ]
 }
 
