@@ -158,7 +158,7 @@ describe('the main job', () => {
 
   it('sends the comparison, which arrives over SMTP with a PDF', async () => {
     await page.getByRole('link', { name: /Sent$/ }).click()
-    await page.getByLabel('To', { exact: true }).click()
+    await page.getByRole('combobox', { name: 'To' }).click()
     await page.getByRole('option', { name: /Demo client/ }).click()
     await page.getByLabel('A note to go with it').fill('Both floors, as agreed on the telephone.')
     await page.getByRole('button', { name: 'Send the comparison' }).click()
