@@ -1,4 +1,6 @@
 import { existsSync } from 'node:fs'
+import { resolve } from 'node:path'
+import { fileURLToPath } from 'node:url'
 import { emailAddress, line } from '#shared/contracts/primitives'
 import { readableIssues } from '#shared/readableIssues'
 import { z } from 'zod'
@@ -8,6 +10,7 @@ import { migrate } from '../server/migrate'
 import { makeFirm } from '../server/services/person/makeFirm'
 import { openLocalConnection, type LocalConnection } from './localConnection'
 
+const ROOT = new URL('../', import.meta.url)
 const USAGE = 'npm run firm -- NAME EMAIL    as: npm run firm -- "Alder Surveyors" admin@example.com'
 const words = z.tuple([line(120), emailAddress])
 
@@ -25,10 +28,11 @@ function readWords(given: readonly string[]): [string, string] {
 
 /** The database that `.env` or the surroundings name, else the local one. */
 async function openConnection(): Promise<LocalConnection> {
-  if (existsSync('.env')) process.loadEnvFile('.env')
+  const settings = new URL('.env', ROOT)
+  if (existsSync(settings)) process.loadEnvFile(settings)
   const isNamed = process.env['DATABASE_URL'] !== undefined || process.env['DATABASE_SOCKET'] !== undefined
   if (isNamed) return { variables: {}, stop: () => Promise.resolve() }
-  return await openLocalConnection(process.env['DATA_FOLDER'] ?? '.data')
+  return await openLocalConnection(resolve(process.env['DATA_FOLDER'] ?? fileURLToPath(new URL('.data', ROOT))))
 }
 
 /** Makes a firm and invites its first admin. */

@@ -115,6 +115,13 @@ describe('the command that makes a firm', { timeout: 120_000 }, () => {
     expect(mail!.text).toContain('https://floors.example/invitation#')
   })
 
+  it('starts the local database for itself where nothing else is named or running', async () => {
+    const local = { PATH: process.env['PATH'], DATA_FOLDER: join(folder, 'local') }
+    const { status, out } = await result(run('scripts/firm.ts', ['Birch', 'boss@birch.example'], local))
+    expect({ status, out }).toMatchObject({ status: 0, out: expect.stringContaining('Birch is made') as string })
+    expect(existsSync(join(folder, 'local', 'database', 'mysql'))).toBe(true)
+  })
+
   it.each([
     [[], 'expected a NAME and an EMAIL'],
     [['Alder', 'nobody'], 'EMAIL: expected'],

@@ -12,7 +12,7 @@ import { createAppraisalPool } from '../../server/services/appraisal/appraisalPo
 import { inTransaction } from '../../server/services/transaction'
 import { isUnavailable } from '../../server/services/unavailable'
 import { signedIn } from '../support/factories'
-import { TestClient } from '../support/testClient'
+import type { TestClient } from '../support/testClient'
 import { openTestDatabase, testDatabaseSettings } from '../support/testDatabase'
 import { testEnv } from '../support/testServer'
 

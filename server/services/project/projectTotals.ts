@@ -10,7 +10,8 @@ import { sheetOf } from './projectService'
 type Totals = ProjectSummary['totals']
 
 /** Longest time that a list waits for totals. */
-const PATIENCE_MS = 2_000
+const PATIENCE_MS = 4_000
+const AT_ONCE = 4
 
 /** A scheme's total, or null: it cannot stand, has no prices, or lacks the price of an item it needs. */
 async function appraisedTotals(pool: AppraisalPool, sheet: ProjectSheet): Promise<Totals> {
@@ -62,7 +63,7 @@ async function within<T>(work: Promise<T>, ms: number): Promise<T | null> {
 
 /**
  * Totals of each project by its id. Those stored for the present content are taken as they are; others are appraised anew and
- * stored, unless the content changed again meanwhile. What is not done within 2 s is left out, and stored when it is done.
+ * stored, unless the content changed again meanwhile. What is not done within 4 s is left out, and stored when it is done.
  */
 export async function currentTotals(
   db: EntityManager,
@@ -70,13 +71,16 @@ export async function currentTotals(
   rows: readonly ProjectEntity[],
 ): Promise<Map<string, Totals>> {
   const deadline = Date.now() + PATIENCE_MS
-  const found = new Map<string, Totals>()
-  for (const row of rows) {
-    const isCurrent = row.totalsVersion === row.contentVersion
-    const leftMs = deadline - Date.now()
-    if (!isCurrent && leftMs <= 0) continue
-    const totals = isCurrent ? row.totals : await within(refreshOnce(db, pool, row), leftMs)
-    if (totals !== null) found.set(row.id, totals)
+  const isCurrent = (row: ProjectEntity) => row.totalsVersion === row.contentVersion
+  const found = new Map(rows.filter(isCurrent).map(({ id, totals }) => [id, totals]))
+  const stale = rows.filter((row) => !isCurrent(row))
+  for (let first = 0; first < stale.length && Date.now() < deadline; first += AT_ONCE) {
+    const group = stale.slice(first, first + AT_ONCE)
+    const fresh = await Promise.all(group.map((row) => within(refreshOnce(db, pool, row), deadline - Date.now())))
+    group.forEach(({ id }, place) => {
+      const totals = fresh[place]
+      if (totals) found.set(id, totals)
+    })
   }
   return found
 }
