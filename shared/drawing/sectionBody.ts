@@ -16,7 +16,7 @@ export interface SectionSubject {
   /** Depth as sized, mm; null where the floor could not be sized. */
   readonly depthMm: number | null
   readonly reinforcement: SectionReinforcement
-  /** Absent: fired clay. */
+  /** Absent where the reader does not see the catalogue: hatched as fired clay, named a hollow block. */
   readonly blockMaterial?: CatalogueBlock['material']
 }
 

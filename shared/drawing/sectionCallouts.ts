@@ -36,7 +36,7 @@ export function sectionCallouts(subject: SectionSubject, frame: SectionFrame): S
 }
 
 function ribbedCallouts(subject: SectionSubject, frame: SectionFrame): SectionCallout[] {
-  const { scheme, reinforcement, blockMaterial = 'fired clay' } = subject
+  const { scheme, reinforcement, blockMaterial } = subject
   if (scheme.kind !== 'ribbed') return []
   const { block, ribWidth, topping, mesh, link } = scheme
   const spacing = block.width + ribWidth
@@ -73,7 +73,8 @@ function ribbedCallouts(subject: SectionSubject, frame: SectionFrame): SectionCa
   ]
 }
 
-function material(name: NonNullable<SectionSubject['blockMaterial']>): string {
+function material(name: SectionSubject['blockMaterial']): string {
+  if (name === undefined) return 'Hollow'
   const words = { 'fired clay': 'Hollow clay', concrete: 'Hollow concrete', 'lightweight concrete': 'Lightweight concrete' }
   return words[name]
 }

@@ -102,7 +102,7 @@ describe('the cross-section of a ribbed scheme', () => {
         'ribs at 520',
         'Mesh A142',
         'in a 50 mm topping',
-        'Hollow clay block 400 × 200 × 200',
+        'Hollow block 400 × 200 × 200',
         'Rib 120, 3H12',
         'link H8, cover 25',
       ]),
