@@ -199,7 +199,7 @@ describe('an access token', () => {
     const row = await server.db.manager.findOneByOrFail(SessionEntity, { personId: person.id })
     return { personId: person.id, sessionId: row.id, token: issueAccessToken(settings(), person.id, row.id) }
   }
-  const sign = (claims: object, options: jsonwebtoken.SignOptions = {}, key?: Buffer | string) =>
+  const sign = (claims: object, options: jsonwebtoken.SignOptions = {}, key?: jsonwebtoken.Secret) =>
     jsonwebtoken.sign(claims, key ?? tokenKey(server.env.sessionSecret, 'access'), { algorithm: 'HS256', ...options })
 
   it('is taken when it is ours and fresh', async () => {

@@ -1,4 +1,4 @@
-import { hkdfSync } from 'node:crypto'
+import { createSecretKey, hkdfSync, type KeyObject } from 'node:crypto'
 import jsonwebtoken from 'jsonwebtoken'
 import { z } from 'zod'
 import { ACCESS_S, type SessionSettings } from './sessionSettings'
@@ -13,9 +13,17 @@ const payload = z.object({
   exp: z.number(),
 })
 
-/** Key of one purpose, drawn from the secret, so that a token of one kind is never one of another. */
-export function tokenKey(secret: string, purpose: 'access' | 'refresh'): Buffer {
-  return Buffer.from(hkdfSync('sha256', secret, '', `bothways ${purpose}`, 32))
+const keys = new Map<string, KeyObject>()
+
+/**
+ * Key of one purpose, drawn from the secret, so that a token of one kind is never one of another. Drawn once: as a key object it is
+ * taken as it is, where bytes would first be tried as a public key at every request.
+ */
+export function tokenKey(secret: string, purpose: 'access' | 'refresh'): KeyObject {
+  const name = `${purpose} ${secret}`
+  const key = keys.get(name) ?? createSecretKey(Buffer.from(hkdfSync('sha256', secret, '', `bothways ${purpose}`, 32)))
+  keys.set(name, key)
+  return key
 }
 
 /** A signed statement that this session of this person may call the API for the next 10 minutes. */
