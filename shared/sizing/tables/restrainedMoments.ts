@@ -14,7 +14,7 @@ interface MomentRows {
 /**
  * Bending moment coefficients of rectangular panels on four sides with corners held down.
  *
- * Source: BS 8110-1:1997, Table 3.14 (seen in three independent public encodings, same as memory)
+ * Source: BS 8110-1:1997, Table 3.14 (seen in two public encodings that agree but for one entry, panels 1 to 4 in a third; same as memory)
  */
 export const RESTRAINED_MOMENTS = {
   1: {
