@@ -129,7 +129,8 @@ describe('the main job', () => {
     const parts = page.getByRole('region', { name: /^Parts of Hollow blocks/i })
     expect(await parts.innerText()).toMatch(/L2[\s\S]*P1/)
     await page.getByRole('link', { name: /Bill$/ }).click()
-    const bill = page.getByRole('table').first()
+    // by its caption: the sheet of quantities stands until the sheet of the bill is loaded
+    const bill = page.getByRole('table', { name: /^Bill/ })
     await bill.waitFor()
     const blocks = await bill
       .getByRole('row', { name: /^Hollow blocks, whole/ })
