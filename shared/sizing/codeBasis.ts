@@ -112,7 +112,8 @@ export interface CodeBasis {
   readonly secondary: { readonly share: number; readonly clause: string }
   effectiveSpanMm(clearMm: number, heightMm: number, depthMm: number, ends: readonly [SpanEnd, SpanEnd]): number
   flangeWidthMm(position: SpanPosition, spanMm: number, webMm: number, clearMm: number): Answer
-  flexure(section: BendingSection, momentNmm: number, isRedistributed: boolean): Flexure
+  /** `redistributedShare` of the moment was taken off at this section, 0 to 0.3. */
+  flexure(section: BendingSection, momentNmm: number, redistributedShare: number): Flexure
   shearResistanceN(section: ShearSection): Answer
   spanDepthLimit(input: SpanDepthInput): Answer
   leastSteelMm2(zone: TensionZone): Answer
@@ -127,5 +128,5 @@ export interface CodeBasis {
   /** Greatest clear length of ribs between cross ribs or solid zones, mm; null where the code has no rule. */
   crossRibSpacingMm(heightMm: number): Answer | null
   slabFire(minutes: number, action: SlabAction): FireDemand
-  ribFire(minutes: number, ribMm: number, isContinuous: boolean, isRedistributed: boolean): FireDemand
+  ribFire(minutes: number, ribMm: number, isContinuous: boolean, redistributedShare: number): FireDemand
 }

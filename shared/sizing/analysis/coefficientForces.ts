@@ -1,6 +1,6 @@
 import { ultimateLoad } from '../actions'
 import type { LoadFactors } from '../codeBasis'
-import { ONE_WAY_COEFFICIENTS, ONE_WAY_CONDITIONS } from '../tables/oneWayCoefficients'
+import { COEFFICIENT_REDISTRIBUTION, ONE_WAY_COEFFICIENTS, ONE_WAY_CONDITIONS } from '../tables/oneWayCoefficients'
 import { type EndOfSpan, forcesKey, type SpanForces } from './spanForces'
 import type { StripSpan } from './strip'
 
@@ -51,7 +51,7 @@ export function coefficientForces(spans: readonly StripSpan[], index: number, fa
   const hoggingNmm = (end: EndOfSpan, from: number) => ends[end].momentNmm - ends[end].shearN * from + (load * from ** 2) / 2
   return {
     method: 'coefficients',
-    isRedistributed: true,
+    redistributedShare: COEFFICIENT_REDISTRIBUTION,
     key: forcesKey([load, spanMm, ...Object.values(ends).flatMap(({ momentNmm, shearN }) => [momentNmm, shearN])]),
     saggingNmm: (isEndSpan ? moment.endSpan : moment.interiorSpan) * momentUnit(index),
     hoggingNmm: (end, from) => (from < spanMm / 2 ? Math.max(0, hoggingNmm(end, from)) : 0),

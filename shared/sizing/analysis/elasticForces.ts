@@ -28,7 +28,7 @@ export function elasticForces(spans: readonly StripSpan[], index: number, factor
   const most = (effect: (each: SpanCase) => number) => Math.max(0, ...cases.map(effect))
   return {
     method: 'elastic',
-    isRedistributed: false,
+    redistributedShare: 0,
     key: forcesKey([spanMm, ...cases.flatMap(({ load, startMoment, endMoment }) => [load, startMoment, endMoment])]),
     saggingNmm: most((each) => greatestSagging(each, spanMm)),
     hoggingNmm: (end, from) => most((each) => -momentAt(each, spanMm, end === 'start' ? from : spanMm - from)),

@@ -10,8 +10,8 @@ export interface SectionForces {
 /** Design forces of one span per metre of width: N·mm and N, envelopes over all load cases, all ≥ 0. */
 export interface SpanForces {
   readonly method: 'coefficients' | 'elastic'
-  /** Whether 20 % redistribution of support moments is in the values. */
-  readonly isRedistributed: boolean
+  /** Share of the support moments that redistribution took off in the values, 0 to 0.3. */
+  readonly redistributedShare: number
   /** The same for forces that are the same all along the span. */
   readonly key: string
   readonly saggingNmm: number
@@ -30,7 +30,7 @@ export interface SpanForces {
 export function simpleSpanForces(load: number, spanMm: number): SpanForces {
   return {
     method: 'elastic',
-    isRedistributed: false,
+    redistributedShare: 0,
     key: forcesKey([load, spanMm]),
     saggingNmm: (load * spanMm * spanMm) / 8,
     hoggingNmm: () => 0,

@@ -34,7 +34,7 @@ export function en1992Basis({ fck, fyk }: EuropeanBrief, values: NationalValues 
     secondary: { share: values.secondaryShare, clause: 'EN 1992-1-1 9.3.1.1(2)' },
     effectiveSpanMm: (clear, height, _depth, ends) => effectiveSpanMm(clear, height, ends),
     flangeWidthMm: ribFlangeWidth,
-    flexure: (section, moment, isRedistributed) => flexure(section, moment, isRedistributed, strengths),
+    flexure: (section, moment, redistributedShare) => flexure(section, moment, redistributedShare, strengths),
     shearResistanceN: (section) => shearResistanceN(section, strengths),
     spanDepthLimit: (input) => spanDepthLimit(input, strengths),
     leastSteelMm2: (zone) => leastSteelMm2(zone, strengths),

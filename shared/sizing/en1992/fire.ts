@@ -34,14 +34,17 @@ export function slabFire(minutes: number, action: SlabAction): FireDemand {
   }
 }
 
+/** Redistribution of support moments up to which Table 5.6 holds. Source: EN 1992-1-2:2004, 5.6.3(2) (from memory) */
+const GREATEST_REDISTRIBUTION = 0.15
+
 /**
  * Least width and axis distance of a rib in fire, checked as a beam: continuous where it is so and not redistributed over 15 %.
  *
  * Source: EN 1992-1-2:2004, 5.7.5(1), 5.6.2, 5.6.3, Tables 5.5 and 5.6, in a straight line between columns
  * @throws OutOfScopeError `brief.fireMinutes` for a period the table does not have
  */
-export function ribFire(minutes: number, ribMm: number, isContinuous: boolean, isRedistributed: boolean): FireDemand {
-  const byTable56 = isContinuous && !isRedistributed
+export function ribFire(minutes: number, ribMm: number, isContinuous: boolean, redistributedShare: number): FireDemand {
+  const byTable56 = isContinuous && redistributedShare <= GREATEST_REDISTRIBUTION
   const pairs = (byTable56 ? CONTINUOUS_BEAM_FIRE_SIZES : SIMPLE_BEAM_FIRE_SIZES)[periodOf(minutes)]
   const widths = pairs.map(([width]) => width)
   const axis = interpolate(

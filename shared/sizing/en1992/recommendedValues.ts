@@ -9,8 +9,8 @@ export interface NationalValues {
   readonly concreteShare: number
   /** αct in fctd = αct·fctk,0.05/γc. */
   readonly alphaCt: number
-  /** Greatest K of a singly reinforced section, without redistribution and after 20 %. */
-  readonly greatestK: { readonly elastic: number; readonly redistributed: number }
+  /** k1 and k2 of the limit x/d ≤ (δ − k1)/k2 on the neutral axis after redistribution. */
+  readonly redistribution: { readonly k1: number; readonly k2: number }
   /** Greatest z/d. */
   readonly greatestLeverArm: number
   readonly shear: { readonly coefficient: number; readonly vMinCoefficient: number }
@@ -43,7 +43,7 @@ export const recommendedValues = {
   steelShare: 0.87,
   concreteShare: 0.567,
   alphaCt: 1,
-  greatestK: { elastic: 0.167, redistributed: 0.116 },
+  redistribution: { k1: 0.44, k2: 1.25 },
   greatestLeverArm: 0.95,
   shear: { coefficient: 0.18, vMinCoefficient: 0.035 },
   leastSteel: { tensileShare: 0.26, share: 0.0013 },

@@ -27,7 +27,7 @@ export function midspanFlexure(
   outer: BarDiameter | null,
 ): Flexure {
   const span = context.analysis[direction]
-  return context.basis.flexure(slabSection(context, diameter, outer), span?.saggingNmm ?? 0, false)
+  return context.basis.flexure(slabSection(context, diameter, outer), span?.saggingNmm ?? 0, 0)
 }
 
 /**
@@ -39,9 +39,9 @@ export function topFlexure(context: SlabContext, place: TopPlace, diameter: BarD
   const { basis, analysis } = context
   const section = slabSection(context, diameter, outer)
   if (isHogging(place) && place.span)
-    return basis.flexure(section, place.span.ends[place.end].hoggingNmm, place.span.isRedistributed)
+    return basis.flexure(section, place.span.ends[place.end].hoggingNmm, place.span.redistributedShare)
   const midspan = (place.span ?? analysis.short).saggingNmm
-  return basis.flexure(section, basis.simpleEdge.share * midspan, false)
+  return basis.flexure(section, basis.simpleEdge.share * midspan, 0)
 }
 
 function spacingFinding(

@@ -7,6 +7,7 @@ import { positionIn, stripForces } from '../analysis/stripForces'
 import { twoWayForces } from '../analysis/twoWayForces'
 import type { CodeBasis, SpanPosition } from '../codeBasis'
 import type { LevelSite } from '../panelSite'
+import { COEFFICIENT_REDISTRIBUTION } from '../tables/oneWayCoefficients'
 import type { TwoWayCase } from '../tables/twoWayCase'
 import type { SlabAxis, SlabPlan } from './slabPlan'
 
@@ -21,7 +22,7 @@ export interface SlabSpan {
   readonly axis: SlabAxis
   readonly spanMm: number
   readonly position: SpanPosition
-  readonly isRedistributed: boolean
+  readonly redistributedShare: number
   readonly saggingNmm: number
   readonly ends: Readonly<Record<EndOfSpan, EndForces>>
 }
@@ -37,6 +38,13 @@ export interface SlabAnalysis {
   readonly assumedEnds: number
 }
 
+/** Thickness of one panel of a level, mm, `depthMm` to the middle of thin bars, and the loads that go with it. */
+export interface SlabThickness {
+  readonly heightMm: number
+  readonly depthMm: number
+  readonly loads: FloorLoads
+}
+
 /** Effective spans closer than this are equal, mm. */
 const EQUAL_SPANS_MM = 0.01
 
@@ -48,6 +56,7 @@ interface Spanning {
   readonly firstMm: number
   readonly secondMm: number
   readonly isTwoWay: boolean
+  readonly loads: FloorLoads
 }
 
 const isFree = ({ ends }: SlabAxis) => ends.start.isFree || ends.end.isFree
@@ -59,7 +68,7 @@ const continuousEnds = ({ ends }: SlabAxis) => Number(ends.start.isContinuous) +
  * Source: BS 8110-1:1997, 3.5.3 and EN 1992-1-1:2004, 5.3.1(5) (engine design section 3); equal spans: the more continuous one first
  * @throws OutOfScopeError `edges` where free edges leave no two opposite supports
  */
-function spanning(plan: SlabPlan, heightMm: number, depthMm: number, basis: CodeBasis): Spanning {
+function spanning(plan: SlabPlan, { heightMm, depthMm, loads }: SlabThickness, basis: CodeBasis): Spanning {
   const [a, b] = plan.axes
   const spanOf = ({ clearMm, ends }: SlabAxis) => basis.effectiveSpanMm(clearMm, heightMm, depthMm, [ends.start, ends.end])
   const [aMm, bMm] = [spanOf(a), spanOf(b)]
@@ -71,29 +80,31 @@ function spanning(plan: SlabPlan, heightMm: number, depthMm: number, basis: Code
   const isEqual = Math.abs(aMm - bMm) < EQUAL_SPANS_MM
   const aFirst = isFree(b) || (!isFree(a) && (isEqual ? continuousEnds(a) > continuousEnds(b) : aMm < bMm))
   const [first, second, firstMm, secondMm] = aFirst ? [a, b, aMm, bMm] : [b, a, bMm, aMm]
-  return { plan, first, second, firstMm, secondMm, isTwoWay: !isFree(second) && secondMm / firstMm <= 2 }
+  return { plan, first, second, firstMm, secondMm, isTwoWay: !isFree(second) && secondMm / firstMm <= 2, loads }
 }
 
 /**
- * Effective spans and forces of every solid panel of a level at one thickness: two-way by coefficients, one-way along its strip. Of
+ * Effective spans and forces of every solid panel of a level, each at its thickness: two-way by coefficients, one-way along its strip. Of
  * unequal moments at a shared support both sides take the larger.
  *
  * Source: engine design sections 3 and 4; BS 8110-1:1997, Tables 3.12, 3.14, 3.15; elastic analysis elsewhere
+ * @param thicknesses - one for each panel
  * @throws OutOfScopeError `levels.I.panels.J.edges` where free edges leave no two opposite supports
  */
 export function analyseSlabs(
   { neighbours }: LevelSite,
   plans: readonly SlabPlan[],
-  loads: FloorLoads,
-  thickness: { readonly heightMm: number; readonly depthMm: number },
+  thicknesses: readonly SlabThickness[],
   basis: CodeBasis,
 ): SlabAnalysis[] {
-  const spannings = plans.map((plan) => spanning(plan, thickness.heightMm, thickness.depthMm, basis))
-  const lines = spannings.map((each) => spanLine(each, loads))
+  const spannings = plans.map((plan, i) => spanning(plan, thicknesses[i]!, basis))
+  const lines = spannings.map(spanLine)
   const bays = bayAreas(lines, neighbours)
   const withBays = lines.map((line, i) => line && { ...line, span: { ...line.span, bayMm2: bays[i]! } })
   const raw = spannings.map((each, i) =>
-    each.isTwoWay ? twoWay(each, ultimateLoad(loads, basis.loadFactors)) : oneWay(each, stripOf(i, withBays, neighbours), basis),
+    each.isTwoWay
+      ? twoWay(each, ultimateLoad(each.loads, basis.loadFactors))
+      : oneWay(each, stripOf(i, withBays, neighbours), basis),
   )
   const moments = raw.map(edgeMoments)
   return raw.map((analysis, i) => ({
@@ -103,7 +114,7 @@ export function analyseSlabs(
   }))
 }
 
-function spanLine({ plan, first, firstMm, isTwoWay }: Spanning, loads: FloorLoads): SpanLine | null {
+function spanLine({ plan, first, firstMm, isTwoWay, loads }: Spanning): SpanLine | null {
   if (isTwoWay) return null
   return { direction: first.direction, ends: first.ends, span: { spanMm: firstMm, loads, bayMm2: plan.areas.gross } }
 }
@@ -120,7 +131,7 @@ function oneWay(
       axis: first,
       spanMm: firstMm,
       position: positionIn(strip),
-      isRedistributed: forces.isRedistributed,
+      redistributedShare: forces.redistributedShare,
       saggingNmm: forces.saggingNmm,
       ends: { start: at('start'), end: at('end') },
     },
@@ -148,7 +159,7 @@ function twoWay({ first, second, firstMm, secondMm }: Spanning, load: number): S
     axis,
     spanMm,
     position: POSITIONS[continuousEnds(axis)]!,
-    isRedistributed: true,
+    redistributedShare: COEFFICIENT_REDISTRIBUTION,
     saggingNmm,
     ends: {
       start: { hoggingNmm: hoggingNmm[0], shearN: shearN[0] },

@@ -87,7 +87,7 @@ export function givenTop({ given }: SlabContext, { direction }: TopPlace): BarLa
  */
 export function slabKey({ analysis: { short, long, other, aspect, method, panelCase } }: SlabContext): string {
   const spanKey = (span: SlabSpan | null) =>
-    span && [span.spanMm, span.position, span.isRedistributed, span.saggingNmm, span.ends]
+    span && [span.spanMm, span.position, span.redistributedShare, span.saggingNmm, span.ends]
   const axisKey = ({ clearMm, ends }: SlabAxis) => [clearMm, ends]
   const round = (_: string, value: unknown) => (typeof value === 'number' ? Number(value.toPrecision(10)) : value)
   return JSON.stringify([spanKey(short), spanKey(long), axisKey(short.axis), axisKey(other), aspect, method, panelCase], round)

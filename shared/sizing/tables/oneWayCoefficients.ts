@@ -12,6 +12,13 @@ export const ONE_WAY_COEFFICIENTS = {
 } as const
 
 /**
+ * Share of the support moments that was taken off in the coefficients of slabs, one-way and two-way.
+ *
+ * Source: BS 8110-1:1997, 3.5.2.4 and Table 3.12 (20 %, as a worked example states it); two-way panels alike, on the safe side
+ */
+export const COEFFICIENT_REDISTRIBUTION = 0.2
+
+/**
  * When Table 3.12 may be used: area of each bay, imposed to dead load, imposed load without partitions, spans.
  *
  * Source: BS 8110-1:1997, 3.5.2.3 (seen in a worked example); about equal within 15 % of the longest: common practice, no source

@@ -45,7 +45,7 @@ export function midspanBending(context: RibContext, bars: BarSet) {
   const flange = basis.flangeWidthMm(analysis.position, analysis.spanMm, section.ribMm, section.clearMm)
   const bendingSection = midspanSection(section, effectiveDepthMm(section, bars), flange.value)
   const momentNmm = perRib(context, analysis.forces.saggingNmm)
-  return { bendingSection, momentNmm, flexure: basis.flexure(bendingSection, momentNmm, false) }
+  return { bendingSection, momentNmm, flexure: basis.flexure(bendingSection, momentNmm, 0) }
 }
 
 /** Width the bars take up side by side: bars and gaps between, mm. */
@@ -79,7 +79,7 @@ function fireFindings(context: RibContext, bars: BarSet): Finding[] {
   const { basis, section, analysis, fireMinutes } = context
   if (fireMinutes === 0) return []
   const isContinuous = analysis.position !== 'simple'
-  const { axisMm, sideAxisMm } = basis.ribFire(fireMinutes, section.ribMm, isContinuous, analysis.forces.isRedistributed)
+  const { axisMm, sideAxisMm } = basis.ribFire(fireMinutes, section.ribMm, isContinuous, analysis.forces.redistributedShare)
   const axis = axisDistanceMm(section, bars)
   const found: Finding[] = [
     {

@@ -75,7 +75,7 @@ function isAnchored(
   if (top.length === 0) return false
   const depthMm = effectiveDepthMm(section, top)
   const rib = { widthMm: section.ribMm, depthMm, flange: null }
-  const { requiredMm2 } = basis.flexure(rib, hoggingNmm, analysis.forces.isRedistributed)
+  const { requiredMm2 } = basis.flexure(rib, hoggingNmm, analysis.forces.redistributedShare)
   const stressShare = Math.min(1, requiredMm2 / areaOf(top))
   const anchorage = basis.anchorageMm(thickest(top), section.heightMm > 250, stressShare).value
   return fromFaceMm + anchorage + depthMm <= TOP_REACH * clearMm

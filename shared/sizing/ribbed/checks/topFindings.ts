@@ -24,9 +24,9 @@ export function supportBending(context: RibContext, end: EndOfSpan, bars: BarSet
   const { basis, section, analysis } = context
   const { forces } = analysis
   const momentAt = (fromMm: number) => perRib(context, forces.hoggingNmm(end, fromMm))
-  const over = basis.flexure(hoggingSection(context, section.spacingMm, bars), momentAt(0), forces.isRedistributed)
+  const over = basis.flexure(hoggingSection(context, section.spacingMm, bars), momentAt(0), forces.redistributedShare)
   const atRibNmm = momentAt(zoneFaceMm(context, end))
-  const atRib = basis.flexure(hoggingSection(context, section.ribMm, bars), atRibNmm, forces.isRedistributed)
+  const atRib = basis.flexure(hoggingSection(context, section.ribMm, bars), atRibNmm, forces.redistributedShare)
   return { over, atRib, requiredMm2: Math.max(over.requiredMm2, atRib.requiredMm2) }
 }
 
@@ -75,7 +75,7 @@ export function simpleEdgeFinding(context: RibContext, end: EndOfSpan, bars: Bar
   const { basis, analysis } = context
   const { share, clause } = basis.simpleEdge
   const momentNmm = share * perRib(context, analysis.forces.saggingNmm)
-  const flexure = basis.flexure(hoggingSection(context, context.section.ribMm, bars), momentNmm, false)
+  const flexure = basis.flexure(hoggingSection(context, context.section.ribMm, bars), momentNmm, 0)
   return {
     name: 'steel.least',
     clause,

@@ -8,8 +8,8 @@ const [concrete, steel] = [0.567 * 30, 0.87 * 500]
 
 describe('flexure of a T-section', () => {
   it('is that of a rectangle as wide as the flange while the stress block stays in it', () => {
-    const tee = basis.flexure({ widthMm: 500, depthMm: 230, flange: { webMm: 100, thicknessMm: 60 } }, 20e6, false)
-    const rectangle = basis.flexure({ widthMm: 500, depthMm: 230, flange: null }, 20e6, false)
+    const tee = basis.flexure({ widthMm: 500, depthMm: 230, flange: { webMm: 100, thicknessMm: 60 } }, 20e6, 0)
+    const rectangle = basis.flexure({ widthMm: 500, depthMm: 230, flange: null }, 20e6, 0)
     expect(tee.requiredMm2).toBe(rectangle.requiredMm2)
     expect(tee.steelWorking()).toContain('in the flange')
   })
@@ -21,7 +21,7 @@ describe('flexure of a T-section', () => {
         const { requiredMm2, steelWorking } = basis.flexure(
           { widthMm: width, depthMm: depth, flange: { webMm: web, thicknessMm: flange } },
           momentNmm,
-          false,
+          0,
         )
         expect(steelWorking()).toMatch(/^flange /)
         // Tension balances full flange and web block; the block's depth follows, and the moment about the steel.
@@ -38,7 +38,7 @@ describe('flexure of a T-section', () => {
   it('carries its moment in equilibrium as a rectangle once the lever arm is below its cap', () => {
     fc.assert(
       fc.property(fc.double({ min: 95e6, max: 260e6, noNaN: true }), (momentNmm) => {
-        const { requiredMm2, leverArmMm } = basis.flexure({ widthMm: 1000, depthMm: 230, flange: null }, momentNmm, false)
+        const { requiredMm2, leverArmMm } = basis.flexure({ widthMm: 1000, depthMm: 230, flange: null }, momentNmm, 0)
         expect(leverArmMm).toBeLessThan(0.95 * 230)
         const blockMm = (steel * requiredMm2) / (concrete * 1000)
         expect(Math.abs(leverArmMm - (230 - blockMm / 2))).toBeLessThan(1e-6)
@@ -47,13 +47,13 @@ describe('flexure of a T-section', () => {
   })
 
   it('fails above the greatest K, 0.116 after redistribution, with steel that still grows', () => {
-    const at = (momentNmm: number, isRedistributed: boolean) =>
-      basis.flexure({ widthMm: 100, depthMm: 200, flange: null }, momentNmm, isRedistributed)
+    const at = (momentNmm: number, redistributedShare: number) =>
+      basis.flexure({ widthMm: 100, depthMm: 200, flange: null }, momentNmm, redistributedShare)
     const k = (share: number) => share * 100 * 200 ** 2 * 30
-    expect(at(k(0.15), false).greatestK).toBe(0.167)
-    expect(at(k(0.15), true).greatestK).toBe(0.116)
-    expect(at(k(0.15), true).k).toBeCloseTo(0.15, 12)
-    expect(at(k(0.4), false).requiredMm2).toBeGreaterThan(at(k(0.3), false).requiredMm2)
+    expect(at(k(0.15), 0).greatestK).toBe(0.167)
+    expect(at(k(0.15), 0.2).greatestK).toBe(0.116)
+    expect(at(k(0.15), 0.2).k).toBeCloseTo(0.15, 12)
+    expect(at(k(0.4), 0).requiredMm2).toBeGreaterThan(at(k(0.3), 0).requiredMm2)
   })
 })
 

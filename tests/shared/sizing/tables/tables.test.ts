@@ -119,19 +119,19 @@ describe('fire tables', () => {
   })
 
   it('give ribs a width, and an axis distance between the columns', () => {
-    expect(ribFire(60, 120, false, false).size.value).toBe(120)
-    expect(ribFire(60, 140, false, false).axisMm.value).toBeCloseTo(37.5, 10)
-    expect(ribFire(60, 160, true, false).axisMm.value).toBeCloseTo(18.5, 10)
+    expect(ribFire(60, 120, false, 0).size.value).toBe(120)
+    expect(ribFire(60, 140, false, 0).axisMm.value).toBeCloseTo(37.5, 10)
+    expect(ribFire(60, 160, true, 0).axisMm.value).toBeCloseTo(18.5, 10)
   })
 
   it('leave Table 5.6 once moments were redistributed by 20 %', () => {
-    expect(ribFire(60, 120, true, false).axisMm.value).toBe(25)
-    expect(ribFire(60, 120, true, true).axisMm.value).toBe(40)
+    expect(ribFire(60, 120, true, 0).axisMm.value).toBe(25)
+    expect(ribFire(60, 120, true, 0.2).axisMm.value).toBe(40)
   })
 
   it('ask 10 mm more to the side up to the second width only', () => {
-    expect(ribFire(60, 160, false, false).sideAxisMm?.value).toBe(45)
-    expect(ribFire(60, 161, false, false).sideAxisMm).toBeNull()
+    expect(ribFire(60, 160, false, 0).sideAxisMm?.value).toBe(45)
+    expect(ribFire(60, 161, false, 0).sideAxisMm).toBeNull()
   })
 })
 
