@@ -1,5 +1,6 @@
 /** The appraisal file: the engine's one public input and output. Lengths mm, loads kN/m², strengths MPa, masses kg, moments kNm. */
 import { z } from 'zod'
+import { britishValues, europeanValues } from './nationalValues'
 
 export const mark = z
   .string()
@@ -51,10 +52,23 @@ const loads = {
   partitionsLoad: load.default(0), // variable, both bases
   cover: z.number().min(10).max(100), // nominal, to the outermost bar; no link unless `link` is given
   fireMinutes: z.literal([0, 30, 60, 90, 120, 180, 240]),
+  stockLength: z.int().min(6000).max(18_000).multipleOf(25).default(12_000), // bars come in it; longer ones are lapped
 }
 export const brief = z.discriminatedUnion('basis', [
-  z.strictObject({ basis: z.literal('EN1992'), ...loads, fck: z.number().min(12).max(50), fyk: z.number().min(250).max(600) }),
-  z.strictObject({ basis: z.literal('BS8110'), ...loads, fcu: z.number().min(20).max(60), fy: z.number().min(250).max(500) }),
+  z.strictObject({
+    basis: z.literal('EN1992'),
+    ...loads,
+    fck: z.number().min(12).max(50),
+    fyk: z.number().min(250).max(600),
+    nationalValues: europeanValues.default({}),
+  }),
+  z.strictObject({
+    basis: z.literal('BS8110'),
+    ...loads,
+    fcu: z.number().min(20).max(60),
+    fy: z.number().min(250).max(500),
+    nationalValues: britishValues.default({}),
+  }),
 ])
 export const edge = z.strictObject({
   supportWidth: z.number().min(0).max(3000),
@@ -68,7 +82,14 @@ export const panel = z.strictObject({
   edges: z.array(edge).min(1), // 1, or as many as vertices; edge i runs from vertex i to i + 1; free ⇒ supportWidth 0
   ribDirection: z.number().min(0).lt(180),
   voids: z.array(ring).max(50).default([]),
+  corners: z.enum(['held', 'mayLift']).default('held'), // of a solid panel with four discontinuous edges
 })
+const bottomBarsOfRib = z.array(bar).min(1).max(3)
+const topBarsOfRib = z.array(bar).max(3)
+/** Bars that an engineer gave one panel's ribs; they take the place of the scheme's own there. */
+export const givenRibbedPanel = z
+  .strictObject({ level: mark, panel: mark, ribBars: bottomBarsOfRib.optional(), topBars: topBarsOfRib.optional() })
+  .refine(({ ribBars, topBars }) => ribBars !== undefined || topBars !== undefined, 'expected ribBars, topBars or both')
 export const ribbed = z.strictObject({
   mark,
   kind: z.literal('ribbed'),
@@ -89,21 +110,27 @@ export const ribbed = z.strictObject({
   trimmerWidth: z.number().min(0).max(1000).default(100), // solid strip around every void
   cutBlocks: z.boolean().default(false),
   leastPiece: z.number().min(10).default(50),
-  ribBars: z.union([z.literal('computed'), z.array(bar).min(1).max(3)]).default('computed'), // bottom of every rib
-  topBars: z.union([z.literal('computed'), z.array(bar).max(3)]).default('computed'), // per rib over continuous edges
+  ribBars: z.union([z.literal('computed'), bottomBarsOfRib]).default('computed'), // bottom of every rib
+  topBars: z.union([z.literal('computed'), topBarsOfRib]).default('computed'), // per rib over continuous edges
+  givenPanels: z.array(givenRibbedPanel).max(5000).default([]),
   link: z.literal([0, 6, 8, 10]).default(0),
 }) // link diameter; 0: none
-export const solid = z.strictObject({
-  mark,
-  kind: z.literal('solid'),
-  thickness: z.union([z.literal('least'), z.number().min(50).max(1500)]),
-  bars: z
-    .union([
-      z.literal('computed'),
-      z.strictObject({ bottomX: layer, bottomY: layer, topX: layer.optional(), topY: layer.optional() }),
-    ])
-    .default('computed'),
-})
+export const slabLayers = z.strictObject({ bottomX: layer, bottomY: layer, topX: layer.optional(), topY: layer.optional() })
+/** Bars that an engineer gave one panel; they take the place of the scheme's own there. */
+export const givenSolidPanel = z.strictObject({ level: mark, panel: mark, bars: slabLayers })
+export const solid = z
+  .strictObject({
+    mark,
+    kind: z.literal('solid'),
+    thickness: z.union([z.literal('least'), z.number().min(50).max(1500)]),
+    thicknessPer: z.enum(['scheme', 'panel']).default('scheme'), // 'panel': each panel the least at which it passes
+    bars: z.union([z.literal('computed'), slabLayers]).default('computed'),
+    givenPanels: z.array(givenSolidPanel).max(5000).default([]),
+  })
+  .refine(({ thickness, thicknessPer }) => thicknessPer === 'scheme' || thickness === 'least', {
+    path: ['thicknessPer'],
+    error: "expected scheme where the thickness is a number: 'panel' is for the least thickness of each panel",
+  })
 export const level = z.strictObject({ mark, repeat, panels: z.array(panel).min(1).max(500) })
 export const scheme = z.discriminatedUnion('kind', [ribbed, solid])
 export const markups = z.strictObject({
@@ -234,6 +261,9 @@ export type Panel = z.infer<typeof panel>
 export type Level = z.infer<typeof level>
 export type RibbedScheme = z.infer<typeof ribbed>
 export type SolidScheme = z.infer<typeof solid>
+export type SlabLayers = z.infer<typeof slabLayers>
+export type GivenRibbedPanel = z.infer<typeof givenRibbedPanel>
+export type GivenSolidPanel = z.infer<typeof givenSolidPanel>
 export type Scheme = z.infer<typeof scheme>
 export type Mesh = z.infer<typeof mesh>
 export type Bar = z.infer<typeof bar>

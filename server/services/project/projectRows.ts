@@ -1,3 +1,4 @@
+import { brief as briefContract, scheme as schemeContract } from '#shared/contracts/appraisal'
 import type { Project, StoredLevel, StoredScheme } from '#shared/contracts/project'
 import type { EntityManager } from 'typeorm'
 import { PersonEntity } from '../../entities/firm/PersonEntity'
@@ -13,18 +14,19 @@ export async function requireProject(db: EntityManager, firmId: string, id: stri
   return row
 }
 
-/** A project's row as the contract has it. */
+/** A project's row as the contract has it; fields of the brief younger than the row take their defaults. */
 export async function toProject(db: EntityManager, row: ProjectEntity): Promise<Project> {
   const { id, name, reference, place, use, brief, editionId, markups, version } = row
   const person = await db.findOneByOrFail(PersonEntity, { firmId: row.firmId, id: row.updatedBy })
-  const updatedAt = row.updatedAt.toISOString()
-  return { id, name, reference, place, use, brief, editionId, markups, version, updatedAt, updatedBy: person.name }
+  const given = { brief: briefContract.parse(brief), updatedAt: row.updatedAt.toISOString(), updatedBy: person.name }
+  return { id, name, reference, place, use, editionId, markups, version, ...given }
 }
 
 export function toStoredLevel({ id, position, mark, name, repeat, panels, version }: LevelEntity): StoredLevel {
   return { id, position, mark, name, repeat, panels, version }
 }
 
+/** A scheme's row as the contract has it; fields younger than the row take their defaults. */
 export function toStoredScheme({ id, position, name, blockId, specification, version }: SchemeEntity): StoredScheme {
-  return { id, position, name, blockId, specification, version }
+  return { id, position, name, blockId, specification: schemeContract.parse(specification), version }
 }

@@ -17,7 +17,15 @@ const rows = [
 ] as const
 
 describe.each(rows)('C%d', (fck, good, poor, lap) => {
-  const brief = { imposedLoad: 0, finishesLoad: 0, servicesLoad: 0, partitionsLoad: 0, cover: 25, fireMinutes: 0 } as const
+  const brief = {
+    imposedLoad: 0,
+    finishesLoad: 0,
+    servicesLoad: 0,
+    partitionsLoad: 0,
+    cover: 25,
+    fireMinutes: 0,
+    stockLength: 12_000,
+  } as const
   const basis = en1992Basis({ basis: 'EN1992', ...brief, fck, fyk: 500 })
 
   it(`anchors a bar in ${good} diameters, in poor bond in ${poor}, and laps it in ${lap}`, () => {

@@ -53,7 +53,15 @@ const rates: Rates = {
 }
 
 const block = { length: 200, width: 400, height: 200, mass: 12.5 }
-const loads = { imposedLoad: 2, finishesLoad: 1.5, servicesLoad: 0.3, partitionsLoad: 0.8, cover: 25, fireMinutes: 60 } as const
+const loads = {
+  imposedLoad: 2,
+  finishesLoad: 1.5,
+  servicesLoad: 0.3,
+  partitionsLoad: 0.8,
+  cover: 25,
+  fireMinutes: 60,
+  stockLength: 6000,
+} as const
 
 /** A file in which every field of EN 1992-1-1 schemes with sizes left to the engine has something to do. */
 export const computedFile: AppraisalFileInput = {
@@ -102,6 +110,7 @@ export const givenFile: AppraisalFileInput = {
       leastPiece: 50,
       ribBars: [{ diameter: 12, count: 2 }],
       topBars: [{ diameter: 12, count: 2 }],
+      givenPanels: [{ level: 'L1', panel: 'P2', ribBars: [{ diameter: 16, count: 1 }], topBars: [{ diameter: 10, count: 2 }] }],
       link: 0,
     },
     {
@@ -114,6 +123,18 @@ export const givenFile: AppraisalFileInput = {
         topX: { diameter: 10, spacing: 150 },
         topY: { diameter: 8, spacing: 200 },
       },
+      givenPanels: [
+        {
+          level: 'L1',
+          panel: 'P2',
+          bars: {
+            bottomX: { diameter: 12, spacing: 150 },
+            bottomY: { diameter: 10, spacing: 200 },
+            topX: { diameter: 12, spacing: 200 },
+            topY: { diameter: 8, spacing: 175 },
+          },
+        },
+      ],
     },
   ],
 }
