@@ -24,6 +24,7 @@ export function ribbedScheme(mark: string, name: string, blockCode: string, size
       leastPiece: 50,
       ribBars: 'computed',
       topBars: 'computed',
+      givenPanels: [],
       link: 0,
     },
   }
@@ -33,5 +34,5 @@ export function ribbedScheme(mark: string, name: string, blockCode: string, size
 export const solidScheme = (mark: string, name: string): DemoScheme => ({
   name,
   blockCode: null,
-  specification: { mark, kind: 'solid', thickness: 'least', bars: 'computed' },
+  specification: { mark, kind: 'solid', thickness: 'least', thicknessPer: 'scheme', bars: 'computed', givenPanels: [] },
 })

@@ -1,6 +1,7 @@
 import type { ApiIssue } from '../contracts/apiError'
 import type { AppraisalFile } from '../contracts/appraisal'
 import { checkBlockFit } from './checks/checkBlockFit'
+import { checkGivenPanels } from './checks/checkGivenPanels'
 import { checkMarks } from './checks/checkMarks'
 import { checkOverlaps } from './checks/checkOverlaps'
 import { checkPanel } from './checks/checkPanel'
@@ -25,5 +26,5 @@ export function checkFloor(file: AppraisalFile): ApiIssue[] {
     })
     return ofPanels.some((issue) => issue.path.startsWith(path)) ? ofPanels : [...ofPanels, ...checkOverlaps(level, path)]
   })
-  return [...checkMarks(file), ...ofLevels]
+  return [...checkMarks(file), ...ofLevels, ...checkGivenPanels(file)]
 }

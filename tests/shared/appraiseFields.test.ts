@@ -33,6 +33,7 @@ const OTHER_WORD: Readonly<Record<string, unknown>> = {
   wall: 'beam',
   continuous: 'discontinuous',
   discontinuous: 'continuous',
+  scheme: 'panel',
   ribbed: 'solid',
   solid: 'ribbed',
   USD: 'JPY',

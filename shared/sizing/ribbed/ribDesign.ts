@@ -71,8 +71,9 @@ export interface RibTask {
  *
  * Source: project rule, engine design section 4
  */
-export function chooseBottom({ panel, context, scheme, rules }: RibTask): BarSet {
-  if (scheme.ribBars !== 'computed') return scheme.ribBars
+export function chooseBottom({ panel, context, rules }: RibTask): BarSet {
+  const { ribBars } = panel.bars
+  if (ribBars !== 'computed') return ribBars
   return choose(
     massBy((diameter) => totalLengthMm(bottomLines(panel, diameter, 1, rules))),
     (set) => bottomFindings(context, set),
@@ -84,9 +85,10 @@ export function chooseBottom({ panel, context, scheme, rules }: RibTask): BarSet
  *
  * Source: project rule, engine design section 4
  */
-export function chooseTop({ panel, context, scheme, rules }: RibTask, end: EndOfSpan): BarSet {
+export function chooseTop({ panel, context, rules }: RibTask, end: EndOfSpan): BarSet {
   const { isContinuous } = panel.ends[end]
-  if (isContinuous && scheme.topBars !== 'computed') return scheme.topBars
+  const { topBars } = panel.bars
+  if (isContinuous && topBars !== 'computed') return topBars
   const added = context.analysis.spanMm - context.clearMm
   const massOf = massBy((diameter) =>
     topLines(panel, end, diameter, 1, added, rules).reduce((sum, lines) => sum + totalLengthMm(lines), 0),
@@ -134,13 +136,13 @@ export function lightestTops(task: RibTask): Readonly<Record<EndOfSpan, BarSet>>
  * Source: project rule, engine design sections 4 (`"least"` lets shear widen the zone) and 8 (monotone)
  */
 export function zoneFindings(task: RibTask, bottom: BarSet, tops: Readonly<Record<EndOfSpan, BarSet>>): Compared[] {
-  const { context, panel, scheme } = task
+  const { context, panel } = task
   return ENDS.flatMap((end) => {
     const top = tops[end]
     const shear = shearFindings(context, end, { bottom, top }).slice(0, 1)
     if (!panel.ends[end].isContinuous) return shear
     const { k, greatestK, requiredMm2 } = supportBending(context, end, top).atRib
-    const steel = scheme.topBars === 'computed' ? [{ demand: requiredMm2, capacity: areaOf(top) }] : []
+    const steel = panel.bars.topBars === 'computed' ? [{ demand: requiredMm2, capacity: areaOf(top) }] : []
     return [...shear, { demand: k, capacity: greatestK }, ...steel]
   })
 }

@@ -1,5 +1,6 @@
 import type { Brief, RibbedScheme } from '../../contracts/appraisal'
 import type { CodeBasis } from '../codeBasis'
+import { givenFor } from '../givenPanel'
 import { atPath, type LevelSite, type PanelSite } from '../panelSite'
 import { remember } from '../remember'
 import { analyseRibs, type RibAnalysis } from './ribAnalysis'
@@ -50,8 +51,11 @@ export function laidLevel(job: RibbedJob, zones: readonly number[]): LaidLevel {
   return { zones, panels, analyses: analyseRibs(level, panels, rules.heightMm, basis) }
 }
 
-function shaped({ scheme, brief, basis, shapeFor }: RibbedJob, site: PanelSite, zoneMm: number): RibbedPanel {
-  return shapeFor(shapeKey(site, zoneMm), () => atPath(site.path, () => ribbedPanel(site, scheme, brief, basis, zoneMm)))
+function shaped({ scheme, brief, basis, level, shapeFor }: RibbedJob, site: PanelSite, zoneMm: number): RibbedPanel {
+  const given = givenFor(scheme.givenPanels, level.mark, site.panel.mark)
+  return shapeFor(shapeKey(site, zoneMm, given), () =>
+    atPath(site.path, () => ribbedPanel(site, scheme, brief, basis, zoneMm, given)),
+  )
 }
 
 /**

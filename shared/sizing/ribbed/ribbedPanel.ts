@@ -1,4 +1,4 @@
-import type { Brief, RibbedScheme } from '../../contracts/appraisal'
+import type { Brief, GivenRibbedPanel, RibbedScheme } from '../../contracts/appraisal'
 import { frameAt } from '../../geometry/frame'
 import type { Point } from '../../geometry/point'
 import { layOutPanel } from '../../layout/layOutPanel'
@@ -12,6 +12,9 @@ import { figure } from '../figure'
 import type { PanelSite } from '../panelSite'
 import { type RibLineEnds, ribLineEnds } from './ribEnds'
 
+/** Where the bars of a panel's ribs come from. */
+export type RibBarChoice = Pick<RibbedScheme, 'ribBars' | 'topBars'>
+
 /** A ribbed panel laid out with one width of solid zone, before it is analysed: what does not depend on where it stands. */
 export interface RibbedPanel {
   /** As `shapeKey`. */
@@ -23,6 +26,8 @@ export interface RibbedPanel {
   readonly loads: FloorLoads
   readonly grossMm2: number
   readonly solidZoneMm: number
+  /** Bars given to this panel, else to every panel of the scheme; or computed. */
+  readonly bars: RibBarChoice
   /** The panel it was laid out for, and how. */
   readonly site: PanelSite
   readonly layout: PanelLayout
@@ -42,6 +47,7 @@ export function laidOut(site: PanelSite, scheme: RibbedScheme, basis: CodeBasis,
  * A panel laid out, with its rib ends and loads.
  *
  * Source: project rule, engine design sections 2 and 4 (self-weight of all concrete and blocks inside the clear outline)
+ * @param given - bars of this panel alone
  * @throws OutOfScopeError `outline` where no row of blocks fits, `edges` where ribs end on a free edge
  */
 export function ribbedPanel(
@@ -50,6 +56,7 @@ export function ribbedPanel(
   brief: Brief,
   basis: CodeBasis,
   solidZoneMm: number,
+  given?: GivenRibbedPanel,
 ): RibbedPanel {
   const layout = laidOut(site, scheme, basis, solidZoneMm)
   const ribs = ribLineEnds(site, layout)
@@ -64,7 +71,7 @@ export function ribbedPanel(
     (blocksLongMm / length) * mass,
   )
   return {
-    key: shapeKey(site, solidZoneMm),
+    key: shapeKey(site, solidZoneMm, given),
     ribs,
     direction: frameAt([0, 0], site.panel.ribDirection).toLevel([1, 0]),
     clearMm: layout.longestRib,
@@ -72,6 +79,7 @@ export function ribbedPanel(
     loads: floorLoads(selfWeight, brief),
     grossMm2: layout.areas.gross,
     solidZoneMm,
+    bars: { ribBars: given?.ribBars ?? scheme.ribBars, topBars: given?.topBars ?? scheme.topBars },
     site,
     layout,
   }
@@ -82,10 +90,19 @@ export function ribbedPanel(
  *
  * Source: project rule, identical panels are laid out once for sizing
  */
-export function shapeKey({ panel, edges, sharedEdges }: PanelSite, solidZoneMm: number): string {
+export function shapeKey({ panel, edges, sharedEdges }: PanelSite, solidZoneMm: number, given?: Partial<RibBarChoice>): string {
   const [originX, originY] = panel.outline[0]!
   const ring = (points: readonly Point[]) => points.map(([x, y]) => `${figure(x - originX, 4)},${figure(y - originY, 4)}`)
-  return JSON.stringify([solidZoneMm, panel.ribDirection, ring(panel.outline), panel.voids.map(ring), edges, sharedEdges])
+  const own = given ? [given.ribBars, given.topBars] : null
+  return JSON.stringify([
+    solidZoneMm,
+    panel.ribDirection,
+    ring(panel.outline),
+    panel.voids.map(ring),
+    edges,
+    sharedEdges,
+    ...(own ? [own] : []),
+  ])
 }
 
 /** One end of the panel's ribs as a whole: continuous only where every edge they end on is; the widest support counts. */

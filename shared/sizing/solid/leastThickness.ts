@@ -7,11 +7,11 @@ import { sizeFindings } from './layerFindings'
 import { type SlabContext, slabKey, topPlaces } from './slabContext'
 
 /**
- * Least thickness, step and greatest thickness that the engine chooses from, mm.
+ * Least thickness, the firm's step and greatest thickness that the engine chooses from, mm.
  *
  * Source: project rule, engine design section 3 (5 mm steps from 100 mm); greatest as the contract allows
  */
-const THICKNESS = { least: 100, step: 5, most: 1500 } as const
+export const THICKNESS = { least: 100, step: 5, most: 1500 } as const
 
 /** What a thicker slab can mend: the axis distance of bars in fire is for cover and diameter. */
 const isForThickness = ({ name }: Finding) => name !== 'fire.cover'
@@ -53,10 +53,15 @@ export function leastThickness(contextsAt: (heightMm: number) => readonly SlabCo
     if (failing < 0) return heightMm
     hardest = failing
   }
-  return contextsAt(THICKNESS.most)[0]!.given ? nearest(contextsAt) : THICKNESS.most
+  return contextsAt(THICKNESS.most).some(({ given }) => given) ? nearest(contextsAt) : THICKNESS.most
 }
 
-function nearest(contextsAt: (heightMm: number) => readonly SlabContext[]): number {
+/**
+ * Thickness at which the worst check of some panels comes nearest to passing, mm; the least of equals.
+ *
+ * Source: project rule, what fails is shown at its best
+ */
+export function nearest(contextsAt: (heightMm: number) => readonly SlabContext[]): number {
   let best: { heightMm: number; worst: number } = { heightMm: THICKNESS.most, worst: Infinity }
   for (let heightMm: number = THICKNESS.least; heightMm <= THICKNESS.most; heightMm += THICKNESS.step) {
     const worst = Math.max(...contextsAt(heightMm).map(worstOf))

@@ -3,6 +3,7 @@ import { floorLoads, REINFORCED_CONCRETE_KN_PER_M3 } from '../actions'
 import { barRuns } from '../bars/barRuns'
 import type { CodeBasis } from '../codeBasis'
 import { checkRow } from '../finding'
+import { givenFor } from '../givenPanel'
 import type { LevelSite } from '../panelSite'
 import { remember } from '../remember'
 import { refuseCoverThroughSection } from '../sectionDepth'
@@ -10,9 +11,11 @@ import type { SizedPanel } from '../sizedPanel'
 import { CHOSEN_DIAMETERS } from '../tables/bars'
 import { chooseSlabBars, type SlabBars } from './bars/chooseSlabBars'
 import { analyseSlabs } from './slabAnalysis'
+import { soffitSteps } from './soffitSteps'
 import { bottomBarLines, topBarLines, torsionBarLines } from './bars/slabBarLines'
 import { sizeFindings } from './layerFindings'
 import { leastThickness } from './leastThickness'
+import { leastThicknesses } from './leastThicknesses'
 import { isHogging, type SlabContext, slabKey } from './slabContext'
 import { slabFlags } from './slabFlags'
 import { layerAreaMm2 } from './bars/slabLayer'
@@ -20,16 +23,21 @@ import { type SlabPlan, slabPlan } from './slabPlan'
 
 type BarsFor = ReturnType<typeof remember<SlabBars>>
 
+interface JobLevel {
+  readonly site: LevelSite
+  readonly plans: readonly SlabPlan[]
+}
+
 /** All levels of a solid scheme while it is sized. */
 interface Job {
-  readonly levels: readonly { readonly site: LevelSite; readonly plans: readonly SlabPlan[] }[]
+  readonly levels: readonly JobLevel[]
   readonly scheme: SolidScheme
   readonly brief: Brief
   readonly basis: CodeBasis
 }
 
 /**
- * The panels of all levels built solid, at the given thickness or the least that passes in every panel.
+ * The panels of all levels built solid, at the given thickness, the least that passes in every panel, or the least of each.
  *
  * Signs: moments and forces are magnitudes, sagging and hogging apart. Lengths mm, forces N, moments N·mm, per metre of width. `short`
  * is the direction spanned first, whose bars lie nearest the faces; `long` the other.
@@ -40,25 +48,43 @@ interface Job {
 export function sizeSolid(sites: readonly LevelSite[], scheme: SolidScheme, brief: Brief, basis: CodeBasis): SizedPanel[] {
   const levels = sites.map((site) => ({ site, plans: site.panels.map(slabPlan) }))
   const job: Job = { levels, scheme, brief, basis }
-  const all = (heightMm: number) => contextsAt(job, heightMm).flatMap(({ contexts }) => contexts)
-  const heightMm = scheme.thickness === 'least' ? leastThickness(all) : scheme.thickness
-  refuseCoverThroughSection(heightMm, brief.cover + 2 * CHOSEN_DIAMETERS[0])
+  const heights = heightsOf(job)
+  refuseCoverThroughSection(Math.min(...heights.flat()), brief.cover + 2 * CHOSEN_DIAMETERS[0])
   const barsFor: BarsFor = remember()
-  return contextsAt(job, heightMm).flatMap(({ mark, contexts }) => contexts.map((context) => sizedPanel(context, mark, barsFor)))
+  return levels.flatMap((level, i) =>
+    contextsAt(job, level, heights[i]!).map((context, j) => {
+      const steps = soffitSteps(level.site, heights[i]!, j)
+      return sizedPanel(context, level.site.mark, barsFor, steps)
+    }),
+  )
 }
 
-function contextsAt({ levels, scheme, brief, basis }: Job, heightMm: number): { mark: string; contexts: SlabContext[] }[] {
-  const loads = floorLoads((heightMm / 1000) * REINFORCED_CONCRETE_KN_PER_M3, brief)
-  const given = scheme.bars === 'computed' ? null : scheme.bars
-  const thickness = { heightMm, depthMm: heightMm - brief.cover }
-  return levels.map(({ site, plans }) => {
-    const analyses = analyseSlabs(site, plans, loads, thickness, basis)
-    const contexts = plans.map((plan, i) => ({ basis, brief, given, plan, analysis: analyses[i]!, heightMm }))
-    return { mark: site.mark, contexts }
+/** Thickness of every panel, level by level: given, one least for all, or the least of each. */
+function heightsOf(job: Job): number[][] {
+  const { levels, scheme } = job
+  const { thickness, thicknessPer } = scheme
+  if (thickness === 'least' && thicknessPer === 'panel')
+    return levels.map((level) => leastThicknesses(level.plans.length, (heights) => contextsAt(job, level, heights)))
+  const evenly = (heightMm: number) => levels.map(({ plans }) => plans.map(() => heightMm))
+  if (thickness !== 'least') return evenly(thickness)
+  const all = (heightMm: number) =>
+    levels.flatMap((level) => contextsAt(job, level, new Array<number>(level.plans.length).fill(heightMm)))
+  return evenly(leastThickness(all))
+}
+
+function contextsAt({ scheme, brief, basis }: Job, { site, plans }: JobLevel, heightsMm: readonly number[]): SlabContext[] {
+  const thicknesses = heightsMm.map((heightMm) => {
+    const loads = floorLoads((heightMm / 1000) * REINFORCED_CONCRETE_KN_PER_M3, brief)
+    return { heightMm, depthMm: heightMm - brief.cover, loads }
+  })
+  const analyses = analyseSlabs(site, plans, thicknesses, basis)
+  return plans.map((plan, i) => {
+    const own = givenFor(scheme.givenPanels, site.mark, plan.site.panel.mark)?.bars ?? scheme.bars
+    return { basis, brief, given: own === 'computed' ? null : own, plan, analysis: analyses[i]!, heightMm: heightsMm[i]! }
   })
 }
 
-function sizedPanel(context: SlabContext, level: string, barsFor: BarsFor): SizedPanel {
+function sizedPanel(context: SlabContext, level: string, barsFor: BarsFor, steps: readonly string[]): SizedPanel {
   const { plan, heightMm } = context
   const { mark } = plan.site.panel
   const bars = barsFor(slabKey(context), () => chooseSlabBars(context))
@@ -78,7 +104,7 @@ function sizedPanel(context: SlabContext, level: string, barsFor: BarsFor): Size
     moments: momentsOf(context),
     steel: steelOf(bars),
     bars: lines.flatMap(barRuns),
-    flags: slabFlags(context, findings),
+    flags: [...slabFlags(context, findings), ...steps],
   }
 }
 

@@ -38,7 +38,7 @@ export interface SlabAnalysis {
   readonly assumedEnds: number
 }
 
-/** Thickness of one panel of a level, mm, `depthMm` to the middle of thin bars, and the loads that go with it. */
+/** Thickness of one panel of a level, mm, `depthMm` less the cover, and the loads that go with it. */
 export interface SlabThickness {
   readonly heightMm: number
   readonly depthMm: number
@@ -84,8 +84,8 @@ function spanning(plan: SlabPlan, { heightMm, depthMm, loads }: SlabThickness, b
 }
 
 /**
- * Effective spans and forces of every solid panel of a level, each at its thickness: two-way by coefficients, one-way along its strip. Of
- * unequal moments at a shared support both sides take the larger.
+ * Effective spans and forces of every solid panel of a level, each at its thickness: two-way by coefficients, one-way along its strip, all
+ * spans equally stiff. Of unequal moments at a shared support both sides take the larger.
  *
  * Source: engine design sections 3 and 4; BS 8110-1:1997, Tables 3.12, 3.14, 3.15; elastic analysis elsewhere
  * @param thicknesses - one for each panel

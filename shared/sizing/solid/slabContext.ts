@@ -81,14 +81,16 @@ export function givenTop({ given }: SlabContext, { direction }: TopPlace): BarLa
 }
 
 /**
- * The same for panels of one scheme and thickness that are reinforced alike.
+ * The same for panels of one scheme that are reinforced alike.
  *
  * Source: project rule, identical panels are sized once
  */
-export function slabKey({ analysis: { short, long, other, aspect, method, panelCase } }: SlabContext): string {
+export function slabKey({ heightMm, given, analysis }: SlabContext): string {
+  const { short, long, other, aspect, method, panelCase } = analysis
   const spanKey = (span: SlabSpan | null) =>
     span && [span.spanMm, span.position, span.redistributedShare, span.saggingNmm, span.ends]
   const axisKey = ({ clearMm, ends }: SlabAxis) => [clearMm, ends]
   const round = (_: string, value: unknown) => (typeof value === 'number' ? Number(value.toPrecision(10)) : value)
-  return JSON.stringify([spanKey(short), spanKey(long), axisKey(short.axis), axisKey(other), aspect, method, panelCase], round)
+  const forces = [spanKey(short), spanKey(long), axisKey(short.axis), axisKey(other), aspect, method, panelCase]
+  return JSON.stringify([heightMm, given, forces], round)
 }

@@ -26,6 +26,7 @@ export function newRibbed(block: CatalogueBlock, schemes: readonly StoredScheme[
     leastPiece: 50,
     ribBars: 'computed',
     topBars: 'computed',
+    givenPanels: [],
     link: 0,
   }
   return { name: `Ribs with ${block.name}`.slice(0, 120), blockId: block.id, specification }
@@ -33,7 +34,14 @@ export function newRibbed(block: CatalogueBlock, schemes: readonly StoredScheme[
 
 /** A solid scheme to begin with: the engine finds thickness and bars. */
 export function newSolid(schemes: readonly StoredScheme[]): SchemeInput {
-  const specification: SolidScheme = { mark: nextMark('solid', schemes), kind: 'solid', thickness: 'least', bars: 'computed' }
+  const specification: SolidScheme = {
+    mark: nextMark('solid', schemes),
+    kind: 'solid',
+    thickness: 'least',
+    thicknessPer: 'scheme',
+    bars: 'computed',
+    givenPanels: [],
+  }
   return { name: 'Solid slab', blockId: null, specification }
 }
 

@@ -1,6 +1,7 @@
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
 import CompareView from '../../../src/views/CompareView.vue'
 import { openSheet, aPricedSheet } from '../../support/openSheet'
+import { scheme as schemeContract } from '#shared/contracts/appraisal'
 import { allByRole, byRole } from '../../support/screen'
 
 const drawn = vi.hoisted(() => ({ options: [] as unknown[] }))
@@ -74,7 +75,7 @@ describe('CompareView', () => {
   it('compares the pair that was chosen', async () => {
     const sheet = aPricedSheet()
     const [ribbed, solid] = sheet.schemes
-    const specification = { mark: 'S2', kind: 'solid', thickness: 300, bars: 'computed' } as const
+    const specification = schemeContract.parse({ mark: 'S2', kind: 'solid', thickness: 300 })
     const other = { ...solid!, id: '00000000-0000-4000-8000-000000000044', name: 'thick', specification }
     const schemes = [ribbed!, solid!, other]
     unmount = (await openSheet(CompareView, { ...sheet, schemes }, {}, { solid: other.id })).unmount

@@ -110,7 +110,7 @@ export const givenFile: AppraisalFileInput = {
       leastPiece: 50,
       ribBars: [{ diameter: 12, count: 2 }],
       topBars: [{ diameter: 12, count: 2 }],
-      givenPanels: [{ level: 'L1', panel: 'P2', ribBars: [{ diameter: 16, count: 1 }], topBars: [{ diameter: 10, count: 2 }] }],
+      givenPanels: [{ level: 'L1', panel: 'P2', ribBars: [{ diameter: 20, count: 1 }], topBars: [{ diameter: 10, count: 2 }] }],
       link: 0,
     },
     {
