@@ -3,11 +3,19 @@ import type { Check } from '../contracts/appraisal'
 /** A check of one panel before it is stamped with level and panel; its working is written only when it is shown. */
 export interface Finding {
   readonly name: Check['name']
+  /** Where in the panel, as 'midspan' or 'edge 2, rib'; with the name, and the order among equals, it tells a check from all others. */
+  readonly place: () => string
   readonly clause: string
   readonly demand: number
   readonly capacity: number
   readonly unit: string
   readonly working: () => string
+}
+
+/** Where a check is made, and the bars it is made for; asked only when shown. */
+export interface Where {
+  readonly place: () => string
+  readonly bars: () => string
 }
 
 /** Utilisation shown where something is demanded and nothing is there; JSON has no infinity. */

@@ -1,37 +1,43 @@
 import type { BendingSection, Flexure, TensionZone } from './codeBasis'
 import type { CodeBasis } from './codeBasis'
 import { figure } from './figure'
-import type { Finding } from './finding'
+import type { Finding, Where } from './finding'
+
+const opening = ({ place, bars }: Where) => `${place()}, ${bars()}`
 
 /**
  * The two findings of a section in bending: K against the greatest K, and steel required against provided.
  *
  * Source: by the basis, `flexure`
- * @param where - opens the working, as `midspan`; asked only when shown
+ * @param where - opens the working
  */
 export function flexureFindings(
   name: 'flexure.midspan' | 'flexure.support',
-  where: () => string,
+  where: Where,
   { k, greatestK, requiredMm2, clause, kWorking, steelWorking }: Flexure,
   providedMm2: number,
 ): Finding[] {
   const sign = (isMet: boolean) => (isMet ? '≤' : '>')
+  const { place } = where
   return [
     {
       name,
+      place,
       clause,
       demand: k,
       capacity: greatestK,
       unit: '-',
-      working: () => `${where()}: ${kWorking()} ${sign(k <= greatestK)} ${greatestK}`,
+      working: () => `${opening(where)}: ${kWorking()} ${sign(k <= greatestK)} ${greatestK}`,
     },
     {
       name,
+      place,
       clause,
       demand: requiredMm2,
       capacity: providedMm2,
       unit: 'mm²',
-      working: () => `${where()}: ${steelWorking()} ${sign(requiredMm2 <= providedMm2)} ${figure(providedMm2, 0)} mm² provided`,
+      working: () =>
+        `${opening(where)}: ${steelWorking()} ${sign(requiredMm2 <= providedMm2)} ${figure(providedMm2, 0)} mm² provided`,
     },
   ]
 }
@@ -44,7 +50,7 @@ export function flexureFindings(
  */
 export function steelLimitFindings(
   basis: CodeBasis,
-  where: () => string,
+  where: Where,
   zone: TensionZone,
   concreteMm2: number,
   providedMm2: number,
@@ -54,19 +60,21 @@ export function steelLimitFindings(
   return [
     {
       name: 'steel.least',
+      place: where.place,
       clause: least.clause,
       demand: least.value,
       capacity: providedMm2,
       unit: 'mm²',
-      working: () => `${where()}: ${least.working()}; ${provided()}`,
+      working: () => `${opening(where)}: ${least.working()}; ${provided()}`,
     },
     {
       name: 'steel.most',
+      place: where.place,
       clause: most.clause,
       demand: providedMm2,
       capacity: most.value,
       unit: 'mm²',
-      working: () => `${where()}: ${most.working()}; ${provided()}`,
+      working: () => `${opening(where)}: ${most.working()}; ${provided()}`,
     },
   ]
 }
@@ -78,7 +86,7 @@ export function steelLimitFindings(
  */
 export function deflectionFinding(
   basis: CodeBasis,
-  where: () => string,
+  where: Where,
   input: Parameters<CodeBasis['spanDepthLimit']>[0] & { readonly section: BendingSection },
 ): Finding {
   const limit = basis.spanDepthLimit(input)
@@ -86,10 +94,12 @@ export function deflectionFinding(
   const actual = spanMm / section.depthMm
   return {
     name: 'deflection',
+    place: where.place,
     clause: limit.clause,
     demand: actual,
     capacity: limit.value,
     unit: '-',
-    working: () => `${where()}: l/d = ${figure(spanMm, 0)}/${figure(section.depthMm)} = ${figure(actual)}; ${limit.working()}`,
+    working: () =>
+      `${opening(where)}: l/d = ${figure(spanMm, 0)}/${figure(section.depthMm)} = ${figure(actual)}; ${limit.working()}`,
   }
 }

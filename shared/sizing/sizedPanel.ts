@@ -1,14 +1,18 @@
 import type { BarDiameter, Check, PanelResult } from '../contracts/appraisal'
 import type { PanelAreas, PanelLayout } from '../layout/panelLayout'
+import type { BarShape } from './bars/barShape'
 
-/** Bars of one kind in one panel, repeats not counted. Total length = count × length, laps and anchorages in. */
+/** Bars of one kind in one panel that are cut and bent alike, repeats not counted. Total length = count × length. */
 export interface BarRun {
   /** As 'bottom, along ribs' or 'top, edge 2'. */
   readonly position: string
   readonly diameter: BarDiameter
   readonly count: number
-  /** Of one bar as scheduled, mm, laps in. */
+  /** Of one bar as it is cut, mm, by the formula of its shape. */
   readonly lengthMm: number
+  readonly shape: BarShape
+  /** Of the layer that the bars make, mm; null for bars that are counted in ribs. */
+  readonly spacingMm: number | null
   /** How count and length came about, for the reader: 'ribs 12, 2 in each' and 'clear 5 750 + 2 × 120'. */
   readonly countWorking: string
   readonly lengthWorking: string
@@ -24,6 +28,8 @@ export interface SizedPanel {
   /** Ribbed panels only. */
   readonly layout: PanelLayout | null
   readonly checks: readonly Check[]
+  /** Where in the panel each check is made, beside `checks`: 'midspan', 'edge 2, rib'. */
+  readonly places: readonly string[]
   readonly moments: PanelResult['moments']
   readonly steel: PanelResult['steel']
   readonly bars: readonly BarRun[]

@@ -35,6 +35,7 @@ export function sizedRibbedPanel(
     areas: layout.areas,
     layout,
     checks: findings.map((finding) => checkRow(finding, level, mark)),
+    places: findings.map(({ place }) => place()),
     moments: momentsOf(context),
     steel: steelOf(context, design),
     bars: runsOf(task, design),

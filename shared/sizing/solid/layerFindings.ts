@@ -1,7 +1,7 @@
 import type { BarDiameter, BarLayer } from '../../contracts/appraisal'
 import type { BendingSection, Flexure } from '../codeBasis'
 import { figure } from '../figure'
-import type { Finding } from '../finding'
+import type { Finding, Where } from '../finding'
 import { deflectionFinding, flexureFindings, steelLimitFindings } from '../flexureFindings'
 import { METRE_MM, type SlabContext, type TopPlace, isHogging, layerDepthMm, placeName } from './slabContext'
 import { layerAreaMm2, layerText } from './bars/slabLayer'
@@ -44,24 +44,27 @@ export function topFlexure(context: SlabContext, place: TopPlace, diameter: BarD
   return basis.flexure(section, basis.simpleEdge.share * midspan, 0)
 }
 
+const at = (place: string, layer: BarLayer): Where => ({ place: () => place, bars: () => layerText(layer) })
+
 function spacingFinding(
   context: SlabContext,
-  where: () => string,
+  where: Where,
   place: 'greatestMoment' | 'principal' | 'secondary',
   layer: BarLayer,
 ): Finding {
   const most = context.basis.greatestSpacingMm(place, context.heightMm)
   return {
     name: 'bars.spacing',
+    place: where.place,
     clause: most.clause,
     demand: layer.spacing,
     capacity: most.value,
     unit: 'mm',
-    working: () => `${where()}: ${most.working()}; ${layerText(layer)}`,
+    working: () => `${where.place()}, ${where.bars()}: ${most.working()}; ${layerText(layer)}`,
   }
 }
 
-function limitFindings(context: SlabContext, where: () => string, depthMm: number, layer: BarLayer): Finding[] {
+function limitFindings(context: SlabContext, where: Where, depthMm: number, layer: BarLayer): Finding[] {
   const { basis, heightMm } = context
   const zone = { widthMm: METRE_MM, webMm: METRE_MM, heightMm, depthMm }
   return [
@@ -77,7 +80,7 @@ function limitFindings(context: SlabContext, where: () => string, depthMm: numbe
  */
 export function slabDeflection(context: SlabContext, layer: BarLayer, flexure: Flexure): Finding {
   const { basis, analysis, brief } = context
-  return deflectionFinding(basis, () => `short span, midspan, ${layerText(layer)}`, {
+  return deflectionFinding(basis, at('short span, midspan', layer), {
     position: analysis.short.position,
     spanMm: analysis.short.spanMm,
     section: slabSection(context, layer.diameter, null),
@@ -94,7 +97,7 @@ export function slabDeflection(context: SlabContext, layer: BarLayer, flexure: F
  * Source: by the basis
  */
 export function shortBottomFindings(context: SlabContext, layer: BarLayer, flexure: Flexure): Finding[] {
-  const where = () => `short span, midspan, ${layerText(layer)}`
+  const where = at('short span, midspan', layer)
   return [
     ...flexureFindings('flexure.midspan', where, flexure, layerAreaMm2(layer)),
     slabDeflection(context, layer, flexure),
@@ -111,6 +114,7 @@ function axisFinding({ basis, brief, analysis }: SlabContext, { diameter }: BarL
   return [
     {
       name: 'fire.cover',
+      place: () => 'short span, bottom bars',
       clause: axisMm.clause,
       demand: axisMm.value,
       capacity: axis,
@@ -129,7 +133,7 @@ function axisFinding({ basis, brief, analysis }: SlabContext, { diameter }: BarL
 export function longBottomFindings(context: SlabContext, layer: BarLayer, flexure: Flexure, main: BarLayer): Finding[] {
   const { basis, analysis } = context
   if (analysis.long) {
-    const where = () => `long span, midspan, ${layerText(layer)}`
+    const where = at('long span, midspan', layer)
     const depthMm = layerDepthMm(context, layer.diameter, main.diameter)
     return [
       ...flexureFindings('flexure.midspan', where, flexure, layerAreaMm2(layer)),
@@ -137,17 +141,18 @@ export function longBottomFindings(context: SlabContext, layer: BarLayer, flexur
     ]
   }
   const { share, clause } = basis.secondary
-  const where = () => `across the span, ${layerText(layer)}`
+  const where = at('across the span', layer)
   const demand = share * layerAreaMm2(main)
   return [
     {
       name: 'steel.least',
+      place: where.place,
       clause,
       demand,
       capacity: layerAreaMm2(layer),
       unit: 'mm²',
       working: () =>
-        `${where()}: ${share} of the main bars = ${share}·${figure(layerAreaMm2(main), 0)} = ${figure(demand, 0)} mm²; ` +
+        `${where.place()}, ${where.bars()}: ${share} of the main bars = ${share}·${figure(layerAreaMm2(main), 0)} = ${figure(demand, 0)} mm²; ` +
         `${figure(layerAreaMm2(layer), 0)} mm² provided`,
     },
     spacingFinding(context, where, 'secondary', layer),
@@ -167,7 +172,7 @@ export function topLayerFindings(
   flexure: Flexure,
   depthMm: number,
 ): Finding[] {
-  const where = () => `${placeName(place)}, ${layer ? layerText(layer) : 'no bars'}`
+  const where: Where = { place: () => placeName(place), bars: () => (layer ? layerText(layer) : 'no bars') }
   const provided = layer ? layerAreaMm2(layer) : 0
   if (isHogging(place))
     return [
@@ -178,11 +183,13 @@ export function topLayerFindings(
   return [
     {
       name: 'steel.least',
+      place: where.place,
       clause,
       demand: flexure.requiredMm2,
       capacity: provided,
       unit: 'mm²',
-      working: () => `${where()}: ${share} of the midspan moment; ${flexure.steelWorking()}; ${figure(provided, 0)} mm² provided`,
+      working: () =>
+        `${where.place()}, ${where.bars()}: ${share} of the midspan moment; ${flexure.steelWorking()}; ${figure(provided, 0)} mm² provided`,
     },
     ...(layer ? [spacingFinding(context, where, 'principal', layer)] : []),
   ]
@@ -199,6 +206,7 @@ export function slabShearFinding(context: SlabContext, place: TopPlace, depthMm:
   const resistance = context.basis.shearResistanceN({ widthMm: METRE_MM, depthMm, steelMm2 })
   return {
     name: 'shear',
+    place: () => placeName(place),
     clause: resistance.clause,
     demand: shearN / 1000,
     capacity: resistance.value / 1000,
@@ -216,5 +224,6 @@ export function sizeFindings({ basis, brief, heightMm }: SlabContext): Finding[]
   if (brief.fireMinutes === 0) return []
   const { size } = basis.slabFire(brief.fireMinutes, 'oneWay')
   const working = () => `${size.working()}; slab ${figure(heightMm)} mm`
-  return [{ name: 'fire.size', clause: size.clause, demand: size.value, capacity: heightMm, unit: 'mm', working }]
+  const place = () => 'slab'
+  return [{ name: 'fire.size', place, clause: size.clause, demand: size.value, capacity: heightMm, unit: 'mm', working }]
 }

@@ -101,6 +101,7 @@ function sizedPanel(context: SlabContext, level: string, barsFor: BarsFor, steps
     areas: plan.areas,
     layout: null,
     checks: findings.map((finding) => checkRow(finding, level, mark)),
+    places: findings.map(({ place }) => place()),
     moments: momentsOf(context),
     steel: steelOf(bars),
     bars: lines.flatMap(barRuns),

@@ -4,6 +4,7 @@ import { slenderFlags } from '#shared/sizing/slenderFlags'
 
 const deflection = (demand: number, capacity: number): Finding => ({
   name: 'deflection',
+  place: () => 'midspan',
   clause: 'EN 1992-1-1 7.4.2(2)',
   demand,
   capacity,

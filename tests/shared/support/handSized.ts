@@ -53,7 +53,19 @@ export function handSized(scheme: Scheme, levels: readonly Level[], bars: readon
       const areas = layout?.areas ?? solidAreas(panel, shared[index]!)
       const moments = { midspan: 0, support: 0 }
       const steel = { midspanRequired: 0, midspanProvided: 0, supportRequired: 0, supportProvided: 0 }
-      return { level: level.mark, mark: panel.mark, depth, areas, layout, checks: [], moments, steel, bars, flags: [] }
+      return {
+        level: level.mark,
+        mark: panel.mark,
+        depth,
+        areas,
+        layout,
+        checks: [],
+        places: [],
+        moments,
+        steel,
+        bars,
+        flags: [],
+      }
     })
   })
   return { mark: scheme.mark, kind: scheme.kind, depth, passes: true, panels }

@@ -5,6 +5,8 @@ import { deflectionFinding, flexureFindings, steelLimitFindings } from '../../fl
 import { type RibContext, RIB_AGGREGATE_MM, perRib } from '../ribContext'
 import { axisDistanceMm, concreteAreaMm2, effectiveDepthMm, midspanSection } from '../ribSection'
 
+const midspan = () => 'midspan'
+
 /**
  * What the checks find for the bottom bars of a rib: bending at midspan, deflection, least and most steel, room, axis distance in fire.
  *
@@ -12,7 +14,7 @@ import { axisDistanceMm, concreteAreaMm2, effectiveDepthMm, midspanSection } fro
  */
 export function bottomFindings(context: RibContext, bars: BarSet): Finding[] {
   const { basis, section, analysis } = context
-  const where = () => `midspan, ${setText(bars)} a rib`
+  const where = { place: midspan, bars: () => `${setText(bars)} a rib` }
   const bending = midspanBending(context, bars)
   const { flexure, momentNmm, bendingSection } = bending
   const providedMm2 = areaOf(bars)
@@ -64,6 +66,7 @@ function fitFinding(context: RibContext, bars: BarSet): Finding {
   const demand = 2 * (coverMm + linkMm) + widthMm
   return {
     name: 'bars.fit',
+    place: midspan,
     clause,
     demand,
     capacity: ribMm,
@@ -84,6 +87,7 @@ function fireFindings(context: RibContext, bars: BarSet): Finding[] {
   const found: Finding[] = [
     {
       name: 'fire.cover',
+      place: () => 'bottom bars, from below',
       clause: axisMm.clause,
       demand: axisMm.value,
       capacity: axis,
@@ -95,5 +99,6 @@ function fireFindings(context: RibContext, bars: BarSet): Finding[] {
   const side = (section.ribMm - barsWidthMm(context, bars).widthMm + thickest(bars)) / 2
   const working = () => `${sideAxisMm.working()}; bars closed up in the rib: asd = ${figure(side)} mm`
   const demand = sideAxisMm.value
-  return [...found, { name: 'fire.cover', clause: sideAxisMm.clause, demand, capacity: side, unit: 'mm', working }]
+  const place = () => 'bottom bars, from the side'
+  return [...found, { name: 'fire.cover', place, clause: sideAxisMm.clause, demand, capacity: side, unit: 'mm', working }]
 }

@@ -35,7 +35,7 @@ function shearFinding(
   widthMm: number,
   place: string,
 ): Finding {
-  const { basis, analysis } = context
+  const { basis, analysis, section } = context
   const fromSupportMm = analysis.faceMm[end] + fromFaceMm
   const judged = analysis.forces.casesAt(end, fromSupportMm).map((forces) => {
     const { depthMm, steelMm2 } = tensionSteel(context, bars, perRib(context, forces.hoggingNmm), fromFaceMm)
@@ -47,6 +47,7 @@ function shearFinding(
   )
   return {
     name: 'shear',
+    place: () => `${endName(context, end)}, ${widthMm === section.ribMm ? 'rib' : 'solid'}`,
     clause: resistance.clause,
     demand: shearN / 1000,
     capacity: resistance.value / 1000,

@@ -12,9 +12,10 @@ import type { RibSection } from '../ribSection'
 export function shapeFindings(basis: CodeBasis, section: RibSection, analysis: RibAnalysis, fireMinutes: number): Finding[] {
   const topping = basis.leastToppingMm(section)
   return [
-    ...basis.ribProportions(section).map((each): Finding => ({ name: 'ribs.proportions', ...each })),
+    ...basis.ribProportions(section).map((each): Finding => ({ name: 'ribs.proportions', place: () => 'ribs', ...each })),
     {
       name: 'topping',
+      place: () => 'topping',
       clause: topping.clause,
       demand: topping.value,
       capacity: section.toppingMm,
@@ -32,6 +33,7 @@ function fireSizeFindings(basis: CodeBasis, { toppingMm, ribMm }: RibSection, an
   return [
     {
       name: 'fire.size',
+      place: () => 'topping',
       clause: flange.clause,
       demand: flange.value,
       capacity: toppingMm,
@@ -40,6 +42,7 @@ function fireSizeFindings(basis: CodeBasis, { toppingMm, ribMm }: RibSection, an
     },
     {
       name: 'fire.size',
+      place: () => 'rib',
       clause: rib.clause,
       demand: rib.value,
       capacity: ribMm,

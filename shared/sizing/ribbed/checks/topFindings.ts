@@ -38,14 +38,33 @@ export function supportBending(context: RibContext, end: EndOfSpan, bars: BarSet
 export function topFindings(context: RibContext, end: EndOfSpan, bars: BarSet): Finding[] {
   const { basis, section } = context
   const { spacingMm, ribMm, heightMm } = section
-  const where = () => `${endName(context, end)}, ${setText(bars)} a rib`
+  const at = (place: (name: string) => string) => ({
+    place: () => place(endName(context, end)),
+    bars: () => `${setText(bars)} a rib`,
+  })
   const { over, atRib } = supportBending(context, end, bars)
   const provided = areaOf(bars)
   const zone = { widthMm: spacingMm, webMm: ribMm, heightMm, depthMm: effectiveDepthMm(section, bars) }
   return [
-    ...flexureFindings('flexure.support', () => `over ${where()}`, over, provided),
-    ...flexureFindings('flexure.support', () => `${where()}, where the rib begins`, atRib, provided),
-    ...steelLimitFindings(basis, where, zone, spacingMm * heightMm, provided),
+    ...flexureFindings(
+      'flexure.support',
+      at((name) => `over ${name}`),
+      over,
+      provided,
+    ),
+    ...flexureFindings(
+      'flexure.support',
+      at((name) => `${name}, where the rib begins`),
+      atRib,
+      provided,
+    ),
+    ...steelLimitFindings(
+      basis,
+      at((name) => name),
+      zone,
+      spacingMm * heightMm,
+      provided,
+    ),
     ...(section.toppingMm >= section.coverMm + section.linkMm + thickest(bars) ? [] : [topFitFinding(context, end, bars)]),
   ]
 }
@@ -57,6 +76,7 @@ function topFitFinding(context: RibContext, end: EndOfSpan, bars: BarSet): Findi
   const demand = 2 * (coverMm + linkMm) + diameters + Math.max(0, countOf(bars) - 1) * gap.value
   return {
     name: 'bars.fit',
+    place: () => endName(context, end),
     clause: gap.clause,
     demand,
     capacity: ribMm,
@@ -78,6 +98,7 @@ export function simpleEdgeFinding(context: RibContext, end: EndOfSpan, bars: Bar
   const flexure = basis.flexure(hoggingSection(context, context.section.ribMm, bars), momentNmm, 0)
   return {
     name: 'steel.least',
+    place: () => endName(context, end),
     clause,
     demand: flexure.requiredMm2,
     capacity: areaOf(bars),
