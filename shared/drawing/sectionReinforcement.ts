@@ -58,8 +58,7 @@ function sizedLayers(panel: SizedPanel): Pick<SectionReinforcement, 'cutLayer' |
   return { cutLayer: { diameter: main.diameter, spacing }, lyingLayer: across ? layerOf(across) : null }
 }
 
-/** The layer that a run's working names, as `24 bars, φ8 at 200`; null where it names none. */
-function layerOf({ diameter, countWorking }: BarRun): BarLayer | null {
-  const [, spacing] = /\bat (\d+)/.exec(countWorking) ?? []
-  return spacing === undefined ? null : { diameter, spacing: Number(spacing) }
+/** The layer that a run of bars belongs to; null where it is counted in ribs. */
+function layerOf({ diameter, spacingMm }: BarRun): BarLayer | null {
+  return spacingMm === null ? null : { diameter, spacing: spacingMm }
 }

@@ -1,8 +1,9 @@
 import type { BarDiameter } from '../../contracts/appraisal'
 import type { EndOfSpan } from '../analysis/spanForces'
-import { type BarLines, pastFaceMm } from '../bars/barRuns'
+import { anchoredEnd, type BarEnd, bottomBarEnd } from '../bars/barEnds'
+import type { BarLines, BarPiece } from '../bars/barLines'
 import type { CodeBasis } from '../codeBasis'
-import type { LineEndOnEdge } from '../bars/lineEndAt'
+import type { RibLineEnds } from './ribEnds'
 import { TOP_REACH } from './ribContext'
 import type { RibbedPanel } from './ribbedPanel'
 
@@ -12,35 +13,50 @@ export interface RibBarRules {
   readonly coverMm: number
   readonly trimmerMm: number
   readonly heightMm: number
+  readonly stockMm: number
 }
-
-/** A section deeper than this has poor bond at its top, mm. Source: EN 1992-1-1:2004, 8.4.2, Figure 8.2 */
-const GOOD_BOND_MM = 250
 
 /**
  * Bottom bars of every rib of a panel: clear length, and past each face into the support or the trimmer.
  *
- * Source: by the basis, `lapMm`; lengths by engine design section 4
+ * Source: by the basis, `bottomEnd` and `lapMm`; lengths by engine design section 4
  */
-export function bottomLines({ ribs }: RibbedPanel, diameter: BarDiameter, each: number, rules: RibBarRules): BarLines {
-  const past = ({ edge, supportMm }: LineEndOnEdge) =>
-    edge === null ? rules.trimmerMm - rules.coverMm : pastFaceMm(diameter, supportMm, rules.coverMm)
+export function bottomLines(panel: RibbedPanel, diameter: BarDiameter, each: number, rules: RibBarRules): BarLines {
+  const { basis, heightMm, stockMm } = rules
   return {
     position: 'bottom, along ribs',
     diameter,
     each,
     lines: 'ribs',
-    pieces: ribs.map(({ clearMm, start, end }) => [clearMm, past(start), past(end)]),
-    lapMm: () => rules.basis.lapMm(diameter, false).value,
-    clause: 'EN 1992-1-1 9.3.1.2(1)',
+    spacingMm: null,
+    pieces: panel.ribs.map((rib) => bottomPiece(panel, rib, diameter, rules)),
+    stockMm,
+    lapMm: () => basis.lapMm(diameter, { isTop: false, sectionMm: heightMm, isCorner: true }).value,
+    clause: basis.bottomEnd(diameter, 0, false).clause,
   }
+}
+
+/**
+ * A bottom bar of one rib.
+ *
+ * Source: see `bottomBarEnd`
+ */
+export function bottomPiece({ ends }: RibbedPanel, rib: RibLineEnds, diameter: BarDiameter, rules: RibBarRules): BarPiece {
+  const { basis, coverMm, trimmerMm } = rules
+  const at = (end: EndOfSpan): BarEnd => {
+    const { edge, supportMm } = rib[end]
+    if (edge === null) return { pastMm: trimmerMm - coverMm, legMm: 0 }
+    return bottomBarEnd(basis, diameter, { supportMm, isContinuous: ends[end].isContinuous }, coverMm)
+  }
+  const [start, end] = [at('start'), at('end')]
+  return { parts: [rib.clearMm, start.pastMm, end.pastMm], legs: [start.legMm, end.legMm] }
 }
 
 /**
  * Top bars at one end of a panel's ribs, edge by edge: from the middle of a continuous support to 0.3 of the rib past its face; at an
  * edge designed as simple, an anchorage and the basis' share of the span.
  *
- * Source: by the basis, `simpleEdge`, `anchorageMm`; lengths by engine design section 4 (each panel counts its half)
+ * Source: by the basis, `simpleEdge`, `anchorageMm`; lengths by engine design section 4; for the floor behind see `overSupports`
  * @param spanAddedMm - what the effective span has over the clear one
  */
 export function topLines(
@@ -52,21 +68,25 @@ export function topLines(
   rules: RibBarRules,
 ): BarLines[] {
   const { basis, heightMm } = rules
-  const isPoor = heightMm > GOOD_BOND_MM
-  const anchorage = basis.anchorageMm(diameter, isPoor, 1)
-  const { reach, clause } = basis.simpleEdge
+  const bond = { isTop: true, sectionMm: heightMm, isCorner: false }
+  const anchorageMm = basis.anchorageMm(diameter, bond, 1).value
+  const { reach, clause } = basis.simpleEdge.rib
   const isContinuous = ends[end].isContinuous
+  const pieceOf = (rib: RibLineEnds, edge: number): BarPiece => {
+    const { supportMm } = rib[end]
+    if (isContinuous) return { parts: [supportMm / 2, TOP_REACH * rib.clearMm], legs: [0, 0], over: edge }
+    const { pastMm, legMm } = anchoredEnd(diameter, anchorageMm, supportMm - rules.coverMm)
+    return { parts: [reach * (rib.clearMm + spanAddedMm), pastMm], legs: [legMm, 0] }
+  }
   return ends[end].edges.map((edge) => ({
     position: `top, edge ${edge + 1}`,
     diameter,
     each,
     lines: 'ribs',
-    pieces: ribs
-      .filter((rib) => rib[end].edge === edge)
-      .map((rib) =>
-        isContinuous ? [rib[end].supportMm / 2, TOP_REACH * rib.clearMm] : [anchorage.value, reach * (rib.clearMm + spanAddedMm)],
-      ),
-    lapMm: () => basis.lapMm(diameter, isPoor).value,
+    spacingMm: null,
+    pieces: ribs.filter((rib) => rib[end].edge === edge).map((rib) => pieceOf(rib, edge)),
+    stockMm: rules.stockMm,
+    lapMm: () => basis.lapMm(diameter, bond).value,
     clause: isContinuous ? 'common practice' : clause,
   }))
 }

@@ -35,7 +35,7 @@ export interface LaidLevel {
  */
 export function ribbedJob(level: LevelSite, scheme: RibbedScheme, brief: Brief, basis: CodeBasis): RibbedJob {
   const heightMm = scheme.block.height + scheme.topping
-  const rules = { basis, coverMm: brief.cover, trimmerMm: scheme.trimmerWidth, heightMm }
+  const rules = { basis, coverMm: brief.cover, trimmerMm: scheme.trimmerWidth, heightMm, stockMm: brief.stockLength }
   return { scheme, brief, basis, level, rules, shapeFor: remember(), zoneFor: remember(), designFor: remember() }
 }
 

@@ -32,10 +32,3 @@ export function barAreaMm2(diameterMm: BarDiameter): number {
  * Source: project rule, common practice for slabs and ribs, no source
  */
 export const CHOSEN_DIAMETERS = [8, 10, 12, 16, 20, 25] as const satisfies readonly BarDiameter[]
-
-/**
- * Longest bar a stock holds, mm: beyond it a bar is lapped.
- *
- * Source: project rule, common stock length, no source
- */
-export const STOCK_LENGTH_MM = 12_000

@@ -51,6 +51,9 @@ function moved(file: AppraisalFile, degrees: number, [dx, dy]: readonly [number,
   return { ...file, levels }
 }
 
+/** Plan length, then the formula of a bent bar's shape, then the length it is cut to, each where it differs. */
+const WORKING = /^([\d.+ -]+) = ([\d.]+)(?:; A [^:]+: ([\d.]+))?(?:, cut to (\d+))?$/
+
 function near(actual: number, expected: number) {
   expect(Math.abs(actual - expected), `${actual} against ${expected}`).toBeLessThanOrEqual(
     RELATIVE * Math.max(1, Math.abs(expected)),
@@ -101,14 +104,14 @@ describe.each(schemes)('%s', (_, scheme) => {
     fc.assert(
       fc.property(spans, height, load, (widths, deep, imposedLoad) => {
         const { panels } = sizeScheme(scheme, fileOf(row(widths, deep), { imposedLoad }))
-        for (const { count, lengthMm, countWorking, lengthWorking } of panels.flatMap(({ bars }) => bars)) {
-          const [terms, result] = lengthWorking.replaceAll('−', '-').split(' = ')
-          const sum = terms!.split(/ (?=[+-] )/).reduce((total, term) => {
-            const [, sign, first, times] = /^([+-] )?([\d.]+)(?: × ([\d.]+))?$/.exec(term) ?? []
-            return total + (sign === '- ' ? -1 : 1) * Number(first) * Number(times ?? 1)
-          }, 0)
-          expect(Math.abs(sum - lengthMm)).toBeLessThan(0.01)
-          expect(Math.abs(Number(result) - lengthMm)).toBeLessThan(0.001)
+        for (const { count, lengthMm, shape, countWorking, lengthWorking } of panels.flatMap(({ bars }) => bars)) {
+          const [, terms, plan, formula, cut] = WORKING.exec(lengthWorking.replaceAll('−', '-')) ?? []
+          const sum = terms!.split(/ (?=[+-] )/).reduce((total, term) => total + Number(term.replace(' ', '')), 0)
+          expect(Math.abs(sum - Number(plan))).toBeLessThan(0.01)
+          expect(shape.code === '00').toBe(formula === undefined)
+          expect(Number(cut ?? formula ?? plan)).toBeCloseTo(lengthMm, 3)
+          expect(lengthMm % 25).toBe(0)
+          expect(lengthMm - Number(formula ?? plan)).toBeLessThan(25)
           const [, lines] = /^(\d+) /.exec(countWorking) ?? []
           const [, each] = /× (\d+) = \d+$/.exec(countWorking) ?? []
           expect(Number(lines) * Number(each ?? 1)).toBe(count)

@@ -67,12 +67,19 @@ describe('ribbed: ribs 100 at 500, blocks 200 × 400 × 200 of 12.5 kg, topping 
   })
 
   it('schedules two bars in each of twelve ribs, and a top bar at each end', () => {
-    const bars = panel.bars.map(({ diameter, count, lengthMm }) => [diameter, count, Math.round(lengthMm)])
-    // Past each face max(10·10, 250/2) = 125. Top: 0.2 · 4500 and an anchorage of 8/4 · 435/(2.25 · 0.7 · 0.7 · 2.8965/1.5) = 408.7.
+    const bars = panel.bars.map(({ diameter, count, lengthMm, shape }) => [
+      diameter,
+      count,
+      lengthMm,
+      shape.code,
+      ...shape.dimensionsMm,
+    ])
+    // Past each face max(10·10, 250/2) = 125. Top: 0.2 · 4500 and an anchorage of 8/4 · 435/(2.25 · 0.7 · 0.7 · 2.8965/1.5) = 408.7, of
+    // which the beam takes 250 − 25 = 225; the other 183.7 are a leg of 185. Shape 11: 1125 + 185 − 16/2 − 8 = 1294, cut to 1300.
     expect(bars).toEqual([
-      [10, 24, 4500],
-      [8, 12, 1309],
-      [8, 12, 1309],
+      [10, 24, 4500, '00', 4500],
+      [8, 12, 1300, '11', 1125, 185],
+      [8, 12, 1300, '11', 1125, 185],
     ])
   })
 
@@ -123,12 +130,13 @@ describe('solid: 150 thick, two way with four simple edges', () => {
       'torsion, top, long span',
     ])
     const width = (shortM * 1000) / 5
-    for (const { lengthMm } of torsion) near(lengthMm, width + 125)
+    // 880 + 125 = 1005, cut to the next multiple of 25
+    expect(width + 125).toBeCloseTo(1005, 9)
+    for (const { lengthMm } of torsion) expect(lengthMm).toBe(1025)
     // Layers as scheduled, mm² per metre: π·φ²/4 · 1000/spacing.
     const area = (position: string) => {
       const run = panel.bars.find((each) => each.position === position)
-      const [, spacing] = /at (\d+)/.exec(run?.countWorking ?? '') ?? []
-      return (Math.PI * (run?.diameter ?? 0) ** 2 * 1000) / (4 * Number(spacing))
+      return (Math.PI * (run?.diameter ?? 0) ** 2 * 1000) / (4 * (run?.spacingMm ?? Infinity))
     }
     const needed = 0.75 * panel.steel.midspanRequired
     const crossing = area('bottom, short span, edge strips')

@@ -77,6 +77,8 @@ export const barRun = (diameter: BarRun['diameter'], count: number, lengthMm: nu
   diameter,
   count,
   lengthMm,
+  shape: { code: '00', dimensionsMm: [lengthMm] },
+  spacingMm: null,
   countWorking: `${count}`,
   lengthWorking: `${lengthMm}`,
   clause: 'given',

@@ -1,12 +1,13 @@
 import type { BarLayer } from '../../../contracts/appraisal'
-import { type BarLines, pastFaceMm } from '../../bars/barRuns'
-import type { LineEndOnEdge } from '../../bars/lineEndAt'
+import { bottomBarEnd } from '../../bars/barEnds'
+import type { BarLines, BarPiece } from '../../bars/barLines'
+import type { EndOfSpan } from '../../analysis/spanForces'
 import type { SlabBars } from './chooseSlabBars'
 import type { TopBars } from './chooseTopBars'
 import { isHogging, type SlabContext } from '../slabContext'
 import { layerText, type StripLayers } from './slabLayer'
 import { type SlabLine, slabLines } from './slabLines'
-import { EDGE_STRIP, isPoorBond, lineCount, SLAB_TOP_REACH } from './slabMass'
+import { EDGE_STRIP, lineCount, simpleTopPiece, SLAB_TOP_REACH, slabBond } from './slabMass'
 import type { SlabAxis } from '../slabPlan'
 import type { TorsionBars } from './torsionBars'
 
@@ -27,14 +28,14 @@ function stripsOf({ middle, edge }: StripLayers): Strip[] {
   ]
 }
 
-/** Lines of every strip along an axis, made into bars by `partsOf`; strips of the same name and layer together. */
+/** Lines of every strip along an axis, made into bars by `pieceOf`; strips of the same name and layer together. */
 function linesIn(
   context: SlabContext,
   axis: SlabAxis,
   acrossMm: number,
   layers: StripLayers,
   bars: Pick<BarLines, 'position' | 'clause'> & { readonly isTop: boolean },
-  partsOf: (line: SlabLine, layer: BarLayer) => number[][],
+  pieceOf: (line: SlabLine, layer: BarLayer) => BarPiece | null,
 ): BarLines[] {
   const found = stripsOf(layers).map(({ name, from, to, layer }): BarLines => {
     const lines = slabLines(context.plan, axis, from, to, lineCount(acrossMm * (to - from), layer.spacing))
@@ -43,8 +44,10 @@ function linesIn(
       diameter: layer.diameter,
       each: 1,
       lines: `bars, ${layerText(layer)}`,
-      pieces: lines.flatMap((line) => partsOf(line, layer)),
-      lapMm: () => context.basis.lapMm(layer.diameter, bars.isTop && isPoorBond(context.heightMm)).value,
+      spacingMm: layer.spacing,
+      pieces: lines.flatMap((line) => pieceOf(line, layer) ?? []),
+      stockMm: context.brief.stockLength,
+      lapMm: () => context.basis.lapMm(layer.diameter, slabBond(context.heightMm, bars.isTop)).value,
       clause: bars.clause,
     }
   })
@@ -59,25 +62,33 @@ function linesIn(
 /**
  * Bottom bars of a solid panel on its real outline, voids left out.
  *
- * Source: see pastFaceMm; middle and edge strips BS 8110-1:1997, 3.5.3.5
+ * Source: see `bottomBarEnd`; middle and edge strips BS 8110-1:1997, 3.5.3.5
  */
 export function bottomBarLines(context: SlabContext, { bottom }: SlabBars): BarLines[] {
   const { short, other } = context.analysis
-  const coverMm = context.brief.cover
-  const past = ({ edge, supportMm }: LineEndOnEdge, { diameter }: BarLayer) =>
-    edge === null ? -coverMm : pastFaceMm(diameter, supportMm, coverMm)
-  const partsOf = (line: SlabLine, layer: BarLayer) => [[line.clearMm, past(line.start, layer), past(line.end, layer)]]
-  const clause = 'EN 1992-1-1 9.3.1.2(1)'
+  const { basis, brief } = context
+  const endOf = (axis: SlabAxis, line: SlabLine, end: EndOfSpan, { diameter }: BarLayer) => {
+    const { edge, supportMm } = line[end]
+    const support = { supportMm: edge === null ? 0 : supportMm, isContinuous: axis.ends[end].isContinuous }
+    return bottomBarEnd(basis, diameter, support, brief.cover)
+  }
+  const pieceAlong =
+    (axis: SlabAxis) =>
+    (line: SlabLine, layer: BarLayer): BarPiece => {
+      const [start, end] = [endOf(axis, line, 'start', layer), endOf(axis, line, 'end', layer)]
+      return { parts: [line.clearMm, start.pastMm, end.pastMm], legs: [start.legMm, end.legMm] }
+    }
+  const { clause } = basis.bottomEnd(bottom.short.middle.diameter, 0, false)
   const named = (position: string) => ({ position, clause, isTop: false })
   return [
-    ...linesIn(context, short.axis, other.clearMm, bottom.short, named('bottom, short span'), partsOf),
+    ...linesIn(context, short.axis, other.clearMm, bottom.short, named('bottom, short span'), pieceAlong(short.axis)),
     ...linesIn(
       context,
       other,
       short.axis.clearMm,
       bottom.long,
       named(`bottom, ${context.analysis.long ? 'long span' : 'distribution'}`),
-      partsOf,
+      pieceAlong(other),
     ),
   ]
 }
@@ -89,21 +100,20 @@ export function bottomBarLines(context: SlabContext, { bottom }: SlabBars): BarL
  */
 export function topBarLines(context: SlabContext, { place, layers }: TopBars): BarLines[] {
   if (!layers) return []
-  const { basis, analysis, heightMm } = context
+  const { basis, analysis } = context
   const [axis, across] =
     place.direction === 'short' ? [analysis.short.axis, analysis.other] : [analysis.other, analysis.short.axis]
   const hogging = isHogging(place)
-  const { spanMm } = place.span ?? analysis.short
-  const partsOf = (line: SlabLine, { diameter }: BarLayer): number[][] => {
+  const pieceOf = (line: SlabLine, { diameter }: BarLayer): BarPiece | null => {
     const { edge, supportMm } = line[place.end]
-    if (edge === null || !place.side.edges.includes(edge)) return []
-    if (hogging) return [[supportMm / 2, SLAB_TOP_REACH * line.clearMm]]
-    return [[basis.anchorageMm(diameter, isPoorBond(heightMm), 1).value, basis.simpleEdge.reach * spanMm]]
+    if (edge === null || !place.side.edges.includes(edge)) return null
+    if (hogging) return { parts: [supportMm / 2, SLAB_TOP_REACH * line.clearMm], legs: [0, 0], over: edge }
+    return simpleTopPiece(context, place, diameter, supportMm)
   }
   const edges = place.side.edges.map((edge) => edge + 1).join(', ')
   const position = `top, edge ${edges}`
-  const clause = hogging ? 'common practice' : basis.simpleEdge.clause
-  return linesIn(context, axis, across.clearMm, layers, { position, clause, isTop: true }, partsOf)
+  const clause = hogging ? 'common practice' : basis.simpleEdge.slab.clause
+  return linesIn(context, axis, across.clearMm, layers, { position, clause, isTop: true }, pieceOf)
 }
 
 /**
@@ -113,18 +123,20 @@ export function topBarLines(context: SlabContext, { place, layers }: TopBars): B
  */
 export function torsionBarLines(context: SlabContext, torsion: readonly TorsionBars[]): BarLines[] {
   const joined = new Map<string, BarLines>()
-  for (const { face, direction, layer, parts, widthMm } of torsion) {
+  for (const { face, direction, layer, piece, widthMm } of torsion) {
     const position = `torsion, ${face}, ${direction} span`
-    const key = [position, layerText(layer), ...parts].join()
-    const pieces = new Array<readonly number[]>(lineCount(widthMm, layer.spacing)).fill(parts)
+    const key = [position, layerText(layer), ...piece.parts, ...piece.legs].join()
+    const pieces = new Array<BarPiece>(lineCount(widthMm, layer.spacing)).fill(piece)
     const before = joined.get(key)
     joined.set(key, {
       position,
       diameter: layer.diameter,
       each: 1,
       lines: `bars, ${layerText(layer)}`,
+      spacingMm: layer.spacing,
+      stockMm: context.brief.stockLength,
       pieces: [...(before?.pieces ?? []), ...pieces],
-      lapMm: () => context.basis.lapMm(layer.diameter, face === 'top' && isPoorBond(context.heightMm)).value,
+      lapMm: () => context.basis.lapMm(layer.diameter, slabBond(context.heightMm, face === 'top')).value,
       clause: 'BS 8110-1 3.5.3.5',
     })
   }

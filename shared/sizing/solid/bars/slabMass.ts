@@ -1,13 +1,13 @@
-import type { BarLayer } from '../../../contracts/appraisal'
+import type { BarDiameter, BarLayer } from '../../../contracts/appraisal'
 import type { EndOfSpan } from '../../analysis/spanForces'
-import { pastFaceMm, totalLengthMm } from '../../bars/barRuns'
+import { anchoredEnd, bottomBarEnd } from '../../bars/barEnds'
+import type { BarPiece } from '../../bars/barLines'
+import { totalLengthMm } from '../../bars/barRuns'
+import type { BarBond } from '../../codeBasis'
 import { BAR_MASS_KG_PER_M } from '../../tables/bars'
 import { isHogging, type SlabContext, type TopPlace } from '../slabContext'
 import type { StripLayers } from './slabLayer'
 import type { SlabAxis } from '../slabPlan'
-
-/** A section deeper than this has poor bond at its top, mm. Source: EN 1992-1-1:2004, 8.4.2, Figure 8.2 */
-const GOOD_BOND_MM = 250
 
 /**
  * Share of a two-way panel's width that one edge strip takes.
@@ -33,35 +33,53 @@ export function lineCount(widthMm: number, spacingMm: number): number {
 }
 
 /**
- * Parts of a bottom bar along an axis, mm: clear length and past each face; short of a free edge by the cover.
+ * A bottom bar along an axis: clear length and past each face; short of a free edge by the cover.
  *
- * Source: see pastFaceMm
+ * Source: see `bottomBarEnd`
  */
-export function bottomParts({ clearMm, ends }: SlabAxis, { diameter }: BarLayer, coverMm: number): number[] {
-  const past = (end: EndOfSpan) => pastFaceMm(diameter, ends[end].supportMm, coverMm)
-  return [clearMm, past('start'), past('end')]
+export function bottomParts({ basis, brief }: SlabContext, { clearMm, ends }: SlabAxis, { diameter }: BarLayer): BarPiece {
+  const at = (end: EndOfSpan) => bottomBarEnd(basis, diameter, ends[end], brief.cover)
+  const [start, end] = [at('start'), at('end')]
+  return { parts: [clearMm, start.pastMm, end.pastMm], legs: [start.legMm, end.legMm] }
 }
 
 /**
- * Parts of a top bar at one end: half the support and 0.3 of the clear span; at an edge taken as simple an anchorage and the basis' share
- * of the span that carries.
+ * A top bar at one end: half the support and 0.3 of the clear span; at an edge taken as simple see `simpleTopPiece`.
  *
- * Source: by the basis, `anchorageMm` and `simpleEdge`; engine design section 4 (each panel counts its half)
+ * Source: engine design section 4; for the floor behind see `overSupports`
  */
-export function topParts(context: SlabContext, place: TopPlace, { diameter }: BarLayer, clearMm: number): number[] {
-  const { basis, analysis, heightMm } = context
-  if (isHogging(place)) return [place.side.supportMm / 2, SLAB_TOP_REACH * clearMm]
-  const { spanMm } = place.span ?? analysis.short
-  return [basis.anchorageMm(diameter, isPoorBond(heightMm), 1).value, basis.simpleEdge.reach * spanMm]
+export function topParts(context: SlabContext, place: TopPlace, { diameter }: BarLayer, clearMm: number): BarPiece {
+  const { supportMm } = place.side
+  if (isHogging(place)) return { parts: [supportMm / 2, SLAB_TOP_REACH * clearMm], legs: [0, 0] }
+  return simpleTopPiece(context, place, diameter, supportMm)
 }
 
 /**
- * Whether top bars of a slab have poor bond.
+ * A top bar at an edge taken as simple: the basis' share of the span that carries and an anchorage, turned down where the support is too
+ * narrow for it.
  *
- * Source: EN 1992-1-1:2004, 8.4.2, Figure 8.2 (from memory)
+ * Source: by the basis, `anchorageMm` and `simpleEdge`
+ * @param supportMm - width of the support along the bar
  */
-export function isPoorBond(heightMm: number): boolean {
-  return heightMm > GOOD_BOND_MM
+export function simpleTopPiece(
+  { basis, analysis, heightMm, brief }: SlabContext,
+  { span }: TopPlace,
+  diameter: BarDiameter,
+  supportMm: number,
+): BarPiece {
+  const { spanMm } = span ?? analysis.short
+  const anchorageMm = basis.anchorageMm(diameter, slabBond(heightMm, true), 1).value
+  const { pastMm, legMm } = anchoredEnd(diameter, anchorageMm, supportMm - brief.cover)
+  return { parts: [basis.simpleEdge.slab.reach * spanMm, pastMm], legs: [legMm, 0] }
+}
+
+/**
+ * What the bond of a slab's bars depends on.
+ *
+ * Source: by the basis, `anchorageMm` and `lapMm`; bars of slabs do not lie in corners
+ */
+export function slabBond(heightMm: number, isTop: boolean): BarBond {
+  return { isTop, sectionMm: heightMm, isCorner: false }
 }
 
 /**
@@ -70,16 +88,12 @@ export function isPoorBond(heightMm: number): boolean {
  * Source: BS 4449, nominal masses
  * @param widthMm - clear width that the layer covers
  */
-export function layerMassKg(
-  context: SlabContext,
-  layer: BarLayer,
-  parts: readonly number[],
-  widthMm: number,
-  isTop: boolean,
-): number {
-  const lapMm = () => context.basis.lapMm(layer.diameter, isTop && isPoorBond(context.heightMm)).value
-  const lengthMm = totalLengthMm({ pieces: [parts], each: lineCount(widthMm, layer.spacing), lapMm })
-  return (lengthMm * BAR_MASS_KG_PER_M[layer.diameter]) / 1000
+export function layerMassKg(context: SlabContext, layer: BarLayer, piece: BarPiece, widthMm: number, isTop: boolean): number {
+  const { diameter, spacing } = layer
+  const lapMm = () => context.basis.lapMm(diameter, slabBond(context.heightMm, isTop)).value
+  const made = { diameter, stockMm: context.brief.stockLength, lapMm }
+  const lengthMm = totalLengthMm({ ...made, pieces: [piece], each: lineCount(widthMm, spacing) })
+  return (lengthMm * BAR_MASS_KG_PER_M[diameter]) / 1000
 }
 
 /**
@@ -90,13 +104,13 @@ export function layerMassKg(
 export function stripsMassKg(
   context: SlabContext,
   { middle, edge }: StripLayers,
-  parts: readonly number[],
+  piece: BarPiece,
   widthMm: number,
   isTop: boolean,
 ): number {
-  if (!edge) return layerMassKg(context, middle, parts, widthMm, isTop)
+  if (!edge) return layerMassKg(context, middle, piece, widthMm, isTop)
   return (
-    layerMassKg(context, middle, parts, (1 - 2 * EDGE_STRIP) * widthMm, isTop) +
-    2 * layerMassKg(context, edge, parts, EDGE_STRIP * widthMm, isTop)
+    layerMassKg(context, middle, piece, (1 - 2 * EDGE_STRIP) * widthMm, isTop) +
+    2 * layerMassKg(context, edge, piece, EDGE_STRIP * widthMm, isTop)
   )
 }

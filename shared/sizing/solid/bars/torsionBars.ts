@@ -1,8 +1,10 @@
-import type { BarLayer } from '../../../contracts/appraisal'
+import type { BarDiameter, BarLayer } from '../../../contracts/appraisal'
 import type { EndOfSpan } from '../../analysis/spanForces'
-import { pastFaceMm } from '../../bars/barRuns'
+import { bottomBarEnd } from '../../bars/barEnds'
+import type { BarPiece } from '../../bars/barLines'
 import { CHOSEN_DIAMETERS } from '../../tables/bars'
 import { topFlexure } from '../layerFindings'
+import { greatestSpacingMm } from '../slabLimits'
 import { givenTop, isHogging, layerDepthMm, type SlabContext, type TopPlace, topPlaces } from '../slabContext'
 import { leastMm2 } from './firstMeeting'
 import { layerAreaMm2, layerFor } from './slabLayer'
@@ -23,7 +25,7 @@ export interface TorsionBars {
   readonly direction: Direction
   readonly corner: Readonly<Record<Direction, EndOfSpan>>
   readonly layer: BarLayer
-  readonly parts: readonly number[]
+  readonly piece: BarPiece
   readonly widthMm: number
   readonly massKg: number
 }
@@ -84,16 +86,18 @@ function added(
   context: SlabContext,
   where: Pick<TorsionBars, 'face' | 'direction' | 'corner'>,
   missingMm2: number,
-  { supportMm }: SlabSide,
+  side: SlabSide,
 ): TorsionBars[] {
   if (missingMm2 <= 1e-9) return []
   const widthMm = EXTENT * context.analysis.short.spanMm
-  const greatest = context.basis.greatestSpacingMm('principal', context.heightMm).value
-  const options = CHOSEN_DIAMETERS.map((diameter) => ({ layer: layerFor(diameter, missingMm2, greatest), diameter }))
+  const greatestMm = (diameterMm: BarDiameter) =>
+    greatestSpacingMm(context, 'principal', diameterMm, layerDepthMm(context, diameterMm, null))
+  const options = CHOSEN_DIAMETERS.map((diameter) => ({ layer: layerFor(diameter, missingMm2, greatestMm(diameter)), diameter }))
   const enough = options.filter(({ layer }) => layerAreaMm2(layer) >= missingMm2)
   const made = (enough.length > 0 ? enough : options.slice(-1)).map(({ layer, diameter }): TorsionBars => {
-    const parts = [widthMm, pastFaceMm(diameter, supportMm, context.brief.cover)]
-    return { ...where, layer, parts, widthMm, massKg: layerMassKg(context, layer, parts, widthMm, where.face === 'top') }
+    const { pastMm, legMm } = bottomBarEnd(context.basis, diameter, side, context.brief.cover)
+    const piece: BarPiece = { parts: [widthMm, pastMm], legs: [legMm, 0] }
+    return { ...where, layer, piece, widthMm, massKg: layerMassKg(context, layer, piece, widthMm, where.face === 'top') }
   })
   return [made.reduce((best, each) => (each.massKg < best.massKg ? each : best))]
 }
