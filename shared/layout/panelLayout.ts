@@ -75,6 +75,8 @@ export interface PanelLayout {
   readonly ribLines: readonly RibLine[]
   readonly regions: readonly SolidRegion[]
   readonly areas: PanelAreas
+  /** Clear area less voids, mm². */
+  readonly netArea: number
   readonly blocksWhole: number
   readonly blocksCut: number
   readonly closedEnds: number

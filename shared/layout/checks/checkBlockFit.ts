@@ -1,7 +1,7 @@
 import type { ApiIssue } from '../../contracts/apiError'
 import type { Panel, RibbedScheme } from '../../contracts/appraisal'
 import { clearOutline } from '../clearOutline'
-import { layRow } from '../laidRow'
+import { clearRow, layRow } from '../laidRow'
 import type { PanelField } from '../panelField'
 import { panelField } from '../panelField'
 import { rowBands } from '../rowBands'
@@ -50,7 +50,7 @@ function longestWithoutBlock(field: PanelField, starts: readonly number[], schem
   const middle = (starts.length - 1) / 2
   let longest = 0
   for (const start of [...starts.keys()].sort((a, b) => Math.abs(a - middle) - Math.abs(b - middle)).map((i) => starts[i]!)) {
-    const row = layRow(field, field.bottom + start, scheme, { solidZoneMm, crossRibSpacingMm: null })
+    const row = layRow(clearRow(field, field.bottom + start, scheme), scheme, { solidZoneMm, crossRibSpacingMm: null })
     if (row.filled.some(({ runs }) => runs.length > 0)) return null
     for (const { start: from, end: to } of row.usable) longest = Math.max(longest, to - from)
   }
