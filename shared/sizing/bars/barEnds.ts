@@ -30,11 +30,12 @@ export function anchoredEnd(diameter: BarDiameter, wantedMm: number, roomMm: num
 export function bottomBarEnd(
   basis: CodeBasis,
   diameter: BarDiameter,
-  { supportMm, isContinuous }: SpanEnd,
-  coverMm: number,
+  support: SpanEnd,
+  { coverMm, heightMm }: { readonly coverMm: number; readonly heightMm: number },
 ): BarEnd {
+  const { supportMm, isContinuous } = support
   if (supportMm === 0) return { pastMm: -coverMm, legMm: 0 }
-  const { leastMm, usualMm } = basis.bottomEnd(diameter, supportMm, isContinuous)
+  const { leastMm, usualMm } = basis.bottomEnd(diameter, support, heightMm - coverMm)
   const roomMm = supportMm - coverMm
   if (isContinuous) return { pastMm: Math.max(leastMm, Math.min(usualMm, roomMm)), legMm: 0 }
   return leastMm <= roomMm ? { pastMm: Math.min(usualMm, roomMm), legMm: 0 } : anchoredEnd(diameter, leastMm, roomMm)

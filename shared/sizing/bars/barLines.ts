@@ -11,6 +11,8 @@ export interface BarPiece {
 /** Bars of one position to be scheduled. */
 export interface BarLines {
   readonly position: string
+  /** The strip of the panel they lie in, as `, middle strip`; absent across the whole width. */
+  readonly strip?: string
   readonly diameter: BarDiameter
   /** Bars side by side in each line. */
   readonly each: number

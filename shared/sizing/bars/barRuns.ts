@@ -46,7 +46,7 @@ export function barRuns(lines: BarLines): BarRun[] {
 
 function runOf(lines: BarLines, { bar, longest, isLapped, count }: Alike): BarRun {
   return {
-    position: lines.position,
+    position: lines.position + (lines.strip ?? ''),
     diameter: lines.diameter,
     count: count * lines.each,
     lengthMm: bar.lengthMm,

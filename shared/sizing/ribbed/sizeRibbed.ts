@@ -1,5 +1,6 @@
 import type { Brief, RibbedScheme } from '../../contracts/appraisal'
 import type { CodeBasis } from '../codeBasis'
+import { overSupports } from '../bars/overSupports'
 import type { LevelSite } from '../panelSite'
 import { refuseCoverThroughSection } from '../sectionDepth'
 import type { SizedPanel } from '../sizedPanel'
@@ -8,7 +9,7 @@ import { designRibs } from './ribDesign'
 import { laidOut } from './ribbedPanel'
 import { reinforcementKey, ribbedJob, taskOf } from './ribbedJob'
 import { settleZones } from './settleZones'
-import { sizedRibbedPanel } from './sizedRibbedPanel'
+import { ribBarLines, sizedRibbedPanel } from './sizedRibbedPanel'
 
 /**
  * The panels of a level built ribbed: laid out, analysed one way along the ribs, reinforced and checked.
@@ -23,11 +24,17 @@ export function sizeRibbed(level: LevelSite, scheme: RibbedScheme, brief: Brief,
   refuseCoverThroughSection(scheme.block.height + scheme.topping, brief.cover + scheme.link + CHOSEN_DIAMETERS[0])
   const job = ribbedJob(level, scheme, brief, basis)
   const { panels, analyses } = settleZones(job)
+  const designed = panels.map((panel, i) => {
+    const task = taskOf(job, panel, analyses[i]!)
+    return { task, design: job.designFor(reinforcementKey(panel, analyses[i]!), () => designRibs(task)) }
+  })
+  const lines = overSupports(
+    level,
+    designed.map(({ task, design }) => ribBarLines(task, design)),
+  )
   return level.panels.map((site, i) => {
-    const [panel, analysis] = [panels[i]!, analyses[i]!]
-    const task = taskOf(job, panel, analysis)
-    const design = job.designFor(reinforcementKey(panel, analysis), () => designRibs(task))
+    const [panel, { task, design }] = [panels[i]!, designed[i]!]
     const layout = site === panel.site ? panel.layout : laidOut(site, scheme, basis, panel.solidZoneMm)
-    return sizedRibbedPanel(task, design, { level: level.mark, mark: site.panel.mark }, layout)
+    return sizedRibbedPanel(task, design, { level: level.mark, mark: site.panel.mark }, layout, lines[i]!)
   })
 }

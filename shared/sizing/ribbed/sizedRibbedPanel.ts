@@ -1,9 +1,10 @@
 import type { PanelLayout } from '../../layout/panelLayout'
 import type { EndOfSpan } from '../analysis/spanForces'
+import type { BarLines } from '../bars/barLines'
 import { barRuns } from '../bars/barRuns'
 import { areaOf } from '../bars/barSet'
 import { checkRow } from '../finding'
-import type { BarRun, SizedPanel } from '../sizedPanel'
+import type { SizedPanel } from '../sizedPanel'
 import { midspanBending } from './checks/bottomFindings'
 import { bottomLines, topLines } from './ribBarLines'
 import { perRib, type RibContext } from './ribContext'
@@ -24,6 +25,7 @@ export function sizedRibbedPanel(
   design: RibDesign,
   { level, mark }: { readonly level: string; readonly mark: string },
   layout: PanelLayout,
+  lines: readonly BarLines[],
 ): SizedPanel {
   const { context } = task
   const { basis, section, analysis, fireMinutes } = context
@@ -38,7 +40,7 @@ export function sizedRibbedPanel(
     places: findings.map(({ place }) => place()),
     moments: momentsOf(context),
     steel: steelOf(context, design),
-    bars: runsOf(task, design),
+    bars: lines.flatMap(barRuns),
     flags: ribFlags(task, findings),
   }
 }
@@ -65,12 +67,15 @@ function steelOf(context: RibContext, { bottom, tops }: RibDesign): SizedPanel['
   }
 }
 
-function runsOf({ panel, context, rules }: RibTask, { bottom, tops }: RibDesign): BarRun[] {
+/**
+ * All bars of a ribbed panel to be scheduled.
+ *
+ * Source: see `bottomLines` and `topLines`
+ */
+export function ribBarLines({ panel, context, rules }: RibTask, { bottom, tops }: RibDesign): BarLines[] {
   const added = context.analysis.spanMm - panel.clearMm
   return [
-    ...bottom.flatMap(({ diameter, count }) => barRuns(bottomLines(panel, diameter, count, rules))),
-    ...ENDS.flatMap((end) =>
-      tops[end].flatMap(({ diameter, count }) => topLines(panel, end, diameter, count, added, rules).flatMap(barRuns)),
-    ),
+    ...bottom.map(({ diameter, count }) => bottomLines(panel, diameter, count, rules)),
+    ...ENDS.flatMap((end) => tops[end].flatMap(({ diameter, count }) => topLines(panel, end, diameter, count, added, rules))),
   ]
 }

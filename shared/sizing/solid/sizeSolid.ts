@@ -1,6 +1,8 @@
 import type { Brief, SolidScheme } from '../../contracts/appraisal'
 import { floorLoads, REINFORCED_CONCRETE_KN_PER_M3 } from '../actions'
+import type { BarLines } from '../bars/barLines'
 import { barRuns } from '../bars/barRuns'
+import { overSupports } from '../bars/overSupports'
 import type { CodeBasis } from '../codeBasis'
 import { checkRow } from '../finding'
 import { givenFor } from '../givenPanel'
@@ -12,7 +14,7 @@ import { CHOSEN_DIAMETERS } from '../tables/bars'
 import { chooseSlabBars, type SlabBars } from './bars/chooseSlabBars'
 import { analyseSlabs } from './slabAnalysis'
 import { soffitSteps } from './soffitSteps'
-import { bottomBarLines, topBarLines, torsionBarLines } from './bars/slabBarLines'
+import { slabBarLines } from './bars/slabBarLines'
 import { sizeFindings } from './layerFindings'
 import { leastThickness } from './leastThickness'
 import { leastThicknesses } from './leastThicknesses'
@@ -51,12 +53,18 @@ export function sizeSolid(sites: readonly LevelSite[], scheme: SolidScheme, brie
   const heights = heightsOf(job)
   refuseCoverThroughSection(Math.min(...heights.flat()), brief.cover + 2 * CHOSEN_DIAMETERS[0])
   const barsFor: BarsFor = remember()
-  return levels.flatMap((level, i) =>
-    contextsAt(job, level, heights[i]!).map((context, j) => {
+  return levels.flatMap((level, i) => {
+    const contexts = contextsAt(job, level, heights[i]!)
+    const bars = contexts.map((context) => barsFor(slabKey(context), () => chooseSlabBars(context)))
+    const lines = overSupports(
+      level.site,
+      contexts.map((context, j) => slabBarLines(context, bars[j]!)),
+    )
+    return contexts.map((context, j) => {
       const steps = soffitSteps(level.site, heights[i]!, j)
-      return sizedPanel(context, level.site.mark, barsFor, steps)
-    }),
-  )
+      return sizedPanel(context, level.site.mark, { chosen: bars[j]!, lines: lines[j]! }, steps)
+    })
+  })
 }
 
 /** Thickness of every panel, level by level: given, one least for all, or the least of each. */
@@ -84,16 +92,16 @@ function contextsAt({ scheme, brief, basis }: Job, { site, plans }: JobLevel, he
   })
 }
 
-function sizedPanel(context: SlabContext, level: string, barsFor: BarsFor, steps: readonly string[]): SizedPanel {
+/** Bars of a panel as chosen, and as they are to be scheduled. */
+interface PanelBars {
+  readonly chosen: SlabBars
+  readonly lines: readonly BarLines[]
+}
+
+function sizedPanel(context: SlabContext, level: string, { chosen, lines }: PanelBars, steps: readonly string[]): SizedPanel {
   const { plan, heightMm } = context
   const { mark } = plan.site.panel
-  const bars = barsFor(slabKey(context), () => chooseSlabBars(context))
-  const findings = [...bars.findings, ...sizeFindings(context)]
-  const lines = [
-    ...bottomBarLines(context, bars),
-    ...bars.tops.flatMap((top) => topBarLines(context, top)),
-    ...torsionBarLines(context, bars.torsion),
-  ]
+  const findings = [...chosen.findings, ...sizeFindings(context)]
   return {
     level,
     mark,
@@ -103,7 +111,7 @@ function sizedPanel(context: SlabContext, level: string, barsFor: BarsFor, steps
     checks: findings.map((finding) => checkRow(finding, level, mark)),
     places: findings.map(({ place }) => place()),
     moments: momentsOf(context),
-    steel: steelOf(bars),
+    steel: steelOf(chosen),
     bars: lines.flatMap(barRuns),
     flags: [...slabFlags(context, findings), ...steps],
   }

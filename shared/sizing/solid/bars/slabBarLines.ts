@@ -40,7 +40,8 @@ function linesIn(
   const found = stripsOf(layers).map(({ name, from, to, layer }): BarLines => {
     const lines = slabLines(context.plan, axis, from, to, lineCount(acrossMm * (to - from), layer.spacing))
     return {
-      position: bars.position + name,
+      position: bars.position,
+      strip: name,
       diameter: layer.diameter,
       each: 1,
       lines: `bars, ${layerText(layer)}`,
@@ -53,10 +54,23 @@ function linesIn(
   })
   const joined = new Map<string, BarLines>()
   for (const each of found) {
-    const before = joined.get(each.position)
-    joined.set(each.position, before ? { ...before, pieces: [...before.pieces, ...each.pieces] } : each)
+    const before = joined.get(each.strip ?? '')
+    joined.set(each.strip ?? '', before ? { ...before, pieces: [...before.pieces, ...each.pieces] } : each)
   }
   return [...joined.values()].filter(({ pieces }) => pieces.length > 0)
+}
+
+/**
+ * All bars of a solid panel to be scheduled.
+ *
+ * Source: as the functions below
+ */
+export function slabBarLines(context: SlabContext, bars: SlabBars): BarLines[] {
+  return [
+    ...bottomBarLines(context, bars),
+    ...bars.tops.flatMap((top) => topBarLines(context, top)),
+    ...torsionBarLines(context, bars.torsion),
+  ]
 }
 
 /**
@@ -66,11 +80,11 @@ function linesIn(
  */
 export function bottomBarLines(context: SlabContext, { bottom }: SlabBars): BarLines[] {
   const { short, other } = context.analysis
-  const { basis, brief } = context
+  const { basis, brief, heightMm } = context
   const endOf = (axis: SlabAxis, line: SlabLine, end: EndOfSpan, { diameter }: BarLayer) => {
     const { edge, supportMm } = line[end]
     const support = { supportMm: edge === null ? 0 : supportMm, isContinuous: axis.ends[end].isContinuous }
-    return bottomBarEnd(basis, diameter, support, brief.cover)
+    return bottomBarEnd(basis, diameter, support, { coverMm: brief.cover, heightMm })
   }
   const pieceAlong =
     (axis: SlabAxis) =>
@@ -78,7 +92,7 @@ export function bottomBarLines(context: SlabContext, { bottom }: SlabBars): BarL
       const [start, end] = [endOf(axis, line, 'start', layer), endOf(axis, line, 'end', layer)]
       return { parts: [line.clearMm, start.pastMm, end.pastMm], legs: [start.legMm, end.legMm] }
     }
-  const { clause } = basis.bottomEnd(bottom.short.middle.diameter, 0, false)
+  const { clause } = basis.bottomEnd(bottom.short.middle.diameter, short.axis.ends.start, heightMm)
   const named = (position: string) => ({ position, clause, isTop: false })
   return [
     ...linesIn(context, short.axis, other.clearMm, bottom.short, named('bottom, short span'), pieceAlong(short.axis)),
