@@ -17,7 +17,7 @@ export interface RibLineEnds {
  * Source: project rule, ribs run between supports
  * @throws OutOfScopeError `edges` where a rib ends on a free edge
  */
-export function ribLineEnds(site: PanelSite, { ribLines }: PanelLayout): RibLineEnds[] {
+export function ribLineEnds(site: PanelSite, { ribLines }: Pick<PanelLayout, 'ribLines'>): RibLineEnds[] {
   const supported = (at: Point, direction: Point): LineEndOnEdge => {
     const found = lineEndAt(site, at, direction)
     if (found.edge !== null && site.edges[found.edge]!.continuity === 'free')

@@ -1,12 +1,13 @@
 import type { Brief, RibbedScheme } from '../../contracts/appraisal'
 import type { CodeBasis } from '../codeBasis'
 import { givenFor } from '../givenPanel'
-import { atPath, type LevelSite, type PanelSite } from '../panelSite'
+import { atPath, type LevelSite } from '../panelSite'
 import { remember } from '../remember'
 import { analyseRibs, type RibAnalysis } from './ribAnalysis'
 import type { RibBarRules } from './ribBarLines'
 import type { RibDesign, RibTask } from './ribDesign'
-import { type RibbedPanel, ribbedPanel, shapeKey } from './ribbedPanel'
+import { type RibbedGround, ribbedGround } from './ribbedGround'
+import { type RibbedPanel, ribbedPanel, type RibbedShape, shapeKey } from './ribbedPanel'
 import { ribSection } from './ribSection'
 
 /** One level of a ribbed scheme while it is sized, with what was worked out once for panels that are alike. */
@@ -16,6 +17,9 @@ export interface RibbedJob {
   readonly basis: CodeBasis
   readonly level: LevelSite
   readonly rules: RibBarRules
+  /** One for each panel of the level. */
+  readonly shapes: readonly RibbedShape[]
+  readonly groundFor: ReturnType<typeof remember<RibbedGround>>
   readonly shapeFor: ReturnType<typeof remember<RibbedPanel>>
   readonly zoneFor: ReturnType<typeof remember<number>>
   readonly designFor: ReturnType<typeof remember<RibDesign>>
@@ -36,7 +40,12 @@ export interface LaidLevel {
 export function ribbedJob(level: LevelSite, scheme: RibbedScheme, brief: Brief, basis: CodeBasis): RibbedJob {
   const heightMm = scheme.block.height + scheme.topping
   const rules = { basis, coverMm: brief.cover, trimmerMm: scheme.trimmerWidth, heightMm, stockMm: brief.stockLength }
-  return { scheme, brief, basis, level, rules, shapeFor: remember(), zoneFor: remember(), designFor: remember() }
+  const shapes = level.panels.map((site): RibbedShape => {
+    const given = givenFor(scheme.givenPanels, level.mark, site.panel.mark)
+    return { site, given, key: shapeKey(site, given) }
+  })
+  const memory = { groundFor: remember<RibbedGround>(), shapeFor: remember<RibbedPanel>(), zoneFor: remember<number>() }
+  return { scheme, brief, basis, level, rules, shapes, ...memory, designFor: remember() }
 }
 
 /**
@@ -46,15 +55,18 @@ export function ribbedJob(level: LevelSite, scheme: RibbedScheme, brief: Brief, 
  * @param zones - one for each panel, mm
  */
 export function laidLevel(job: RibbedJob, zones: readonly number[]): LaidLevel {
-  const { level, basis, rules } = job
-  const panels = level.panels.map((site, i) => shaped(job, site, zones[i]!))
+  const { level, shapes, basis, rules } = job
+  const panels = shapes.map((shape, i) => shaped(job, shape, zones[i]!))
   return { zones, panels, analyses: analyseRibs(level, panels, rules.heightMm, basis) }
 }
 
-function shaped({ scheme, brief, basis, level, shapeFor }: RibbedJob, site: PanelSite, zoneMm: number): RibbedPanel {
-  const given = givenFor(scheme.givenPanels, level.mark, site.panel.mark)
-  return shapeFor(shapeKey(site, zoneMm, given), () =>
-    atPath(site.path, () => ribbedPanel(site, scheme, brief, basis, zoneMm, given)),
+function shaped({ scheme, brief, basis, groundFor, shapeFor }: RibbedJob, shape: RibbedShape, zoneMm: number): RibbedPanel {
+  const { site, key } = shape
+  return shapeFor(`${zoneMm} ${key}`, () =>
+    atPath(site.path, () => {
+      const ground = groundFor(key, () => ribbedGround(site, scheme))
+      return ribbedPanel(shape, ground, scheme, brief, basis, zoneMm)
+    }),
   )
 }
 

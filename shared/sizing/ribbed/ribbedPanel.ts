@@ -1,23 +1,24 @@
 import type { Brief, GivenRibbedPanel, RibbedScheme } from '../../contracts/appraisal'
-import { frameAt } from '../../geometry/frame'
 import type { Point } from '../../geometry/point'
+import { signedArea } from '../../geometry/ring'
 import { layOutPanel } from '../../layout/layOutPanel'
+import type { LayoutGround } from '../../layout/layoutGround'
 import type { PanelLayout } from '../../layout/panelLayout'
-import { OutOfScopeError } from '../../outOfScope'
 import { type FloorLoads, floorLoads, selfWeightKnPerM2 } from '../actions'
 import type { LineEnd } from '../analysis/levelStrips'
 import type { EndOfSpan } from '../analysis/spanForces'
 import type { CodeBasis } from '../codeBasis'
 import { figure } from '../figure'
 import type { PanelSite } from '../panelSite'
-import { type RibLineEnds, ribLineEnds } from './ribEnds'
+import type { RibLineEnds } from './ribEnds'
+import type { RibbedGround } from './ribbedGround'
 
 /** Where the bars of a panel's ribs come from. */
 export type RibBarChoice = Pick<RibbedScheme, 'ribBars' | 'topBars'>
 
 /** A ribbed panel laid out with one width of solid zone, before it is analysed: what does not depend on where it stands. */
 export interface RibbedPanel {
-  /** As `shapeKey`. */
+  /** As `shapeKey`, with the zone. */
   readonly key: string
   readonly ribs: readonly RibLineEnds[]
   readonly direction: Point
@@ -37,47 +38,56 @@ export interface RibbedPanel {
  * A panel laid out with a solid zone of a given width.
  *
  * Source: project rule, engine design section 2
+ * @param ground - of this very panel, where it is known
  */
-export function laidOut(site: PanelSite, scheme: RibbedScheme, basis: CodeBasis, solidZoneMm: number): PanelLayout {
+export function laidOut(
+  site: PanelSite,
+  scheme: RibbedScheme,
+  basis: CodeBasis,
+  solidZoneMm: number,
+  ground?: LayoutGround,
+): PanelLayout {
   const crossRibs = basis.crossRibSpacingMm(scheme.block.height + scheme.topping)?.value ?? null
-  return layOutPanel(site.panel, scheme, solidZoneMm, crossRibs, site.sharedEdges)
+  return layOutPanel(site.panel, scheme, solidZoneMm, crossRibs, site.sharedEdges, ground)
+}
+
+/** A panel of a level as it asks to be laid out: `key` as `shapeKey`; `given` bars of this panel alone. */
+export interface RibbedShape {
+  readonly site: PanelSite
+  readonly given: GivenRibbedPanel | undefined
+  readonly key: string
 }
 
 /**
  * A panel laid out, with its rib ends and loads.
  *
  * Source: project rule, engine design sections 2 and 4 (self-weight of all concrete and blocks inside the clear outline)
- * @param given - bars of this panel alone
- * @throws OutOfScopeError `outline` where no row of blocks fits, `edges` where ribs end on a free edge
  */
 export function ribbedPanel(
-  site: PanelSite,
+  { site, given, key }: RibbedShape,
+  { ribs, direction, ends, layout: ground }: RibbedGround,
   scheme: RibbedScheme,
   brief: Brief,
   basis: CodeBasis,
   solidZoneMm: number,
-  given?: GivenRibbedPanel,
 ): RibbedPanel {
-  const layout = laidOut(site, scheme, basis, solidZoneMm)
-  const ribs = ribLineEnds(site, layout)
-  if (layout.longestRib === 0 || ribs.length === 0)
-    throw new OutOfScopeError('outline', 'no row of blocks fits: expected a wider panel, smaller blocks or another rib direction')
+  const layout = laidOut(site, scheme, basis, solidZoneMm, ground)
   const { length, width, height, mass } = scheme.block
   const blocksLongMm = layout.blocksWhole * length + layout.cutLength
   const selfWeight = selfWeightKnPerM2(
-    layout.areas.clear - layout.areas.voids,
+    layout.netArea,
     height + scheme.topping,
     blocksLongMm * width * height,
     (blocksLongMm / length) * mass,
   )
   return {
-    key: shapeKey(site, solidZoneMm, given),
+    key: `${solidZoneMm} ${key}`,
     ribs,
-    direction: frameAt([0, 0], site.panel.ribDirection).toLevel([1, 0]),
+    direction,
     clearMm: layout.longestRib,
-    ends: { start: lineEnd(site, ribs, 'start'), end: lineEnd(site, ribs, 'end') },
+    ends,
     loads: floorLoads(selfWeight, brief),
-    grossMm2: layout.areas.gross,
+    grossMm2: signedArea(site.panel.outline),
     solidZoneMm,
     bars: { ribBars: given?.ribBars ?? scheme.ribBars, topBars: given?.topBars ?? scheme.topBars },
     site,
@@ -90,12 +100,11 @@ export function ribbedPanel(
  *
  * Source: project rule, identical panels are laid out once for sizing
  */
-export function shapeKey({ panel, edges, sharedEdges }: PanelSite, solidZoneMm: number, given?: Partial<RibBarChoice>): string {
+export function shapeKey({ panel, edges, sharedEdges }: PanelSite, given?: Partial<RibBarChoice>): string {
   const [originX, originY] = panel.outline[0]!
   const ring = (points: readonly Point[]) => points.map(([x, y]) => `${figure(x - originX, 4)},${figure(y - originY, 4)}`)
   const own = given ? [given.ribBars, given.topBars] : null
   return JSON.stringify([
-    solidZoneMm,
     panel.ribDirection,
     ring(panel.outline),
     panel.voids.map(ring),
@@ -103,17 +112,6 @@ export function shapeKey({ panel, edges, sharedEdges }: PanelSite, solidZoneMm: 
     sharedEdges,
     ...(own ? [own] : []),
   ])
-}
-
-/** One end of the panel's ribs as a whole: continuous only where every edge they end on is; the widest support counts. */
-function lineEnd({ edges }: PanelSite, ribs: readonly RibLineEnds[], end: EndOfSpan): LineEnd {
-  const borne = ribs.map((rib) => rib[end]).filter(({ edge }) => edge !== null)
-  const numbers = [...new Set(borne.map(({ edge }) => edge!))].sort((a, b) => a - b)
-  return {
-    edges: numbers,
-    supportMm: Math.max(0, ...borne.map(({ supportMm }) => supportMm)),
-    isContinuous: numbers.length > 0 && numbers.every((edge) => edges[edge]!.continuity === 'continuous'),
-  }
 }
 
 /**

@@ -1,0 +1,47 @@
+import type { RibbedScheme } from '../../contracts/appraisal'
+import { frameAt } from '../../geometry/frame'
+import type { Point } from '../../geometry/point'
+import { type LayoutGround, layoutGround } from '../../layout/layoutGround'
+import { OutOfScopeError } from '../../outOfScope'
+import type { LineEnd } from '../analysis/levelStrips'
+import type { EndOfSpan } from '../analysis/spanForces'
+import type { PanelSite } from '../panelSite'
+import { type RibLineEnds, ribLineEnds } from './ribEnds'
+
+/** What of a ribbed panel does not depend on its solid zones: rows and ribs, and what they bear on. */
+export interface RibbedGround {
+  readonly layout: LayoutGround
+  readonly ribs: readonly RibLineEnds[]
+  readonly direction: Point
+  readonly ends: Readonly<Record<EndOfSpan, LineEnd>>
+}
+
+/**
+ * Ribs of a panel with their ends.
+ *
+ * Source: project rule, engine design section 2
+ * @throws OutOfScopeError `outline` where no row of blocks fits, `edges` where ribs end on a free edge
+ */
+export function ribbedGround(site: PanelSite, scheme: RibbedScheme): RibbedGround {
+  const layout = layoutGround(site.panel, scheme)
+  const ribs = ribLineEnds(site, layout)
+  if (layout.longestRib === 0 || ribs.length === 0)
+    throw new OutOfScopeError('outline', 'no row of blocks fits: expected a wider panel, smaller blocks or another rib direction')
+  return {
+    layout,
+    ribs,
+    direction: frameAt([0, 0], site.panel.ribDirection).toLevel([1, 0]),
+    ends: { start: lineEnd(site, ribs, 'start'), end: lineEnd(site, ribs, 'end') },
+  }
+}
+
+/** One end of the panel's ribs as a whole: continuous only where every edge they end on is; the widest support counts. */
+function lineEnd({ edges }: PanelSite, ribs: readonly RibLineEnds[], end: EndOfSpan): LineEnd {
+  const borne = ribs.map((rib) => rib[end]).filter(({ edge }) => edge !== null)
+  const numbers = [...new Set(borne.map(({ edge }) => edge!))].sort((a, b) => a - b)
+  return {
+    edges: numbers,
+    supportMm: Math.max(0, ...borne.map(({ supportMm }) => supportMm)),
+    isContinuous: numbers.length > 0 && numbers.every((edge) => edges[edge]!.continuity === 'continuous'),
+  }
+}
