@@ -6,6 +6,8 @@ export interface Candidate<Option> {
   readonly option: Option
   readonly massKg: number
   readonly findings: () => readonly Finding[]
+  /** Known, without asking, to fail a check: it counts only where nothing passes. */
+  readonly isHopeless?: boolean
 }
 
 type Name = Check['name']
@@ -31,13 +33,15 @@ const SAME = 1e-9
  * @param candidates - at least one; of equal masses the first counts
  */
 export function chooseLeastMass<Option>(candidates: readonly Candidate<Option>[]): Candidate<Option> {
-  const judged: Judged<Option>[] = []
-  for (const candidate of [...candidates].sort((a, b) => a.massKg - b.massKg)) {
+  const inOrder = [...candidates].sort((a, b) => a.massKg - b.massKg)
+  const judged = new Map<Candidate<Option>, readonly Finding[]>()
+  for (const candidate of inOrder) {
+    if (candidate.isHopeless) continue
     const findings = candidate.findings()
     if (findings.every(({ demand, capacity }) => isMet(demand, capacity))) return candidate
-    judged.push({ candidate, findings })
+    judged.set(candidate, findings)
   }
-  return nearest(judged).candidate
+  return nearest(inOrder.map((candidate) => ({ candidate, findings: judged.get(candidate) ?? candidate.findings() }))).candidate
 }
 
 interface Judged<Option> {

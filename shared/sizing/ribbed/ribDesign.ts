@@ -36,6 +36,10 @@ export const RIB_BAR_SETS: readonly BarSet[] = CHOSEN_DIAMETERS.flatMap((first, 
   [{ diameter: first, count: 2 }],
 ])
 
+/** Sets whose bars lie deepest in the rib, and least deep. */
+const DEEPEST: BarSet = [{ diameter: CHOSEN_DIAMETERS[0], count: 1 }]
+const SHALLOWEST: BarSet = [{ diameter: CHOSEN_DIAMETERS[CHOSEN_DIAMETERS.length - 1]!, count: 1 }]
+
 type MassOf = (set: BarSet) => number
 
 /** Mass of a set whose lines of one bar of each diameter are known, remembered by diameter. */
@@ -49,11 +53,31 @@ function massBy(lengthOf: (diameter: BarDiameter) => number): MassOf {
     }, 0)
 }
 
-function choose(massOf: MassOf, findingsOf: (set: BarSet) => readonly Finding[]): BarSet {
+type FindingsOf = (set: BarSet) => readonly Finding[]
+
+/** A share that floating point may miss a bound by. */
+const BOUND_SHARE = 1 - 1e-6
+
+/**
+ * Steel that every set must have, mm²: what is required goes one way with the depth of the bars, so the lesser of what the least and the
+ * most deep ones ask for. Sets with less fail without being looked at.
+ */
+function leastAreaMm2(findingsOf: FindingsOf): number {
+  const required = (set: BarSet) =>
+    findingsOf(set)
+      .filter(({ name, unit }) => unit === 'mm²' && name !== 'steel.most')
+      .map(({ demand }) => demand)
+  const shallow = required(SHALLOWEST)
+  return BOUND_SHARE * Math.max(0, ...required(DEEPEST).map((demand, i) => Math.min(demand, shallow[i]!)))
+}
+
+function choose(massOf: MassOf, findingsOf: FindingsOf): BarSet {
+  const leastMm2 = leastAreaMm2(findingsOf)
   const candidates = RIB_BAR_SETS.map((option): Candidate<BarSet> => ({
     option,
     massKg: massOf(option),
     findings: () => findingsOf(option),
+    isHopeless: areaOf(option) < leastMm2,
   }))
   return chooseLeastMass(candidates).option
 }
