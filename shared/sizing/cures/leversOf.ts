@@ -45,9 +45,9 @@ function ribbedLevers(input: CureInput, scheme: RibbedScheme, target: CheckTarge
     case 'topping':
       return [topping()]
     case 'fire.size':
-      return [topping(), rib()]
+      return [place === 'rib' ? rib() : topping()]
     case 'fire.cover':
-      return [otherCover(input, true), rib()]
+      return place.endsWith('side') ? [rib()] : [otherCover(input, true), rib()]
   }
 }
 

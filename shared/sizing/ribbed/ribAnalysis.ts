@@ -1,6 +1,7 @@
 import { bayAreas, type SpanLines, stripOf } from '../analysis/levelStrips'
 import { momentFromBehind, raisedTo } from '../analysis/sharedSupports'
 import type { EndOfSpan, SpanForces } from '../analysis/spanForces'
+import type { Strip } from '../analysis/strip'
 import { positionIn, stripForces } from '../analysis/stripForces'
 import type { CodeBasis, SpanPosition } from '../codeBasis'
 import type { LevelSite } from '../panelSite'
@@ -15,6 +16,8 @@ export interface RibAnalysis {
   readonly faceMm: Readonly<Record<EndOfSpan, number>>
   /** Number of ends beyond which an equal span was assumed. */
   readonly assumedEnds: number
+  /** The strip it was analysed in. */
+  readonly strip: Strip
 }
 
 /**
@@ -50,6 +53,7 @@ export function analyseRibs(
       forces: raisedTo(forces, spanMm, { start: behind('start'), end: behind('end') }),
       faceMm: faceDistances(panels[i]!, spanMm, depthMm, basis),
       assumedEnds: strip.assumedEnds,
+      strip,
     }
   })
 }

@@ -3,6 +3,7 @@ import { type FloorLoads, ultimateLoad } from '../actions'
 import { bayAreas, type SpanLine, stripOf } from '../analysis/levelStrips'
 import { type EdgeMoments, momentFromBehind } from '../analysis/sharedSupports'
 import type { EndOfSpan } from '../analysis/spanForces'
+import type { Strip } from '../analysis/strip'
 import { positionIn, stripForces } from '../analysis/stripForces'
 import { twoWayForces } from '../analysis/twoWayForces'
 import type { CodeBasis, SpanPosition } from '../codeBasis'
@@ -36,6 +37,9 @@ export interface SlabAnalysis {
   readonly method: 'coefficients' | 'elastic' | 'twoWay'
   readonly panelCase: TwoWayCase | null
   readonly assumedEnds: number
+  readonly loads: FloorLoads
+  /** The strip it was analysed in; null where it spans two ways. */
+  readonly strip: Strip | null
 }
 
 /** Thickness of one panel of a level, mm, `depthMm` less the cover, and the loads that go with it. */
@@ -120,7 +124,7 @@ function spanLine({ plan, first, firstMm, isTwoWay, loads }: Spanning): SpanLine
 }
 
 function oneWay(
-  { first, second, firstMm, secondMm }: Spanning,
+  { first, second, firstMm, secondMm, loads }: Spanning,
   strip: ReturnType<typeof stripOf>,
   basis: CodeBasis,
 ): SlabAnalysis {
@@ -141,12 +145,14 @@ function oneWay(
     method: forces.method,
     panelCase: null,
     assumedEnds: strip.assumedEnds,
+    loads,
+    strip,
   }
 }
 
 const POSITIONS: readonly SpanPosition[] = ['simple', 'end', 'interior']
 
-function twoWay({ first, second, firstMm, secondMm }: Spanning, load: number): SlabAnalysis {
+function twoWay({ first, second, firstMm, secondMm, loads }: Spanning, load: number): SlabAnalysis {
   const continuity = ({ ends }: SlabAxis) => [ends.start.isContinuous, ends.end.isContinuous] as const
   const forces = twoWayForces({
     load,
@@ -174,6 +180,8 @@ function twoWay({ first, second, firstMm, secondMm }: Spanning, load: number): S
     method: 'twoWay',
     panelCase: forces.panelCase,
     assumedEnds: 0,
+    loads,
+    strip: null,
   }
 }
 
