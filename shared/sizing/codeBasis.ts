@@ -55,12 +55,30 @@ export interface SpanDepthInput {
   readonly carriesPartitions: boolean
 }
 
-/** Tension zone of a section for least steel, mm: its mean `width`, `web`, overall `height` and effective `depth`. */
+/**
+ * Tension zone of a section for least steel, mm: its mean `width`, the `web` and the `flange` of a T (equal in a rectangle), overall
+ * `height` and effective `depth`. `tension` says which part of the section is pulled.
+ */
 export interface TensionZone {
+  readonly tension: 'rectangle' | 'web' | 'flange'
   readonly widthMm: number
   readonly webMm: number
+  readonly flangeMm: number
   readonly heightMm: number
   readonly depthMm: number
+}
+
+/** Members with detailing rules of their own. */
+export type Member = 'slab' | 'rib'
+
+/** Top steel at an edge designed as simple: a share of the midspan moment or of the midspan steel, and its reach as a share of the span. */
+export interface SimpleEdge {
+  readonly share: number
+  readonly of: 'moment' | 'steel'
+  /** Whether it is no less than the least steel of the section. */
+  readonly isAtLeastLeast: boolean
+  readonly reach: number
+  readonly clause: string
 }
 
 /** One end of a span: support width along the span, mm, and whether the floor goes on behind it. */
@@ -72,13 +90,40 @@ export interface SpanEnd {
 /** Where bars lie, for their greatest spacing. */
 export type BarPlace = 'greatestMoment' | 'principal' | 'secondary'
 
+/** Bars of a slab whose spacing is limited, mm. `redistributedShare` of the moment was taken off there. */
+export interface SpacedBars {
+  readonly place: BarPlace
+  readonly heightMm: number
+  readonly depthMm: number
+  readonly diameterMm: BarDiameter
+  readonly redistributedShare: number
+}
+
+/** What the bond of a bar depends on: at the top of a section as cast, its depth, mm, and whether in a corner of the section. */
+export interface BarBond {
+  readonly isTop: boolean
+  readonly sectionMm: number
+  readonly isCorner: boolean
+}
+
+/** How far a bottom bar passes the face of its support, mm: what anchors it, and what it is usually given where there is room. */
+export interface BottomEnd {
+  readonly leastMm: number
+  readonly usualMm: number
+  readonly clause: string
+}
+
 /** How a solid slab carries, for its fire table. */
 export type SlabAction = 'oneWay' | 'twoWay' | 'twoWayLong'
 
-/** Fire demand: least `size` and least axis distance `axisMm` of bars, mm; `sideAxisMm` to the side face where the table asks more there. */
+/**
+ * Fire demand: least `size`, mm, and least distance `bars` of the bars from the face, mm, measured to their axis or as cover to the
+ * outermost; `sideAxisMm` to the side face where the table asks more there.
+ */
 export interface FireDemand {
   readonly size: Answer
-  readonly axisMm: Answer
+  readonly bars: Answer
+  readonly measuredTo: 'axis' | 'cover'
   readonly sideAxisMm: Answer | null
 }
 
@@ -106,10 +151,11 @@ export interface Comparison {
 export interface CodeBasis {
   readonly title: string
   readonly loadFactors: LoadFactors
-  /** Top steel at edges designed as simple: share of the midspan moment and reach from the face as a share of the span. */
-  readonly simpleEdge: { readonly share: number; readonly reach: number; readonly clause: string }
-  /** Secondary steel as a share of the principal. */
-  readonly secondary: { readonly share: number; readonly clause: string }
+  /** Greatest share of a support moment that may be redistributed. */
+  readonly greatestRedistribution: { readonly share: number; readonly clause: string }
+  /** Span over depth beyond which the code tabulates nothing, its greatest factor for steel included. */
+  readonly greatestTabulatedSpanDepth: number
+  readonly simpleEdge: Readonly<Record<Member, SimpleEdge>>
   effectiveSpanMm(clearMm: number, heightMm: number, depthMm: number, ends: readonly [SpanEnd, SpanEnd]): number
   flangeWidthMm(position: SpanPosition, spanMm: number, webMm: number, clearMm: number): Answer
   /** `redistributedShare` of the moment was taken off at this section, 0 to 0.3. */
@@ -118,15 +164,21 @@ export interface CodeBasis {
   spanDepthLimit(input: SpanDepthInput): Answer
   leastSteelMm2(zone: TensionZone): Answer
   mostSteelMm2(concreteMm2: number): Answer
-  greatestSpacingMm(place: BarPlace, heightMm: number): Answer
+  /** Steel across the principal bars of a one-way slab, whose section `zone` is. */
+  secondarySteelMm2(principalMm2: number, zone: TensionZone): Answer
+  /** Mesh in the topping of a ribbed floor, mm² per metre each way. */
+  toppingMeshMm2(toppingMm: number): Answer
+  /** Between the middles of bars. */
+  greatestSpacingMm(bars: SpacedBars): Answer
   leastGapMm(diameterMm: BarDiameter, aggregateMm: number): Answer
   /** Of a bar stressed to a share of its design strength, 0 to 1. */
-  anchorageMm(diameterMm: BarDiameter, isTopOfDeepSection: boolean, stressShare: number): Answer
-  lapMm(diameterMm: BarDiameter, isTopOfDeepSection: boolean): Answer
+  anchorageMm(diameterMm: BarDiameter, bond: BarBond, stressShare: number): Answer
+  lapMm(diameterMm: BarDiameter, bond: BarBond): Answer
+  bottomEnd(diameterMm: BarDiameter, end: SpanEnd, depthMm: number): BottomEnd
   ribProportions(shape: RibShape): readonly Comparison[]
   leastToppingMm(shape: RibShape): Answer
   /** Greatest clear length of ribs between cross ribs or solid zones, mm; null where the code has no rule. */
   crossRibSpacingMm(heightMm: number): Answer | null
-  slabFire(minutes: number, action: SlabAction): FireDemand
+  slabFire(minutes: number, action: SlabAction, isContinuous: boolean): FireDemand
   ribFire(minutes: number, ribMm: number, isContinuous: boolean, redistributedShare: number): FireDemand
 }

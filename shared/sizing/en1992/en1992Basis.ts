@@ -1,26 +1,29 @@
 import type { Brief } from '../../contracts/appraisal'
 import type { CodeBasis } from '../codeBasis'
-import { anchorageMm, lapMm } from './anchorage'
+import { anchorageMm, bottomEnd, lapMm } from './anchorage'
 import { effectiveSpanMm } from './effectiveSpan'
 import { ribFire, slabFire } from './fire'
 import { ribFlangeWidth } from './flangeWidth'
 import { flexure } from './flexure'
-import { type NationalValues, recommendedValues } from './recommendedValues'
+import { nationalValues } from './recommendedValues'
 import { crossRibSpacingMm, leastToppingMm, ribProportions } from './ribProportions'
 import { shearResistanceN } from './shear'
-import { spanDepthLimit } from './spanDepthLimit'
-import { greatestSpacingMm, leastGapMm, leastSteelMm2, mostSteelMm2 } from './steelLimits'
+import { GREATEST_TABULATED, spanDepthLimit } from './spanDepthLimit'
+import { greatestSpacingMm, leastGapMm, leastSteelMm2, mostSteelMm2, secondarySteelMm2, toppingMeshMm2 } from './steelLimits'
 import type { Strengths } from './strengths'
 
-type EuropeanBrief = Extract<Brief, { basis: 'EN1992' }>
+type EuropeanBrief = Pick<Extract<Brief, { basis: 'EN1992' }>, 'fck' | 'fyk' | 'nationalValues'>
+
+/** Source: EN 1992-1-1:2004, 9.3.1.2(2) (from memory) */
+const SIMPLE_EDGE = { share: 0.25, of: 'moment', isAtLeastLeast: false, reach: 0.2, clause: 'EN 1992-1-1 9.3.1.2(2)' } as const
 
 /**
  * EN 1992-1-1 and EN 1992-1-2 answering for one brief's strengths.
  *
  * Source: EN 1990:2002, EN 1992-1-1:2004, EN 1992-1-2:2004, by the clauses named in this folder; EN 9.3.1.2(2) for simple edges
- * @param values - nationally chosen values; the recommended ones unless given
  */
-export function en1992Basis({ fck, fyk }: EuropeanBrief, values: NationalValues = recommendedValues): CodeBasis {
+export function en1992Basis({ fck, fyk, nationalValues: chosen }: EuropeanBrief): CodeBasis {
+  const values = nationalValues(chosen)
   const strengths: Strengths = { fckMpa: fck, fykMpa: fyk, values }
   return {
     title: 'EN 1992-1-1:2004',
@@ -30,8 +33,9 @@ export function en1992Basis({ fck, fyk }: EuropeanBrief, values: NationalValues 
       unloaded: values.gammaPermanent,
       clause: 'EN 1990 6.10',
     },
-    simpleEdge: { share: 0.25, reach: 0.2, clause: 'EN 1992-1-1 9.3.1.2(2)' },
-    secondary: { share: values.secondaryShare, clause: 'EN 1992-1-1 9.3.1.1(2)' },
+    greatestRedistribution: { share: 0.3, clause: 'EN 1992-1-1 5.5(4)' },
+    greatestTabulatedSpanDepth: GREATEST_TABULATED * values.greatestSteelStressFactor,
+    simpleEdge: { slab: SIMPLE_EDGE, rib: SIMPLE_EDGE },
     effectiveSpanMm: (clear, height, _depth, ends) => effectiveSpanMm(clear, height, ends),
     flangeWidthMm: ribFlangeWidth,
     flexure: (section, moment, redistributedShare) => flexure(section, moment, redistributedShare, strengths),
@@ -39,10 +43,13 @@ export function en1992Basis({ fck, fyk }: EuropeanBrief, values: NationalValues 
     spanDepthLimit: (input) => spanDepthLimit(input, strengths),
     leastSteelMm2: (zone) => leastSteelMm2(zone, strengths),
     mostSteelMm2: (concrete) => mostSteelMm2(concrete, strengths),
-    greatestSpacingMm: (place, height) => greatestSpacingMm(place, height, strengths),
+    secondarySteelMm2: (principal) => secondarySteelMm2(principal, strengths),
+    toppingMeshMm2: (topping) => toppingMeshMm2(topping, strengths),
+    greatestSpacingMm: (bars) => greatestSpacingMm(bars, strengths),
     leastGapMm: (diameter, aggregate) => leastGapMm(diameter, aggregate, strengths),
-    anchorageMm: (diameter, isPoor, stressShare) => anchorageMm(diameter, isPoor, stressShare, strengths),
-    lapMm: (diameter, isPoor) => lapMm(diameter, isPoor, strengths),
+    anchorageMm: (diameter, bond, stressShare) => anchorageMm(diameter, bond, stressShare, strengths),
+    lapMm: (diameter, bond) => lapMm(diameter, bond, strengths),
+    bottomEnd,
     ribProportions,
     leastToppingMm,
     crossRibSpacingMm,

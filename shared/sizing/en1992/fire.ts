@@ -29,7 +29,8 @@ export function slabFire(minutes: number, action: SlabAction): FireDemand {
   const clause = 'EN 1992-1-2 5.7.2, Table 5.8'
   return {
     size: answer(row.thicknessMm, clause, () => `REI ${minutes}: hs ≥ ${row.thicknessMm} mm`),
-    axisMm: answer(row[action], clause, () => `REI ${minutes}: a ≥ ${row[action]} mm`),
+    bars: answer(row[action], clause, () => `REI ${minutes}: a ≥ ${row[action]} mm`),
+    measuredTo: 'axis',
     sideAxisMm: null,
   }
 }
@@ -56,7 +57,8 @@ export function ribFire(minutes: number, ribMm: number, isContinuous: boolean, r
   const side = axis + SIDE_AXIS_ADDITION_MM
   return {
     size: answer(widths[0]!, clause, () => `R ${minutes}: b ≥ ${widths[0]} mm`),
-    axisMm: answer(axis, clause, () => `R ${minutes}, b = ${figure(ribMm)}: a ≥ ${figure(axis)} mm`),
+    bars: answer(axis, clause, () => `R ${minutes}, b = ${figure(ribMm)}: a ≥ ${figure(axis)} mm`),
+    measuredTo: 'axis',
     sideAxisMm:
       ribMm <= widths[1]!
         ? answer(side, clause, () => `R ${minutes}: asd ≥ a + ${SIDE_AXIS_ADDITION_MM} = ${figure(side)} mm`)

@@ -10,6 +10,13 @@ import type { Strengths } from './strengths'
 export const STRUCTURAL_SYSTEM = { simple: 1, end: 1.3, interior: 1.5 } as const satisfies Record<SpanPosition, number>
 
 /**
+ * Greatest l/d tabulated: an interior span lightly stressed, before the factor for steel.
+ *
+ * Source: EN 1992-1-1:2004, Table 7.4N (30 seen in several encodings)
+ */
+export const GREATEST_TABULATED = 30
+
+/**
  * Span over 7 m above which slabs that carry partitions are reduced, mm.
  *
  * Source: EN 1992-1-1:2004, 7.4.2(2) (seen in R-EC-1)
@@ -53,12 +60,15 @@ export function spanDepthLimit(input: SpanDepthInput, { fckMpa, fykMpa, values }
   const flanged = section.flange && section.widthMm / section.flange.webMm > overWidthRatio ? factor : 1
   const long = input.carriesPartitions && spanMm > LONG_SPAN_MM ? LONG_SPAN_MM / spanMm : 1
   const steel = Math.min(values.greatestSteelStressFactor, (500 * providedMm2) / (fykMpa * requiredMm2))
+  const byExpression = system * basic * flanged * long * steel
+  const cap = system * values.greatestSpanDepth
   return {
-    value: system * basic * flanged * long * steel,
+    value: Math.min(byExpression, cap),
     clause: 'EN 1992-1-1 7.4.2(2)',
     working: () =>
       `limit = K·N·F1·F2·F3 = ${system}·${figure(basic)}·${flanged}·${figure(long, 3)}·${figure(steel, 3)} = ` +
-      `${figure(system * basic * flanged * long * steel)} (ρ ${figure(100 * rho, 3)} %, ρ0 ${figure(0.1 * Math.sqrt(fckMpa), 3)} %; ` +
+      `${figure(byExpression)}${cap < byExpression ? `, nationally at most ${figure(values.greatestSpanDepth)}·K = ${figure(cap)}` : ''} ` +
+      `(ρ ${figure(100 * rho, 3)} %, ρ0 ${figure(0.1 * Math.sqrt(fckMpa), 3)} %; ` +
       `F3 = 500·${figure(providedMm2, 0)}/(${figure(fykMpa)}·${figure(requiredMm2, 0)}) ≤ ${values.greatestSteelStressFactor})`,
   }
 }

@@ -1,4 +1,4 @@
-import type { Answer, BarPlace, TensionZone } from '../codeBasis'
+import type { Answer, SpacedBars, TensionZone } from '../codeBasis'
 import type { BarDiameter } from '../../contracts/appraisal'
 import { figure } from '../figure'
 import { meanTensileStrength } from './meanTensileStrength'
@@ -38,11 +38,36 @@ export function mostSteelMm2(concreteMm2: number, { values }: Strengths): Answer
 }
 
 /**
+ * Least steel across the principal bars of a one-way slab, mm².
+ *
+ * Source: EN 1992-1-1:2004, 9.3.1.1(2) (20 % seen)
+ */
+export function secondarySteelMm2(principalMm2: number, { values }: Strengths): Answer {
+  const value = values.secondaryShare * principalMm2
+  return {
+    value,
+    clause: 'EN 1992-1-1 9.3.1.1(2)',
+    working: () =>
+      `${values.secondaryShare} of the main bars = ${values.secondaryShare}·${figure(principalMm2, 0)} = ${figure(value, 0)} mm²`,
+  }
+}
+
+/**
+ * Mesh in the topping of a ribbed floor, mm² per metre each way: least steel of the flange as a slab of its own.
+ *
+ * Source: EN 1992-1-1:2004, 9.2.1.1(1) over the whole thickness (166 mm²/m for 100 of C35/45 seen in R-EC-1)
+ */
+export function toppingMeshMm2(toppingMm: number, strengths: Strengths): Answer {
+  const zone = { widthMm: 1000, webMm: 1000, flangeMm: 1000, heightMm: toppingMm, depthMm: toppingMm }
+  return leastSteelMm2({ tension: 'rectangle', ...zone }, strengths)
+}
+
+/**
  * Greatest spacing of slab bars, mm.
  *
  * Source: EN 1992-1-1:2004, 9.3.1.1(3) (principal 3h ≤ 400 seen, the rest from memory)
  */
-export function greatestSpacingMm(place: BarPlace, heightMm: number, { values }: Strengths): Answer {
+export function greatestSpacingMm({ place, heightMm }: SpacedBars, { values }: Strengths): Answer {
   const { depths, mm } = values.spacing[place]
   const value = Math.min(depths * heightMm, mm)
   return {

@@ -32,7 +32,7 @@ export function bottomLines(panel: RibbedPanel, diameter: BarDiameter, each: num
     pieces: panel.ribs.map((rib) => bottomPiece(panel, rib, diameter, rules)),
     stockMm,
     lapMm: () => basis.lapMm(diameter, { isTop: false, sectionMm: heightMm, isCorner: true }).value,
-    clause: basis.bottomEnd(diameter, 0, false).clause,
+    clause: basis.bottomEnd(diameter, panel.ends.start, heightMm).clause,
   }
 }
 
@@ -46,7 +46,7 @@ export function bottomPiece({ ends }: RibbedPanel, rib: RibLineEnds, diameter: B
   const at = (end: EndOfSpan): BarEnd => {
     const { edge, supportMm } = rib[end]
     if (edge === null) return { pastMm: trimmerMm - coverMm, legMm: 0 }
-    return bottomBarEnd(basis, diameter, { supportMm, isContinuous: ends[end].isContinuous }, coverMm)
+    return bottomBarEnd(basis, diameter, { supportMm, isContinuous: ends[end].isContinuous }, rules)
   }
   const [start, end] = [at('start'), at('end')]
   return { parts: [rib.clearMm, start.pastMm, end.pastMm], legs: [start.legMm, end.legMm] }

@@ -36,7 +36,7 @@ export function ribFlags(task: RibTask, findings: readonly Finding[]): string[] 
     ...crossRibFlag(task),
     ...meshFlag(task),
     ...fireFlags(findings),
-    ...slenderFlags(findings),
+    ...slenderFlags(findings, context.basis),
   ]
 }
 
@@ -63,10 +63,10 @@ function crossRibFlag({ panel: { layout }, context: { basis, section } }: RibTas
 function meshFlag({ scheme: { mesh }, context: { basis, section } }: RibTask): string[] {
   const { toppingMm } = section
   if (toppingMm === 0) return []
-  const least = basis.leastSteelMm2({ widthMm: 1000, webMm: 1000, heightMm: toppingMm, depthMm: toppingMm })
+  const least = basis.toppingMeshMm2(toppingMm)
   const { areaMm2PerM } = FABRIC[mesh]
   if (isMet(least.value, areaMm2PerM)) return []
   return [
-    `topping: ${mesh === 'none' ? 'no mesh' : `${mesh} mesh, ${figure(areaMm2PerM, 0)} mm²/m`}, against ${figure(least.value, 0)} mm²/m as least steel of the flange (${least.clause})`,
+    `topping: ${mesh === 'none' ? 'no mesh' : `${mesh} mesh, ${figure(areaMm2PerM, 0)} mm²/m`}, against ${figure(least.value, 0)} mm²/m asked each way (${least.clause})`,
   ]
 }

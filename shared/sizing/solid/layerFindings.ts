@@ -1,10 +1,12 @@
 import type { BarDiameter, BarLayer } from '../../contracts/appraisal'
-import type { BendingSection, Flexure } from '../codeBasis'
+import type { BarPlace, BendingSection, Flexure, SpacedBars } from '../codeBasis'
 import { figure } from '../figure'
 import type { Finding, Where } from '../finding'
 import { deflectionFinding, flexureFindings, steelLimitFindings } from '../flexureFindings'
+import { simpleEdgeFlexure } from '../simpleEdgeFlexure'
 import { METRE_MM, type SlabContext, type TopPlace, isHogging, layerDepthMm, placeName } from './slabContext'
 import { layerAreaMm2, layerText } from './bars/slabLayer'
+import { redistributedAt, secondarySteel, slabZone } from './slabLimits'
 
 /**
  * A metre of slab with one layer of tension bars.
@@ -41,18 +43,21 @@ export function topFlexure(context: SlabContext, place: TopPlace, diameter: BarD
   if (isHogging(place) && place.span)
     return basis.flexure(section, place.span.ends[place.end].hoggingNmm, place.span.redistributedShare)
   const midspan = (place.span ?? analysis.short).saggingNmm
-  return basis.flexure(section, basis.simpleEdge.share * midspan, 0)
+  const zone = slabZone(context.heightMm, section.depthMm)
+  return simpleEdgeFlexure(basis, 'slab', { hogging: section, sagging: section, midspanNmm: midspan, zone })
 }
 
 const at = (place: string, layer: BarLayer): Where => ({ place: () => place, bars: () => layerText(layer) })
 
-function spacingFinding(
-  context: SlabContext,
-  where: Where,
-  place: 'greatestMoment' | 'principal' | 'secondary',
-  layer: BarLayer,
-): Finding {
-  const most = context.basis.greatestSpacingMm(place, context.heightMm)
+/** Depth and redistribution that a spacing is judged by. */
+type SpacedAt = Pick<SpacedBars, 'depthMm' | 'redistributedShare'>
+
+const unredistributed = (depthMm: number): SpacedAt => ({ depthMm, redistributedShare: 0 })
+
+function spacingFinding(context: SlabContext, where: Where, place: BarPlace, layer: BarLayer, bars: SpacedAt): Finding {
+  const { diameter } = layer
+  const { heightMm } = context
+  const most = context.basis.greatestSpacingMm({ place, heightMm, diameterMm: diameter, ...bars })
   return {
     name: 'bars.spacing',
     place: where.place,
@@ -64,12 +69,11 @@ function spacingFinding(
   }
 }
 
-function limitFindings(context: SlabContext, where: Where, depthMm: number, layer: BarLayer): Finding[] {
+function limitFindings(context: SlabContext, where: Where, bars: SpacedAt, layer: BarLayer): Finding[] {
   const { basis, heightMm } = context
-  const zone = { widthMm: METRE_MM, webMm: METRE_MM, heightMm, depthMm }
   return [
-    ...steelLimitFindings(basis, where, zone, METRE_MM * heightMm, layerAreaMm2(layer)),
-    spacingFinding(context, where, 'greatestMoment', layer),
+    ...steelLimitFindings(basis, where, slabZone(heightMm, bars.depthMm), METRE_MM * heightMm, layerAreaMm2(layer)),
+    spacingFinding(context, where, 'greatestMoment', layer, bars),
   ]
 }
 
@@ -101,7 +105,7 @@ export function shortBottomFindings(context: SlabContext, layer: BarLayer, flexu
   return [
     ...flexureFindings('flexure.midspan', where, flexure, layerAreaMm2(layer)),
     slabDeflection(context, layer, flexure),
-    ...limitFindings(context, where, layerDepthMm(context, layer.diameter, null), layer),
+    ...limitFindings(context, where, unredistributed(layerDepthMm(context, layer.diameter, null)), layer),
     ...axisFinding(context, layer),
   ]
 }
@@ -109,17 +113,22 @@ export function shortBottomFindings(context: SlabContext, layer: BarLayer, flexu
 function axisFinding({ basis, brief, analysis }: SlabContext, { diameter }: BarLayer): Finding[] {
   if (brief.fireMinutes === 0) return []
   const action = analysis.long === null ? 'oneWay' : analysis.aspect <= 1.5 ? 'twoWay' : 'twoWayLong'
-  const { axisMm } = basis.slabFire(brief.fireMinutes, action)
-  const axis = brief.cover + diameter / 2
+  const isContinuous = analysis.short.position !== 'simple'
+  const { bars, measuredTo } = basis.slabFire(brief.fireMinutes, action, isContinuous)
+  const isAxis = measuredTo === 'axis'
+  const provided = isAxis ? brief.cover + diameter / 2 : brief.cover
   return [
     {
       name: 'fire.cover',
       place: () => 'short span, bottom bars',
-      clause: axisMm.clause,
-      demand: axisMm.value,
-      capacity: axis,
+      clause: bars.clause,
+      demand: bars.value,
+      capacity: provided,
       unit: 'mm',
-      working: () => `${axisMm.working()}; a = cover + φ/2 = ${figure(brief.cover)} + ${diameter}/2 = ${figure(axis)} mm`,
+      working: () =>
+        isAxis
+          ? `${bars.working()}; a = cover + φ/2 = ${figure(brief.cover)} + ${diameter}/2 = ${figure(provided)} mm`
+          : `${bars.working()}; cover ${figure(provided)} mm`,
     },
   ]
 }
@@ -131,31 +140,27 @@ function axisFinding({ basis, brief, analysis }: SlabContext, { diameter }: BarL
  * @param main - bars of the direction spanned first, which lie outside these
  */
 export function longBottomFindings(context: SlabContext, layer: BarLayer, flexure: Flexure, main: BarLayer): Finding[] {
-  const { basis, analysis } = context
-  if (analysis.long) {
+  const depthMm = layerDepthMm(context, layer.diameter, main.diameter)
+  if (context.analysis.long) {
     const where = at('long span, midspan', layer)
-    const depthMm = layerDepthMm(context, layer.diameter, main.diameter)
     return [
       ...flexureFindings('flexure.midspan', where, flexure, layerAreaMm2(layer)),
-      ...limitFindings(context, where, depthMm, layer),
+      ...limitFindings(context, where, unredistributed(depthMm), layer),
     ]
   }
-  const { share, clause } = basis.secondary
+  const secondary = secondarySteel(context, main, depthMm)
   const where = at('across the span', layer)
-  const demand = share * layerAreaMm2(main)
   return [
     {
       name: 'steel.least',
       place: where.place,
-      clause,
-      demand,
+      clause: secondary.clause,
+      demand: secondary.value,
       capacity: layerAreaMm2(layer),
       unit: 'mm²',
-      working: () =>
-        `${where.place()}, ${where.bars()}: ${share} of the main bars = ${share}·${figure(layerAreaMm2(main), 0)} = ${figure(demand, 0)} mm²; ` +
-        `${figure(layerAreaMm2(layer), 0)} mm² provided`,
+      working: () => `${where.place()}, ${where.bars()}: ${secondary.working()}; ${figure(layerAreaMm2(layer), 0)} mm² provided`,
     },
-    spacingFinding(context, where, 'secondary', layer),
+    spacingFinding(context, where, 'secondary', layer, unredistributed(depthMm)),
   ]
 }
 
@@ -177,9 +182,9 @@ export function topLayerFindings(
   if (isHogging(place))
     return [
       ...flexureFindings('flexure.support', where, flexure, provided),
-      ...(layer ? limitFindings(context, where, depthMm, layer) : []),
+      ...(layer ? limitFindings(context, where, { depthMm, redistributedShare: redistributedAt(place) }, layer) : []),
     ]
-  const { share, clause } = context.basis.simpleEdge
+  const { clause } = context.basis.simpleEdge.slab
   return [
     {
       name: 'steel.least',
@@ -188,10 +193,9 @@ export function topLayerFindings(
       demand: flexure.requiredMm2,
       capacity: provided,
       unit: 'mm²',
-      working: () =>
-        `${where.place()}, ${where.bars()}: ${share} of the midspan moment; ${flexure.steelWorking()}; ${figure(provided, 0)} mm² provided`,
+      working: () => `${where.place()}, ${where.bars()}: ${flexure.steelWorking()}; ${figure(provided, 0)} mm² provided`,
     },
-    ...(layer ? [spacingFinding(context, where, 'principal', layer)] : []),
+    ...(layer ? [spacingFinding(context, where, 'principal', layer, unredistributed(depthMm))] : []),
   ]
 }
 
@@ -222,7 +226,7 @@ export function slabShearFinding(context: SlabContext, place: TopPlace, depthMm:
  */
 export function sizeFindings({ basis, brief, heightMm }: SlabContext): Finding[] {
   if (brief.fireMinutes === 0) return []
-  const { size } = basis.slabFire(brief.fireMinutes, 'oneWay')
+  const { size } = basis.slabFire(brief.fireMinutes, 'oneWay', true)
   const working = () => `${size.working()}; slab ${figure(heightMm)} mm`
   const place = () => 'slab'
   return [{ name: 'fire.size', place, clause: size.clause, demand: size.value, capacity: heightMm, unit: 'mm', working }]

@@ -24,7 +24,7 @@ export function slabFlags(context: SlabContext, findings: readonly Finding[]): s
       ? ['sized as without its voids; bars stop at them, trimming bars round them are not included']
       : []),
     ...fireFlags(findings),
-    ...slenderFlags(findings),
+    ...slenderFlags(findings, context.basis),
   ]
 }
 

@@ -8,6 +8,8 @@ import { describe, expect, it } from 'vitest'
 import { en1992Basis } from '#shared/sizing/en1992/en1992Basis'
 
 const HALF_A_DIAMETER = 0.5
+const bottom = { isTop: false, sectionMm: 300, isCorner: false }
+const top = { ...bottom, isTop: true }
 const rows = [
   [20, 47, 67, 70],
   [25, 40, 58, 61],
@@ -17,22 +19,13 @@ const rows = [
 ] as const
 
 describe.each(rows)('C%d', (fck, good, poor, lap) => {
-  const brief = {
-    imposedLoad: 0,
-    finishesLoad: 0,
-    servicesLoad: 0,
-    partitionsLoad: 0,
-    cover: 25,
-    fireMinutes: 0,
-    stockLength: 12_000,
-  } as const
-  const basis = en1992Basis({ basis: 'EN1992', ...brief, fck, fyk: 500 })
+  const basis = en1992Basis({ fck, fyk: 500, nationalValues: {} })
 
   it(`anchors a bar in ${good} diameters, in poor bond in ${poor}, and laps it in ${lap}`, () => {
     const near = (actual: number, multiple: number) =>
       expect(Math.abs(actual / 16 - multiple)).toBeLessThanOrEqual(HALF_A_DIAMETER + 0.05)
-    near(basis.anchorageMm(16, false, 1).value, good)
-    near(basis.anchorageMm(16, true, 1).value, poor)
-    near(basis.lapMm(16, false).value, lap)
+    near(basis.anchorageMm(16, bottom, 1).value, good)
+    near(basis.anchorageMm(16, top, 1).value, poor)
+    near(basis.lapMm(16, bottom).value, lap)
   })
 })

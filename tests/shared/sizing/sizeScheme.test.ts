@@ -1,10 +1,10 @@
 import { describe, expect, it } from 'vitest'
-import { appraisalFile, type Bar } from '#shared/contracts/appraisal'
+import type { Bar } from '#shared/contracts/appraisal'
 import { OutOfScopeError } from '#shared/outOfScope'
 import { RIB_BAR_SETS } from '#shared/sizing/ribbed/ribDesign'
 import { sizeScheme } from '#shared/sizing/sizeScheme'
 import { BAR_MASS_KG_PER_M } from '#shared/sizing/tables/bars'
-import { edge, fileOf, loads, panelOf, rectangle, ribbed, row, schemeOf, solid } from './support/floors'
+import { edge, fileOf, panelOf, rectangle, ribbed, row, schemeOf, solid } from './support/floors'
 
 const one = panelOf('P1', rectangle(0, 0, 4500, 6000), [])
 
@@ -20,12 +20,6 @@ function pathOf(work: () => unknown): string {
 
 describe('what lies outside the rules', () => {
   const free = (sides: readonly number[]) => [0, 1, 2, 3].map((i) => edge(sides.includes(i) ? 'free' : 'discontinuous'))
-
-  it('names the basis that is not built', () => {
-    const file = fileOf([one])
-    const british = appraisalFile.shape.brief.parse({ ...loads, basis: 'BS8110', fcu: 30, fy: 460 })
-    expect(pathOf(() => sizeScheme(schemeOf(solid), { ...file, brief: british }))).toBe('brief.basis')
-  })
 
   it('names the cover that takes up the depth', () => {
     const file = fileOf([one], { cover: 90 })

@@ -19,7 +19,9 @@ export function bottomFindings(context: RibContext, bars: BarSet): Finding[] {
   const { flexure, momentNmm, bendingSection } = bending
   const providedMm2 = areaOf(bars)
   const { ribMm, heightMm } = section
-  const zone = { widthMm: ribMm, webMm: ribMm, heightMm, depthMm: bendingSection.depthMm }
+  const { depthMm, widthMm, flange } = bendingSection
+  const tension = flange ? 'web' : 'rectangle'
+  const zone = { tension, widthMm: ribMm, webMm: ribMm, flangeMm: widthMm, heightMm, depthMm } as const
   return [
     ...flexureFindings('flexure.midspan', where, flexure, providedMm2),
     deflectionFinding(basis, where, {
@@ -82,19 +84,21 @@ function fireFindings(context: RibContext, bars: BarSet): Finding[] {
   const { basis, section, analysis, fireMinutes } = context
   if (fireMinutes === 0) return []
   const isContinuous = analysis.position !== 'simple'
-  const { axisMm, sideAxisMm } = basis.ribFire(fireMinutes, section.ribMm, isContinuous, analysis.forces.redistributedShare)
-  const axis = axisDistanceMm(section, bars)
+  const fire = basis.ribFire(fireMinutes, section.ribMm, isContinuous, analysis.forces.redistributedShare)
+  const isAxis = fire.measuredTo === 'axis'
+  const provided = isAxis ? axisDistanceMm(section, bars) : section.coverMm
   const found: Finding[] = [
     {
       name: 'fire.cover',
       place: () => 'bottom bars, from below',
-      clause: axisMm.clause,
-      demand: axisMm.value,
-      capacity: axis,
+      clause: fire.bars.clause,
+      demand: fire.bars.value,
+      capacity: provided,
       unit: 'mm',
-      working: () => `${axisMm.working()}; a = cover + link + φ/2 = ${figure(axis)} mm`,
+      working: () => `${fire.bars.working()}; ${isAxis ? 'a = cover + link + φ/2 =' : 'cover'} ${figure(provided)} mm`,
     },
   ]
+  const { sideAxisMm } = fire
   if (!sideAxisMm) return found
   const side = (section.ribMm - barsWidthMm(context, bars).widthMm + thickest(bars)) / 2
   const working = () => `${sideAxisMm.working()}; bars closed up in the rib: asd = ${figure(side)} mm`

@@ -78,6 +78,7 @@ function isAnchored(
   const rib = { widthMm: section.ribMm, depthMm, flange: null }
   const { requiredMm2 } = basis.flexure(rib, hoggingNmm, analysis.forces.redistributedShare)
   const stressShare = Math.min(1, requiredMm2 / areaOf(top))
-  const anchorage = basis.anchorageMm(thickest(top), section.heightMm > 250, stressShare).value
+  const bond = { isTop: true, sectionMm: section.heightMm, isCorner: false }
+  const anchorage = basis.anchorageMm(thickest(top), bond, stressShare).value
   return fromFaceMm + anchorage + depthMm <= TOP_REACH * clearMm
 }

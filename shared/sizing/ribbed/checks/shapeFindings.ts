@@ -28,7 +28,7 @@ export function shapeFindings(basis: CodeBasis, section: RibSection, analysis: R
 
 function fireSizeFindings(basis: CodeBasis, { toppingMm, ribMm }: RibSection, analysis: RibAnalysis, minutes: number): Finding[] {
   if (minutes === 0) return []
-  const flange = basis.slabFire(minutes, 'twoWayLong').size
+  const flange = basis.slabFire(minutes, 'twoWayLong', true).size
   const rib = basis.ribFire(minutes, ribMm, analysis.position !== 'simple', analysis.forces.redistributedShare).size
   return [
     {

@@ -1,17 +1,29 @@
 import type { EndOfSpan } from '../../analysis/spanForces'
 import { type BarSet, areaOf, countOf, setText, thickest } from '../../bars/barSet'
-import type { BendingSection } from '../../codeBasis'
+import type { BendingSection, TensionZone } from '../../codeBasis'
 import { figure } from '../../figure'
 import type { Finding } from '../../finding'
 import { flexureFindings, steelLimitFindings } from '../../flexureFindings'
 import { type RibContext, RIB_AGGREGATE_MM, endName, perRib, zoneFaceMm } from '../ribContext'
-import { effectiveDepthMm } from '../ribSection'
+import { simpleEdgeFlexure } from '../../simpleEdgeFlexure'
+import { effectiveDepthMm, type RibSection } from '../ribSection'
+import { midspanBending } from './bottomFindings'
 
 /** A section whose compression face, at the bottom, is as wide as the spacing (solid over a support) or the rib. */
 const hoggingSection = ({ section }: RibContext, widthMm: number, bars: BarSet): BendingSection => ({
   widthMm,
   depthMm: effectiveDepthMm(section, bars),
   flange: null,
+})
+
+/** The T over a support, its flange pulled; solid across the spacing over the support and in the solid zone. */
+const supportZone = (section: RibSection, bars: BarSet): TensionZone => ({
+  tension: 'flange',
+  widthMm: section.spacingMm,
+  webMm: section.ribMm,
+  flangeMm: section.spacingMm,
+  heightMm: section.heightMm,
+  depthMm: effectiveDepthMm(section, bars),
 })
 
 /**
@@ -37,14 +49,14 @@ export function supportBending(context: RibContext, end: EndOfSpan, bars: BarSet
  */
 export function topFindings(context: RibContext, end: EndOfSpan, bars: BarSet): Finding[] {
   const { basis, section } = context
-  const { spacingMm, ribMm, heightMm } = section
+  const { spacingMm, heightMm } = section
   const at = (place: (name: string) => string) => ({
     place: () => place(endName(context, end)),
     bars: () => `${setText(bars)} a rib`,
   })
   const { over, atRib } = supportBending(context, end, bars)
   const provided = areaOf(bars)
-  const zone = { widthMm: spacingMm, webMm: ribMm, heightMm, depthMm: effectiveDepthMm(section, bars) }
+  const zone = supportZone(section, bars)
   return [
     ...flexureFindings(
       'flexure.support',
@@ -87,15 +99,19 @@ function topFitFinding(context: RibContext, end: EndOfSpan, bars: BarSet): Findi
 }
 
 /**
- * What top bars at an end designed as simple must carry: a share of the midspan moment.
+ * What top bars at an end designed as simple must be: by a share of the midspan moment, or of the midspan steel.
  *
  * Source: by the basis, `simpleEdge`
  */
 export function simpleEdgeFinding(context: RibContext, end: EndOfSpan, bars: BarSet): Finding {
-  const { basis, analysis } = context
-  const { share, clause } = basis.simpleEdge
-  const momentNmm = share * perRib(context, analysis.forces.saggingNmm)
-  const flexure = basis.flexure(hoggingSection(context, context.section.ribMm, bars), momentNmm, 0)
+  const { basis, analysis, section } = context
+  const { clause } = basis.simpleEdge.rib
+  const flexure = simpleEdgeFlexure(basis, 'rib', {
+    hogging: hoggingSection(context, section.ribMm, bars),
+    sagging: midspanBending(context, bars).bendingSection,
+    midspanNmm: perRib(context, analysis.forces.saggingNmm),
+    zone: supportZone(section, bars),
+  })
   return {
     name: 'steel.least',
     place: () => endName(context, end),
@@ -104,7 +120,7 @@ export function simpleEdgeFinding(context: RibContext, end: EndOfSpan, bars: Bar
     capacity: areaOf(bars),
     unit: 'mm²',
     working: () =>
-      `${endName(context, end)}, top, ${setText(bars)} a rib: ${share} of the midspan moment; ${flexure.steelWorking()}; ` +
+      `${endName(context, end)}, top, ${setText(bars)} a rib: ${flexure.steelWorking()}; ` +
       `${figure(areaOf(bars), 0)} mm² provided`,
   }
 }

@@ -4,6 +4,7 @@ import type { Finding } from '../../finding'
 import { CHOSEN_DIAMETERS } from '../../tables/bars'
 import { firstMeeting, inStrips, leastMm2 } from './firstMeeting'
 import { longBottomFindings, midspanFlexure, shortBottomFindings, slabDeflection, slabShearFinding } from '../layerFindings'
+import { greatestSpacingMm, secondarySteel } from '../slabLimits'
 import { layerDepthMm, type SlabContext, topPlaces } from '../slabContext'
 import { layerAreaMm2, layerFor, type StripLayers } from './slabLayer'
 import { bottomParts, stripsMassKg } from './slabMass'
@@ -24,7 +25,7 @@ export function shortLayer(context: SlabContext, diameter: BarDiameter): BarLaye
   const flexure = midspanFlexure(context, 'short', diameter, null)
   const depthMm = layerDepthMm(context, diameter, null)
   const needed = Math.max(flexure.requiredMm2, leastMm2(context, depthMm))
-  const greatest = context.basis.greatestSpacingMm('greatestMoment', context.heightMm).value
+  const greatest = greatestSpacingMm(context, 'greatestMoment', diameter, depthMm)
   return firstMeeting(layerFor(diameter, needed, greatest), (layer) => [
     slabDeflection(context, layer, flexure),
     ...bottomShears(context, 'short', depthMm, layer),
@@ -49,26 +50,26 @@ function longFindings(context: SlabContext, layer: BarLayer, main: BarLayer): Fi
 }
 
 function longCandidate(context: SlabContext, layer: BarLayer, main: BarLayer): Candidate<StripLayers> {
-  const { analysis, given, brief } = context
+  const { analysis, given } = context
   const depthMm = layerDepthMm(context, layer.diameter, main.diameter)
   const option = given ? { middle: layer, edge: null } : inStrips(context, layer, depthMm)
   return {
     option,
     findings: () => longFindings(context, layer, main),
-    massKg: stripsMassKg(context, option, bottomParts(analysis.other, layer, brief.cover), analysis.short.axis.clearMm, false),
+    massKg: stripsMassKg(context, option, bottomParts(context, analysis.other, layer), analysis.short.axis.clearMm, false),
   }
 }
 
 function longLayer(context: SlabContext, diameter: BarDiameter, main: BarLayer): BarLayer {
-  const { basis, analysis, heightMm } = context
-  if (!analysis.long) {
-    const greatest = basis.greatestSpacingMm('secondary', heightMm).value
-    return layerFor(diameter, basis.secondary.share * layerAreaMm2(main), greatest)
-  }
+  const { analysis } = context
   const depthMm = layerDepthMm(context, diameter, main.diameter)
+  if (!analysis.long) {
+    const greatest = greatestSpacingMm(context, 'secondary', diameter, depthMm)
+    return layerFor(diameter, secondarySteel(context, main, depthMm).value, greatest)
+  }
   const { requiredMm2 } = midspanFlexure(context, 'long', diameter, main.diameter)
   const needed = Math.max(requiredMm2, leastMm2(context, depthMm))
-  const widest = layerFor(diameter, needed, basis.greatestSpacingMm('greatestMoment', heightMm).value)
+  const widest = layerFor(diameter, needed, greatestSpacingMm(context, 'greatestMoment', diameter, depthMm))
   return firstMeeting(widest, (layer) => bottomShears(context, 'long', depthMm, layer))
 }
 

@@ -25,14 +25,14 @@ export interface SlabBars {
 type BottomBars = Omit<SlabBars, 'tops' | 'findings'>
 
 function candidateOf(context: SlabContext, layer: BarLayer): Candidate<BottomBars> {
-  const { analysis, given, brief } = context
+  const { analysis, given } = context
   const midspan = midspanFlexure(context, 'short', layer.diameter, null)
   const depthMm = layerDepthMm(context, layer.diameter, null)
   const short = given ? { middle: layer, edge: null } : inStrips(context, layer, depthMm)
   const across = chooseLongBottom(context, layer)
   const bottom = { short, long: across.option }
   const torsion = torsionBars(context, midspan.requiredMm2)
-  const own = stripsMassKg(context, short, bottomParts(analysis.short.axis, layer, brief.cover), analysis.other.clearMm, false)
+  const own = stripsMassKg(context, short, bottomParts(context, analysis.short.axis, layer), analysis.other.clearMm, false)
   return {
     option: { bottom, torsion, midspan },
     massKg: own + across.massKg + torsion.reduce((sum, each) => sum + each.massKg, 0),

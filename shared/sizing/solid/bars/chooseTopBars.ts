@@ -5,6 +5,7 @@ import type { Finding } from '../../finding'
 import { CHOSEN_DIAMETERS } from '../../tables/bars'
 import { firstMeeting, inStrips, leastMm2 } from './firstMeeting'
 import { slabShearFinding, topFlexure, topLayerFindings } from '../layerFindings'
+import { greatestSpacingMm, redistributedAt } from '../slabLimits'
 import { givenTop, isHogging, layerDepthMm, type SlabContext, type TopPlace } from '../slabContext'
 import { layerAreaMm2, layerFor, type StripLayers } from './slabLayer'
 import { stripsMassKg, topParts } from './slabMass'
@@ -44,7 +45,7 @@ function topLayer(context: SlabContext, place: TopPlace, diameter: BarDiameter):
   const { requiredMm2 } = topFlexure(context, place, diameter, outer)
   const hogging = isHogging(place)
   const needed = hogging ? Math.max(requiredMm2, leastMm2(context, depthMm)) : requiredMm2
-  const greatest = context.basis.greatestSpacingMm(hogging ? 'greatestMoment' : 'principal', context.heightMm).value
+  const greatest = greatestSpacingMm(context, hogging ? 'greatestMoment' : 'principal', diameter, depthMm, redistributedAt(place))
   return firstMeeting(layerFor(diameter, needed, greatest), (each) => shearOf(context, place, depthMm, each))
 }
 

@@ -1,6 +1,7 @@
 import type { BarLayer } from '../../../contracts/appraisal'
 import { type Finding, isMet, utilisationOf } from '../../finding'
-import { METRE_MM, type SlabContext } from '../slabContext'
+import type { SlabContext } from '../slabContext'
+import { greatestSpacingMm, slabZone } from '../slabLimits'
 import { closerLayer, layerFor, type StripLayers } from './slabLayer'
 
 /**
@@ -25,7 +26,7 @@ export function firstMeeting(widest: BarLayer, judge: (layer: BarLayer) => reado
  * Source: by the basis, `leastSteelMm2`
  */
 export function leastMm2({ basis, heightMm }: SlabContext, depthMm: number): number {
-  return basis.leastSteelMm2({ widthMm: METRE_MM, webMm: METRE_MM, heightMm, depthMm }).value
+  return basis.leastSteelMm2(slabZone(heightMm, depthMm)).value
 }
 
 /**
@@ -35,7 +36,7 @@ export function leastMm2({ basis, heightMm }: SlabContext, depthMm: number): num
  */
 export function inStrips(context: SlabContext, middle: BarLayer, depthMm: number): StripLayers {
   if (!context.analysis.long) return { middle, edge: null }
-  const greatest = context.basis.greatestSpacingMm('principal', context.heightMm).value
+  const greatest = greatestSpacingMm(context, 'principal', middle.diameter, depthMm)
   const edge = layerFor(middle.diameter, leastMm2(context, depthMm), greatest)
   return { middle, edge: edge.spacing > middle.spacing ? edge : middle }
 }

@@ -37,8 +37,12 @@ export function lineCount(widthMm: number, spacingMm: number): number {
  *
  * Source: see `bottomBarEnd`
  */
-export function bottomParts({ basis, brief }: SlabContext, { clearMm, ends }: SlabAxis, { diameter }: BarLayer): BarPiece {
-  const at = (end: EndOfSpan) => bottomBarEnd(basis, diameter, ends[end], brief.cover)
+export function bottomParts(
+  { basis, brief, heightMm }: SlabContext,
+  { clearMm, ends }: SlabAxis,
+  { diameter }: BarLayer,
+): BarPiece {
+  const at = (end: EndOfSpan) => bottomBarEnd(basis, diameter, ends[end], { coverMm: brief.cover, heightMm })
   const [start, end] = [at('start'), at('end')]
   return { parts: [clearMm, start.pastMm, end.pastMm], legs: [start.legMm, end.legMm] }
 }

@@ -95,7 +95,10 @@ function added(
   const options = CHOSEN_DIAMETERS.map((diameter) => ({ layer: layerFor(diameter, missingMm2, greatestMm(diameter)), diameter }))
   const enough = options.filter(({ layer }) => layerAreaMm2(layer) >= missingMm2)
   const made = (enough.length > 0 ? enough : options.slice(-1)).map(({ layer, diameter }): TorsionBars => {
-    const { pastMm, legMm } = bottomBarEnd(context.basis, diameter, side, context.brief.cover)
+    const { pastMm, legMm } = bottomBarEnd(context.basis, diameter, side, {
+      coverMm: context.brief.cover,
+      heightMm: context.heightMm,
+    })
     const piece: BarPiece = { parts: [widthMm, pastMm], legs: [legMm, 0] }
     return { ...where, layer, piece, widthMm, massKg: layerMassKg(context, layer, piece, widthMm, where.face === 'top') }
   })

@@ -2,16 +2,7 @@ import * as fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { en1992Basis } from '#shared/sizing/en1992/en1992Basis'
 
-const brief = {
-  imposedLoad: 0,
-  finishesLoad: 0,
-  servicesLoad: 0,
-  partitionsLoad: 0,
-  cover: 25,
-  fireMinutes: 0,
-  stockLength: 12_000,
-} as const
-const basis = en1992Basis({ basis: 'EN1992', ...brief, fck: 30, fyk: 500 })
+const basis = en1992Basis({ fck: 30, fyk: 500, nationalValues: {} })
 const [concrete, steel] = [0.567 * 30, 0.87 * 500]
 
 describe('flexure of a T-section', () => {

@@ -113,20 +113,20 @@ describe('Table 3.15', () => {
 describe('fire tables', () => {
   it('give slabs their thickness and axis distance', () => {
     expect(slabFire(60, 'oneWay').size.value).toBe(80)
-    expect(slabFire(120, 'oneWay').axisMm.value).toBe(40)
-    expect(slabFire(90, 'twoWay').axisMm.value).toBe(15)
-    expect(slabFire(240, 'twoWayLong').axisMm.value).toBe(50)
+    expect(slabFire(120, 'oneWay').bars.value).toBe(40)
+    expect(slabFire(90, 'twoWay').bars.value).toBe(15)
+    expect(slabFire(240, 'twoWayLong').bars.value).toBe(50)
   })
 
   it('give ribs a width, and an axis distance between the columns', () => {
     expect(ribFire(60, 120, false, 0).size.value).toBe(120)
-    expect(ribFire(60, 140, false, 0).axisMm.value).toBeCloseTo(37.5, 10)
-    expect(ribFire(60, 160, true, 0).axisMm.value).toBeCloseTo(18.5, 10)
+    expect(ribFire(60, 140, false, 0).bars.value).toBeCloseTo(37.5, 10)
+    expect(ribFire(60, 160, true, 0).bars.value).toBeCloseTo(18.5, 10)
   })
 
   it('leave Table 5.6 once moments were redistributed by 20 %', () => {
-    expect(ribFire(60, 120, true, 0).axisMm.value).toBe(25)
-    expect(ribFire(60, 120, true, 0.2).axisMm.value).toBe(40)
+    expect(ribFire(60, 120, true, 0).bars.value).toBe(25)
+    expect(ribFire(60, 120, true, 0.2).bars.value).toBe(40)
   })
 
   it('ask 10 mm more to the side up to the second width only', () => {
