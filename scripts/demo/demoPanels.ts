@@ -26,5 +26,5 @@ export function panelOf(
   edges: Edge[],
   { ribDirection = 90, voids = [] }: { ribDirection?: number; voids?: Ring[] } = {},
 ): Panel {
-  return { mark, repeat: 1, outline, edges, ribDirection, voids }
+  return { mark, repeat: 1, outline, edges, ribDirection, voids, corners: 'held' }
 }

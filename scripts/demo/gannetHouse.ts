@@ -1,6 +1,8 @@
 import { edgesOf, panelOf, rectangle } from './demoPanels'
+import { DEMO_FACTORS } from './demoFactors'
 import type { DemoProject } from './demoProject'
 import { ribbedScheme, solidScheme } from './demoSchemes'
+import { inRatesOf, pricedIn } from './demoScope'
 
 const BEAM = 300
 
@@ -23,8 +25,17 @@ export const GANNET_HOUSE: DemoProject = {
       stockLength: 12_000,
       fck: 35,
       fyk: 500,
+      nationalValues: {},
     },
     markups: { preliminariesPercent: '15', contingencyPercent: '7.5', taxPercent: '8' },
+    measurement: 'comparing',
+    scope: [
+      ...inRatesOf(['R1', 'R2', 'S1'], ['ceiling', 'deck', 'hoisting', 'tiesChairsLinks', 'leastGang']),
+      pricedIn('R1', 'groutLost', '0.06', 'blocks'),
+      pricedIn('R2', 'groutLost', '0.06', 'blocks'),
+      ...inRatesOf(['S1'], ['groutLost']),
+    ],
+    factors: DEMO_FACTORS,
   },
   levels: [
     {

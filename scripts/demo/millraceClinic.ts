@@ -1,6 +1,8 @@
 import { edgesOf, panelOf, rectangle } from './demoPanels'
+import { DEMO_FACTORS } from './demoFactors'
 import type { DemoProject } from './demoProject'
 import { ribbedScheme, solidScheme } from './demoSchemes'
+import { inRatesOf, leftOutOf, pricedIn } from './demoScope'
 
 const BEAM = 300
 
@@ -23,8 +25,20 @@ export const MILLRACE_CLINIC: DemoProject = {
       stockLength: 12_000,
       fck: 30,
       fyk: 500,
+      nationalValues: {},
     },
     markups: { preliminariesPercent: '13', contingencyPercent: '5', taxPercent: '6' },
+    measurement: 'comparing',
+    scope: [
+      ...inRatesOf(['R1', 'R2', 'S1'], ['deck', 'propping', 'hoisting', 'tiesChairsLinks', 'trimmingBars']),
+      pricedIn('R1', 'ceiling', '8.60', 'grossArea'),
+      pricedIn('R2', 'ceiling', '8.60', 'grossArea'),
+      leftOutOf('S1', 'ceiling', 'Soffit is painted as struck; painting is with the finishes'),
+      pricedIn('R1', 'ribbedConcrete', '9.80', 'concrete'),
+      pricedIn('R2', 'ribbedConcrete', '9.80', 'concrete'),
+      ...inRatesOf(['S1'], ['ribbedConcrete']),
+    ],
+    factors: DEMO_FACTORS,
   },
   levels: [
     {

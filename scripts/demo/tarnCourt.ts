@@ -1,6 +1,8 @@
 import { edgesOf, panelOf, rectangle } from './demoPanels'
+import { DEMO_FACTORS } from './demoFactors'
 import type { DemoProject } from './demoProject'
 import { ribbedScheme, solidScheme } from './demoSchemes'
+import { inRatesOf, leftOutOf, pricedIn } from './demoScope'
 
 const BEAM = 250
 
@@ -23,8 +25,22 @@ export const TARN_COURT: DemoProject = {
       stockLength: 12_000,
       fck: 30,
       fyk: 500,
+      nationalValues: {},
     },
     markups: { preliminariesPercent: '12', contingencyPercent: '5', taxPercent: '8' },
+    measurement: 'comparing',
+    scope: [
+      ...inRatesOf(['R1', 'S1'], ['deck', 'propping', 'hoisting', 'tiesChairsLinks', 'groutLost', 'ribbedConcrete']),
+      pricedIn('R1', 'ceiling', '7.20', 'grossArea'),
+      pricedIn('S1', 'ceiling', '4.10', 'grossArea'),
+      pricedIn('R1', 'floorFinish', '6.50', 'grossArea'),
+      pricedIn('S1', 'floorFinish', '6.50', 'grossArea'),
+      pricedIn('R1', 'storeyHeight', '5200', 'sum'),
+      leftOutOf('S1', 'storeyHeight', 'The thinner floor sets the storey height'),
+      leftOutOf('R1', 'loadDirection', 'Beams are the same in both; the frame is not measured here'),
+      leftOutOf('S1', 'loadDirection', 'Beams are the same in both; the frame is not measured here'),
+    ],
+    factors: DEMO_FACTORS,
   },
   levels: [
     {

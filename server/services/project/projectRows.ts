@@ -1,4 +1,6 @@
-import { brief as briefContract, scheme as schemeContract } from '#shared/contracts/appraisal'
+import { brief as briefContract, panel as panelContract, scheme as schemeContract } from '#shared/contracts/appraisal'
+import { factors as factorsContract } from '#shared/contracts/factors'
+import { scope as scopeContract } from '#shared/contracts/sameScope'
 import type { Project, StoredLevel, StoredScheme } from '#shared/contracts/project'
 import type { EntityManager } from 'typeorm'
 import { PersonEntity } from '../../entities/firm/PersonEntity'
@@ -14,16 +16,23 @@ export async function requireProject(db: EntityManager, firmId: string, id: stri
   return row
 }
 
-/** A project's row as the contract has it; fields of the brief younger than the row take their defaults. */
+/** A project's row as the contract has it; fields younger than the row take their defaults. */
 export async function toProject(db: EntityManager, row: ProjectEntity): Promise<Project> {
-  const { id, name, reference, place, use, brief, editionId, markups, version } = row
+  const { id, name, reference, place, use, editionId, markups, measurement, version } = row
   const person = await db.findOneByOrFail(PersonEntity, { firmId: row.firmId, id: row.updatedBy })
-  const given = { brief: briefContract.parse(brief), updatedAt: row.updatedAt.toISOString(), updatedBy: person.name }
-  return { id, name, reference, place, use, editionId, markups, version, ...given }
+  const given = {
+    brief: briefContract.parse(row.brief),
+    scope: scopeContract.parse(row.scope ?? []),
+    factors: factorsContract.parse(row.factors ?? {}),
+    updatedAt: row.updatedAt.toISOString(),
+    updatedBy: person.name,
+  }
+  return { id, name, reference, place, use, editionId, markups, measurement, version, ...given }
 }
 
+/** A level's row as the contract has it; fields of its panels younger than the row take their defaults. */
 export function toStoredLevel({ id, position, mark, name, repeat, panels, version }: LevelEntity): StoredLevel {
-  return { id, position, mark, name, repeat, panels, version }
+  return { id, position, mark, name, repeat, panels: panels.map((panel) => panelContract.parse(panel)), version }
 }
 
 /** A scheme's row as the contract has it; fields younger than the row take their defaults. */

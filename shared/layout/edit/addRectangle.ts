@@ -33,7 +33,7 @@ export interface RectangleInput {
 export function addRectangle(panels: readonly Panel[], input: RectangleInput): Panel[] {
   const { mark, repeat, ribDirection } = input
   const outline = rectangleRing(freePlace(panels, input.alongX, input.alongY), input.alongX, input.alongY)
-  const added: Panel = { mark, repeat, outline, edges: [usualEdge(panels)], ribDirection, voids: [] }
+  const added: Panel = { mark, repeat, outline, edges: [usualEdge(panels)], ribDirection, voids: [], corners: 'held' }
   return settleContinuity(panels, [...panels, added])
 }
 

@@ -28,7 +28,7 @@ export function setOutline(panels: readonly Panel[], index: number, outline: Rin
 
 /** Adds a panel of any outline, with the level's usual supports. Refused, in words, where it makes no floor. */
 export function addPolygon(panels: readonly Panel[], mark: string, outline: Ring, ribDirection: number): EditOutcome {
-  const added: Panel = { mark, repeat: 1, outline, edges: [usualEdge(panels)], ribDirection, voids: [] }
+  const added: Panel = { mark, repeat: 1, outline, edges: [usualEdge(panels)], ribDirection, voids: [], corners: 'held' }
   const fault = floorFault([...panels, added])
   return fault === null ? { panels: settleContinuity(panels, [...panels, added]) } : { refused: fault }
 }

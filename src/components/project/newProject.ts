@@ -1,3 +1,4 @@
+import { factors } from '#shared/contracts/factors'
 import type { ProjectInput, UseCategory } from '#shared/contracts/project'
 import { useOf } from '../brief/useCategories'
 
@@ -32,7 +33,11 @@ export function newProjectInput({ name, reference, place, use, editionId }: NewP
       stockLength: 12_000,
       fck: 25,
       fyk: 500,
+      nationalValues: {},
     },
     markups: { preliminariesPercent: '0', contingencyPercent: '0', taxPercent: '0' },
+    measurement: 'comparing',
+    scope: [],
+    factors: factors.parse({}),
   }
 }

@@ -90,6 +90,7 @@ export function frozenExample(change: Partial<FrozenComparison> = {}): FrozenCom
       stockLength: 12_000,
       fck: 25,
       fyk: 500,
+      nationalValues: {},
     },
     edition: { region: 'Eastmere', number: 4, currency: 'USD', baseDate: '2026-03-01', taxBasis: 'before tax' },
     floor: { areaM2: 991.44, floorCount: 4, panelCount: 28 },
