@@ -3,6 +3,7 @@ import { AppraisalRefusedError } from '#shared/appraisalRefused'
 import { appraiseInFull } from '#shared/appraise'
 import { type AppraisalFileInput, appraisalFile } from '#shared/contracts/appraisal'
 import { parseAppraisalFile } from '#shared/parseAppraisalFile'
+import type { SizedPanel } from '#shared/sizing/sizedPanel'
 import { brief, ribbed, row, solid } from './support/floors'
 
 type SchemeInput = AppraisalFileInput['schemes'][number]
@@ -30,6 +31,9 @@ function issuesOf(scheme: SchemeInput) {
   return []
 }
 
+/** What a panel is designed for and with; bars over a shared support belong to both sides. */
+const designOf = ({ checks, moments, steel, depth, flags }: SizedPanel) => ({ checks, moments, steel, depth, flags })
+
 const layers = { bottomX: { diameter: 12, spacing: 125 }, bottomY: { diameter: 10, spacing: 200 } } as const
 const fixedSolid: SolidInput = { ...solid, thickness: 180 }
 const fixedRibs: RibbedInput = { ...ribbed, solidZone: 300 }
@@ -39,8 +43,7 @@ describe('bars given panel by panel', () => {
     const before = sizedWith(fixedSolid)
     const after = sizedWith({ ...fixedSolid, givenPanels: [{ level: 'L1', panel: 'P2', bars: layers }] })
     expect(after.panels[1]!.steel.midspanProvided).toBeCloseTo((Math.PI * 36 * 1000) / 125, 6)
-    expect(after.panels[0]).toEqual(before.panels[0])
-    expect(after.panels[2]).toEqual(before.panels[2])
+    for (const i of [0, 2]) expect(designOf(after.panels[i]!)).toEqual(designOf(before.panels[i]!))
   })
 
   it('take the place of computed bars in that ribbed panel, and change no other', () => {
@@ -50,8 +53,7 @@ describe('bars given panel by panel', () => {
     const { steel } = after.panels[1]!
     expect(steel.midspanProvided).toBeCloseTo(2 * Math.PI * 100, 6)
     expect(steel.supportProvided).toBeCloseTo(Math.PI * 64, 6)
-    expect(after.panels[0]).toEqual(before.panels[0])
-    expect(after.panels[2]).toEqual(before.panels[2])
+    for (const i of [0, 2]) expect(designOf(after.panels[i]!)).toEqual(designOf(before.panels[i]!))
   })
 
   it('leave the top bars to the engine where only the bottom ones are given', () => {
