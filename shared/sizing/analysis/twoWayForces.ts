@@ -21,7 +21,8 @@ export interface TwoWayDirection {
 
 /** Forces of a two-way panel in both directions. */
 export interface TwoWayForces {
-  readonly panelCase: TwoWayCase
+  /** Null where the corners may lift. */
+  readonly panelCase: TwoWayCase | null
   readonly aspect: number
   readonly short: TwoWayDirection
   readonly long: TwoWayDirection

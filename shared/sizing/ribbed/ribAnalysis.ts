@@ -20,6 +20,12 @@ export interface RibAnalysis {
   readonly strip: Strip
 }
 
+/** Overall depth of the ribs, and to the near side of their bars, mm. */
+export interface RibDepths {
+  readonly heightMm: number
+  readonly depthMm: number
+}
+
 /**
  * Effective span and forces of every ribbed panel of a level: one way along the ribs, continuous with neighbours whose ribs run
  * the same way.
@@ -29,10 +35,10 @@ export interface RibAnalysis {
 export function analyseRibs(
   { neighbours }: LevelSite,
   panels: readonly RibbedPanel[],
-  depthMm: number,
+  depths: RibDepths,
   basis: CodeBasis,
 ): RibAnalysis[] {
-  const lines = spanLines(panels, depthMm, basis)
+  const lines = spanLines(panels, depths, basis)
   const bays = bayAreas(lines, neighbours)
   const withBays = lines.map((line, i) => line && { ...line, span: { ...line.span, bayMm2: bays[i]! } })
   const raw = panels.map((_, i) => {
@@ -51,16 +57,16 @@ export function analyseRibs(
       spanMm,
       position: positionIn(strip),
       forces: raisedTo(forces, spanMm, { start: behind('start'), end: behind('end') }),
-      faceMm: faceDistances(panels[i]!, spanMm, depthMm, basis),
+      faceMm: faceDistances(panels[i]!, spanMm, depths, basis),
       assumedEnds: strip.assumedEnds,
       strip,
     }
   })
 }
 
-function spanLines(panels: readonly RibbedPanel[], depthMm: number, basis: CodeBasis): SpanLines {
+function spanLines(panels: readonly RibbedPanel[], { heightMm, depthMm }: RibDepths, basis: CodeBasis): SpanLines {
   return panels.map(({ direction, ends, clearMm, loads, grossMm2 }) => {
-    const span = basis.effectiveSpanMm(clearMm, depthMm, depthMm, [ends.start, ends.end])
+    const span = basis.effectiveSpanMm(clearMm, heightMm, depthMm, [ends.start, ends.end])
     return { direction, ends, span: { spanMm: span, loads, bayMm2: grossMm2 } }
   })
 }
@@ -69,12 +75,12 @@ function spanLines(panels: readonly RibbedPanel[], depthMm: number, basis: CodeB
 function faceDistances(
   { clearMm, ends }: RibbedPanel,
   spanMm: number,
-  depthMm: number,
+  { heightMm, depthMm }: RibDepths,
   basis: CodeBasis,
 ): Record<EndOfSpan, number> {
   const none = { supportMm: 0, isContinuous: false }
-  const start = basis.effectiveSpanMm(clearMm, depthMm, depthMm, [ends.start, none]) - clearMm
-  const end = basis.effectiveSpanMm(clearMm, depthMm, depthMm, [none, ends.end]) - clearMm
+  const start = basis.effectiveSpanMm(clearMm, heightMm, depthMm, [ends.start, none]) - clearMm
+  const end = basis.effectiveSpanMm(clearMm, heightMm, depthMm, [none, ends.end]) - clearMm
   const share = start + end === 0 ? 0 : (spanMm - clearMm) / (start + end)
   return { start: start * share, end: end * share }
 }

@@ -57,7 +57,9 @@ export function ribbedJob(level: LevelSite, scheme: RibbedScheme, brief: Brief, 
 export function laidLevel(job: RibbedJob, zones: readonly number[]): LaidLevel {
   const { level, shapes, basis, rules } = job
   const panels = shapes.map((shape, i) => shaped(job, shape, zones[i]!))
-  return { zones, panels, analyses: analyseRibs(level, panels, rules.heightMm, basis) }
+  const { heightMm, coverMm } = rules
+  const depths = { heightMm, depthMm: heightMm - coverMm - job.scheme.link }
+  return { zones, panels, analyses: analyseRibs(level, panels, depths, basis) }
 }
 
 function shaped({ scheme, brief, basis, groundFor, shapeFor }: RibbedJob, shape: RibbedShape, zoneMm: number): RibbedPanel {

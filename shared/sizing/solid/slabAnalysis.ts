@@ -5,6 +5,7 @@ import { type EdgeMoments, momentFromBehind } from '../analysis/sharedSupports'
 import type { EndOfSpan } from '../analysis/spanForces'
 import type { Strip } from '../analysis/strip'
 import { positionIn, stripForces } from '../analysis/stripForces'
+import { liftedTwoWayForces } from '../analysis/liftedTwoWayForces'
 import { twoWayForces } from '../analysis/twoWayForces'
 import type { CodeBasis, SpanPosition } from '../codeBasis'
 import type { LevelSite } from '../panelSite'
@@ -35,6 +36,7 @@ export interface SlabAnalysis {
   readonly other: SlabAxis
   readonly aspect: number
   readonly method: 'coefficients' | 'elastic' | 'twoWay'
+  /** Null one way, and of a two-way panel whose corners may lift. */
   readonly panelCase: TwoWayCase | null
   readonly assumedEnds: number
   readonly loads: FloorLoads
@@ -91,7 +93,7 @@ function spanning(plan: SlabPlan, { heightMm, depthMm, loads }: SlabThickness, b
  * Effective spans and forces of every solid panel of a level, each at its thickness: two-way by coefficients, one-way along its strip, all
  * spans equally stiff. Of unequal moments at a shared support both sides take the larger.
  *
- * Source: engine design sections 3 and 4; BS 8110-1:1997, Tables 3.12, 3.14, 3.15; elastic analysis elsewhere
+ * Source: engine design sections 3 and 4; BS 8110-1:1997, Tables 3.12 to 3.15; elastic analysis elsewhere
  * @param thicknesses - one for each panel
  * @throws OutOfScopeError `levels.I.panels.J.edges` where free edges leave no two opposite supports
  */
@@ -152,15 +154,13 @@ function oneWay(
 
 const POSITIONS: readonly SpanPosition[] = ['simple', 'end', 'interior']
 
-function twoWay({ first, second, firstMm, secondMm, loads }: Spanning, load: number): SlabAnalysis {
+function twoWay({ plan, first, second, firstMm, secondMm, loads }: Spanning, load: number): SlabAnalysis {
   const continuity = ({ ends }: SlabAxis) => [ends.start.isContinuous, ends.end.isContinuous] as const
-  const forces = twoWayForces({
-    load,
-    shortMm: firstMm,
-    longMm: secondMm,
-    shortEnds: continuity(first),
-    longEnds: continuity(second),
-  })
+  const panel = { load, shortMm: firstMm, longMm: secondMm }
+  const mayLift = plan.site.panel.corners === 'mayLift' && continuousEnds(first) + continuousEnds(second) === 0
+  const forces = mayLift
+    ? liftedTwoWayForces(panel)
+    : twoWayForces({ ...panel, shortEnds: continuity(first), longEnds: continuity(second) })
   const direction = (axis: SlabAxis, spanMm: number, { saggingNmm, hoggingNmm, shearN }: typeof forces.short): SlabSpan => ({
     axis,
     spanMm,

@@ -63,6 +63,15 @@ export function isHogging({ side, span }: TopPlace): boolean {
 }
 
 /**
+ * Whether a panel carries two ways with its corners held down, and so in strips and with torsion at its corners.
+ *
+ * Source: BS 8110-1:1997, 3.5.3.4, 3.5.3.5 (corners held) against 3.5.3.3 (corners may lift)
+ */
+export function hasHeldCorners({ analysis }: Pick<SlabContext, 'analysis'>): boolean {
+  return analysis.long !== null && analysis.panelCase !== null
+}
+
+/**
  * How a place is named in workings.
  *
  * Source: project rule

@@ -23,6 +23,7 @@ export function slabFlags(context: SlabContext, findings: readonly Finding[]): s
     ...(plan.site.panel.voids.length > 0
       ? ['sized as without its voids; bars stop at them, trimming bars round them are not included']
       : []),
+    ...cornerFlag(context),
     ...fireFlags(findings),
     ...slenderFlags(findings, context.basis),
   ]
@@ -30,10 +31,21 @@ export function slabFlags(context: SlabContext, findings: readonly Finding[]): s
 
 function methodFlag({ analysis }: SlabContext): string {
   const { method, short, panelCase } = analysis
+  if (method === 'twoWay' && panelCase === null)
+    return 'two way, corners may lift: coefficients of BS 8110-1 Table 3.13, no torsion steel; shear of half the short span at every edge'
   if (method === 'twoWay')
     return `two way, coefficients of BS 8110-1 Tables 3.14 and 3.15, case ${panelCase}; of unequal support moments the larger counts on both sides`
   if (short.position === 'simple') return 'one way, simple span'
   return method === 'coefficients'
     ? 'one way, coefficients of BS 8110-1 Table 3.12 (3.5.2.3 holds; 20 % redistribution included)'
     : 'one way, elastic continuous beam with pattern loading (conditions of BS 8110-1 3.5.2.3 do not hold)'
+}
+
+function cornerFlag({ plan, analysis }: SlabContext): string[] {
+  if (plan.site.panel.corners === 'held' || (analysis.long && analysis.panelCase === null)) return []
+  return [
+    analysis.long
+      ? 'corners are taken as held: Table 3.13 for corners that may lift needs four discontinuous edges'
+      : 'one way: whether corners may lift makes no difference',
+  ]
 }

@@ -1,6 +1,6 @@
 import type { BarLayer } from '../../../contracts/appraisal'
 import { type Finding, isMet, utilisationOf } from '../../finding'
-import type { SlabContext } from '../slabContext'
+import { hasHeldCorners, type SlabContext } from '../slabContext'
 import { greatestSpacingMm, slabZone } from '../slabLimits'
 import { closerLayer, layerFor, type StripLayers } from './slabLayer'
 
@@ -30,12 +30,12 @@ export function leastMm2({ basis, heightMm }: SlabContext, depthMm: number): num
 }
 
 /**
- * A layer in the middle strip with least steel in the edge strips of two-way panels; across the whole width of others.
+ * A layer in the middle strip with least steel in the edge strips of two-way panels with corners held down; across the whole width of others.
  *
  * Source: BS 8110-1:1997, 3.5.3.5, rules 1 to 3 (from memory, engine design section 4)
  */
 export function inStrips(context: SlabContext, middle: BarLayer, depthMm: number): StripLayers {
-  if (!context.analysis.long) return { middle, edge: null }
+  if (!hasHeldCorners(context)) return { middle, edge: null }
   const greatest = greatestSpacingMm(context, 'principal', middle.diameter, depthMm)
   const edge = layerFor(middle.diameter, leastMm2(context, depthMm), greatest)
   return { middle, edge: edge.spacing > middle.spacing ? edge : middle }

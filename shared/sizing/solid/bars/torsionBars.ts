@@ -5,7 +5,7 @@ import type { BarPiece } from '../../bars/barLines'
 import { CHOSEN_DIAMETERS } from '../../tables/bars'
 import { topFlexure } from '../layerFindings'
 import { greatestSpacingMm } from '../slabLimits'
-import { givenTop, isHogging, layerDepthMm, type SlabContext, type TopPlace, topPlaces } from '../slabContext'
+import { givenTop, hasHeldCorners, isHogging, layerDepthMm, type SlabContext, type TopPlace, topPlaces } from '../slabContext'
 import { leastMm2 } from './firstMeeting'
 import { layerAreaMm2, layerFor } from './slabLayer'
 import { layerMassKg } from './slabMass'
@@ -41,8 +41,7 @@ const [THINNEST, THICKEST] = [CHOSEN_DIAMETERS[0], CHOSEN_DIAMETERS[CHOSEN_DIAME
  * @param midspanMm2 - required at midspan of the short direction, per metre
  */
 export function torsionBars(context: SlabContext, midspanMm2: number): TorsionBars[] {
-  const { analysis } = context
-  if (!analysis.long) return []
+  if (!hasHeldCorners(context)) return []
   const places = topPlaces(context)
   const placeAt = (direction: Direction, end: EndOfSpan) =>
     places.find((each) => each.direction === direction && each.end === end)
