@@ -1,5 +1,6 @@
 /** The appraisal file: the engine's one public input and output. Lengths mm, loads kN/m², strengths MPa, masses kg, moments kNm. */
 import { z } from 'zod'
+import { britishExposure, europeanExposure } from './exposure'
 import { britishValues, europeanValues } from './nationalValues'
 
 export const mark = z
@@ -61,6 +62,7 @@ export const brief = z.discriminatedUnion('basis', [
     fck: z.number().min(12).max(50),
     fyk: z.number().min(250).max(600),
     nationalValues: europeanValues.default({}),
+    exposure: europeanExposure.optional(), // no check of cover for durability without it
   }),
   z.strictObject({
     basis: z.literal('BS8110'),
@@ -68,6 +70,7 @@ export const brief = z.discriminatedUnion('basis', [
     fcu: z.number().min(20).max(60),
     fy: z.number().min(250).max(500),
     nationalValues: britishValues.default({}),
+    exposure: britishExposure.optional(),
   }),
 ])
 export const edge = z.strictObject({
@@ -168,6 +171,7 @@ export const check = z.strictObject({
     'topping',
     'fire.size',
     'fire.cover',
+    'cover.exposure', // only where the brief names an exposure
   ]),
   clause: z.string(),
   demand: z.number(),

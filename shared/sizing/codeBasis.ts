@@ -127,6 +127,13 @@ export interface FireDemand {
   readonly sideAxisMm: Answer | null
 }
 
+/** What cover for durability and bond depends on, mm: cover to the outermost bar, the link there, 0 for none, and the thickest bar. */
+export interface ExposedBars {
+  readonly coverMm: number
+  readonly linkMm: number
+  readonly diameterMm: number
+}
+
 /** A ribbed floor's shape, mm. */
 export interface RibShape {
   readonly clearMm: number
@@ -156,6 +163,8 @@ export interface CodeBasis {
   /** Span over depth beyond which the code tabulates nothing, its greatest factor for steel included. */
   readonly greatestTabulatedSpanDepth: number
   readonly simpleEdge: Readonly<Record<Member, SimpleEdge>>
+  /** Clause of `effectiveSpanMm`. */
+  readonly effectiveSpanClause: string
   effectiveSpanMm(clearMm: number, heightMm: number, depthMm: number, ends: readonly [SpanEnd, SpanEnd]): number
   flangeWidthMm(position: SpanPosition, spanMm: number, webMm: number, clearMm: number): Answer
   /** `redistributedShare` of the moment was taken off at this section, 0 to 0.3. */
@@ -179,6 +188,8 @@ export interface CodeBasis {
   leastToppingMm(shape: RibShape): Answer
   /** Greatest clear length of ribs between cross ribs or solid zones, mm; null where the code has no rule. */
   crossRibSpacingMm(heightMm: number): Answer | null
+  /** Cover by the exposure of the brief; nothing where it names none. */
+  exposureCover(bars: ExposedBars): readonly Comparison[]
   slabFire(minutes: number, action: SlabAction, isContinuous: boolean): FireDemand
   ribFire(minutes: number, ribMm: number, isContinuous: boolean, redistributedShare: number): FireDemand
 }

@@ -37,6 +37,7 @@ const OTHER_WORD: Readonly<Record<string, unknown>> = {
   ribbed: 'solid',
   solid: 'ribbed',
   USD: 'JPY',
+  XC1: 'XC4',
 }
 /** Other values of single fields, where the next number or word would not do, or is too near to change how many blocks fit. */
 const OTHER_VALUE: Readonly<Record<string, unknown>> = {

@@ -14,4 +14,5 @@ export const CHECK_NAMES = {
   topping: 'Topping',
   'fire.size': 'Fire, sizes',
   'fire.cover': 'Fire, cover',
+  'cover.exposure': 'Cover for exposure',
 } as const satisfies Record<Check['name'], string>

@@ -3,6 +3,7 @@ import type { CodeBasis } from '../codeBasis'
 import { anchorageMm, bottomEnd, lapMm } from './anchorage'
 import { greatestSpacingMm } from './barSpacing'
 import { effectiveSpanMm } from './effectiveSpan'
+import { exposureCover } from './exposure'
 import { ribFire, slabFire } from './fire'
 import { ribFlangeWidth } from './flangeWidth'
 import { flexure } from './flexure'
@@ -12,7 +13,7 @@ import { GREATEST_TABULATED, spanDepthLimit } from './spanDepthLimit'
 import { leastGapMm, leastSteelMm2, mostSteelMm2, toppingMeshMm2 } from './steelLimits'
 import { STEEL_FACTOR, STEEL_SHARE, type Strengths } from './strengths'
 
-type BritishBrief = Pick<Extract<Brief, { basis: 'BS8110' }>, 'fcu' | 'fy' | 'cover' | 'nationalValues'>
+type BritishBrief = Pick<Extract<Brief, { basis: 'BS8110' }>, 'fcu' | 'fy' | 'cover' | 'nationalValues' | 'exposure'>
 
 /**
  * Ultimate factors; a span that a pattern leaves unloaded keeps its characteristic permanent load.
@@ -38,7 +39,7 @@ const SIMPLE_EDGE = {
  *
  * Source: BS 8110-1:1997, by the clauses named in this folder; 3.2.2.1 for redistribution (30 %, from memory)
  */
-export function bs8110Basis({ fcu, fy, cover, nationalValues }: BritishBrief): CodeBasis {
+export function bs8110Basis({ fcu, fy, cover, nationalValues, exposure }: BritishBrief): CodeBasis {
   const steelShare = STEEL_SHARE[nationalValues.gammaSteel ?? STEEL_FACTOR]
   const strengths: Strengths = { fcuMpa: fcu, fyMpa: fy, steelShare, coverMm: cover }
   return {
@@ -47,6 +48,7 @@ export function bs8110Basis({ fcu, fy, cover, nationalValues }: BritishBrief): C
     greatestRedistribution: { share: 0.3, clause: 'BS 8110-1 3.2.2.1' },
     greatestTabulatedSpanDepth: GREATEST_TABULATED,
     simpleEdge: SIMPLE_EDGE,
+    effectiveSpanClause: 'BS 8110-1 3.4.1.2, 3.4.1.3',
     effectiveSpanMm: (clear, _height, depth, ends) => effectiveSpanMm(clear, depth, ends),
     flangeWidthMm: ribFlangeWidth,
     flexure: (section, moment, redistributedShare) => flexure(section, moment, redistributedShare, strengths),
@@ -64,6 +66,7 @@ export function bs8110Basis({ fcu, fy, cover, nationalValues }: BritishBrief): C
     ribProportions,
     leastToppingMm,
     crossRibSpacingMm: () => null,
+    exposureCover: (bars) => (exposure ? exposureCover(exposure, bars, fcu) : []),
     slabFire: (minutes, _action, isContinuous) => slabFire(minutes, isContinuous),
     ribFire: (minutes, _ribMm, isContinuous) => ribFire(minutes, isContinuous),
   }

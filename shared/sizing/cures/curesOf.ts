@@ -66,7 +66,7 @@ function attempt(
 }
 
 /** Names of checks in which a minimum is asked: what is there must be more. */
-const MINIMA: readonly Check['name'][] = ['steel.least', 'topping', 'fire.size', 'fire.cover']
+const MINIMA: readonly Check['name'][] = ['steel.least', 'topping', 'fire.size', 'fire.cover', 'cover.exposure']
 
 function resultOf({ name, demand, capacity, unit }: Check): string {
   const decimals = capacity >= 100 ? 0 : capacity >= 10 ? 1 : 3

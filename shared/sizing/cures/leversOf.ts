@@ -46,6 +46,8 @@ function ribbedLevers(input: CureInput, scheme: RibbedScheme, target: CheckTarge
       return [topping()]
     case 'fire.size':
       return [place === 'rib' ? rib() : topping()]
+    case 'cover.exposure':
+      return [otherCover(input, true), concrete()]
     case 'fire.cover':
       return place.endsWith('side') ? [rib()] : [otherCover(input, true), rib()]
   }
@@ -66,6 +68,8 @@ function solidLevers(input: CureInput, scheme: SolidScheme, target: CheckTarget,
       return [...layers(), thicker()]
     case 'steel.least':
       return layers()
+    case 'cover.exposure':
+      return [otherCover(input, true), concrete()]
     case 'fire.cover':
       return [otherCover(input, true)]
     default:

@@ -2,6 +2,7 @@ import type { Brief } from '../../contracts/appraisal'
 import type { CodeBasis } from '../codeBasis'
 import { anchorageMm, bottomEnd, lapMm } from './anchorage'
 import { effectiveSpanMm } from './effectiveSpan'
+import { exposureCover } from './exposure'
 import { ribFire, slabFire } from './fire'
 import { ribFlangeWidth } from './flangeWidth'
 import { flexure } from './flexure'
@@ -12,7 +13,7 @@ import { GREATEST_TABULATED, spanDepthLimit } from './spanDepthLimit'
 import { greatestSpacingMm, leastGapMm, leastSteelMm2, mostSteelMm2, secondarySteelMm2, toppingMeshMm2 } from './steelLimits'
 import type { Strengths } from './strengths'
 
-type EuropeanBrief = Pick<Extract<Brief, { basis: 'EN1992' }>, 'fck' | 'fyk' | 'nationalValues'>
+type EuropeanBrief = Pick<Extract<Brief, { basis: 'EN1992' }>, 'fck' | 'fyk' | 'nationalValues' | 'exposure'>
 
 /** Source: EN 1992-1-1:2004, 9.3.1.2(2) (from memory) */
 const SIMPLE_EDGE = { share: 0.25, of: 'moment', isAtLeastLeast: false, reach: 0.2, clause: 'EN 1992-1-1 9.3.1.2(2)' } as const
@@ -22,7 +23,7 @@ const SIMPLE_EDGE = { share: 0.25, of: 'moment', isAtLeastLeast: false, reach: 0
  *
  * Source: EN 1990:2002, EN 1992-1-1:2004, EN 1992-1-2:2004, by the clauses named in this folder; EN 9.3.1.2(2) for simple edges
  */
-export function en1992Basis({ fck, fyk, nationalValues: chosen }: EuropeanBrief): CodeBasis {
+export function en1992Basis({ fck, fyk, nationalValues: chosen, exposure }: EuropeanBrief): CodeBasis {
   const values = nationalValues(chosen)
   const strengths: Strengths = { fckMpa: fck, fykMpa: fyk, values }
   return {
@@ -36,6 +37,7 @@ export function en1992Basis({ fck, fyk, nationalValues: chosen }: EuropeanBrief)
     greatestRedistribution: { share: 0.3, clause: 'EN 1992-1-1 5.5(4)' },
     greatestTabulatedSpanDepth: GREATEST_TABULATED * values.greatestSteelStressFactor,
     simpleEdge: { slab: SIMPLE_EDGE, rib: SIMPLE_EDGE },
+    effectiveSpanClause: 'EN 1992-1-1 5.3.2.2(1)',
     effectiveSpanMm: (clear, height, _depth, ends) => effectiveSpanMm(clear, height, ends),
     flangeWidthMm: ribFlangeWidth,
     flexure: (section, moment, redistributedShare) => flexure(section, moment, redistributedShare, strengths),
@@ -53,6 +55,7 @@ export function en1992Basis({ fck, fyk, nationalValues: chosen }: EuropeanBrief)
     ribProportions,
     leastToppingMm,
     crossRibSpacingMm,
+    exposureCover: (bars) => (exposure ? exposureCover(exposure, bars) : []),
     slabFire,
     ribFire,
   }

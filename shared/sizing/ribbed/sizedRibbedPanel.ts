@@ -2,7 +2,8 @@ import type { PanelLayout } from '../../layout/panelLayout'
 import type { EndOfSpan } from '../analysis/spanForces'
 import type { BarLines } from '../bars/barLines'
 import { barRuns } from '../bars/barRuns'
-import { areaOf } from '../bars/barSet'
+import { areaOf, thickest } from '../bars/barSet'
+import { exposureFindings } from '../exposureFindings'
 import { checkRow } from '../finding'
 import type { SizedPanel } from '../sizedPanel'
 import { midspanBending } from './checks/bottomFindings'
@@ -29,7 +30,12 @@ export function sizedRibbedPanel(
 ): SizedPanel {
   const { context } = task
   const { basis, section, analysis, fireMinutes } = context
-  const findings = [...shapeFindings(basis, section, analysis, fireMinutes), ...design.findings]
+  const outermost = { ...section, diameterMm: Math.max(...[design.bottom, design.tops.start, design.tops.end].map(thickest)) }
+  const findings = [
+    ...shapeFindings(basis, section, analysis, fireMinutes),
+    ...design.findings,
+    ...exposureFindings(basis, outermost),
+  ]
   return {
     level,
     mark,

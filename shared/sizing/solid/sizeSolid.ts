@@ -3,7 +3,8 @@ import type { BarLines } from '../bars/barLines'
 import { barRuns } from '../bars/barRuns'
 import { overSupports } from '../bars/overSupports'
 import type { CodeBasis } from '../codeBasis'
-import { checkRow } from '../finding'
+import { exposureFindings } from '../exposureFindings'
+import { checkRow, type Finding } from '../finding'
 import type { LevelSite } from '../panelSite'
 import { remember } from '../remember'
 import type { SizedPanel } from '../sizedPanel'
@@ -51,7 +52,7 @@ interface PanelBars {
 function sizedPanel(context: SlabContext, level: string, { chosen, lines }: PanelBars, steps: readonly string[]): SizedPanel {
   const { plan, heightMm } = context
   const { mark } = plan.site.panel
-  const findings = [...chosen.findings, ...sizeFindings(context)]
+  const findings = [...chosen.findings, ...sizeFindings(context), ...outermostFindings(context, chosen)]
   return {
     level,
     mark,
@@ -65,6 +66,16 @@ function sizedPanel(context: SlabContext, level: string, { chosen, lines }: Pane
     bars: lines.flatMap(barRuns),
     flags: [...slabFlags(context, findings), ...steps],
   }
+}
+
+/** Cover of the bars nearest the faces: those of the direction spanned first, at the bottom and at its ends. */
+function outermostFindings({ basis, brief }: SlabContext, { bottom, tops }: SlabBars): Finding[] {
+  const outer = tops.flatMap(({ place, layers }) => (place.direction === 'short' && layers ? [layers.middle.diameter] : []))
+  return exposureFindings(basis, {
+    coverMm: brief.cover,
+    linkMm: 0,
+    diameterMm: Math.max(bottom.short.middle.diameter, ...outer),
+  })
 }
 
 function momentsOf({ analysis: { short, long } }: SlabContext): SizedPanel['moments'] {

@@ -13,6 +13,7 @@ const NAMES: Record<Check['name'], string> = {
   topping: 'Topping',
   'fire.size': 'Fire, size',
   'fire.cover': 'Fire, cover to bars',
+  'cover.exposure': 'Cover for exposure',
 }
 
 /** A check in the words of the trade. */

@@ -66,7 +66,7 @@ const loads = {
 /** A file in which every field of EN 1992-1-1 schemes with sizes left to the engine has something to do. */
 export const computedFile: AppraisalFileInput = {
   format: 'bothways.appraisal/1',
-  brief: { basis: 'EN1992', ...loads, fck: 30, fyk: 500 },
+  brief: { basis: 'EN1992', ...loads, exposure: 'XC1', fck: 30, fyk: 500 },
   levels,
   schemes: [
     {
