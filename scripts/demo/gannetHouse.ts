@@ -22,6 +22,7 @@ export const GANNET_HOUSE: DemoProject = {
       partitionsLoad: 0.8,
       cover: 25,
       fireMinutes: 60,
+      redistribution: 0,
       stockLength: 12_000,
       fck: 35,
       fyk: 500,

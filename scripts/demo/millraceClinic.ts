@@ -22,6 +22,7 @@ export const MILLRACE_CLINIC: DemoProject = {
       partitionsLoad: 1,
       cover: 25,
       fireMinutes: 60,
+      redistribution: 0,
       stockLength: 12_000,
       fck: 30,
       fyk: 500,

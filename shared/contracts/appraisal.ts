@@ -53,6 +53,7 @@ const loads = {
   partitionsLoad: load.default(0), // variable, both bases
   cover: z.number().min(10).max(100), // nominal, to the outermost bar; no link unless `link` is given
   fireMinutes: z.literal([0, 30, 60, 90, 120, 180, 240]),
+  redistribution: z.number().min(0).max(30).default(0), // percent of elastic support moments, moved to the spans
   stockLength: z.int().min(6000).max(18_000).multipleOf(25).default(12_000), // bars come in it; longer ones are lapped
 }
 export const brief = z.discriminatedUnion('basis', [
@@ -73,10 +74,13 @@ export const brief = z.discriminatedUnion('basis', [
     exposure: britishExposure.optional(),
   }),
 ])
+/** What goes on behind a continuous edge, where the level's own strips are not meant: a span that is not drawn, mm, or a panel of the level. */
+export const beyond = z.union([z.strictObject({ span: z.number().min(500).max(30_000) }), z.strictObject({ panel: mark })])
 export const edge = z.strictObject({
   supportWidth: z.number().min(0).max(3000),
   kind: z.enum(['beam', 'wall']).default('beam'), // over a wall the floor bears, over a beam it does not
   continuity: z.enum(['continuous', 'discontinuous', 'free']),
+  beyond: beyond.optional(), // of a continuous edge
 })
 export const panel = z.strictObject({
   mark,
@@ -260,6 +264,7 @@ export const appraisal = z.strictObject({
 export type ItemCode = z.infer<typeof itemCode>
 export type Brief = z.infer<typeof brief>
 export type Edge = z.infer<typeof edge>
+export type Beyond = z.infer<typeof beyond>
 export type Ring = z.infer<typeof ring>
 export type Panel = z.infer<typeof panel>
 export type Level = z.infer<typeof level>

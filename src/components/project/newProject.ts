@@ -30,6 +30,7 @@ export function newProjectInput({ name, reference, place, use, editionId }: NewP
       partitionsLoad: 0.8,
       cover: 25,
       fireMinutes: 60,
+      redistribution: 0,
       stockLength: 12_000,
       fck: 25,
       fyk: 500,

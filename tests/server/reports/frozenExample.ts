@@ -87,6 +87,7 @@ export function frozenExample(change: Partial<FrozenComparison> = {}): FrozenCom
       partitionsLoad: 1,
       cover: 25,
       fireMinutes: 60,
+      redistribution: 0,
       stockLength: 12_000,
       fck: 25,
       fyk: 500,

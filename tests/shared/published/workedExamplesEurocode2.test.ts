@@ -29,6 +29,7 @@ const noLoads = {
   partitionsLoad: 0,
   cover: 25,
   fireMinutes: 0,
+  redistribution: 0,
   stockLength: 12_000,
 } as const
 const basisOf = (fck: number) => en1992Basis({ fck, fyk: 500, nationalValues: {} })
@@ -110,6 +111,7 @@ describe('S-EC-2, one-way slab 175 thick over 4.8 m', () => {
     imposedLoad: 2.5,
     partitionsLoad: 0.8,
     finishesLoad: 1,
+    redistribution: 0,
     stockLength: 12_000,
     nationalValues: {},
   } as const
