@@ -1,14 +1,12 @@
 /** The appraisal file: the engine's one public input and output. Lengths mm, loads kN/m², strengths MPa, masses kg, moments kNm. */
 import { z } from 'zod'
 import { britishExposure, europeanExposure } from './exposure'
+import { factors } from './factors'
 import { britishValues, europeanValues } from './nationalValues'
+import { mark } from './primitives'
+import { scope } from './sameScope'
 
-export const mark = z
-  .string()
-  .trim()
-  .min(1)
-  .max(20)
-  .regex(/^[\w.-]+$/)
+export { mark }
 const coordinate = z.number().min(-1_000_000).max(1_000_000)
 export const ring = z
   .array(z.tuple([coordinate, coordinate]))
@@ -150,13 +148,23 @@ export const rates = z.strictObject({
   items: z.partialRecord(itemCode, decimal),
   markups: markups.prefault({}),
 })
-export const appraisalFile = z.strictObject({
-  format: z.literal('bothways.appraisal/1'),
-  brief,
-  levels: z.array(level).min(1).max(100),
-  schemes: z.array(scheme).min(1).max(20),
-  rates: rates.optional(),
-})
+export const appraisalFile = z
+  .strictObject({
+    format: z.literal('bothways.appraisal/1'),
+    brief,
+    levels: z.array(level).min(1).max(100),
+    schemes: z.array(scheme).min(1).max(20),
+    rates: rates.optional(),
+    scope: scope.default([]),
+    factors: factors.prefault({}),
+  })
+  .superRefine(({ schemes, scope: declarations }, context) => {
+    const marks = schemes.map((each) => each.mark)
+    declarations.forEach((declaration, index) => {
+      if (!marks.includes(declaration.scheme))
+        context.addIssue({ code: 'custom', path: ['scope', index, 'scheme'], message: `expected one of ${marks.join(', ')}` })
+    })
+  })
 
 export const money = z.string().regex(/^-?\d+(\.\d+)?$/)
 export const check = z.strictObject({

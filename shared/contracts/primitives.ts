@@ -17,6 +17,14 @@ export const optionalLine = (most: number) =>
     .max(most)
     .regex(/^[^\p{Cc}]*$/u, 'expected one line of text without control characters')
 
+/** Mark of a level, panel or scheme. */
+export const mark = z
+  .string()
+  .trim()
+  .min(1)
+  .max(20)
+  .regex(/^[\w.-]+$/)
+
 /** One plain e-mail address: no display name, list, group or quoted part. */
 export const emailAddress = z
   .string()

@@ -1,14 +1,17 @@
 import type { ApiIssue } from '#shared/contracts/apiError'
 import type { AppraisalFile, Rates } from '#shared/contracts/appraisal'
 import { brief, level, panel, rates, scheme } from '#shared/contracts/appraisal'
+import { factors } from '#shared/contracts/factors'
 import type { Project, StoredLevel, StoredScheme } from '#shared/contracts/project'
 import type { EditionWithRates } from '#shared/contracts/rateBook'
+import type { ScopeDeclaration } from '#shared/contracts/sameScope'
+import { scopeDeclaration } from '#shared/contracts/sameScope'
 import type { z } from 'zod'
 import type { FileOrigin } from '../workers/appraisalAnswer'
 
 /** What an appraisal file is made from: a surveyor's sheet, or a reader's, which has no prices. */
 export interface AppraisalSource {
-  readonly project: Pick<Project, 'brief'> & Partial<Pick<Project, 'markups'>>
+  readonly project: Pick<Project, 'brief' | 'factors'> & Partial<Pick<Project, 'markups' | 'scope'>>
   readonly levels: readonly StoredLevel[]
   readonly schemes: readonly StoredScheme[]
   readonly edition: EditionWithRates | null
@@ -47,6 +50,17 @@ function ratesOf({ project, edition }: AppraisalSource, problems: ApiIssue[]): R
   return read(rates, { currency: edition.currency, items, markups: project.markups }, 'rates', problems) ?? undefined
 }
 
+/** Declarations that can stand: a wrong one, or one of a scheme that is not in the file, is left out and its reason kept. */
+function scopeOf({ project }: AppraisalSource, marks: readonly string[], problems: ApiIssue[]): ScopeDeclaration[] {
+  return (project.scope ?? []).flatMap((given, index) => {
+    const value = read(scopeDeclaration, given, `scope.${index}`, problems)
+    if (value === null) return []
+    if (marks.includes(value.scheme)) return [value]
+    problems.push({ path: `scope.${index}.scheme`, message: `no scheme has the mark ${value.scheme}` })
+    return []
+  })
+}
+
 /** The appraisal file of a sheet: rows that the contract refuses are left out, their reasons kept. */
 export function toAppraisalFile(source: AppraisalSource): AppraisalDraft {
   const problems: ApiIssue[] = []
@@ -57,7 +71,10 @@ export function toAppraisalFile(source: AppraisalSource): AppraisalDraft {
     return value === null ? [] : [{ value, index }]
   })
   const priced = ratesOf(source, problems)
-  const canStand = readBrief !== null && levels.length > 0 && schemes.length > 0
+  const marks = schemes.map(({ value }) => value.mark)
+  const declared = scopeOf(source, marks, problems)
+  const readFactors = read(factors, source.project.factors, 'factors', problems)
+  const canStand = readBrief !== null && readFactors !== null && levels.length > 0 && schemes.length > 0
   return {
     origin: { levels: levels.map(({ origin }) => origin), schemes: schemes.map(({ index }) => index) },
     problems,
@@ -67,6 +84,8 @@ export function toAppraisalFile(source: AppraisalSource): AppraisalDraft {
           brief: readBrief,
           levels: levels.map(({ value }) => value),
           schemes: schemes.map(({ value }) => value),
+          scope: declared,
+          factors: readFactors,
           ...(priced === undefined ? {} : { rates: priced }),
         }
       : null,

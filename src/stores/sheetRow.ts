@@ -20,14 +20,17 @@ export type SheetRow =
 
 export const keyOf = ({ kind, row }: SheetRow): string => `${kind}:${row.id}`
 
-export const projectInputOf = ({ name, reference, place, use, brief, editionId, markups }: Project): ProjectInput => ({
-  name,
-  reference,
-  place,
-  use,
-  brief,
-  editionId,
-  markups,
+export const projectInputOf = (project: Project): ProjectInput => ({
+  name: project.name,
+  reference: project.reference,
+  place: project.place,
+  use: project.use,
+  brief: project.brief,
+  editionId: project.editionId,
+  markups: project.markups,
+  measurement: project.measurement,
+  scope: project.scope,
+  factors: project.factors,
 })
 
 export const levelInputOf = ({ mark, name, repeat, panels }: StoredLevel): LevelInput => ({ mark, name, repeat, panels })

@@ -22,6 +22,24 @@ async function surveyorWithProject() {
   return { ...surveyor, made, at: `/api/projects/${made.id}` }
 }
 
+const declared = (change: object) => ({
+  scheme: 'R1',
+  entry: 'ceiling',
+  state: 'priced',
+  rate: '7.2',
+  per: 'grossArea',
+  ...change,
+})
+const carbon = (change: object) => ({
+  material: 'concrete',
+  modules: 'A1-A3',
+  value: 250,
+  unit: 'm³',
+  source: 'invented',
+  date: '2026-09-01',
+  ...change,
+})
+
 describe('a project', () => {
   it('is stored as it was typed, by whom and when, in the firm of who typed it', async () => {
     const { client, firmId } = await signedIn(server, 'surveyor')
@@ -32,6 +50,35 @@ describe('a project', () => {
     expect(answer.as(project)).toMatchObject({ ...input, version: 1, updatedBy: 'Terry Test' })
     const row = await server.db.manager.findOneByOrFail(ProjectEntity, { firmId, id: answer.as(project).id })
     expect(row.name).toBe(input.name)
+  })
+
+  it('keeps what is declared of the scope and typed as factors, guarded by its version', async () => {
+    const { client, at, made } = await surveyorWithProject()
+    const input = sampleProject({
+      reference: made.reference,
+      scope: [
+        { scheme: 'R1', entry: 'ceiling', state: 'priced', rate: '7.2', per: 'grossArea', note: 'plaster' },
+        { scheme: 'S1', entry: 'ceiling', state: 'leftOut', note: 'painted' },
+      ],
+      factors: {
+        labour: { leastGang: 12 },
+        carbon: [{ material: 'blocks', modules: 'A1-A3', value: 2, unit: 'nr', source: 'invented', date: '2026-09-01' }],
+      },
+    })
+    expect((await client.put(at, input)).error.code).toBe('version_required')
+    expect((await client.put(at, input, 1)).as(project)).toMatchObject({ ...input, version: 2 })
+    expect((await client.put(at, { ...input, scope: [] }, 1)).error.code).toBe('stale')
+    const { project: stored } = (await client.get(at)).as(projectSheet)
+    expect({ scope: stored.scope, factors: stored.factors }).toEqual({ scope: input.scope, factors: input.factors })
+  })
+
+  it('stored before it had a scope and factors is read with none declared and the proposed outputs', async () => {
+    const { client, at, made } = await surveyorWithProject()
+    await server.db.query('UPDATE project SET scope = NULL, factors = NULL WHERE id = ?', [made.id])
+    const { project: read } = (await client.get(at)).as(projectSheet)
+    const { scope, factors, measurement } = sampleProject()
+    expect(read).toMatchObject({ scope, factors, measurement })
+    expect(scope).toEqual([])
   })
 
   it('changes by its version, which rises by one', async () => {
@@ -124,6 +171,23 @@ describe('a project', () => {
     ['a field of the other basis', { brief: { ...sampleProject().brief, fcu: 30 } }, 'brief.fcu'],
     ['a number as markup', { markups: { ...sampleProject().markups, taxPercent: 8 } }, 'markups.taxPercent'],
     ['no id', { editionId: 'x' }, 'editionId'],
+    ['rules of measuring that are not there', { measurement: 'x' }, 'measurement'],
+    ['a scope entry that is not there', { scope: [declared({ entry: 'x' })] }, 'scope.0.entry'],
+    ['an entry priced at nothing', { scope: [declared({ rate: '0.00' })] }, 'scope.0.rate'],
+    [
+      'an entry left out without a word',
+      { scope: [{ scheme: 'R1', entry: 'deck', state: 'leftOut', note: '' }] },
+      'scope.0.note',
+    ],
+    ['an entry declared twice', { scope: [declared({}), declared({ rate: '9' })] }, 'scope.1.entry'],
+    ['a labour output of nothing', { factors: { labour: { mesh: { value: 0, source: 'x' } } } }, 'factors.labour.mesh.value'],
+    ['an output without a source', { factors: { labour: { mesh: { value: 1, source: '' } } } }, 'factors.labour.mesh.source'],
+    ['half a person', { factors: { labour: { leastGang: 2.5 } } }, 'factors.labour.leastGang'],
+    ['carbon of concrete by the piece', { factors: { carbon: [carbon({ unit: 'nr' })] } }, 'factors.carbon.0.unit'],
+    ['waste of carrying', { factors: { carbon: [carbon({ modules: 'A4', wastePercent: 3 })] } }, 'factors.carbon.0.wastePercent'],
+    ['concrete used again', { factors: { carbon: [carbon({ uses: 8 })] } }, 'factors.carbon.0.uses'],
+    ['a day that is not there', { factors: { carbon: [carbon({ date: '2026-02-30' })] } }, 'factors.carbon.0.date'],
+    ['one carbon factor twice', { factors: { carbon: [carbon({}), carbon({ value: 9 })] } }, 'factors.carbon.1.material'],
     ['an unknown field', { colour: 'red' }, 'colour'],
     ['a version', { version: 7 }, 'version'],
   ])('is refused with %s, naming the field and what was expected', async (_what, change, path) => {

@@ -14,7 +14,7 @@ export const personId = idOf(7)
 
 /** A stored project with one level of panels by these marks, and both schemes. */
 export function aSheet(marks: readonly string[] = ['P1', 'P2']): ProjectSheet {
-  const { brief, levels, schemes } = aFile(marks)
+  const { brief, levels, schemes, factors } = aFile(marks)
   return {
     project: {
       id: projectId,
@@ -26,6 +26,9 @@ export function aSheet(marks: readonly string[] = ['P1', 'P2']): ProjectSheet {
       brief,
       editionId,
       markups: { preliminariesPercent: '10', contingencyPercent: '5', taxPercent: '0' },
+      measurement: 'comparing',
+      scope: [],
+      factors,
       updatedAt: '2026-11-30T10:00:00.000Z',
       updatedBy: 'surveyor@example.test',
     },

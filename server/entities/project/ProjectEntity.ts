@@ -1,5 +1,7 @@
 import type { Brief, Markups } from '#shared/contracts/appraisal'
-import type { ProjectSummary, UseCategory } from '#shared/contracts/project'
+import type { Factors } from '#shared/contracts/factors'
+import type { ProjectInput, ProjectSummary, UseCategory } from '#shared/contracts/project'
+import type { ScopeDeclaration } from '#shared/contracts/sameScope'
 import { Column, Entity, ForeignKey, Index, PrimaryColumn } from 'typeorm'
 
 @Entity('project')
@@ -17,6 +19,11 @@ export class ProjectEntity {
   @Column({ type: 'json' }) brief: Brief
   @Column({ name: 'edition_id', type: 'uuid', nullable: true }) editionId: string | null
   @Column({ type: 'json' }) markups: Markups
+  @Column({ type: 'varchar', length: 40, default: 'comparing' }) measurement: ProjectInput['measurement']
+  /** Null: stored before a project had declarations, so that it has none. */
+  @Column({ type: 'json', nullable: true }) scope: ScopeDeclaration[] | null
+  /** Null: stored before a project had factors of its own, so that the proposed ones hold. */
+  @Column({ type: 'json', nullable: true }) factors: Factors | null
   /** Counts every change of the project, its levels and its schemes. */
   @Column({ name: 'content_version', type: 'int', unsigned: true, default: 1 }) contentVersion: number
   /** Totals as appraised at content `totalsVersion`; while that differs from `contentVersion`, they are out of date. */

@@ -1,5 +1,6 @@
 import type { AppraisalFile, ItemCode, Rates } from '#shared/contracts/appraisal'
 import type { ProjectSheet } from '#shared/contracts/project'
+import { declaredFor } from '#shared/contracts/sameScope'
 
 function ratesOf({ project, edition }: ProjectSheet): Rates | undefined {
   if (edition === null) return undefined
@@ -15,5 +16,7 @@ export function storedAppraisalFile(sheet: ProjectSheet): AppraisalFile | null {
   const schemes = sheet.schemes.map(({ specification }) => specification)
   if (levels.length === 0 || schemes.length === 0) return null
   const rates = ratesOf(sheet)
-  return { format: 'bothways.appraisal/1', brief: sheet.project.brief, levels, schemes, ...(rates ? { rates } : {}) }
+  const { brief, scope, factors } = sheet.project
+  const declared = declaredFor(scope, schemes)
+  return { format: 'bothways.appraisal/1', brief, levels, schemes, scope: declared, factors, ...(rates ? { rates } : {}) }
 }

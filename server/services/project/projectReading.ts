@@ -52,10 +52,11 @@ export async function readProjectReading(
   const file = storedAppraisalFile(sheet)
   const appraisal = file === null ? NOTHING : await pool.appraiseStored(file)
   const seesMoney = hasRole(who, 'surveyor', 'developer')
-  const { id, name, reference, place, use, brief, version, updatedAt, updatedBy } = sheet.project
+  const { id, name, reference, place, use, brief, measurement, scope, factors, version, updatedAt, updatedBy } = sheet.project
   const { edition } = sheet
   return {
-    project: { id, name, reference, place, use, brief, version, updatedAt, updatedBy },
+    project: { id, name, reference, place, use, brief, measurement, factors, version, updatedAt, updatedBy },
+    scope: scope.map(({ scheme, entry, state, note }) => ({ scheme, entry, state, note })),
     levels: sheet.levels,
     schemes: sheet.schemes,
     edition:

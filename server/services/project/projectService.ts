@@ -83,8 +83,8 @@ export async function changeProject(
 }
 
 async function recordPriceChange(tx: EntityManager, who: SignedIn, before: ProjectEntity, after: ProjectInput): Promise<void> {
-  const from = { editionId: before.editionId, markups: before.markups }
-  const to = { editionId: after.editionId, markups: after.markups }
+  const from = { editionId: before.editionId, markups: before.markups, scope: before.scope ?? [] }
+  const to = { editionId: after.editionId, markups: after.markups, scope: after.scope }
   if (JSON.stringify(from) === JSON.stringify(to)) return
   const detail = { projectId: before.id, from, to }
   await recordEvent(tx, { event: 'project.pricesChanged', firmId: who.firmId, personId: who.personId, detail })

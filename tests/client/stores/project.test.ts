@@ -164,11 +164,12 @@ describe('project store', () => {
   it('gives a reader what the server appraised and sends nothing', async () => {
     const workers = stillWorkers()
     const { project, levels, schemes, edition } = aSheet()
-    const { id, version, name, reference, place, use, brief, updatedAt, updatedBy } = project
-    const shown = { id, version, name, reference, place, use, brief, updatedAt, updatedBy }
+    const { id, version, name, reference, place, use, brief, measurement, factors, updatedAt, updatedBy } = project
+    const shown = { id, version, name, reference, place, use, brief, measurement, factors, updatedAt, updatedBy }
     const { region, number, currency, baseDate } = edition!
     const reading = {
       project: shown,
+      scope: [],
       levels,
       schemes,
       edition: { region, number, currency, baseDate },
