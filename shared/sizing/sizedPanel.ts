@@ -1,6 +1,7 @@
 import type { BarDiameter, Check, PanelResult } from '../contracts/appraisal'
 import type { PanelAreas, PanelLayout } from '../layout/panelLayout'
 import type { BarShape } from './bars/barShape'
+import type { FireStanding } from './fireStanding'
 
 /** Bars of one kind in one panel that are cut and bent alike, repeats not counted. Total length = count × length. */
 export interface BarRun {
@@ -33,6 +34,7 @@ export interface SizedPanel {
   readonly moments: PanelResult['moments']
   readonly steel: PanelResult['steel']
   readonly bars: readonly BarRun[]
+  readonly fire: FireStanding
   /** Stated assumptions and approximations of this panel ('sized on its enclosing rectangle'). */
   readonly flags: readonly string[]
 }

@@ -4,14 +4,15 @@ import type { BarLines } from '../bars/barLines'
 import { barRuns } from '../bars/barRuns'
 import { areaOf, thickest } from '../bars/barSet'
 import { exposureFindings } from '../exposureFindings'
+import { fireStanding } from '../fireStanding'
 import { checkRow } from '../finding'
 import type { SizedPanel } from '../sizedPanel'
-import { midspanBending } from './checks/bottomFindings'
+import { fireFindings, midspanBending } from './checks/bottomFindings'
 import { bottomLines, topLines } from './ribBarLines'
 import { perRib, type RibContext } from './ribContext'
 import type { RibDesign, RibTask } from './ribDesign'
 import { ribFlags } from './ribFlags'
-import { shapeFindings } from './checks/shapeFindings'
+import { fireSizeFindings, shapeFindings } from './checks/shapeFindings'
 import { supportBending } from './checks/topFindings'
 
 const ENDS: readonly EndOfSpan[] = ['start', 'end']
@@ -47,6 +48,10 @@ export function sizedRibbedPanel(
     moments: momentsOf(context),
     steel: steelOf(context, design),
     bars: lines.flatMap(barRuns),
+    fire: fireStanding((minutes) => [
+      ...fireSizeFindings(basis, section, analysis, minutes),
+      ...fireFindings({ ...context, fireMinutes: minutes }, design.bottom),
+    ]),
     flags: ribFlags(task, findings),
   }
 }

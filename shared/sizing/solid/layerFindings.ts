@@ -106,15 +106,25 @@ export function shortBottomFindings(context: SlabContext, layer: BarLayer, flexu
     ...flexureFindings('flexure.midspan', where, flexure, layerAreaMm2(layer)),
     slabDeflection(context, layer, flexure),
     ...limitFindings(context, where, unredistributed(layerDepthMm(context, layer.diameter, null)), layer),
-    ...axisFinding(context, layer),
+    ...fireFindings(context, layer),
   ]
 }
 
-function axisFinding({ basis, brief, analysis }: SlabContext, { diameter }: BarLayer): Finding[] {
-  if (brief.fireMinutes === 0) return []
+/**
+ * Axis distance or cover of the main bottom bars in fire.
+ *
+ * Source: by the basis, `slabFire`
+ * @param minutes - 0: no fire period, nothing is found
+ */
+export function fireFindings(
+  { basis, brief, analysis }: SlabContext,
+  { diameter }: BarLayer,
+  minutes: number = brief.fireMinutes,
+): Finding[] {
+  if (minutes === 0) return []
   const action = analysis.long === null ? 'oneWay' : analysis.aspect <= 1.5 ? 'twoWay' : 'twoWayLong'
   const isContinuous = analysis.short.position !== 'simple'
-  const { bars, measuredTo } = basis.slabFire(brief.fireMinutes, action, isContinuous)
+  const { bars, measuredTo } = basis.slabFire(minutes, action, isContinuous)
   const isAxis = measuredTo === 'axis'
   const provided = isAxis ? brief.cover + diameter / 2 : brief.cover
   return [
@@ -224,9 +234,9 @@ export function slabShearFinding(context: SlabContext, place: TopPlace, depthMm:
  *
  * Source: by the basis, `slabFire`
  */
-export function sizeFindings({ basis, brief, heightMm }: SlabContext): Finding[] {
-  if (brief.fireMinutes === 0) return []
-  const { size } = basis.slabFire(brief.fireMinutes, 'oneWay', true)
+export function sizeFindings({ basis, brief, heightMm }: SlabContext, minutes: number = brief.fireMinutes): Finding[] {
+  if (minutes === 0) return []
+  const { size } = basis.slabFire(minutes, 'oneWay', true)
   const working = () => `${size.working()}; slab ${figure(heightMm)} mm`
   const place = () => 'slab'
   return [{ name: 'fire.size', place, clause: size.clause, demand: size.value, capacity: heightMm, unit: 'mm', working }]

@@ -4,6 +4,7 @@ import { barRuns } from '../bars/barRuns'
 import { overSupports } from '../bars/overSupports'
 import type { CodeBasis } from '../codeBasis'
 import { exposureFindings } from '../exposureFindings'
+import { fireStanding } from '../fireStanding'
 import { checkRow, type Finding } from '../finding'
 import type { LevelSite } from '../panelSite'
 import { remember } from '../remember'
@@ -11,7 +12,7 @@ import type { SizedPanel } from '../sizedPanel'
 import { chooseSlabBars, type SlabBars } from './bars/chooseSlabBars'
 import { soffitSteps } from './soffitSteps'
 import { slabBarLines } from './bars/slabBarLines'
-import { sizeFindings } from './layerFindings'
+import { fireFindings, sizeFindings } from './layerFindings'
 import { isHogging, type SlabContext, slabKey } from './slabContext'
 import { slabFlags } from './slabFlags'
 import { layerAreaMm2 } from './bars/slabLayer'
@@ -64,6 +65,10 @@ function sizedPanel(context: SlabContext, level: string, { chosen, lines }: Pane
     moments: momentsOf(context),
     steel: steelOf(chosen),
     bars: lines.flatMap(barRuns),
+    fire: fireStanding((minutes) => [
+      ...sizeFindings(context, minutes),
+      ...fireFindings(context, chosen.bottom.short.middle, minutes),
+    ]),
     flags: [...slabFlags(context, findings), ...steps],
   }
 }

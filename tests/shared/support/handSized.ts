@@ -64,6 +64,7 @@ export function handSized(scheme: Scheme, levels: readonly Level[], bars: readon
         moments,
         steel,
         bars,
+        fire: { minutes: 60, limits: [] },
         flags: [],
       }
     })

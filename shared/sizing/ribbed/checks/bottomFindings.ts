@@ -79,8 +79,12 @@ function fitFinding(context: RibContext, bars: BarSet): Finding {
   }
 }
 
-/** Axis distance from below, and to the side faces with the bars closed up in the middle of the rib. */
-function fireFindings(context: RibContext, bars: BarSet): Finding[] {
+/**
+ * Axis distance or cover of the bottom bars in fire: from below, and to the side faces with the bars closed up in the middle of the rib.
+ *
+ * Source: by the basis, `ribFire`
+ */
+export function fireFindings(context: RibContext, bars: BarSet): Finding[] {
   const { basis, section, analysis, fireMinutes } = context
   if (fireMinutes === 0) return []
   const isContinuous = analysis.position !== 'simple'

@@ -26,7 +26,18 @@ export function shapeFindings(basis: CodeBasis, section: RibSection, analysis: R
   ]
 }
 
-function fireSizeFindings(basis: CodeBasis, { toppingMm, ribMm }: RibSection, analysis: RibAnalysis, minutes: number): Finding[] {
+/**
+ * Sizes of the topping and the rib in fire.
+ *
+ * Source: by the basis, `slabFire`, `ribFire`
+ * @param minutes - 0: no fire period, nothing is found
+ */
+export function fireSizeFindings(
+  basis: CodeBasis,
+  { toppingMm, ribMm }: RibSection,
+  analysis: RibAnalysis,
+  minutes: number,
+): Finding[] {
   if (minutes === 0) return []
   const flange = basis.slabFire(minutes, 'twoWayLong', true).size
   const rib = basis.ribFire(minutes, ribMm, analysis.position !== 'simple', analysis.forces.redistributedShare).size
