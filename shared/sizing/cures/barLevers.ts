@@ -28,7 +28,11 @@ function ordered<Bars>(all: readonly Bars[], areaMm2: (bars: Bars) => number, no
 
 const setWords = (set: BarSet) => set.map(({ diameter, count }) => `${count} × ${diameter}`).join(' + ') || 'none'
 
-/** Other bars at the bottom of a panel's ribs, or at the top over its continuous edges, where they are given. */
+/**
+ * Other bars at the bottom of a panel's ribs, or at the top over its continuous edges, where they are given.
+ *
+ * Source: project rule, failing checks say what would cure them
+ */
 export function otherRibBars(
   { brief }: CureInput,
   scheme: RibbedScheme,
@@ -61,7 +65,11 @@ const LAYER_NAMES = {
 }
 const layerWords = (layer: BarLayer | undefined) => (layer ? `${layer.diameter} at ${layer.spacing}` : 'none')
 
-/** Another layer of bars in a solid panel, where its bars are given. */
+/**
+ * Another layer of bars in a solid panel, where its bars are given.
+ *
+ * Source: project rule, failing checks say what would cure them
+ */
 export function otherLayer(
   { brief }: CureInput,
   scheme: SolidScheme,

@@ -10,7 +10,12 @@ interface Identity {
 
 type Checked = Pick<SizedPanel, 'checks' | 'places'>
 
-/** What tells the check in a row of a panel's list from the others. @throws RangeError where there is no such row */
+/**
+ * What tells the check in a row of a panel's list from the others.
+ *
+ * Source: project rule, failing checks say what would cure them
+ * @throws RangeError where there is no such row
+ */
 export function identityOf({ checks, places }: Checked, index: number): Identity {
   const check = checks[index]
   const place = places[index]
@@ -20,7 +25,11 @@ export function identityOf({ checks, places }: Checked, index: number): Identity
   return { name, place, order }
 }
 
-/** The same check in another sizing of the panel; null where the sizing does not ask it. */
+/**
+ * The same check in another sizing of the panel; null where the sizing does not ask it.
+ *
+ * Source: project rule, failing checks say what would cure them
+ */
 export function sameCheck({ checks, places }: Checked, { name, place, order }: Identity): Check | null {
   return checks.filter((each, i) => each.name === name && places[i] === place)[order] ?? null
 }

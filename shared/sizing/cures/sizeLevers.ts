@@ -45,7 +45,11 @@ function lever(
   return { trials, isEvery: false, limit: `${name} ${end > from ? 'up' : 'down'} to ${figure(end)} ${unit}` }
 }
 
-/** A given thickness made greater; nothing where the engine finds it. */
+/**
+ * A given thickness made greater; nothing where the engine finds it.
+ *
+ * Source: project rule, failing checks say what would cure them
+ */
 export function thickerSlab({ brief }: CureInput, scheme: SolidScheme): Lever {
   const { thickness } = scheme
   if (thickness === 'least') return none
@@ -59,7 +63,11 @@ export function thickerSlab({ brief }: CureInput, scheme: SolidScheme): Lever {
 type RibSize = 'topping' | 'ribWidth'
 const RIB_SIZE_NAMES = { topping: 'topping', ribWidth: 'rib' } as const
 
-/** A thicker topping, or wider ribs. */
+/**
+ * A thicker topping, or wider ribs.
+ *
+ * Source: project rule, failing checks say what would cure them
+ */
 export function largerRib({ brief }: CureInput, scheme: RibbedScheme, size: RibSize): Lever {
   const { step, most } = TRIED[size]
   const from = scheme[size]
@@ -69,7 +77,11 @@ export function largerRib({ brief }: CureInput, scheme: RibbedScheme, size: RibS
   }))
 }
 
-/** A wider solid zone where it is given; where the engine widens it, it has done so already. */
+/**
+ * A wider solid zone where it is given; where the engine widens it, it has done so already.
+ *
+ * Source: project rule, failing checks say what would cure them
+ */
 export function widerZone({ brief }: CureInput, scheme: RibbedScheme): Lever {
   const { solidZone } = scheme
   if (solidZone === 'least') return none
@@ -80,7 +92,11 @@ export function widerZone({ brief }: CureInput, scheme: RibbedScheme): Lever {
   }))
 }
 
-/** More cover for the bars, or less. */
+/**
+ * More cover for the bars, or less.
+ *
+ * Source: project rule, failing checks say what would cure them
+ */
 export function otherCover({ brief, scheme }: CureInput, isMore: boolean): Lever {
   const { step, least, most } = TRIED.cover
   const { cover } = brief
@@ -89,7 +105,11 @@ export function otherCover({ brief, scheme }: CureInput, isMore: boolean): Lever
   return lever('cover', 'mm', cover, isMore ? more : less, (value) => ({ scheme, brief: { ...brief, cover: value } }))
 }
 
-/** Stronger concrete, class by class. */
+/**
+ * Stronger concrete, class by class.
+ *
+ * Source: project rule, failing checks say what would cure them
+ */
 export function strongerConcrete({ brief, scheme }: CureInput): Lever {
   if (brief.basis === 'EN1992') {
     const values = STRENGTHS.EN1992.filter((fck) => fck > brief.fck)
