@@ -54,9 +54,9 @@ export function cutBars(made: Made, piece: BarPiece): CutBar[] {
  * Source: BS 8666:2005, Table 3
  */
 export function lengthWorking(made: Made, piece: BarPiece, bar: CutBar, isLapped: boolean): string {
-  const terms = piece.parts.map((part, i) =>
-    i === 0 ? figure(part, 3) : part < 0 ? `− ${figure(-part, 3)}` : `+ ${figure(part, 3)}`,
-  )
+  const terms = piece.parts
+    .filter((part, i) => i === 0 || part !== 0)
+    .map((part, i) => (i === 0 ? figure(part, 3) : part < 0 ? `− ${figure(-part, 3)}` : `+ ${figure(part, 3)}`))
   const plan = `${terms.join(' ')} = ${figure(planMm(piece), 3)}`
   const lapped = isLapped ? `, lapped ${figure(made.lapMm(), 0)} from stock of ${figure(made.stockMm, 0)}` : ''
   const byFormula = formulaLengthMm(bar.shape, made.diameter)

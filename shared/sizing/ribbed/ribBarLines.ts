@@ -54,13 +54,14 @@ export function bottomPiece({ ends }: RibbedPanel, rib: RibLineEnds, diameter: B
 
 /**
  * Top bars at one end of a panel's ribs, edge by edge: from the middle of a continuous support to 0.3 of the rib past its face; at an
- * edge designed as simple, an anchorage and the basis' share of the span.
+ * edge designed as simple, an anchorage and the basis' share of the span. A rib cut by a void counts as long as the longest, and its bar
+ * stops at the void.
  *
  * Source: by the basis, `simpleEdge`, `anchorageMm`; lengths by engine design section 4; for the floor behind see `overSupports`
  * @param spanAddedMm - what the effective span has over the clear one
  */
 export function topLines(
-  { ribs, ends }: RibbedPanel,
+  { ribs, ends, clearMm }: RibbedPanel,
   end: EndOfSpan,
   diameter: BarDiameter,
   each: number,
@@ -74,9 +75,12 @@ export function topLines(
   const isContinuous = ends[end].isContinuous
   const pieceOf = (rib: RibLineEnds, edge: number): BarPiece => {
     const { supportMm } = rib[end]
-    if (isContinuous) return { parts: [supportMm / 2, TOP_REACH * rib.clearMm], legs: [0, 0], over: edge }
+    const isCut = rib[end === 'start' ? 'end' : 'start'].edge === null
+    const fullMm = isCut ? clearMm : rib.clearMm
+    const roomMm = isCut ? rib.clearMm + rules.trimmerMm - rules.coverMm : Infinity
+    if (isContinuous) return { parts: [supportMm / 2, Math.min(TOP_REACH * fullMm, roomMm)], legs: [0, 0], over: edge }
     const { pastMm, legMm } = anchoredEnd(diameter, anchorageMm, supportMm - rules.coverMm)
-    return { parts: [reach * (rib.clearMm + spanAddedMm), pastMm], legs: [legMm, 0] }
+    return { parts: [Math.min(reach * (fullMm + spanAddedMm), roomMm), pastMm], legs: [legMm, 0] }
   }
   return ends[end].edges.map((edge) => ({
     position: `top, edge ${edge + 1}`,

@@ -28,7 +28,9 @@ export function ribFlags(task: RibTask, findings: readonly Finding[]): string[] 
     ...(['start', 'end'] as const).filter((end) => isMixedEnd(panel, end)).map((end) => mixedFlag(panel, end)),
     ...(varies ? [`ribs differ in length: sized on the longest clear rib, ${figure(panel.clearMm, 0)} mm`] : []),
     ...(panel.site.panel.voids.length > 0
-      ? ['ribs that end at a void hang on its trimmers; bars of trimmers are not included']
+      ? [
+          'ribs that end at a void hang on its trimmers; their bars are made up in the ribs beside and in the strips across (common practice), and not checked',
+        ]
       : []),
     ...(isWidened
       ? [`solid zone widened to ${figure(panel.solidZoneMm, 0)} mm for shear and for bending of the ribs at supports`]

@@ -9,6 +9,7 @@ import { checkRow } from '../finding'
 import type { SizedPanel } from '../sizedPanel'
 import { fireFindings, midspanBending } from './checks/bottomFindings'
 import { bottomLines, topLines } from './ribBarLines'
+import { ribTrimmerLines } from './ribTrimmers'
 import { perRib, type RibContext } from './ribContext'
 import type { RibDesign, RibTask } from './ribDesign'
 import { ribFlags } from './ribFlags'
@@ -81,12 +82,13 @@ function steelOf(context: RibContext, { bottom, tops }: RibDesign): SizedPanel['
 /**
  * All bars of a ribbed panel to be scheduled.
  *
- * Source: see `bottomLines` and `topLines`
+ * Source: see `bottomLines`, `topLines` and `ribTrimmerLines`
  */
 export function ribBarLines({ panel, context, rules }: RibTask, { bottom, tops }: RibDesign): BarLines[] {
   const added = context.analysis.spanMm - panel.clearMm
   return [
     ...bottom.map(({ diameter, count }) => bottomLines(panel, diameter, count, rules)),
     ...ENDS.flatMap((end) => tops[end].flatMap(({ diameter, count }) => topLines(panel, end, diameter, count, added, rules))),
+    ...ribTrimmerLines(panel, bottom, rules),
   ]
 }

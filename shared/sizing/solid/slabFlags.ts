@@ -21,7 +21,7 @@ export function slabFlags(context: SlabContext, findings: readonly Finding[]): s
       .filter(({ isMixed }) => isMixed)
       .map(({ edges }) => `edges ${edges.map((edge) => edge + 1).join(', ')}: continuous in part only, taken as discontinuous`),
     ...(plan.site.panel.voids.length > 0
-      ? ['sized as without its voids; bars stop at them, trimming bars round them are not included']
+      ? ['sized as without its voids; bars that they cut are made up beside them, half on each side (common practice), and not checked']
       : []),
     ...cornerFlag(context),
     ...fireFlags(findings),

@@ -1,32 +1,17 @@
 import type { BarLayer } from '../../../contracts/appraisal'
-import { bottomBarEnd } from '../../bars/barEnds'
 import type { BarLines, BarPiece } from '../../bars/barLines'
 import type { EndOfSpan } from '../../analysis/spanForces'
+import { bottomLineEnd } from './bottomLineEnd'
 import type { SlabBars } from './chooseSlabBars'
 import type { TopBars } from './chooseTopBars'
 import { isHogging, type SlabContext } from '../slabContext'
 import { layerText, type StripLayers } from './slabLayer'
 import { type SlabLine, slabLines } from './slabLines'
-import { EDGE_STRIP, lineCount, simpleTopPiece, SLAB_TOP_REACH, slabBond } from './slabMass'
+import { lineCount, simpleTopPiece, SLAB_TOP_REACH, slabBond } from './slabMass'
+import { stripsOf } from './slabStrips'
+import { trimmerLines } from './slabTrimmers'
 import type { SlabAxis } from '../slabPlan'
 import type { TorsionBars } from './torsionBars'
-
-/** A strip of the panel across the bars, shares of the clear width, and the layer that lies in it. */
-interface Strip {
-  readonly name: string
-  readonly from: number
-  readonly to: number
-  readonly layer: BarLayer
-}
-
-function stripsOf({ middle, edge }: StripLayers): Strip[] {
-  if (!edge) return [{ name: '', from: 0, to: 1, layer: middle }]
-  return [
-    { name: ', middle strip', from: EDGE_STRIP, to: 1 - EDGE_STRIP, layer: middle },
-    { name: ', edge strips', from: 0, to: EDGE_STRIP, layer: edge },
-    { name: ', edge strips', from: 1 - EDGE_STRIP, to: 1, layer: edge },
-  ]
-}
 
 /** Lines of every strip along an axis, made into bars by `pieceOf`; strips of the same name and layer together. */
 function linesIn(
@@ -70,6 +55,7 @@ export function slabBarLines(context: SlabContext, bars: SlabBars): BarLines[] {
     ...bottomBarLines(context, bars),
     ...bars.tops.flatMap((top) => topBarLines(context, top)),
     ...torsionBarLines(context, bars.torsion),
+    ...trimmerLines(context, bars),
   ]
 }
 
@@ -80,16 +66,14 @@ export function slabBarLines(context: SlabContext, bars: SlabBars): BarLines[] {
  */
 export function bottomBarLines(context: SlabContext, { bottom }: SlabBars): BarLines[] {
   const { short, other } = context.analysis
-  const { basis, brief, heightMm } = context
-  const endOf = (axis: SlabAxis, line: SlabLine, end: EndOfSpan, { diameter }: BarLayer) => {
-    const { edge, supportMm } = line[end]
-    const support = { supportMm: edge === null ? 0 : supportMm, isContinuous: axis.ends[end].isContinuous }
-    return bottomBarEnd(basis, diameter, support, { coverMm: brief.cover, heightMm })
-  }
+  const { basis, heightMm } = context
   const pieceAlong =
     (axis: SlabAxis) =>
-    (line: SlabLine, layer: BarLayer): BarPiece => {
-      const [start, end] = [endOf(axis, line, 'start', layer), endOf(axis, line, 'end', layer)]
+    (line: SlabLine, { diameter }: BarLayer): BarPiece => {
+      const [start, end] = [
+        bottomLineEnd(context, axis, line, 'start', diameter),
+        bottomLineEnd(context, axis, line, 'end', diameter),
+      ]
       return { parts: [line.clearMm, start.pastMm, end.pastMm], legs: [start.legMm, end.legMm] }
     }
   const { clause } = basis.bottomEnd(bottom.short.middle.diameter, short.axis.ends.start, heightMm)
@@ -121,14 +105,17 @@ export function topBarLines(context: SlabContext, { place, layers }: TopBars): B
   const pieceOf = (line: SlabLine, { diameter }: BarLayer): BarPiece | null => {
     const { edge, supportMm } = line[place.end]
     if (edge === null || !place.side.edges.includes(edge)) return null
-    if (hogging) return { parts: [supportMm / 2, SLAB_TOP_REACH * line.clearMm], legs: [0, 0], over: edge }
-    return simpleTopPiece(context, place, diameter, supportMm)
+    const roomMm = line[opposite(place.end)].edge === null ? line.clearMm - context.brief.cover : Infinity
+    if (!hogging) return simpleTopPiece(context, place, diameter, supportMm, roomMm)
+    return { parts: [supportMm / 2, Math.min(SLAB_TOP_REACH * line.fullMm, roomMm)], legs: [0, 0], over: edge }
   }
   const edges = place.side.edges.map((edge) => edge + 1).join(', ')
   const position = `top, edge ${edges}`
   const clause = hogging ? 'common practice' : basis.simpleEdge.slab.clause
   return linesIn(context, axis, across.clearMm, layers, { position, clause, isTop: true }, pieceOf)
 }
+
+const opposite = (end: EndOfSpan): EndOfSpan => (end === 'start' ? 'end' : 'start')
 
 /**
  * Corner bars of a solid panel, equal ones together.

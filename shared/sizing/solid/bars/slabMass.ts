@@ -64,17 +64,19 @@ export function topParts(context: SlabContext, place: TopPlace, { diameter }: Ba
  *
  * Source: by the basis, `anchorageMm` and `simpleEdge`
  * @param supportMm - width of the support along the bar
+ * @param roomMm - from its face to a void, less the cover
  */
 export function simpleTopPiece(
   { basis, analysis, heightMm, brief }: SlabContext,
   { span }: TopPlace,
   diameter: BarDiameter,
   supportMm: number,
+  roomMm = Infinity,
 ): BarPiece {
   const { spanMm } = span ?? analysis.short
   const anchorageMm = basis.anchorageMm(diameter, slabBond(heightMm, true), 1).value
   const { pastMm, legMm } = anchoredEnd(diameter, anchorageMm, supportMm - brief.cover)
-  return { parts: [basis.simpleEdge.slab.reach * spanMm, pastMm], legs: [legMm, 0] }
+  return { parts: [Math.min(basis.simpleEdge.slab.reach * spanMm, roomMm), pastMm], legs: [legMm, 0] }
 }
 
 /**
