@@ -42,9 +42,20 @@ export interface ShearSection {
 }
 
 /** Where a span lies in its line of spans. */
-export type SpanPosition = 'simple' | 'end' | 'interior'
+export type SpanPosition = 'simple' | 'end' | 'interior' | 'cantilever'
 
-/** What the span to depth rule looks at. */
+/** What a code says of support moments that are redistributed after a linear elastic analysis. */
+export interface RedistributionRules {
+  /** Greatest share of a support moment that may be taken off. */
+  readonly greatestShare: number
+  /** Neighbouring spans may not be further apart than this ratio; null without such a rule. */
+  readonly greatestSpanRatio: number | null
+  /** Share of the greatest elastic moment that every section must still resist; 0 without such a rule. */
+  readonly leastElasticShare: number
+  readonly clause: string
+}
+
+/** What the span to depth rule looks at; of a cantilever its support, where the flange is pulled and the web pressed. */
 export interface SpanDepthInput {
   readonly position: SpanPosition
   readonly spanMm: number
@@ -158,8 +169,7 @@ export interface Comparison {
 export interface CodeBasis {
   readonly title: string
   readonly loadFactors: LoadFactors
-  /** Greatest share of a support moment that may be redistributed. */
-  readonly greatestRedistribution: { readonly share: number; readonly clause: string }
+  readonly redistribution: RedistributionRules
   /** Span over depth beyond which the code tabulates nothing, its greatest factor for steel included. */
   readonly greatestTabulatedSpanDepth: number
   readonly simpleEdge: Readonly<Record<Member, SimpleEdge>>

@@ -19,6 +19,8 @@ export interface LevelSite {
   readonly mark: string
   readonly panels: readonly PanelSite[]
   readonly neighbours: readonly Neighbour[]
+  /** The same, panel by panel. */
+  readonly neighboursOf: readonly (readonly Neighbour[])[]
 }
 
 /**
@@ -54,6 +56,8 @@ export function levelSites(levels: readonly Level[]): LevelSite[] {
         sharedEdges: shared[j]!,
       }))
     })
-    return { mark: level.mark, panels, neighbours: findNeighbours(level) }
+    const neighbours = findNeighbours(level)
+    const neighboursOf = panels.map((_, j) => neighbours.filter((each) => each.panel === j))
+    return { mark: level.mark, panels, neighbours, neighboursOf }
   })
 }

@@ -7,13 +7,14 @@ import type { StripSpan } from './strip'
 /**
  * Whether the coefficients of one-way slabs may be used for a strip.
  *
- * Source: BS 8110-1:1997, 3.5.2.3 (see ONE_WAY_CONDITIONS)
+ * Source: BS 8110-1:1997, 3.5.2.3 (see ONE_WAY_CONDITIONS); not with an overhang, project rule on the safe side
  */
 export function coefficientsApply(spans: readonly StripSpan[]): boolean {
   const limits = ONE_WAY_CONDITIONS
   const lengths = spans.map(({ spanMm }) => spanMm)
   return (
     spans.length >= limits.leastSpans &&
+    !spans.some(({ isCantilever }) => isCantilever) &&
     Math.min(...lengths) >= limits.shortestToLongest * Math.max(...lengths) &&
     spans.every(
       ({ loads, bayMm2 }) =>

@@ -1,18 +1,27 @@
 /**
- * Hogging moments over the supports of a continuous beam of constant stiffness on knife edges, ends simple, each span loaded evenly.
+ * Hogging moments over the supports of a continuous beam of constant stiffness on knife edges, each span loaded evenly. Its ends are
+ * simple, or carry a moment that is known: that of an overhang.
  *
  * Source: three-moment equation (Clapeyron 1857), M(i−1)·l(i) + 2·M(i)·(l(i) + l(i+1)) + M(i+1)·l(i+1) = (w(i)·l(i)³ + w(i+1)·l(i+1)³)/4
  * @param spansMm - one or more, any lengths > 0
  * @param loads - on each span, N/mm
- * @returns one moment a support, N·mm, hogging positive; the first and the last are 0
+ * @param outer - moments over the first and the last support, N·mm, hogging positive
+ * @returns one moment a support, N·mm, hogging positive; the first and the last are `outer`
  */
-export function supportMoments(spansMm: readonly number[], loads: readonly number[]): number[] {
+export function supportMoments(
+  spansMm: readonly number[],
+  loads: readonly number[],
+  outer: readonly [number, number] = [0, 0],
+): number[] {
   const inner = spansMm.length - 1
   const reduced: number[] = []
   const moments = new Array<number>(spansMm.length + 1).fill(0)
+  moments[0] = outer[0]
+  moments[inner + 1] = outer[1]
   for (let i = 0; i < inner; i += 1) {
     const [left, right] = [spansMm[i]!, spansMm[i + 1]!]
-    const load = (loads[i]! * left ** 3 + loads[i + 1]! * right ** 3) / 4
+    const last = i === inner - 1 ? right * outer[1] : 0
+    const load = (loads[i]! * left ** 3 + loads[i + 1]! * right ** 3) / 4 - last
     const pivot = 2 * (left + right) - (i > 0 ? left * reduced[i - 1]! : 0)
     reduced.push(right / pivot)
     moments[i + 1] = (load - left * moments[i]!) / pivot

@@ -1,17 +1,24 @@
+import type { Beyond } from '../../contracts/appraisal'
 import type { Point } from '../../geometry/point'
 import type { Neighbour } from '../../layout/neighbours'
 import type { EndOfSpan } from './spanForces'
 import type { Strip, StripSpan } from './strip'
 
-/** One end of a one-way panel: the outline edges it bears on there, numbers from 0. */
+/** One end of a one-way panel: the outline edges it bears on there, numbers from 0, and what was typed to go on behind them. */
 export interface LineEnd {
   readonly edges: readonly number[]
   readonly supportMm: number
   readonly isContinuous: boolean
+  /** Some of its edges are free: nothing carries the panel there. */
+  readonly isFree: boolean
+  /** Length of those edges, mm. */
+  readonly supportLengthMm: number
+  readonly beyond: Beyond | null
 }
 
 /** A panel that spans one way: unit vector from start to end in level coordinates, its ends and its span. `bayMm2` is its own area. */
 export interface SpanLine {
+  readonly mark: string
   readonly direction: Point
   readonly ends: Readonly<Record<EndOfSpan, LineEnd>>
   readonly span: StripSpan
@@ -20,43 +27,97 @@ export interface SpanLine {
 /** One entry for each panel of the level; null for panels that do not span one way. */
 export type SpanLines = readonly (SpanLine | null)[]
 
+/** For each panel of a level what stands on its edges. */
+export type NeighboursOf = readonly (readonly Neighbour[])[]
+
 /** Spans that turn by less than this against each other span the same way: 1 degree. */
 const PARALLEL_SINE = Math.sin(Math.PI / 180)
 
-const isParallel = (a: Point, b: Point) => Math.abs(a[0] * b[1] - a[1] * b[0]) < PARALLEL_SINE
-const opposite: Record<EndOfSpan, EndOfSpan> = { start: 'end', end: 'start' }
+/**
+ * An overhang that takes less than this share of the support behind it does not relieve the span there over its whole width.
+ *
+ * Source: project rule, on the safe side
+ */
+const WHOLE_WIDTH_SHARE = 0.95
 
-/** The panel that goes on behind one end, spanning the same way, with the longest common support; the longer span where two are equal. */
-function panelBehind(panel: number, end: EndOfSpan, lines: SpanLines, neighbours: readonly Neighbour[]): number | null {
+/** Whether two unit vectors lie in one line, either way round. */
+export const isParallel = (a: Point, b: Point) => Math.abs(a[0] * b[1] - a[1] * b[0]) < PARALLEL_SINE
+
+/** The other end of a span. */
+export const oppositeEnd: Readonly<Record<EndOfSpan, EndOfSpan>> = { start: 'end', end: 'start' }
+
+/** Whether an edge is the free end of a cantilever. */
+const isTip = ({ ends }: SpanLine, edge: number) =>
+  (ends.start.isFree && ends.start.edges.includes(edge)) || (ends.end.isFree && ends.end.edges.includes(edge))
+
+/** Panels behind one end that span the same way, and how long they share its support, mm. */
+function sharedLengths(panel: number, end: EndOfSpan, lines: SpanLines, neighboursOf: NeighboursOf): Map<number, number> {
   const line = lines[panel]!
-  const overlaps = new Map<number, number>()
-  for (const { panel: from, edge, neighbour, overlap } of neighbours) {
+  const lengths = new Map<number, number>()
+  for (const { edge, neighbour, neighbourEdge, overlap } of neighboursOf[panel]!) {
     const behind = lines[neighbour]
-    if (from !== panel || !line.ends[end].edges.includes(edge) || !behind || !isParallel(line.direction, behind.direction))
-      continue
-    overlaps.set(neighbour, (overlaps.get(neighbour) ?? 0) + overlap)
+    if (!line.ends[end].edges.includes(edge) || !behind || !isParallel(line.direction, behind.direction)) continue
+    if (behind.span.isCantilever && isTip(behind, neighbourEdge)) continue
+    lengths.set(neighbour, (lengths.get(neighbour) ?? 0) + overlap)
   }
+  return lengths
+}
+
+/**
+ * The panel that goes on behind one end, spanning the same way: the one named there, else the one with the longest common support; the
+ * longer span where two are equal.
+ */
+function panelBehind(panel: number, end: EndOfSpan, lines: SpanLines, neighboursOf: NeighboursOf): number | null {
+  const lengths = sharedLengths(panel, end, lines, neighboursOf)
+  const { beyond } = lines[panel]!.ends[end]
+  if (beyond && 'panel' in beyond) return [...lengths.keys()].find((each) => lines[each]!.mark === beyond.panel) ?? null
   const spanOf = (each: number) => lines[each]!.span.spanMm
-  const order = [...overlaps].sort(([a, lengthA], [b, lengthB]) => lengthB - lengthA || spanOf(b) - spanOf(a))
+  const order = [...lengths].sort(([a, lengthA], [b, lengthB]) => lengthB - lengthA || spanOf(b) - spanOf(a))
   return order[0]?.[0] ?? null
 }
 
-/** Spans beyond one end of a panel, nearest first; a continuous edge without a neighbour is followed by one equal span. */
-function spansBeyond(panel: number, end: EndOfSpan, lines: SpanLines, neighbours: readonly Neighbour[]): (number | StripSpan)[] {
-  const found: (number | StripSpan)[] = []
+interface Member {
+  readonly name: string
+  readonly span: StripSpan
+}
+
+const metres = (mm: number) => (mm / 1000).toFixed(mm % 100 === 0 ? 1 : 2)
+
+/** A span that is not drawn, loaded like the one before it, with a bay as wide. */
+function undrawn({ span }: SpanLine, spanMm: number, word: 'typed' | 'assumed'): Member {
+  const { loads, bayMm2 } = span
+  const ownBayMm2 = spanMm === span.spanMm ? bayMm2 : (bayMm2 * spanMm) / span.spanMm
+  return { name: `(${metres(spanMm)} m ${word})`, span: { spanMm, loads, bayMm2: ownBayMm2 } }
+}
+
+/** A drawn panel as the next member of a strip, `behind` another one. */
+function drawn(at: number, behind: { panel: number; end: EndOfSpan }, lines: SpanLines, neighboursOf: NeighboursOf): Member {
+  const { mark, span } = lines[at]!
+  if (!span.isCantilever) return { name: mark, span }
+  const shared = sharedLengths(behind.panel, behind.end, lines, neighboursOf).get(at) ?? 0
+  const { supportLengthMm } = lines[behind.panel]!.ends[behind.end]
+  return { name: mark, span: { ...span, isPartOfWidth: shared < WHOLE_WIDTH_SHARE * supportLengthMm } }
+}
+
+/** What lies beyond one end of a panel, nearest first; a continuous edge without a neighbour is followed by one equal span. */
+function membersBeyond(panel: number, end: EndOfSpan, lines: SpanLines, neighboursOf: NeighboursOf) {
+  const found: Member[] = []
   const seen = new Set([panel])
   let [at, out] = [panel, end]
   for (;;) {
     const line = lines[at]!
-    if (!line.ends[out].isContinuous) return found
-    const next = panelBehind(at, out, lines, neighbours)
-    if (next === null || seen.has(next)) return [...found, line.span]
+    const { isContinuous, beyond } = line.ends[out]
+    if (!isContinuous) return { found, isAssumed: false }
+    if (beyond && 'span' in beyond) return { found: [...found, undrawn(line, beyond.span, 'typed')], isAssumed: false }
+    const next = panelBehind(at, out, lines, neighboursOf)
+    if (next === null || seen.has(next))
+      return { found: [...found, undrawn(line, line.span.spanMm, 'assumed')], isAssumed: at === panel }
     const { direction } = lines[next]!
     const sameWay = direction[0] * line.direction[0] + direction[1] * line.direction[1] > 0
-    found.push(next)
+    found.push(drawn(next, { panel: at, end: out }, lines, neighboursOf))
     seen.add(next)
     at = next
-    out = sameWay ? out : opposite[out]
+    out = sameWay ? out : oppositeEnd[out]
   }
 }
 
@@ -65,7 +126,7 @@ function spansBeyond(panel: number, end: EndOfSpan, lines: SpanLines, neighbours
  *
  * Source: BS 8110-1:1997, 3.5.2.3 and Figure 3.7, definition of a bay (from memory, engine design section 4)
  */
-export function bayAreas(lines: SpanLines, neighbours: readonly Neighbour[]): number[] {
+export function bayAreas(lines: SpanLines, neighboursOf: NeighboursOf): number[] {
   const bays = new Array<number>(lines.length).fill(0)
   const done = new Set<number>()
   lines.forEach((line, first) => {
@@ -75,9 +136,9 @@ export function bayAreas(lines: SpanLines, neighbours: readonly Neighbour[]): nu
     for (const at of row) {
       const { ends, direction } = lines[at]!
       const atEnds = [...ends.start.edges, ...ends.end.edges]
-      for (const { panel, edge, neighbour } of neighbours) {
+      for (const { edge, neighbour } of neighboursOf[at]!) {
         const beside = lines[neighbour]
-        if (panel !== at || atEnds.includes(edge) || done.has(neighbour) || !beside) continue
+        if (atEnds.includes(edge) || done.has(neighbour) || !beside) continue
         if (!isParallel(direction, beside.direction)) continue
         done.add(neighbour)
         row.push(neighbour)
@@ -92,18 +153,19 @@ export function bayAreas(lines: SpanLines, neighbours: readonly Neighbour[]): nu
 /**
  * The continuous strip that a one-way panel is part of.
  *
- * Source: project rule, engine design section 4 (neighbours share an edge and span the same way; else an equal span, flagged)
+ * Source: project rule, engine design section 4 (neighbours share an edge and span the same way; else an equal span, flagged; what was
+ *   typed behind an edge comes before both)
  * @param lines - of the level, `lines[panel]` not null, bays as `bayAreas` gives them
  */
-export function stripOf(panel: number, lines: SpanLines, neighbours: readonly Neighbour[]): Strip {
+export function stripOf(panel: number, lines: SpanLines, neighboursOf: NeighboursOf): Strip {
   const own = lines[panel]!
-  const before = spansBeyond(panel, 'start', lines, neighbours)
-  const after = spansBeyond(panel, 'end', lines, neighbours)
-  const spanOf = (each: number | StripSpan) => (typeof each === 'number' ? lines[each]!.span : each)
-  const assumed = [before[0], after[0]].filter((first) => first === own.span)
+  const before = membersBeyond(panel, 'start', lines, neighboursOf)
+  const after = membersBeyond(panel, 'end', lines, neighboursOf)
+  const members = [...before.found.reverse(), { name: own.mark, span: own.span }, ...after.found]
   return {
-    spans: [...before.reverse().map(spanOf), own.span, ...after.map(spanOf)],
-    index: before.length,
-    assumedEnds: assumed.length,
+    spans: members.map(({ span }) => span),
+    names: members.map(({ name }) => name),
+    index: before.found.length,
+    assumedEnds: Number(before.isAssumed) + Number(after.isAssumed),
   }
 }

@@ -1,4 +1,4 @@
-import type { Neighbour } from '../../layout/neighbours'
+import type { NeighboursOf } from './levelStrips'
 import { type EndOfSpan, forcesKey, type SpanForces } from './spanForces'
 
 /** Hogging moment of each panel over each outline edge, N·mm per metre; edges that are not there count as 0. */
@@ -13,13 +13,11 @@ export function momentFromBehind(
   panel: number,
   edges: readonly number[],
   moments: EdgeMoments,
-  neighbours: readonly Neighbour[],
+  neighboursOf: NeighboursOf,
 ): number {
-  return neighbours.reduce(
-    (most, each) =>
-      each.panel === panel && edges.includes(each.edge)
-        ? Math.max(most, moments[each.neighbour]?.get(each.neighbourEdge) ?? 0)
-        : most,
+  return neighboursOf[panel]!.reduce(
+    (most, { edge, neighbour, neighbourEdge }) =>
+      edges.includes(edge) ? Math.max(most, moments[neighbour]?.get(neighbourEdge) ?? 0) : most,
     0,
   )
 }

@@ -45,7 +45,7 @@ export function bs8110Basis({ fcu, fy, cover, nationalValues, exposure }: Britis
   return {
     title: 'BS 8110-1:1997',
     loadFactors: LOAD_FACTORS,
-    greatestRedistribution: { share: 0.3, clause: 'BS 8110-1 3.2.2.1' },
+    redistribution: { greatestShare: 0.3, greatestSpanRatio: null, leastElasticShare: 0.7, clause: 'BS 8110-1 3.2.2.1' },
     greatestTabulatedSpanDepth: GREATEST_TABULATED,
     simpleEdge: SIMPLE_EDGE,
     effectiveSpanClause: 'BS 8110-1 3.4.1.2, 3.4.1.3',

@@ -4,9 +4,9 @@ import { figure } from '../figure'
 /**
  * Distance between points of zero moment as a share of the span.
  *
- * Source: BS 8110-1:1997, 3.4.1.5 (0.7 for continuous beams; from memory)
+ * Source: BS 8110-1:1997, 3.4.1.5 (0.7 for continuous beams; from memory); a cantilever has no midspan, its length stands for one
  */
-const ZERO_MOMENT_SHARE = { simple: 1, end: 0.7, interior: 0.7 } as const satisfies Record<SpanPosition, number>
+const ZERO_MOMENT_SHARE = { simple: 1, end: 0.7, interior: 0.7, cantilever: 1 } as const satisfies Record<SpanPosition, number>
 
 /**
  * Effective flange width of a rib between equal ribs, mm: web and a fifth of the distance between zero moments, at most the spacing.

@@ -12,6 +12,7 @@ export const BASIC_SPAN_DEPTH = {
   simple: { rectangular: 20, flanged: 16 },
   end: { rectangular: 26, flanged: 20.8 },
   interior: { rectangular: 26, flanged: 20.8 },
+  cantilever: { rectangular: 7, flanged: 5.6 },
 } as const satisfies Record<SpanPosition, { readonly rectangular: number; readonly flanged: number }>
 
 /** Web over flange width between which Table 3.9 is interpolated. Source: BS 8110-1:1997, 3.4.6.3 */
@@ -53,10 +54,11 @@ export function basicSpanDepth({ position, section: { widthMm, flange } }: Pick<
  * Source: BS 8110-1:1997, 3.4.6.3 to 3.4.6.5, 3.5.7, 3.6.5, Tables 3.9 and 3.10, equation 8 with fs = 2·fy·As,req/(3·As,prov), βb taken as 1
  */
 export function spanDepthLimit(input: SpanDepthInput, { fyMpa }: Strengths): Answer {
-  const { section, spanMm, momentNmm, requiredMm2, providedMm2 } = input
+  const { position, section, spanMm, momentNmm, requiredMm2, providedMm2 } = input
   const basic = basicSpanDepth(input)
+  const pressedMm = position === 'cantilever' && section.flange ? section.flange.webMm : section.widthMm
   const long = spanMm > LONG_SPAN_MM ? LONG_SPAN_MM / spanMm : 1
-  const momentMpa = momentNmm / (section.widthMm * section.depthMm ** 2)
+  const momentMpa = momentNmm / (pressedMm * section.depthMm ** 2)
   const serviceMpa = (2 * fyMpa * requiredMm2) / (3 * providedMm2)
   const factor = tensionSteelFactor(serviceMpa, momentMpa)
   const web = section.flange ? `, bw/b ${figure(section.flange.webMm / section.widthMm, 2)}` : ''

@@ -34,7 +34,7 @@ export function en1992Basis({ fck, fyk, nationalValues: chosen, exposure }: Euro
       unloaded: values.gammaPermanent,
       clause: 'EN 1990 6.10',
     },
-    greatestRedistribution: { share: 0.3, clause: 'EN 1992-1-1 5.5(4)' },
+    redistribution: { greatestShare: 0.3, greatestSpanRatio: 2, leastElasticShare: 0, clause: 'EN 1992-1-1 5.5(4)' },
     greatestTabulatedSpanDepth: GREATEST_TABULATED * values.greatestSteelStressFactor,
     simpleEdge: { slab: SIMPLE_EDGE, rib: SIMPLE_EDGE },
     effectiveSpanClause: 'EN 1992-1-1 5.3.2.2(1)',

@@ -4,9 +4,10 @@ import { figure } from '../figure'
 /**
  * Distance between points of zero moment as a share of the span.
  *
- * Source: EN 1992-1-1:2004, 5.3.2.1(2), Figure 5.2 (0.85 seen in T-EC-1, 0.7 from memory)
+ * Source: EN 1992-1-1:2004, 5.3.2.1(2), Figure 5.2 (0.85 seen in T-EC-1, 0.7 from memory); a cantilever has no
+ *   midspan, its length stands for one
  */
-const ZERO_MOMENT_SHARE = { simple: 1, end: 0.85, interior: 0.7 } as const satisfies Record<SpanPosition, number>
+const ZERO_MOMENT_SHARE = { simple: 1, end: 0.85, interior: 0.7, cantilever: 1 } as const satisfies Record<SpanPosition, number>
 
 /**
  * Effective flange width of a T-section at midspan, mm.

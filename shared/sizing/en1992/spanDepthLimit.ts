@@ -7,7 +7,10 @@ import type { Strengths } from './strengths'
  *
  * Source: EN 1992-1-1:2004, Table 7.4N (from memory; its l/d values seen in several encodings)
  */
-export const STRUCTURAL_SYSTEM = { simple: 1, end: 1.3, interior: 1.5 } as const satisfies Record<SpanPosition, number>
+export const STRUCTURAL_SYSTEM = { simple: 1, end: 1.3, interior: 1.5, cantilever: 0.4 } as const satisfies Record<
+  SpanPosition,
+  number
+>
 
 /**
  * Greatest l/d tabulated: an interior span lightly stressed, before the factor for steel.
@@ -40,9 +43,10 @@ export function basicSpanDepth(rho: number, fckMpa: number): number {
  *
  * Source: EN 1992-1-1:2004, 7.4.2(2); for T-sections as CCIP-041 section 3.3 (seen in R-EC-1)
  */
-export function spanDepthRatioOfSteel({ section, requiredMm2 }: SpanDepthInput): number {
+export function spanDepthRatioOfSteel({ position, section, requiredMm2 }: SpanDepthInput): number {
   const { widthMm, depthMm, flange } = section
   if (!flange) return requiredMm2 / (widthMm * depthMm)
+  if (position === 'cantilever') return requiredMm2 / (flange.webMm * depthMm)
   return requiredMm2 / (flange.webMm * depthMm + (widthMm - flange.webMm) * flange.thicknessMm)
 }
 

@@ -1,4 +1,5 @@
-import { bayAreas, type SpanLines, stripOf } from '../analysis/levelStrips'
+import type { AnalysisRules } from '../analysis/analysisRules'
+import { bayAreas, type SpanLine, stripOf } from '../analysis/levelStrips'
 import { momentFromBehind, raisedTo } from '../analysis/sharedSupports'
 import type { EndOfSpan, SpanForces } from '../analysis/spanForces'
 import type { Strip } from '../analysis/strip'
@@ -33,17 +34,19 @@ export interface RibDepths {
  * Source: EN 1992-1-1:2004, 5.3.2.2, or the basis' own rule; BS 8110-1:1997, Table 3.12 or elastic analysis (engine design section 4)
  */
 export function analyseRibs(
-  { neighbours }: LevelSite,
+  { panels: sites, neighboursOf }: LevelSite,
   panels: readonly RibbedPanel[],
   depths: RibDepths,
   basis: CodeBasis,
+  rules: AnalysisRules,
 ): RibAnalysis[] {
-  const lines = spanLines(panels, depths, basis)
-  const bays = bayAreas(lines, neighbours)
-  const withBays = lines.map((line, i) => line && { ...line, span: { ...line.span, bayMm2: bays[i]! } })
+  const marks = sites.map(({ panel }) => panel.mark)
+  const lines = spanLines(panels, marks, depths, basis)
+  const bays = bayAreas(lines, neighboursOf)
+  const withBays = lines.map((line, i) => ({ ...line, span: { ...line.span, bayMm2: bays[i]! } }))
   const raw = panels.map((_, i) => {
-    const strip = stripOf(i, withBays, neighbours)
-    return { strip, forces: stripForces(strip, basis.loadFactors) }
+    const strip = stripOf(i, withBays, neighboursOf)
+    return { strip, forces: stripForces(strip, rules) }
   })
   const moments = panels.map(({ ends }, i) => {
     const at = (end: EndOfSpan) => ends[end].edges.map((edge) => [edge, raw[i]!.forces.hoggingNmm(end, 0)] as const)
@@ -52,7 +55,7 @@ export function analyseRibs(
   return panels.map(({ ends }, i) => {
     const { strip, forces } = raw[i]!
     const spanMm = lines[i]!.span.spanMm
-    const behind = (end: EndOfSpan) => (ends[end].isContinuous ? momentFromBehind(i, ends[end].edges, moments, neighbours) : 0)
+    const behind = (end: EndOfSpan) => (ends[end].isContinuous ? momentFromBehind(i, ends[end].edges, moments, neighboursOf) : 0)
     return {
       spanMm,
       position: positionIn(strip),
@@ -64,10 +67,15 @@ export function analyseRibs(
   })
 }
 
-function spanLines(panels: readonly RibbedPanel[], { heightMm, depthMm }: RibDepths, basis: CodeBasis): SpanLines {
-  return panels.map(({ direction, ends, clearMm, loads, grossMm2 }) => {
+function spanLines(
+  panels: readonly RibbedPanel[],
+  marks: readonly string[],
+  { heightMm, depthMm }: RibDepths,
+  basis: CodeBasis,
+): SpanLine[] {
+  return panels.map(({ direction, ends, clearMm, loads, grossMm2 }, i) => {
     const span = basis.effectiveSpanMm(clearMm, heightMm, depthMm, [ends.start, ends.end])
-    return { direction, ends, span: { spanMm: span, loads, bayMm2: grossMm2 } }
+    return { mark: marks[i]!, direction, ends, span: { spanMm: span, loads, bayMm2: grossMm2 } }
   })
 }
 

@@ -3,6 +3,7 @@ import { frameAt } from '../../geometry/frame'
 import type { Point } from '../../geometry/point'
 import { type LayoutGround, layoutGround } from '../../layout/layoutGround'
 import { OutOfScopeError } from '../../outOfScope'
+import { edgesLengthMm, endBeyond } from '../analysis/endBeyond'
 import type { LineEnd } from '../analysis/levelStrips'
 import type { EndOfSpan } from '../analysis/spanForces'
 import type { PanelSite } from '../panelSite'
@@ -36,12 +37,16 @@ export function ribbedGround(site: PanelSite, scheme: RibbedScheme): RibbedGroun
 }
 
 /** One end of the panel's ribs as a whole: continuous only where every edge they end on is; the widest support counts. */
-function lineEnd({ edges }: PanelSite, ribs: readonly RibLineEnds[], end: EndOfSpan): LineEnd {
+function lineEnd(site: PanelSite, ribs: readonly RibLineEnds[], end: EndOfSpan): LineEnd {
+  const { edges } = site
   const borne = ribs.map((rib) => rib[end]).filter(({ edge }) => edge !== null)
   const numbers = [...new Set(borne.map(({ edge }) => edge!))].sort((a, b) => a - b)
   return {
     edges: numbers,
     supportMm: Math.max(0, ...borne.map(({ supportMm }) => supportMm)),
     isContinuous: numbers.length > 0 && numbers.every((edge) => edges[edge]!.continuity === 'continuous'),
+    isFree: numbers.some((edge) => edges[edge]!.continuity === 'free'),
+    supportLengthMm: edgesLengthMm(site, numbers),
+    beyond: endBeyond(site, numbers),
   }
 }

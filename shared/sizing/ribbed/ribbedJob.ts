@@ -1,4 +1,5 @@
 import type { Brief, RibbedScheme } from '../../contracts/appraisal'
+import { type AnalysisRules, analysisRules } from '../analysis/analysisRules'
 import type { CodeBasis } from '../codeBasis'
 import { givenFor } from '../givenPanel'
 import { atPath, type LevelSite } from '../panelSite'
@@ -17,6 +18,7 @@ export interface RibbedJob {
   readonly basis: CodeBasis
   readonly level: LevelSite
   readonly rules: RibBarRules
+  readonly analysis: AnalysisRules
   /** One for each panel of the level. */
   readonly shapes: readonly RibbedShape[]
   readonly groundFor: ReturnType<typeof remember<RibbedGround>>
@@ -45,7 +47,8 @@ export function ribbedJob(level: LevelSite, scheme: RibbedScheme, brief: Brief, 
     return { site, given, key: shapeKey(site, given) }
   })
   const memory = { groundFor: remember<RibbedGround>(), shapeFor: remember<RibbedPanel>(), zoneFor: remember<number>() }
-  return { scheme, brief, basis, level, rules, shapes, ...memory, designFor: remember() }
+  const analysis = analysisRules(basis, brief.redistribution)
+  return { scheme, brief, basis, level, rules, analysis, shapes, ...memory, designFor: remember() }
 }
 
 /**
@@ -55,11 +58,11 @@ export function ribbedJob(level: LevelSite, scheme: RibbedScheme, brief: Brief, 
  * @param zones - one for each panel, mm
  */
 export function laidLevel(job: RibbedJob, zones: readonly number[]): LaidLevel {
-  const { level, shapes, basis, rules } = job
+  const { level, shapes, basis, rules, analysis } = job
   const panels = shapes.map((shape, i) => shaped(job, shape, zones[i]!))
   const { heightMm, coverMm } = rules
   const depths = { heightMm, depthMm: heightMm - coverMm - job.scheme.link }
-  return { zones, panels, analyses: analyseRibs(level, panels, depths, basis) }
+  return { zones, panels, analyses: analyseRibs(level, panels, depths, basis, analysis) }
 }
 
 function shaped({ scheme, brief, basis, groundFor, shapeFor }: RibbedJob, shape: RibbedShape, zoneMm: number): RibbedPanel {

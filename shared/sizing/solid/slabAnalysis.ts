@@ -1,6 +1,7 @@
 import { OutOfScopeError } from '../../outOfScope'
 import { type FloorLoads, ultimateLoad } from '../actions'
-import { bayAreas, type SpanLine, stripOf } from '../analysis/levelStrips'
+import type { AnalysisRules } from '../analysis/analysisRules'
+import { bayAreas, type NeighboursOf, type SpanLine, stripOf } from '../analysis/levelStrips'
 import { type EdgeMoments, momentFromBehind } from '../analysis/sharedSupports'
 import type { EndOfSpan } from '../analysis/spanForces'
 import type { Strip } from '../analysis/strip'
@@ -98,39 +99,41 @@ function spanning(plan: SlabPlan, { heightMm, depthMm, loads }: SlabThickness, b
  * @throws OutOfScopeError `levels.I.panels.J.edges` where free edges leave no two opposite supports
  */
 export function analyseSlabs(
-  { neighbours }: LevelSite,
+  { neighboursOf }: LevelSite,
   plans: readonly SlabPlan[],
   thicknesses: readonly SlabThickness[],
   basis: CodeBasis,
+  rules: AnalysisRules,
 ): SlabAnalysis[] {
   const spannings = plans.map((plan, i) => spanning(plan, thicknesses[i]!, basis))
   const lines = spannings.map(spanLine)
-  const bays = bayAreas(lines, neighbours)
+  const bays = bayAreas(lines, neighboursOf)
   const withBays = lines.map((line, i) => line && { ...line, span: { ...line.span, bayMm2: bays[i]! } })
   const raw = spannings.map((each, i) =>
     each.isTwoWay
-      ? twoWay(each, ultimateLoad(each.loads, basis.loadFactors))
-      : oneWay(each, stripOf(i, withBays, neighbours), basis),
+      ? twoWay(each, ultimateLoad(each.loads, rules.factors))
+      : oneWay(each, stripOf(i, withBays, neighboursOf), rules),
   )
   const moments = raw.map(edgeMoments)
   return raw.map((analysis, i) => ({
     ...analysis,
-    short: raised(analysis.short, i, moments, neighbours),
-    long: analysis.long && raised(analysis.long, i, moments, neighbours),
+    short: raised(analysis.short, i, moments, neighboursOf),
+    long: analysis.long && raised(analysis.long, i, moments, neighboursOf),
   }))
 }
 
 function spanLine({ plan, first, firstMm, isTwoWay, loads }: Spanning): SpanLine | null {
   if (isTwoWay) return null
-  return { direction: first.direction, ends: first.ends, span: { spanMm: firstMm, loads, bayMm2: plan.areas.gross } }
+  return {
+    mark: plan.site.panel.mark,
+    direction: first.direction,
+    ends: first.ends,
+    span: { spanMm: firstMm, loads, bayMm2: plan.areas.gross },
+  }
 }
 
-function oneWay(
-  { first, second, firstMm, secondMm, loads }: Spanning,
-  strip: ReturnType<typeof stripOf>,
-  basis: CodeBasis,
-): SlabAnalysis {
-  const forces = stripForces(strip, basis.loadFactors)
+function oneWay({ first, second, firstMm, secondMm, loads }: Spanning, strip: Strip, rules: AnalysisRules): SlabAnalysis {
+  const forces = stripForces(strip, rules)
   const at = (end: EndOfSpan): EndForces => ({ hoggingNmm: forces.hoggingNmm(end, 0), shearN: forces.shearN(end, 0) })
   return {
     short: {
@@ -191,11 +194,11 @@ function edgeMoments({ short, long }: SlabAnalysis): Map<number, number> {
   return new Map([...of(short), ...(long ? of(long) : [])])
 }
 
-function raised(span: SlabSpan, panel: number, moments: EdgeMoments, neighbours: LevelSite['neighbours']): SlabSpan {
+function raised(span: SlabSpan, panel: number, moments: EdgeMoments, neighboursOf: NeighboursOf): SlabSpan {
   const at = (end: EndOfSpan): EndForces => {
     const side = span.axis.ends[end]
     if (!side.isContinuous) return span.ends[end]
-    const behind = momentFromBehind(panel, side.edges, moments, neighbours)
+    const behind = momentFromBehind(panel, side.edges, moments, neighboursOf)
     return { ...span.ends[end], hoggingNmm: Math.max(span.ends[end].hoggingNmm, behind) }
   }
   return { ...span, ends: { start: at('start'), end: at('end') } }

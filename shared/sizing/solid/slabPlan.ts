@@ -4,13 +4,13 @@ import { edgeOfRing } from '../../geometry/ring'
 import { enclosingRectangle } from '../../layout/enclosingRectangle'
 import type { PanelAreas } from '../../layout/panelLayout'
 import { solidAreas } from '../../layout/solidAreas'
+import { edgesLengthMm, endBeyond } from '../analysis/endBeyond'
 import type { LineEnd } from '../analysis/levelStrips'
 import type { EndOfSpan } from '../analysis/spanForces'
 import type { PanelSite } from '../panelSite'
 
 /** One side of the rectangle a solid panel is sized on. */
 export interface SlabSide extends LineEnd {
-  readonly isFree: boolean
   /** Continuous along some of its edges only; then it counts as discontinuous. */
   readonly isMixed: boolean
 }
@@ -66,7 +66,8 @@ function slabAxis(site: PanelSite, angle: number): SlabAxis {
 }
 
 /** Edges that face a direction more than any other of the four; where none does, the one that faces it most. */
-function side({ panel, edges }: PanelSite, outwards: Point): SlabSide {
+function side(site: PanelSite, outwards: Point): SlabSide {
+  const { panel, edges } = site
   const facing = panel.outline.map((_, i) => {
     const [[ax, ay], [bx, by]] = edgeOfRing(panel.outline, i)
     const length = Math.hypot(bx - ax, by - ay)
@@ -81,6 +82,8 @@ function side({ panel, edges }: PanelSite, outwards: Point): SlabSide {
     supportMm: Math.max(...numbers.map((i) => edges[i]!.supportWidth)),
     isContinuous: isAll,
     isFree: numbers.some((i) => edges[i]!.continuity === 'free'),
+    supportLengthMm: edgesLengthMm(site, numbers),
+    beyond: endBeyond(site, numbers),
     isMixed: !isAll && numbers.some((i) => edges[i]!.continuity === 'continuous'),
   }
 }

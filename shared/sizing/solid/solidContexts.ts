@@ -1,5 +1,6 @@
 import type { Brief, SolidScheme } from '../../contracts/appraisal'
 import { floorLoads, REINFORCED_CONCRETE_KN_PER_M3 } from '../actions'
+import { type AnalysisRules, analysisRules } from '../analysis/analysisRules'
 import type { CodeBasis } from '../codeBasis'
 import { givenFor } from '../givenPanel'
 import type { LevelSite } from '../panelSite'
@@ -29,6 +30,7 @@ interface Job {
   readonly scheme: SolidScheme
   readonly brief: Brief
   readonly basis: CodeBasis
+  readonly rules: AnalysisRules
 }
 
 /**
@@ -39,7 +41,7 @@ interface Job {
  */
 export function solidContexts(sites: readonly LevelSite[], scheme: SolidScheme, brief: Brief, basis: CodeBasis): SolidLevel[] {
   const levels = sites.map((site) => ({ site, plans: site.panels.map(slabPlan) }))
-  const job: Job = { levels, scheme, brief, basis }
+  const job: Job = { levels, scheme, brief, basis, rules: analysisRules(basis, brief.redistribution) }
   const heights = heightsOf(job)
   refuseCoverThroughSection(Math.min(...heights.flat()), brief.cover + 2 * CHOSEN_DIAMETERS[0])
   return levels.map((level, i) => ({
@@ -62,12 +64,16 @@ function heightsOf(job: Job): number[][] {
   return evenly(leastThickness(all))
 }
 
-function contextsAt({ scheme, brief, basis }: Job, { site, plans }: JobLevel, heightsMm: readonly number[]): SlabContext[] {
+function contextsAt(
+  { scheme, brief, basis, rules }: Job,
+  { site, plans }: JobLevel,
+  heightsMm: readonly number[],
+): SlabContext[] {
   const thicknesses = heightsMm.map((heightMm) => {
     const loads = floorLoads((heightMm / 1000) * REINFORCED_CONCRETE_KN_PER_M3, brief)
     return { heightMm, depthMm: heightMm - brief.cover, loads }
   })
-  const analyses = analyseSlabs(site, plans, thicknesses, basis)
+  const analyses = analyseSlabs(site, plans, thicknesses, basis, rules)
   return plans.map((plan, i) => {
     const own = givenFor(scheme.givenPanels, site.mark, plan.site.panel.mark)?.bars ?? scheme.bars
     return { basis, brief, given: own === 'computed' ? null : own, plan, analysis: analyses[i]!, heightMm: heightsMm[i]! }

@@ -3,9 +3,10 @@ import { describe, expect, it } from 'vitest'
 import type { FloorLoads } from '#shared/sizing/actions'
 import { elasticForces } from '#shared/sizing/analysis/elasticForces'
 import { greatestSagging, momentAt, shearAt } from '#shared/sizing/analysis/continuousBeam'
+import { analysisRulesOf } from '../support/analysisRulesOf'
 import { stiffnessMoments } from '../support/directStiffness'
 
-const factors = { permanent: 1.35, variable: 1.5, unloaded: 1.35, clause: 'EN 1990 6.10' }
+const rules = analysisRulesOf()
 const loadsOf = (permanent: number, variable: number): FloorLoads => ({
   permanentKnPerM2: permanent,
   variableKnPerM2: variable,
@@ -16,7 +17,7 @@ const loadsOf = (permanent: number, variable: number): FloorLoads => ({
 describe('elasticForces', () => {
   it('gives two equal spans under pattern loading the moments worked by hand', () => {
     const span = { spanMm: 5000, loads: loadsOf(4, 3), bayMm2: 0 }
-    const forces = elasticForces([span, span], 0, factors)
+    const forces = elasticForces([span, span], 0, rules)
     // Both loaded: w = 1.35·4 + 1.5·3 = 9.9; support w·l²/8 = 9.9·25/8 = 30.94 kNm.
     expect(forces.hoggingNmm('end', 0) / 1e6).toBeCloseTo(30.9375, 4)
     // This span loaded, the other at 5.4: support (9.9 + 5.4)·25/16 = 23.91; R = 9.9·2.5 − 23.91/5 = 19.97; sagging R²/(2·9.9) = 20.14.
@@ -37,7 +38,7 @@ describe('elasticForces', () => {
       fc.property(fc.array(span, { minLength: 2, maxLength: 5 }), fc.nat(), (spans, pick) => {
         const index = pick % spans.length
         const beam = spans.map(([spanMm, permanent, variable]) => ({ spanMm, loads: loadsOf(permanent, variable), bayMm2: 0 }))
-        const forces = elasticForces(beam, index, factors)
+        const forces = elasticForces(beam, index, rules)
         const length = spans[index]![0]
         const cases = Array.from({ length: 2 ** spans.length }, (_, bits) => {
           const loads = spans.map(([, permanent, variable], i) => 1.35 * permanent + ((bits >> i) & 1 ? 1.5 * variable : 0))
