@@ -8,6 +8,7 @@ import type { ScopeDeclaration } from '#shared/contracts/sameScope'
 import { scopeDeclaration } from '#shared/contracts/sameScope'
 import type { z } from 'zod'
 import type { FileOrigin } from '../workers/appraisalAnswer'
+import { panelsLeftOut, withoutGiven } from '../workers/withoutGiven'
 
 /** What an appraisal file is made from: a surveyor's sheet, or a reader's, which has no prices. */
 export interface AppraisalSource {
@@ -70,6 +71,7 @@ export function toAppraisalFile(source: AppraisalSource): AppraisalDraft {
     const value = read(scheme, row.specification, `schemes.${index}`, problems)
     return value === null ? [] : [{ value, index }]
   })
+  const rows = levels.map(({ value }) => value)
   const priced = ratesOf(source, problems)
   const marks = schemes.map(({ value }) => value.mark)
   const declared = scopeOf(source, marks, problems)
@@ -82,8 +84,11 @@ export function toAppraisalFile(source: AppraisalSource): AppraisalDraft {
       ? {
           format: 'bothways.appraisal/1',
           brief: readBrief,
-          levels: levels.map(({ value }) => value),
-          schemes: schemes.map(({ value }) => value),
+          levels: rows,
+          schemes: withoutGiven(
+            schemes.map(({ value }) => value),
+            panelsLeftOut(source.levels, rows),
+          ),
           scope: declared,
           factors: readFactors,
           ...(priced === undefined ? {} : { rates: priced }),

@@ -12,6 +12,7 @@ import type { FullAppraisal } from '#shared/appraise'
 import type { AppraisalSource } from './appraisalFile'
 import { useSessionStore } from './session'
 import { createSheetAppraisal } from './sheetAppraisal'
+import { followMarks } from './followMarks'
 import type { SheetRow } from './sheetRow'
 import { levelInputOf, schemeInputOf, withoutRow, withRow } from './sheetRow'
 import { createSheetSaving } from './sheetSaving'
@@ -19,7 +20,7 @@ import { createSheetSaving } from './sheetSaving'
 /**
  * The open project. A surveyor has a working copy (`sheet`), changed at once, appraised in the browser and saved after a pause;
  * a developer or an engineer reads what the server appraised (`reading`). `project`, `levels`, `schemes`, `edition` and `full`
- * serve both.
+ * serve both, `file` is what was appraised here.
  */
 export const useProjectStore = defineStore('project', () => {
   const session = useSessionStore()
@@ -79,7 +80,9 @@ export const useProjectStore = defineStore('project', () => {
 
   function changeLevel(levelId: string, input: LevelInput): void {
     const row = sheet.value?.levels.find(({ id }) => id === levelId)
-    if (row !== undefined) change({ kind: 'level', row: { ...row, ...input } })
+    if (row === undefined || sheet.value === null) return
+    change({ kind: 'level', row: { ...row, ...input } })
+    for (const scheme of followMarks(sheet.value.schemes, row, input)) change({ kind: 'scheme', row: scheme })
   }
 
   function changeScheme(schemeId: string, input: SchemeInput): void {
@@ -147,6 +150,7 @@ export const useProjectStore = defineStore('project', () => {
     schemes,
     edition,
     full,
+    file: appraisal.file,
     problems,
     isAppraising: appraisal.isAppraising,
     fault: appraisal.fault,

@@ -1,6 +1,7 @@
 import type { ApiIssue } from '#shared/contracts/apiError'
 import { ref, shallowRef } from 'vue'
 import type { FullAppraisal } from '#shared/appraise'
+import type { AppraisalFile } from '#shared/contracts/appraisal'
 import type { Appraiser } from '../workers/appraiser'
 import { createAppraiser } from '../workers/appraiser'
 import type { AppraisalSource } from './appraisalFile'
@@ -11,6 +12,8 @@ const PAUSE_MS = 80
 /** Appraises a working copy whenever it changed, off the main thread; the last good result stands until the next one. */
 export function createSheetAppraisal(source: () => AppraisalSource | null) {
   const full = shallowRef<FullAppraisal | null>(null)
+  /** The file that `full` was made from. */
+  const file = shallowRef<AppraisalFile | null>(null)
   const problems = shallowRef<readonly ApiIssue[]>([])
   const isAppraising = ref(false)
   const fault = ref<string | null>(null)
@@ -25,6 +28,7 @@ export function createSheetAppraisal(source: () => AppraisalSource | null) {
         fault.value = null
         problems.value = [...leftOut, ...answer.problems]
         full.value = answer.full
+        file.value = answer.file
       },
       (message) => {
         isAppraising.value = false
@@ -36,14 +40,19 @@ export function createSheetAppraisal(source: () => AppraisalSource | null) {
   function ask(): void {
     const given = source()
     if (given === null) return
-    const { file, origin, problems: refused } = toAppraisalFile(given)
+    const { file: asked, origin, problems: refused } = toAppraisalFile(given)
     leftOut = refused
     appraiser ??= start()
-    if (file !== null) return appraiser.ask(file, origin)
+    if (asked !== null) return appraiser.ask(asked, origin)
     appraiser.drop()
     isAppraising.value = false
     problems.value = refused
-    if (given.levels.every(({ panels }) => panels.length === 0) || given.schemes.length === 0) full.value = null
+    if (given.levels.every(({ panels }) => panels.length === 0) || given.schemes.length === 0) forget()
+  }
+
+  function forget(): void {
+    full.value = null
+    file.value = null
   }
 
   function schedule(pause = PAUSE_MS): void {
@@ -55,11 +64,11 @@ export function createSheetAppraisal(source: () => AppraisalSource | null) {
   function reset(): void {
     clearTimeout(timer)
     appraiser?.drop()
-    full.value = null
+    forget()
     problems.value = []
     fault.value = null
     isAppraising.value = false
   }
 
-  return { full, problems, isAppraising, fault, schedule, reset }
+  return { full, file, problems, isAppraising, fault, schedule, reset }
 }

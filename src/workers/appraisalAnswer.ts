@@ -18,5 +18,7 @@ export interface AppraisalRequest {
 export interface AppraisalAnswer {
   readonly id: number
   readonly full: FullAppraisal | null
+  /** What `full` was made from: the file less what could not stand; null with it. */
+  readonly file: AppraisalFile | null
   readonly problems: readonly ApiIssue[]
 }

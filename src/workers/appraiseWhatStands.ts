@@ -3,11 +3,15 @@ import { AppraisalRefusedError } from '#shared/appraisalRefused'
 import type { ApiIssue } from '#shared/contracts/apiError'
 import type { AppraisalFile } from '#shared/contracts/appraisal'
 import { OutOfScopeError } from '#shared/outOfScope'
+import type { AppraisalAnswer } from './appraisalAnswer'
 import type { TracedFile } from './fileRows'
 import { namesFloor, pathInSheet, rowCount, withoutRows } from './fileRows'
 import { panelMisfits } from './panelMisfits'
 
 type Appraise = (file: AppraisalFile) => FullAppraisal
+
+/** What could be appraised, from which file, and what could not. */
+type Stood = Omit<AppraisalAnswer, 'id'>
 
 /** The result of one try, and what it says against the file. @throws what is a fault of the engine */
 function attempt(appraise: Appraise, file: AppraisalFile): { full: FullAppraisal | null; issues: readonly ApiIssue[] } {
@@ -26,7 +30,7 @@ function attempt(appraise: Appraise, file: AppraisalFile): { full: FullAppraisal
  * so that one half-typed panel does not blank the sheet. A panel that one scheme cannot cover is left out of all of them,
  * so that the schemes still answer the same floor.
  */
-export function appraiseWhatStands(appraise: Appraise, given: TracedFile): { full: FullAppraisal | null; problems: ApiIssue[] } {
+export function appraiseWhatStands(appraise: Appraise, given: TracedFile): Stood {
   const misfits = panelMisfits(given.file)
   const problems: ApiIssue[] = misfits.map(({ path, message }) => ({ path: pathInSheet(path, given.origin), message }))
   let traced = withoutRows(
@@ -38,10 +42,16 @@ export function appraiseWhatStands(appraise: Appraise, given: TracedFile): { ful
     const { origin } = traced
     problems.push(...issues.map(({ path, message }) => ({ path: pathInSheet(path, origin), message })))
     const barred = issues.map(({ path }) => path).filter((path) => full === null || namesFloor(path))
-    if (barred.length === 0) return { full, problems }
+    if (barred.length === 0) return stood(full, traced.file, problems)
     const rest = withoutRows(traced, barred)
-    if (rowCount(rest) === rowCount(traced)) return { full, problems }
+    if (rowCount(rest) === rowCount(traced)) return stood(full, traced.file, problems)
     traced = rest
   }
-  return { full: null, problems }
+  return stood(null, traced.file, problems)
 }
+
+const stood = (full: FullAppraisal | null, file: AppraisalFile, problems: readonly ApiIssue[]): Stood => ({
+  full,
+  file: full && file,
+  problems,
+})

@@ -1,5 +1,6 @@
 import type { AppraisalFile } from '#shared/contracts/appraisal'
 import type { FileOrigin } from './appraisalAnswer'
+import { panelsLeftOut, withoutGiven } from './withoutGiven'
 
 /** A file and where its rows came from. */
 export interface TracedFile {
@@ -40,12 +41,10 @@ export function withoutRows({ file, origin }: TracedFile, paths: readonly string
     ]
   })
   const schemes = file.schemes.map((_, scheme) => scheme).filter((scheme) => isLeft(`schemes.${scheme}`))
+  const rows = levels.map(({ row }) => row)
+  const kept = file.schemes.filter((_, scheme) => schemes.includes(scheme))
   return {
-    file: {
-      ...file,
-      levels: levels.map(({ row }) => row),
-      schemes: file.schemes.filter((_, scheme) => schemes.includes(scheme)),
-    },
+    file: { ...file, levels: rows, schemes: withoutGiven(kept, panelsLeftOut(file.levels, rows)) },
     origin: { levels: levels.map(({ from }) => from), schemes: origin.schemes.filter((_, scheme) => schemes.includes(scheme)) },
   }
 }

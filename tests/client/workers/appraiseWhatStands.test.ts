@@ -29,7 +29,8 @@ describe('appraiseWhatStands', () => {
       ['P1', 'P3', 'P4'],
       ['P1', 'P4'],
     ])
-    expect(answer).toEqual({ full: empty, problems: [{ path: 'levels.1.panels.2.outline', message: 'crosses itself' }] })
+    expect(answer).toMatchObject({ full: empty, problems: [{ path: 'levels.1.panels.2.outline', message: 'crosses itself' }] })
+    expect(marksOf(answer.file!)).toEqual(['P1', 'P4'])
   })
 
   it('leaves a panel that one scheme cannot cover out of all of them', () => {
@@ -50,7 +51,7 @@ describe('appraiseWhatStands', () => {
   it('keeps the other schemes when one lies outside its rules', () => {
     const full = { ...empty, problems: [{ scheme: 'R1', issue: { path: 'schemes.0.topping', message: 'too thin' } }] }
     const answer = appraiseWhatStands(() => full, { file: aFile(['P1', 'P3', 'P4']), origin })
-    expect(answer).toEqual({ full, problems: [{ path: 'schemes.0.topping', message: 'too thin' }] })
+    expect(answer).toMatchObject({ full, problems: [{ path: 'schemes.0.topping', message: 'too thin' }] })
   })
 
   it('answers nothing when the brief is refused, or no panel is left', () => {
@@ -60,6 +61,7 @@ describe('appraiseWhatStands', () => {
     const given = { file: aFile(['P1', 'P3', 'P4']), origin }
     expect(appraiseWhatStands(refuse('brief.cover'), given)).toEqual({
       full: null,
+      file: null,
       problems: [{ path: 'brief.cover', message: 'no' }],
     })
     expect(appraiseWhatStands(refuse('levels.0.panels.0'), given).full).toBeNull()
