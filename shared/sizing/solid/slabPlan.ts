@@ -3,11 +3,13 @@ import type { Point } from '../../geometry/point'
 import { edgeOfRing } from '../../geometry/ring'
 import { enclosingRectangle } from '../../layout/enclosingRectangle'
 import type { PanelAreas } from '../../layout/panelLayout'
+import { type PanelField, panelField } from '../../layout/panelField'
 import { solidAreas } from '../../layout/solidAreas'
 import { edgesLengthMm, endBeyond } from '../analysis/endBeyond'
 import type { LineEnd } from '../analysis/levelStrips'
 import type { EndOfSpan } from '../analysis/spanForces'
 import type { PanelSite } from '../panelSite'
+import { remember } from '../remember'
 
 /** One side of the rectangle a solid panel is sized on. */
 export interface SlabSide extends LineEnd {
@@ -33,6 +35,8 @@ export interface SlabPlan {
   readonly isRectangle: boolean
   /** Along the longer side of the outline's rectangle, and across it. */
   readonly axes: readonly [SlabAxis, SlabAxis]
+  /** The panel turned so that bars along an axis run along x. */
+  readonly fieldAlong: (axis: SlabAxis) => PanelField
 }
 
 const dot = (a: Point, b: Point) => a[0] * b[0] + a[1] * b[1]
@@ -46,11 +50,13 @@ export function slabPlan(site: PanelSite): SlabPlan {
   const { longDirection, isFilled } = enclosingRectangle(site.panel.outline)
   const along = longDirection % 180
   const across = (along + 90) % 180
+  const fields = remember<PanelField>()
   return {
     site,
     areas: solidAreas(site.panel, site.sharedEdges),
     isRectangle: isFilled,
     axes: [slabAxis(site, along), slabAxis(site, across)],
+    fieldAlong: ({ angle }) => fields(String(angle), () => panelField({ ...site.panel, ribDirection: angle }, site.clear, 0)),
   }
 }
 

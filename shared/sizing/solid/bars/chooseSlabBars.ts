@@ -1,7 +1,7 @@
 import type { BarLayer } from '../../../contracts/appraisal'
 import { type Candidate, chooseLeastMass } from '../../bars/chooseLeastMass'
 import type { Flexure } from '../../codeBasis'
-import type { Finding } from '../../finding'
+import { type Finding, isMet } from '../../finding'
 import { CHOSEN_DIAMETERS } from '../../tables/bars'
 import { chooseLongBottom, shortFindings, shortLayer } from './chooseBottomBars'
 import { chooseTopBars, type TopBars } from './chooseTopBars'
@@ -24,20 +24,47 @@ export interface SlabBars {
 /** Bottom bars with one layer in the direction spanned first, and all that follows from it. */
 type BottomBars = Omit<SlabBars, 'tops' | 'findings'>
 
-function candidateOf(context: SlabContext, layer: BarLayer): Candidate<BottomBars> {
+/** Bottom bars in the direction spanned first alone: their mass, and what the checks find of them. */
+interface ShortBars {
+  readonly layer: BarLayer
+  readonly strips: StripLayers
+  readonly massKg: number
+  readonly findings: readonly Finding[]
+}
+
+function shortBars(context: SlabContext, layer: BarLayer): ShortBars {
   const { analysis, given } = context
+  const strips = given ? { middle: layer, edge: null } : inStrips(context, layer, layerDepthMm(context, layer.diameter, null))
+  const piece = bottomParts(context, analysis.short.axis, layer)
+  const massKg = stripsMassKg(context, strips, piece, analysis.other.clearMm, false)
+  return { layer, strips, massKg, findings: shortFindings(context, layer) }
+}
+
+function candidateOf(context: SlabContext, { layer, strips, massKg, findings }: ShortBars): Candidate<BottomBars> {
   const midspan = midspanFlexure(context, 'short', layer.diameter, null)
-  const depthMm = layerDepthMm(context, layer.diameter, null)
-  const short = given ? { middle: layer, edge: null } : inStrips(context, layer, depthMm)
   const across = chooseLongBottom(context, layer)
-  const bottom = { short, long: across.option }
   const torsion = torsionBars(context, midspan.requiredMm2)
-  const own = stripsMassKg(context, short, bottomParts(context, analysis.short.axis, layer), analysis.other.clearMm, false)
   return {
-    option: { bottom, torsion, midspan },
-    massKg: own + across.massKg + torsion.reduce((sum, each) => sum + each.massKg, 0),
-    findings: () => [...shortFindings(context, layer), ...across.findings()],
+    option: { bottom: { short: strips, long: across.option }, torsion, midspan },
+    massKg: massKg + across.massKg + torsion.reduce((sum, each) => sum + each.massKg, 0),
+    findings: () => [...findings, ...across.findings()],
   }
+}
+
+const pass = (findings: readonly Finding[]) => findings.every(({ demand, capacity }) => isMet(demand, capacity))
+
+/**
+ * The lightest bottom bars that pass every check; null where none does. Bars that weigh more in one direction than the best so far in
+ * both are passed over.
+ */
+function lightestPassing(context: SlabContext, all: readonly ShortBars[]): Candidate<BottomBars> | null {
+  let best: Candidate<BottomBars> | null = null
+  for (const each of all.filter(({ findings }) => pass(findings)).sort((a, b) => a.massKg - b.massKg)) {
+    if (best && each.massKg > best.massKg) return best
+    const candidate = candidateOf(context, each)
+    if ((!best || candidate.massKg < best.massKg) && pass(candidate.findings())) best = candidate
+  }
+  return best
 }
 
 /**
@@ -47,9 +74,8 @@ function candidateOf(context: SlabContext, layer: BarLayer): Candidate<BottomBar
  */
 export function chooseSlabBars(context: SlabContext): SlabBars {
   const tops = topPlaces(context).map((place) => chooseTopBars(context, place))
-  const candidates = context.given
-    ? [candidateOf(context, context.given.bottomX)]
-    : CHOSEN_DIAMETERS.map((diameter) => candidateOf(context, shortLayer(context, diameter)))
-  const best = chooseLeastMass(candidates)
+  const layers = context.given ? [context.given.bottomX] : CHOSEN_DIAMETERS.map((diameter) => shortLayer(context, diameter))
+  const all = layers.map((layer) => shortBars(context, layer))
+  const best = lightestPassing(context, all) ?? chooseLeastMass(all.map((each) => candidateOf(context, each)))
   return { ...best.option, tops, findings: [...best.findings(), ...tops.flatMap(({ findings }) => findings)] }
 }

@@ -49,16 +49,18 @@ function topLayer(context: SlabContext, place: TopPlace, diameter: BarDiameter):
   return firstMeeting(layerFor(diameter, needed, greatest), (each) => shearOf(context, place, depthMm, each))
 }
 
-function candidateOf(context: SlabContext, place: TopPlace, diameter: BarDiameter): Candidate<TopBars> {
+/** The lightest bars of one diameter; what the checks find is worked out when it is first asked for. */
+function candidateOf(context: SlabContext, place: TopPlace, diameter: BarDiameter): Candidate<() => TopBars> {
   const layer = topLayer(context, place, diameter)
   const depthMm = layerDepthMm(context, diameter, outerOf(context, place, diameter))
   const layers = isHogging(place) ? inStrips(context, layer, depthMm) : { middle: layer, edge: null }
   const { short, other } = context.analysis
   const [along, across] = place.direction === 'short' ? [short.axis, other] : [other, short.axis]
-  const option = judged(context, place, layer, layers)
+  let found: TopBars | null = null
+  const option = () => (found ??= judged(context, place, layer, layers))
   return {
     option,
-    findings: () => option.findings,
+    findings: () => option().findings,
     massKg: stripsMassKg(context, layers, topParts(context, place, layer, along.clearMm), across.clearMm, true),
   }
 }
@@ -82,5 +84,5 @@ export function chooseTopBars(context: SlabContext, place: TopPlace): TopBars {
   const given = givenTop(context, place)
   if (given) return judged(context, place, given, { middle: given, edge: null })
   if (context.given && isHogging(place)) return judged(context, place, null, null)
-  return chooseLeastMass(CHOSEN_DIAMETERS.map((diameter) => candidateOf(context, place, diameter))).option
+  return chooseLeastMass(CHOSEN_DIAMETERS.map((diameter) => candidateOf(context, place, diameter))).option()
 }

@@ -1,7 +1,7 @@
 import { chordsAt } from '../../../geometry/region'
 import { boundsOf } from '../../../geometry/ring'
 import { FIT_TOLERANCE_MM } from '../../../geometry/tolerance'
-import { type PanelField, panelField } from '../../../layout/panelField'
+import type { PanelField } from '../../../layout/panelField'
 import { type LineEndOnEdge, lineEndAt } from '../../bars/lineEndAt'
 import type { SlabAxis, SlabPlan } from '../slabPlan'
 
@@ -29,17 +29,8 @@ export function slabLines(plan: SlabPlan, axis: SlabAxis, from: number, to: numb
     const line: SlabLine = { clearMm: axis.clearMm, fullMm: axis.clearMm, start: at('start'), end: at('end') }
     return new Array<SlabLine>(count).fill(line)
   }
-  const field = slabField(plan, axis)
+  const field = plan.fieldAlong(axis)
   return lineLevels(field, from, to, count).flatMap((y) => linesAt(plan, axis, field, y).map(({ line }) => line))
-}
-
-/**
- * A panel turned so that bars along an axis run along x.
- *
- * Source: geometry
- */
-export function slabField({ site }: SlabPlan, axis: SlabAxis): PanelField {
-  return panelField({ ...site.panel, ribDirection: axis.angle }, site.clear, 0)
 }
 
 /**

@@ -13,7 +13,7 @@ import { bottomLineEnd } from './bottomLineEnd'
 import type { SlabBars } from './chooseSlabBars'
 import type { TopBars } from './chooseTopBars'
 import type { StripLayers } from './slabLayer'
-import { lineLevels, linesAt, type PlacedLine, slabField } from './slabLines'
+import { lineLevels, linesAt, type PlacedLine } from './slabLines'
 import { lineCount, SLAB_TOP_REACH, slabBond } from './slabMass'
 import { stripsOf } from './slabStrips'
 
@@ -45,7 +45,7 @@ export function trimmerLines(context: SlabContext, { bottom, tops }: SlabBars): 
 }
 
 function bottomTrimmers(context: SlabContext, course: Course): BarLines[] {
-  const field = slabField(context.plan, course.axis)
+  const field = context.plan.fieldAlong(course.axis)
   const { diameter } = course.layers.middle
   return field.voidRings.flatMap((ring, i) => {
     const cut = linesCut(field, course, ring).length
@@ -94,7 +94,7 @@ function topTrimmers(context: SlabContext, { place, layers }: TopBars): BarLines
   const [axis, across] = place.direction === 'short' ? [short.axis, other] : [other, short.axis]
   const edges = place.side.edges.map((edge) => edge + 1).join(', ')
   const course: Course = { name: `top, edge ${edges}`, axis, acrossMm: across.clearMm, layers, isTop: true }
-  const field = slabField(context.plan, axis)
+  const field = context.plan.fieldAlong(axis)
   return field.voidRings.flatMap((ring, i) => {
     const { minX, maxX } = boundsOf(ring)
     const near = (y: number) =>

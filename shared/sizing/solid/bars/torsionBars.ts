@@ -6,6 +6,7 @@ import { CHOSEN_DIAMETERS } from '../../tables/bars'
 import { topFlexure } from '../layerFindings'
 import { greatestSpacingMm } from '../slabLimits'
 import { givenTop, hasHeldCorners, isHogging, layerDepthMm, type SlabContext, type TopPlace, topPlaces } from '../slabContext'
+import { remember } from '../../remember'
 import { leastMm2 } from './firstMeeting'
 import { layerAreaMm2, layerFor } from './slabLayer'
 import { layerMassKg } from './slabMass'
@@ -43,6 +44,7 @@ const [THINNEST, THICKEST] = [CHOSEN_DIAMETERS[0], CHOSEN_DIAMETERS[CHOSEN_DIAME
 export function torsionBars(context: SlabContext, midspanMm2: number): TorsionBars[] {
   if (!hasHeldCorners(context)) return []
   const places = topPlaces(context)
+  const lightest = remember<AddedBars>()
   const placeAt = (direction: Direction, end: EndOfSpan) =>
     places.find((each) => each.direction === direction && each.end === end)
   return ENDS.flatMap((short) =>
@@ -56,7 +58,13 @@ export function torsionBars(context: SlabContext, midspanMm2: number): TorsionBa
       return (['bottom', 'top'] as const).flatMap((face) =>
         (['short', 'long'] as const).flatMap((direction) => {
           const crossing = face === 'bottom' ? bottomCrossing(context, direction) : topCrossing(context, sides[direction])
-          return added(context, { face, direction, corner }, neededMm2 - crossing, sides[direction].side)
+          const missingMm2 = neededMm2 - crossing
+          if (missingMm2 <= 1e-9) return []
+          const { side } = sides[direction]
+          const bars = lightest([missingMm2, face, side.supportMm, side.isContinuous].join(), () =>
+            added(context, missingMm2, face, side),
+          )
+          return [{ face, direction, corner, ...bars }]
         }),
       )
     }),
@@ -81,25 +89,22 @@ function topCrossing(context: SlabContext, place: TopPlace): number {
   return topFlexure(context, place, THINNEST, place.direction === 'short' ? null : THINNEST).requiredMm2
 }
 
-function added(
-  context: SlabContext,
-  where: Pick<TorsionBars, 'face' | 'direction' | 'corner'>,
-  missingMm2: number,
-  side: SlabSide,
-): TorsionBars[] {
-  if (missingMm2 <= 1e-9) return []
+type AddedBars = Omit<TorsionBars, 'face' | 'direction' | 'corner'>
+
+/** The lightest layer that makes up what is missing. */
+function added(context: SlabContext, missingMm2: number, face: TorsionBars['face'], side: SlabSide): AddedBars {
   const widthMm = EXTENT * context.analysis.short.spanMm
   const greatestMm = (diameterMm: BarDiameter) =>
     greatestSpacingMm(context, 'principal', diameterMm, layerDepthMm(context, diameterMm, null))
   const options = CHOSEN_DIAMETERS.map((diameter) => ({ layer: layerFor(diameter, missingMm2, greatestMm(diameter)), diameter }))
   const enough = options.filter(({ layer }) => layerAreaMm2(layer) >= missingMm2)
-  const made = (enough.length > 0 ? enough : options.slice(-1)).map(({ layer, diameter }): TorsionBars => {
+  const made = (enough.length > 0 ? enough : options.slice(-1)).map(({ layer, diameter }): AddedBars => {
     const { pastMm, legMm } = bottomBarEnd(context.basis, diameter, side, {
       coverMm: context.brief.cover,
       heightMm: context.heightMm,
     })
     const piece: BarPiece = { parts: [widthMm, pastMm], legs: [legMm, 0] }
-    return { ...where, layer, piece, widthMm, massKg: layerMassKg(context, layer, piece, widthMm, where.face === 'top') }
+    return { layer, piece, widthMm, massKg: layerMassKg(context, layer, piece, widthMm, face === 'top') }
   })
-  return [made.reduce((best, each) => (each.massKg < best.massKg ? each : best))]
+  return made.reduce((best, each) => (each.massKg < best.massKg ? each : best))
 }
