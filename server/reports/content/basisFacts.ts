@@ -1,4 +1,5 @@
 import type { Brief } from '#shared/contracts/appraisal'
+import { nationalValuesText } from '#shared/sizing/nationalValuesText'
 import { dayText, figureText, listText } from '../figureText'
 import type { FrozenComparison } from '../frozenComparison'
 import type { ReportFact } from './reportFact'
@@ -9,8 +10,9 @@ export function basisName({ basis }: Brief): string {
 }
 
 function basisText(brief: Brief): string {
-  if (brief.basis === 'EN1992') return 'EN 1992-1-1 and EN 1992-1-2 with the recommended national values, except αcc = 0.85.'
-  return 'BS 8110-1:1997, withdrawn in 2010 and used here because local practice still does.'
+  const values = nationalValuesText(brief)
+  if (brief.basis === 'EN1992') return `EN 1992-1-1 and EN 1992-1-2 with ${values}.`
+  return `BS 8110-1:1997 with ${values}; withdrawn in 2010 and used here because local practice still does.`
 }
 
 function strengthText(brief: Brief): string {

@@ -62,6 +62,46 @@ describe('BriefView', () => {
     expect(store.project?.brief.cover).toBe(25)
   })
 
+  it('goes over to BS 8110 by the same class and steel, and keeps every other field', async () => {
+    const { store } = await shown()
+    const before = store.project!.brief
+    if (before.basis !== 'EN1992') throw new Error('the sheet of the test is by EN 1992')
+    byRole('combobox', 'Sized by').click()
+    await flushPromises()
+    ;[...document.querySelectorAll<HTMLElement>('[role=option]')]
+      .find(({ textContent }) => textContent.includes('BS 8110'))!
+      .click()
+    await flushPromises()
+    expect(store.project?.brief).toEqual(before)
+    const cube = byRole('textbox', 'Concrete, cube strength fcu, MPa') as HTMLInputElement
+    expect([before.fck, cube.value]).toEqual([25, '30'])
+    type(byRole('textbox', 'Reinforcement, yield strength fy, MPa'), '460')
+    await vi.advanceTimersByTimeAsync(1)
+    byRole('button', 'Size by BS 8110-1:1997').click()
+    await flushPromises()
+    const { fck, fyk } = before
+    const after = store.project!.brief
+    expect(after).toMatchObject({ basis: 'BS8110', fcu: 30, fy: 460, nationalValues: {} })
+    expect({ ...after, basis: 'EN1992', fcu: undefined, fy: undefined, fck, fyk }).toEqual(before)
+    expect(document.body.textContent).toContain('BS 8110 was withdrawn in 2010; use it only where local practice still does.')
+  })
+
+  it('stores a nationally chosen value, and nothing once it is the recommended one again', async () => {
+    const { store } = await shown()
+    byRole('button', 'Nationally chosen values').click()
+    await flushPromises()
+    type(byRole('textbox', 'αcc, concrete in bending'), '1')
+    await flushPromises()
+    expect(store.project?.brief.nationalValues).toEqual({ alphaCc: 1 })
+    expect(document.body.textContent).toContain('With αcc = 1; the other values recommended.')
+    type(byRole('textbox', 'αcc, concrete in bending'), '0.85')
+    await flushPromises()
+    expect(store.project?.brief.nationalValues).toEqual({})
+    ;(byRole('checkbox', 'Span to depth is capped at K times a value') as HTMLInputElement).click()
+    await flushPromises()
+    expect(store.project?.brief.nationalValues).toEqual({ greatestSpanDepth: 35 })
+  })
+
   it('shows what the server refuses at its field', async () => {
     await shown({ [`PUT ${PROJECT}`]: () => failing(400, 'invalid_request', [{ path: 'name', message: 'expected a name' }]) })
     type(byRole('textbox', 'Name'), '')
