@@ -35,6 +35,12 @@ const projectSheets: NamedRoute[] = [
     meta: { title: 'Schemes', roles: surveyor },
   },
   {
+    path: 'bars',
+    name: 'bars',
+    component: () => import('../views/BarsView.vue'),
+    meta: { title: 'Bars', roles: ['surveyor', 'engineer'] },
+  },
+  {
     path: 'quantities',
     name: 'quantities',
     component: () => import('../views/QuantitiesView.vue'),

@@ -8,6 +8,7 @@ export type RouteName =
   | 'brief'
   | 'levels'
   | 'schemes'
+  | 'bars'
   | 'quantities'
   | 'bill'
   | 'compare'

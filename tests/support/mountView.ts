@@ -20,6 +20,7 @@ const NAMES = [
   'brief',
   'levels',
   'schemes',
+  'bars',
   'quantities',
   'bill',
   'compare',

@@ -5,6 +5,7 @@ export const PROJECT_SHEETS = [
   { name: 'brief', word: 'Brief', roles: ['surveyor'] },
   { name: 'levels', word: 'Levels', roles: ['surveyor'] },
   { name: 'schemes', word: 'Schemes', roles: ['surveyor'] },
+  { name: 'bars', word: 'Bars', roles: ['surveyor', 'engineer'] },
   { name: 'quantities', word: 'Quantities', roles: ['surveyor'] },
   { name: 'bill', word: 'Bill', roles: ['surveyor'] },
   { name: 'compare', word: 'Compare', roles: ['surveyor', 'developer'] },
