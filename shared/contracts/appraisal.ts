@@ -3,7 +3,7 @@ import { z } from 'zod'
 import { britishExposure, europeanExposure } from './exposure'
 import { factors } from './factors'
 import { britishValues, europeanValues } from './nationalValues'
-import { mark } from './primitives'
+import { line, mark } from './primitives'
 import { scope } from './sameScope'
 
 export { mark }
@@ -130,11 +130,16 @@ export const solid = z
     thickness: z.union([z.literal('least'), z.number().min(50).max(1500)]),
     thicknessPer: z.enum(['scheme', 'panel']).default('scheme'), // 'panel': each panel the least at which it passes
     bars: z.union([z.literal('computed'), slabLayers]).default('computed'),
+    thicknessNote: line(400).optional(), // how a given thickness was found
     givenPanels: z.array(givenSolidPanel).max(5000).default([]),
   })
   .refine(({ thickness, thicknessPer }) => thicknessPer === 'scheme' || thickness === 'least', {
     path: ['thicknessPer'],
     error: "expected scheme where the thickness is a number: 'panel' is for the least thickness of each panel",
+  })
+  .refine(({ thickness, thicknessNote }) => thickness !== 'least' || thicknessNote === undefined, {
+    path: ['thicknessNote'],
+    error: 'expected no note on a thickness that the engine finds',
   })
 export const level = z.strictObject({ mark, repeat, panels: z.array(panel).min(1).max(500) })
 export const scheme = z.discriminatedUnion('kind', [ribbed, solid])

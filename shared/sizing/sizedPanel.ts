@@ -1,4 +1,4 @@
-import type { BarDiameter, Check, PanelResult } from '../contracts/appraisal'
+import type { Bar, BarDiameter, Check, PanelResult, SlabLayers } from '../contracts/appraisal'
 import type { PanelAreas, PanelLayout } from '../layout/panelLayout'
 import type { BarShape } from './bars/barShape'
 import type { FireStanding } from './fireStanding'
@@ -20,6 +20,11 @@ export interface BarRun {
   readonly clause: string
 }
 
+/** A panel's bars in the shapes in which a scheme gives them: bottom and heavier top bars of a rib, or layers of a slab. */
+export type Reinforcement =
+  | { readonly kind: 'ribbed'; readonly ribBars: readonly Bar[]; readonly topBars: readonly Bar[] }
+  | { readonly kind: 'solid'; readonly bars: SlabLayers }
+
 /** A panel of one scheme, sized: what the take-off measures and the checks show. */
 export interface SizedPanel {
   readonly level: string
@@ -34,6 +39,7 @@ export interface SizedPanel {
   readonly moments: PanelResult['moments']
   readonly steel: PanelResult['steel']
   readonly bars: readonly BarRun[]
+  readonly reinforcement: Reinforcement
   readonly fire: FireStanding
   /** Stated assumptions and approximations of this panel ('sized on its enclosing rectangle'). */
   readonly flags: readonly string[]

@@ -14,7 +14,7 @@ export function followMarks(schemes: readonly StoredScheme[], before: Marked, af
   if (!isRenamed) return []
   const follow = <Given extends { level: string; panel: string }>(given: Given): Given =>
     given.level === before.mark ? { ...given, level: after.mark, panel: renamed.get(given.panel) ?? given.panel } : given
-  return schemes.flatMap((row) => {
+  return schemes.flatMap((row): StoredScheme[] => {
     const { specification } = row
     if (specification.givenPanels.every(({ level }) => level !== before.mark)) return []
     return specification.kind === 'ribbed'

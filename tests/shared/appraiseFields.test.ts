@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { appraise } from '#shared/appraise'
+import { appraiseInFull } from '#shared/appraise'
 import { AppraisalRefusedError } from '#shared/appraisalRefused'
 import { type AppraisalFileInput, appraisalFile } from '#shared/contracts/appraisal'
 import { OutOfScopeError } from '#shared/outOfScope'
@@ -67,10 +67,13 @@ function otherThan(path: Path, value: unknown): unknown {
   return OTHER_WORD[String(value)] ?? `${String(value)}x`
 }
 
-/** The result as text, or 'refused'. */
+/** The result and what is stated with it as text, or 'refused'. */
 function outcomeOf(file: unknown): string {
   try {
-    return JSON.stringify(appraise(parseAppraisalFile(file)))
+    const { appraisal, sized, problems } = appraiseInFull(parseAppraisalFile(file))
+    return problems.length > 0
+      ? 'refused'
+      : JSON.stringify([appraisal, sized.map(({ panels }) => panels.map(({ flags }) => flags))])
   } catch (error) {
     if (error instanceof AppraisalRefusedError || error instanceof OutOfScopeError) return 'refused'
     throw error

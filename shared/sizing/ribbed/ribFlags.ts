@@ -8,6 +8,7 @@ import { endName } from './ribContext'
 import type { RibAnalysis } from './ribAnalysis'
 import { isMixedEnd, type RibbedPanel } from './ribbedPanel'
 import type { RibTask } from './ribDesign'
+import { zoneFlags } from './zoneFlags'
 
 /**
  * Assumptions and approximations of one ribbed panel, in sentences.
@@ -15,11 +16,10 @@ import type { RibTask } from './ribDesign'
  * Source: project rule, what was assumed is stated (engine design sections 1 and 4)
  */
 export function ribFlags(task: RibTask, findings: readonly Finding[]): string[] {
-  const { panel, context, scheme } = task
+  const { panel, context } = task
   const { analysis } = context
   const lengths = panel.ribs.map(({ clearMm }) => clearMm)
   const varies = Math.max(...lengths) - Math.min(...lengths) > 1
-  const isWidened = scheme.solidZone === 'least' && panel.solidZoneMm > 0
   return [
     methodFlag(analysis),
     ...(analysis.assumedEnds > 0
@@ -32,9 +32,7 @@ export function ribFlags(task: RibTask, findings: readonly Finding[]): string[] 
           'ribs that end at a void hang on its trimmers; their bars are made up in the ribs beside and in the strips across (common practice), and not checked',
         ]
       : []),
-    ...(isWidened
-      ? [`solid zone widened to ${figure(panel.solidZoneMm, 0)} mm for shear and for bending of the ribs at supports`]
-      : []),
+    ...zoneFlags(task, findings),
     ...crossRibFlag(task),
     ...meshFlag(task),
     ...fireFlags(findings),

@@ -2,8 +2,9 @@ import type { PanelLayout } from '../../layout/panelLayout'
 import type { EndOfSpan } from '../analysis/spanForces'
 import type { BarLines } from '../bars/barLines'
 import { barRuns } from '../bars/barRuns'
-import { areaOf, thickest } from '../bars/barSet'
+import { areaOf, type BarSet, thickest } from '../bars/barSet'
 import { exposureFindings } from '../exposureFindings'
+import { givenFlags } from '../givenFlags'
 import { fireStanding } from '../fireStanding'
 import { checkRow } from '../finding'
 import type { SizedPanel } from '../sizedPanel'
@@ -49,12 +50,19 @@ export function sizedRibbedPanel(
     moments: momentsOf(context),
     steel: steelOf(context, design),
     bars: lines.flatMap(barRuns),
+    reinforcement: { kind: 'ribbed', ribBars: design.bottom, topBars: heavierTop(context, design) },
     fire: fireStanding((minutes) => [
       ...fireSizeFindings(basis, section, analysis, minutes),
       ...fireFindings({ ...context, fireMinutes: minutes }, design.bottom),
     ]),
-    flags: ribFlags(task, findings),
+    flags: [...ribFlags(task, findings), ...givenFlags(task.scheme, level, mark)],
   }
+}
+
+/** Top bars over the continuous end that has more of them. */
+function heavierTop({ ends }: RibContext, { tops }: RibDesign): BarSet {
+  const [start, end] = ENDS.map((each): BarSet => (ends[each].isContinuous ? tops[each] : []))
+  return areaOf(start!) >= areaOf(end!) ? start! : end!
 }
 
 function momentsOf(context: RibContext): SizedPanel['moments'] {

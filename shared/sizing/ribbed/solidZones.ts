@@ -14,6 +14,16 @@ export interface Compared {
 }
 
 /**
+ * Widest solid zone that leaves blocks between two of them, mm, in steps.
+ *
+ * Source: project rule
+ * @param clearMm - clear length of the longest rib
+ */
+export function widestZoneMm(clearMm: number): number {
+  return Math.floor((clearMm / 2 - 1) / ZONE_STEP_MM) * ZONE_STEP_MM
+}
+
+/**
  * Least width of solid zone, in steps from a given one, at which everything is met; the widest that leaves blocks between two zones
  * where nothing is.
  *
@@ -22,7 +32,7 @@ export interface Compared {
  * @param clearMm - clear length of the longest rib
  */
 export function leastZoneMm(fromMm: number, clearMm: number, findingsAt: (zoneMm: number) => readonly Compared[]): number {
-  const widest = Math.floor((clearMm / 2 - 1) / ZONE_STEP_MM) * ZONE_STEP_MM
+  const widest = widestZoneMm(clearMm)
   for (let zone = fromMm; zone <= widest; zone += ZONE_STEP_MM)
     if (findingsAt(zone).every(({ demand, capacity }) => isMet(demand, capacity))) return zone
   return Math.max(fromMm, widest)

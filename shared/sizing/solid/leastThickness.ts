@@ -14,7 +14,7 @@ import { type SlabContext, slabKey, topPlaces } from './slabContext'
 export const THICKNESS = { least: 100, step: 5, most: 1500 } as const
 
 /** What a thicker slab can mend: the axis distance of bars in fire is for cover and diameter. */
-const isForThickness = ({ name }: Finding) => name !== 'fire.cover'
+export const isForThickness = ({ name }: Finding) => name !== 'fire.cover' && name !== 'cover.exposure'
 
 const pass = (findings: readonly Finding[]) =>
   findings.every((finding) => !isForThickness(finding) || isMet(finding.demand, finding.capacity))

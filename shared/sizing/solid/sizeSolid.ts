@@ -1,9 +1,10 @@
-import type { Brief, SolidScheme } from '../../contracts/appraisal'
+import type { Brief, SlabLayers, SolidScheme } from '../../contracts/appraisal'
 import type { BarLines } from '../bars/barLines'
 import { barRuns } from '../bars/barRuns'
 import { overSupports } from '../bars/overSupports'
 import type { CodeBasis } from '../codeBasis'
 import { exposureFindings } from '../exposureFindings'
+import { givenFlags } from '../givenFlags'
 import { fireStanding } from '../fireStanding'
 import { checkRow, type Finding } from '../finding'
 import type { LevelSite } from '../panelSite'
@@ -16,6 +17,7 @@ import { fireFindings, sizeFindings } from './layerFindings'
 import { isHogging, type SlabContext, slabKey } from './slabContext'
 import { slabFlags } from './slabFlags'
 import { layerAreaMm2 } from './bars/slabLayer'
+import { hopelessThicknessFlags } from './hopelessThickness'
 import { solidContexts } from './solidContexts'
 
 type BarsFor = ReturnType<typeof remember<SlabBars>>
@@ -38,8 +40,8 @@ export function sizeSolid(sites: readonly LevelSite[], scheme: SolidScheme, brie
       contexts.map((context, i) => slabBarLines(context, bars[i]!)),
     )
     return contexts.map((context, i) => {
-      const steps = soffitSteps(site, heightsMm, i)
-      return sizedPanel(context, site.mark, { chosen: bars[i]!, lines: lines[i]! }, steps)
+      const notes = [...soffitSteps(site, heightsMm, i), ...givenFlags(scheme, site.mark, context.plan.site.panel.mark)]
+      return sizedPanel(context, scheme, site.mark, { chosen: bars[i]!, lines: lines[i]! }, notes)
     })
   })
 }
@@ -50,7 +52,13 @@ interface PanelBars {
   readonly lines: readonly BarLines[]
 }
 
-function sizedPanel(context: SlabContext, level: string, { chosen, lines }: PanelBars, steps: readonly string[]): SizedPanel {
+function sizedPanel(
+  context: SlabContext,
+  scheme: SolidScheme,
+  level: string,
+  { chosen, lines }: PanelBars,
+  notes: readonly string[],
+): SizedPanel {
   const { plan, heightMm } = context
   const { mark } = plan.site.panel
   const findings = [...chosen.findings, ...sizeFindings(context), ...outermostFindings(context, chosen)]
@@ -65,11 +73,12 @@ function sizedPanel(context: SlabContext, level: string, { chosen, lines }: Pane
     moments: momentsOf(context),
     steel: steelOf(chosen),
     bars: lines.flatMap(barRuns),
+    reinforcement: { kind: 'solid', bars: layersOf(chosen) },
     fire: fireStanding((minutes) => [
       ...sizeFindings(context, minutes),
       ...fireFindings(context, chosen.bottom.short.middle, minutes),
     ]),
-    flags: [...slabFlags(context, findings), ...steps],
+    flags: [...slabFlags(context, findings), ...hopelessThicknessFlags(context, scheme, findings), ...notes],
   }
 }
 
@@ -81,6 +90,16 @@ function outermostFindings({ basis, brief }: SlabContext, { bottom, tops }: Slab
     linkMm: 0,
     diameterMm: Math.max(bottom.short.middle.diameter, ...outer),
   })
+}
+
+/** Layers as a scheme gives them; at the top the heaviest of each direction. */
+function layersOf({ bottom, tops }: SlabBars): SlabLayers {
+  const top = (direction: 'short' | 'long') =>
+    tops
+      .flatMap(({ place, layers }) => (place.direction === direction && layers ? [layers.middle] : []))
+      .sort((a, b) => layerAreaMm2(b) - layerAreaMm2(a))[0]
+  const [topX, topY] = [top('short'), top('long')]
+  return { bottomX: bottom.short.middle, bottomY: bottom.long.middle, ...(topX ? { topX } : {}), ...(topY ? { topY } : {}) }
 }
 
 function momentsOf({ analysis: { short, long } }: SlabContext): SizedPanel['moments'] {

@@ -42,7 +42,7 @@ describe('project store', () => {
     const { store, worker } = await opened()
     expect(worker.requests).toHaveLength(1)
     expect(store.isAppraising).toBe(true)
-    worker.answer({ id: worker.requests[0]!.id, full: empty, problems: [] })
+    worker.answer({ file: null, id: worker.requests[0]!.id, full: empty, problems: [] })
     expect(store.full).toEqual(empty)
     expect(store.isAppraising).toBe(false)
   })
@@ -54,10 +54,15 @@ describe('project store', () => {
     renamed(store, 'two')
     await vi.advanceTimersByTimeAsync(100)
     expect(worker.requests).toHaveLength(1)
-    worker.answer({ id: worker.requests[0]!.id, full: empty, problems: [] })
+    worker.answer({ file: null, id: worker.requests[0]!.id, full: empty, problems: [] })
     expect(store.full).toBeNull()
     expect(worker.requests).toHaveLength(2)
-    worker.answer({ id: worker.requests[1]!.id, full: empty, problems: [{ path: 'schemes.0.topping', message: 'thin' }] })
+    worker.answer({
+      file: null,
+      id: worker.requests[1]!.id,
+      full: empty,
+      problems: [{ path: 'schemes.0.topping', message: 'thin' }],
+    })
     expect(store.full).toEqual(empty)
     expect(store.problems).toEqual([{ path: 'schemes.0.topping', message: 'thin' }])
   })

@@ -18,9 +18,17 @@ const ribbedScheme: RibbedScheme = {
   leastPiece: 50,
   ribBars: 'computed',
   topBars: 'computed',
+  givenPanels: [],
   link: 8,
 }
-const solidScheme: SolidScheme = { mark: 'S1', kind: 'solid', thickness: 'least', bars: 'computed' }
+const solidScheme: SolidScheme = {
+  mark: 'S1',
+  kind: 'solid',
+  thickness: 'least',
+  thicknessPer: 'scheme',
+  bars: 'computed',
+  givenPanels: [],
+}
 
 const check = (name: Check['name'], clause: string, utilisation: number, panel = 'P1'): Check => ({
   level: 'L1',

@@ -22,9 +22,17 @@ const ribbed: RibbedScheme = {
   leastPiece: 50,
   ribBars: 'computed',
   topBars: 'computed',
+  givenPanels: [],
   link: 8,
 }
-const solid: SolidScheme = { mark: 'S1', kind: 'solid', thickness: 200, bars: 'computed' }
+const solid: SolidScheme = {
+  mark: 'S1',
+  kind: 'solid',
+  thickness: 200,
+  thicknessPer: 'scheme',
+  bars: 'computed',
+  givenPanels: [],
+}
 const ribbedSubject: SectionSubject = {
   scheme: ribbed,
   depthMm: 250,

@@ -113,6 +113,69 @@ describe('bars given panel by panel', () => {
   })
 })
 
+describe('what is stated', () => {
+  const flagsOf = (scheme: SchemeInput) => sizedWith(scheme).panels.map(({ flags }) => flags.join('; '))
+
+  it('names the panels whose bars are given', () => {
+    const given = [{ level: 'L1', panel: 'P2', bars: layers }]
+    const [first, second] = flagsOf({ ...fixedSolid, givenPanels: given })
+    expect(first).not.toContain('bars given for this panel')
+    expect(second).toContain('bars given for this panel')
+  })
+
+  it('repeats the note on a thickness, which only a given one may have', () => {
+    expect(flagsOf({ ...fixedSolid, thicknessNote: 'cheapest of 12' })[0]).toContain('thickness: cheapest of 12')
+    expect(issuesOf({ ...solid, thicknessNote: 'cheapest of 12' })).toMatchObject([{ path: 'schemes.0.thicknessNote' }])
+  })
+
+  it('says why no thickness passes', () => {
+    const few = { bottomX: { diameter: 6 as const, spacing: 500 }, bottomY: { diameter: 6 as const, spacing: 500 } }
+    const [flags] = flagsOf({ ...solid, bars: few })
+    expect(flags).toMatch(/no thickness from 100 to 1500 mm passes .* shown at \d+ mm, where the given bars come nearest/)
+    expect(flagsOf(solid).join()).not.toContain('no thickness')
+  })
+
+  it('says where solid zones leave little of a panel ribbed', () => {
+    const slim = fileWith({ ...ribbed, ribWidth: 100 }, row([9000], 6000))
+    const flagsUnder = (imposedLoad: number) =>
+      appraiseInFull(appraisalFile.parse({ ...slim, brief: { ...brief, imposedLoad } })).sized[0]!.panels[0]!.flags.join('; ')
+    expect(flagsUnder(20)).toMatch(/solid zone widened to \d+ mm .*: the zones take up \d\d % of the ribs, 8750 mm long/)
+    expect(flagsUnder(0.5)).not.toContain('take up')
+  })
+
+  it('says why no solid zone lets the ribs pass', () => {
+    const given = {
+      ...ribbed,
+      ribWidth: 100,
+      block: { ...ribbed.block, height: 80 },
+      ribBars: [{ diameter: 40 as const, count: 1 }],
+    }
+    const file = { ...fileWith(given, row([6000], 6000)), brief: { ...brief, imposedLoad: 90 } }
+    const { checks, flags, places } = appraiseInFull(appraisalFile.parse(file)).sized[0]!.panels[0]!
+    expect(checks.some(({ name, pass }, i) => name === 'shear' && !pass && places[i]!.endsWith('rib'))).toBe(true)
+    expect(flags.join('; ')).toMatch(/no solid zone that leaves blocks .* widest, \d+ mm of \d+ mm; edge \d, rib governs/)
+  })
+
+  it('offers the bars of each panel in the shape in which they are given, and given so they are the same', () => {
+    for (const scheme of [fixedSolid, fixedRibs]) {
+      const before = sizedWith(scheme).panels[1]!
+      const { reinforcement } = before
+      const given =
+        reinforcement.kind === 'solid'
+          ? { ...fixedSolid, givenPanels: [{ level: 'L1', panel: 'P2', bars: reinforcement.bars }] }
+          : {
+              ...fixedRibs,
+              givenPanels: [
+                { level: 'L1', panel: 'P2', ribBars: [...reinforcement.ribBars], topBars: [...reinforcement.topBars] },
+              ],
+            }
+      const after = sizedWith(given).panels[1]!
+      expect(after.reinforcement).toEqual(reinforcement)
+      expect(after.steel.midspanProvided).toBe(before.steel.midspanProvided)
+    }
+  })
+})
+
 describe('a thickness per panel', () => {
   const perPanel = sizedWith({ ...solid, thicknessPer: 'panel' })
   const together = sizedWith(solid)

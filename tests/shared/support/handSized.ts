@@ -13,6 +13,9 @@ export const rectangle = (x: number, y: number, lx: number, ly: number): [number
   [x, y + ly],
 ]
 
+/** Layers that stand for none: measuring looks at the runs alone. */
+const NO_LAYERS = { bottomX: { diameter: 8, spacing: 200 }, bottomY: { diameter: 8, spacing: 200 } } as const
+
 /** A level read by the contract, so that defaults are in. */
 export const levelOf = (...panels: Partial<Panel>[]): Level =>
   levelContract.parse({
@@ -64,6 +67,8 @@ export function handSized(scheme: Scheme, levels: readonly Level[], bars: readon
         moments,
         steel,
         bars,
+        reinforcement:
+          scheme.kind === 'ribbed' ? { kind: 'ribbed', ribBars: [], topBars: [] } : { kind: 'solid', bars: NO_LAYERS },
         fire: { minutes: 60, limits: [] },
         flags: [],
       }

@@ -117,6 +117,7 @@ export const givenFile: AppraisalFileInput = {
       mark: 'S1',
       kind: 'solid',
       thickness: 175,
+      thicknessNote: 'as the engineer asked',
       bars: {
         bottomX: { diameter: 10, spacing: 150 },
         bottomY: { diameter: 10, spacing: 175 },
