@@ -151,6 +151,19 @@ export function bayAreas(lines: SpanLines, neighboursOf: NeighboursOf): number[]
 }
 
 /**
+ * Length of the longest cantilever that goes on behind some edges of a panel, mm; 0 without one.
+ *
+ * Source: project rule, engine design section 4 (neighbours share an edge)
+ */
+export function overhangBehind(panel: number, edges: readonly number[], lines: SpanLines, neighboursOf: NeighboursOf): number {
+  return neighboursOf[panel]!.reduce((longest, { edge, neighbour, neighbourEdge }) => {
+    const behind = lines[neighbour]
+    const isOverhang = edges.includes(edge) && behind?.span.isCantilever && !isTip(behind, neighbourEdge)
+    return isOverhang ? Math.max(longest, behind.span.spanMm) : longest
+  }, 0)
+}
+
+/**
  * The continuous strip that a one-way panel is part of.
  *
  * Source: project rule, engine design section 4 (neighbours share an edge and span the same way; else an equal span, flagged; what was

@@ -1,5 +1,5 @@
 import type { AnalysisRules } from '../analysis/analysisRules'
-import { bayAreas, type SpanLine, stripOf } from '../analysis/levelStrips'
+import { bayAreas, overhangBehind, type SpanLine, stripOf } from '../analysis/levelStrips'
 import { momentFromBehind, raisedTo } from '../analysis/sharedSupports'
 import type { EndOfSpan, SpanForces } from '../analysis/spanForces'
 import type { Strip } from '../analysis/strip'
@@ -17,6 +17,8 @@ export interface RibAnalysis {
   readonly faceMm: Readonly<Record<EndOfSpan, number>>
   /** Number of ends beyond which an equal span was assumed. */
   readonly assumedEnds: number
+  /** Length of a cantilever that goes on behind each end, mm; 0 without one. */
+  readonly overhangMm: Readonly<Record<EndOfSpan, number>>
   /** The strip it was analysed in. */
   readonly strip: Strip
 }
@@ -62,6 +64,10 @@ export function analyseRibs(
       forces: raisedTo(forces, spanMm, { start: behind('start'), end: behind('end') }),
       faceMm: faceDistances(panels[i]!, spanMm, depths, basis),
       assumedEnds: strip.assumedEnds,
+      overhangMm: {
+        start: overhangBehind(i, ends.start.edges, lines, neighboursOf),
+        end: overhangBehind(i, ends.end.edges, lines, neighboursOf),
+      },
       strip,
     }
   })
@@ -73,9 +79,9 @@ function spanLines(
   { heightMm, depthMm }: RibDepths,
   basis: CodeBasis,
 ): SpanLine[] {
-  return panels.map(({ direction, ends, clearMm, loads, grossMm2 }, i) => {
+  return panels.map(({ direction, ends, isCantilever, clearMm, loads, grossMm2 }, i) => {
     const span = basis.effectiveSpanMm(clearMm, heightMm, depthMm, [ends.start, ends.end])
-    return { mark: marks[i]!, direction, ends, span: { spanMm: span, loads, bayMm2: grossMm2 } }
+    return { mark: marks[i]!, direction, ends, span: { spanMm: span, loads, bayMm2: grossMm2, isCantilever } }
   })
 }
 

@@ -4,7 +4,7 @@ import { anchoredEnd, type BarEnd, bottomBarEnd } from '../bars/barEnds'
 import type { BarLines, BarPiece } from '../bars/barLines'
 import type { CodeBasis } from '../codeBasis'
 import type { RibLineEnds } from './ribEnds'
-import { TOP_REACH } from './ribContext'
+import { type RibContext, topReachMm } from './ribContext'
 import type { RibbedPanel } from './ribbedPanel'
 
 /** What lengths of rib bars depend on beside the panel. */
@@ -58,14 +58,14 @@ export function bottomPiece({ ends }: RibbedPanel, rib: RibLineEnds, diameter: B
  * stops at the void.
  *
  * Source: by the basis, `simpleEdge`, `anchorageMm`; lengths by engine design section 4; for the floor behind see `overSupports`
- * @param spanAddedMm - what the effective span has over the clear one
+ * @param context - of the panel, for its span and how far the bars reach
  */
 export function topLines(
   { ribs, ends, clearMm }: RibbedPanel,
   end: EndOfSpan,
   diameter: BarDiameter,
   each: number,
-  spanAddedMm: number,
+  context: RibContext,
   rules: RibBarRules,
 ): BarLines[] {
   const { basis, heightMm } = rules
@@ -73,12 +73,14 @@ export function topLines(
   const anchorageMm = basis.anchorageMm(diameter, bond, 1).value
   const { reach, clause } = basis.simpleEdge.rib
   const isContinuous = ends[end].isContinuous
+  const spanAddedMm = context.analysis.spanMm - clearMm
   const pieceOf = (rib: RibLineEnds, edge: number): BarPiece => {
     const { supportMm } = rib[end]
     const isCut = rib[end === 'start' ? 'end' : 'start'].edge === null
     const fullMm = isCut ? clearMm : rib.clearMm
     const roomMm = isCut ? rib.clearMm + rules.trimmerMm - rules.coverMm : Infinity
-    if (isContinuous) return { parts: [supportMm / 2, Math.min(TOP_REACH * fullMm, roomMm)], legs: [0, 0], over: edge }
+    if (isContinuous)
+      return { parts: [supportMm / 2, Math.min(topReachMm(context, end, fullMm), roomMm)], legs: [0, 0], over: edge }
     const { pastMm, legMm } = anchoredEnd(diameter, anchorageMm, supportMm - rules.coverMm)
     return { parts: [Math.min(reach * (fullMm + spanAddedMm), roomMm), pastMm], legs: [legMm, 0] }
   }

@@ -27,6 +27,21 @@ export const RIB_AGGREGATE_MM = 10
 export const TOP_REACH = 0.3
 
 /**
+ * How far top bars run past the face of an end into ribs of a clear length, mm: over the whole of a cantilever, and as far behind it; else
+ * the usual share.
+ *
+ * Source: see TOP_REACH; behind a cantilever as long as it: common practice, no source
+ */
+export function topReachMm(
+  { analysis, section }: Pick<RibContext, 'analysis' | 'section'>,
+  end: EndOfSpan,
+  clearMm: number,
+): number {
+  if (analysis.position === 'cantilever') return clearMm - section.coverMm
+  return Math.max(TOP_REACH * clearMm, Math.min(clearMm, analysis.overhangMm[end]))
+}
+
+/**
  * A force or moment per metre of width as that of one rib.
  *
  * Source: statics, a rib carries the width of its spacing

@@ -9,9 +9,9 @@ import { bottomFindings } from './checks/bottomFindings'
 import { bottomLines, type RibBarRules, topLines } from './ribBarLines'
 import type { RibContext } from './ribContext'
 import type { RibbedPanel } from './ribbedPanel'
-import { shearFindings } from './checks/ribShear'
+import { ribShearFinding, shearFindings } from './checks/ribShear'
 import type { Compared } from './solidZones'
-import { simpleEdgeFinding, supportBending, topFindings } from './checks/topFindings'
+import { ribBending, simpleEdgeFinding, topFindings } from './checks/topFindings'
 
 /** The bars of a panel's ribs, and what the checks find. */
 export interface RibDesign {
@@ -105,17 +105,18 @@ export function chooseBottom({ panel, context, rules }: RibTask): BarSet {
 }
 
 /**
- * Top bars at one end of a panel's ribs: over a continuous end the given ones or those of least mass, at a simple end the basis' share.
+ * Top bars at one end of a panel's ribs: over a continuous end the given ones or those of least mass, at a simple end the basis' share, at
+ * a free end none.
  *
  * Source: project rule, engine design section 4
  */
 export function chooseTop({ panel, context, rules }: RibTask, end: EndOfSpan): BarSet {
-  const { isContinuous } = panel.ends[end]
+  const { isContinuous, isFree } = panel.ends[end]
   const { topBars } = panel.bars
+  if (isFree) return []
   if (isContinuous && topBars !== 'computed') return topBars
-  const added = context.analysis.spanMm - context.clearMm
   const massOf = massBy((diameter) =>
-    topLines(panel, end, diameter, 1, added, rules).reduce((sum, lines) => sum + totalLengthMm(lines), 0),
+    topLines(panel, end, diameter, 1, context, rules).reduce((sum, lines) => sum + totalLengthMm(lines), 0),
   )
   return choose(massOf, (set) => (isContinuous ? topFindings(context, end, set) : [simpleEdgeFinding(context, end, set)]))
 }
@@ -131,7 +132,7 @@ export function designRibs(task: RibTask): RibDesign {
   const tops = { start: chooseTop(task, 'start'), end: chooseTop(task, 'end') }
   const topOf = (end: EndOfSpan) =>
     panel.ends[end].isContinuous ? topFindings(context, end, tops[end]) : [simpleEdgeFinding(context, end, tops[end])]
-  const borne = ENDS.filter((end) => panel.ends[end].edges.length > 0)
+  const borne = ENDS.filter((end) => panel.ends[end].edges.length > 0 && !panel.ends[end].isFree)
   return {
     bottom,
     tops,
@@ -161,11 +162,11 @@ export function lightestTops(task: RibTask): Readonly<Record<EndOfSpan, BarSet>>
  */
 export function zoneFindings(task: RibTask, bottom: BarSet, tops: Readonly<Record<EndOfSpan, BarSet>>): Compared[] {
   const { context, panel } = task
-  return ENDS.flatMap((end) => {
+  return ENDS.filter((end) => !panel.ends[end].isFree).flatMap((end) => {
     const top = tops[end]
-    const shear = shearFindings(context, end, { bottom, top }).slice(0, 1)
+    const shear = [ribShearFinding(context, end, { bottom, top })]
     if (!panel.ends[end].isContinuous) return shear
-    const { k, greatestK, requiredMm2 } = supportBending(context, end, top).atRib
+    const { k, greatestK, requiredMm2 } = ribBending(context, end, top)
     const steel = panel.bars.topBars === 'computed' ? [{ demand: requiredMm2, capacity: areaOf(top) }] : []
     return [...shear, { demand: k, capacity: greatestK }, ...steel]
   })

@@ -1,6 +1,5 @@
 import type { Point } from '../../geometry/point'
 import type { PanelLayout } from '../../layout/panelLayout'
-import { OutOfScopeError } from '../../outOfScope'
 import { type LineEndOnEdge, lineEndAt } from '../bars/lineEndAt'
 import type { PanelSite } from '../panelSite'
 
@@ -14,21 +13,11 @@ export interface RibLineEnds {
 /**
  * Ends of every line of rib bars of a panel.
  *
- * Source: project rule, ribs run between supports
- * @throws OutOfScopeError `edges` where a rib ends on a free edge
+ * Source: geometry
  */
 export function ribLineEnds(site: PanelSite, { ribLines }: Pick<PanelLayout, 'ribLines'>): RibLineEnds[] {
-  const supported = (at: Point, direction: Point): LineEndOnEdge => {
-    const found = lineEndAt(site, at, direction)
-    if (found.edge !== null && site.edges[found.edge]!.continuity === 'free')
-      throw new OutOfScopeError(
-        'edges',
-        `ribs end on free edge ${found.edge + 1}: expected ribs that run from support to support`,
-      )
-    return found
-  }
   return ribLines.map(({ start, end, length }) => {
     const direction: Point = [(end[0] - start[0]) / length, (end[1] - start[1]) / length]
-    return { clearMm: length, start: supported(start, direction), end: supported(end, direction) }
+    return { clearMm: length, start: lineEndAt(site, start, direction), end: lineEndAt(site, end, direction) }
   })
 }

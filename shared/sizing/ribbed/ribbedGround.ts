@@ -15,24 +15,28 @@ export interface RibbedGround {
   readonly ribs: readonly RibLineEnds[]
   readonly direction: Point
   readonly ends: Readonly<Record<EndOfSpan, LineEnd>>
+  /** Free at one end. */
+  readonly isCantilever: boolean
 }
 
 /**
  * Ribs of a panel with their ends.
  *
  * Source: project rule, engine design section 2
- * @throws OutOfScopeError `outline` where no row of blocks fits, `edges` where ribs end on a free edge
+ * @throws OutOfScopeError `outline` where no row of blocks fits
  */
 export function ribbedGround(site: PanelSite, scheme: RibbedScheme): RibbedGround {
   const layout = layoutGround(site.panel, scheme)
   const ribs = ribLineEnds(site, layout)
   if (layout.longestRib === 0 || ribs.length === 0)
     throw new OutOfScopeError('outline', 'no row of blocks fits: expected a wider panel, smaller blocks or another rib direction')
+  const ends = { start: lineEnd(site, ribs, 'start'), end: lineEnd(site, ribs, 'end') }
   return {
     layout,
     ribs,
     direction: frameAt([0, 0], site.panel.ribDirection).toLevel([1, 0]),
-    ends: { start: lineEnd(site, ribs, 'start'), end: lineEnd(site, ribs, 'end') },
+    ends,
+    isCantilever: ends.start.isFree || ends.end.isFree,
   }
 }
 

@@ -7,6 +7,7 @@ import { remember } from '../remember'
 import { analyseRibs, type RibAnalysis } from './ribAnalysis'
 import type { RibBarRules } from './ribBarLines'
 import type { RibDesign, RibTask } from './ribDesign'
+import { refuseLooseRibs } from './refuseLooseRibs'
 import { type RibbedGround, ribbedGround } from './ribbedGround'
 import { type RibbedPanel, ribbedPanel, type RibbedShape, shapeKey } from './ribbedPanel'
 import { ribSection } from './ribSection'
@@ -21,7 +22,8 @@ export interface RibbedJob {
   readonly analysis: AnalysisRules
   /** One for each panel of the level. */
   readonly shapes: readonly RibbedShape[]
-  readonly groundFor: ReturnType<typeof remember<RibbedGround>>
+  /** One for each panel of the level. */
+  readonly grounds: readonly RibbedGround[]
   readonly shapeFor: ReturnType<typeof remember<RibbedPanel>>
   readonly zoneFor: ReturnType<typeof remember<number>>
   readonly designFor: ReturnType<typeof remember<RibDesign>>
@@ -38,6 +40,7 @@ export interface LaidLevel {
  * A job with nothing worked out yet.
  *
  * Source: project rule, engine design section 2
+ * @throws OutOfScopeError where no row of blocks fits or ribs are not held
  */
 export function ribbedJob(level: LevelSite, scheme: RibbedScheme, brief: Brief, basis: CodeBasis): RibbedJob {
   const heightMm = scheme.block.height + scheme.topping
@@ -46,9 +49,12 @@ export function ribbedJob(level: LevelSite, scheme: RibbedScheme, brief: Brief, 
     const given = givenFor(scheme.givenPanels, level.mark, site.panel.mark)
     return { site, given, key: shapeKey(site, given) }
   })
-  const memory = { groundFor: remember<RibbedGround>(), shapeFor: remember<RibbedPanel>(), zoneFor: remember<number>() }
+  const groundFor = remember<RibbedGround>()
+  const grounds = shapes.map(({ site, key }) => groundFor(key, () => atPath(site.path, () => ribbedGround(site, scheme))))
+  refuseLooseRibs(level, grounds)
+  const memory = { shapeFor: remember<RibbedPanel>(), zoneFor: remember<number>() }
   const analysis = analysisRules(basis, brief.redistribution)
-  return { scheme, brief, basis, level, rules, analysis, shapes, ...memory, designFor: remember() }
+  return { scheme, brief, basis, level, rules, analysis, shapes, grounds, ...memory, designFor: remember() }
 }
 
 /**
@@ -58,20 +64,21 @@ export function ribbedJob(level: LevelSite, scheme: RibbedScheme, brief: Brief, 
  * @param zones - one for each panel, mm
  */
 export function laidLevel(job: RibbedJob, zones: readonly number[]): LaidLevel {
-  const { level, shapes, basis, rules, analysis } = job
-  const panels = shapes.map((shape, i) => shaped(job, shape, zones[i]!))
+  const { level, shapes, grounds, basis, rules, analysis } = job
+  const panels = shapes.map((shape, i) => shaped(job, shape, grounds[i]!, zones[i]!))
   const { heightMm, coverMm } = rules
   const depths = { heightMm, depthMm: heightMm - coverMm - job.scheme.link }
   return { zones, panels, analyses: analyseRibs(level, panels, depths, basis, analysis) }
 }
 
-function shaped({ scheme, brief, basis, groundFor, shapeFor }: RibbedJob, shape: RibbedShape, zoneMm: number): RibbedPanel {
-  const { site, key } = shape
-  return shapeFor(`${zoneMm} ${key}`, () =>
-    atPath(site.path, () => {
-      const ground = groundFor(key, () => ribbedGround(site, scheme))
-      return ribbedPanel(shape, ground, scheme, brief, basis, zoneMm)
-    }),
+function shaped(
+  { scheme, brief, basis, shapeFor }: RibbedJob,
+  shape: RibbedShape,
+  ground: RibbedGround,
+  zoneMm: number,
+): RibbedPanel {
+  return shapeFor(`${zoneMm} ${shape.key}`, () =>
+    atPath(shape.site.path, () => ribbedPanel(shape, ground, scheme, brief, basis, zoneMm)),
   )
 }
 

@@ -24,6 +24,7 @@ export interface RibbedPanel {
   readonly direction: Point
   readonly clearMm: number
   readonly ends: Readonly<Record<EndOfSpan, LineEnd>>
+  readonly isCantilever: boolean
   readonly loads: FloorLoads
   readonly grossMm2: number
   readonly solidZoneMm: number
@@ -65,7 +66,7 @@ export interface RibbedShape {
  */
 export function ribbedPanel(
   { site, given, key }: RibbedShape,
-  { ribs, direction, ends, layout: ground }: RibbedGround,
+  { ribs, direction, ends, isCantilever, layout: ground }: RibbedGround,
   scheme: RibbedScheme,
   brief: Brief,
   basis: CodeBasis,
@@ -86,6 +87,7 @@ export function ribbedPanel(
     direction,
     clearMm: layout.longestRib,
     ends,
+    isCantilever,
     loads: floorLoads(selfWeight, brief),
     grossMm2: signedArea(site.panel.outline),
     solidZoneMm,

@@ -93,10 +93,9 @@ function steelOf(context: RibContext, { bottom, tops }: RibDesign): SizedPanel['
  * Source: see `bottomLines`, `topLines` and `ribTrimmerLines`
  */
 export function ribBarLines({ panel, context, rules }: RibTask, { bottom, tops }: RibDesign): BarLines[] {
-  const added = context.analysis.spanMm - panel.clearMm
   return [
     ...bottom.map(({ diameter, count }) => bottomLines(panel, diameter, count, rules)),
-    ...ENDS.flatMap((end) => tops[end].flatMap(({ diameter, count }) => topLines(panel, end, diameter, count, added, rules))),
+    ...ENDS.flatMap((end) => tops[end].flatMap(({ diameter, count }) => topLines(panel, end, diameter, count, context, rules))),
     ...ribTrimmerLines(panel, bottom, rules),
   ]
 }

@@ -8,7 +8,8 @@ import { axisDistanceMm, concreteAreaMm2, effectiveDepthMm, midspanSection } fro
 const midspan = () => 'midspan'
 
 /**
- * What the checks find for the bottom bars of a rib: bending at midspan, deflection, least and most steel, room, axis distance in fire.
+ * What the checks find for the bottom bars of a rib: bending at midspan, deflection, least and most steel, room, axis distance in fire. A
+ * cantilever has no midspan moment: its bottom is pressed.
  *
  * Source: by the basis; T-section at midspan (engine design section 4)
  */
@@ -22,6 +23,9 @@ export function bottomFindings(context: RibContext, bars: BarSet): Finding[] {
   const { depthMm, widthMm, flange } = bendingSection
   const tension = flange ? 'web' : 'rectangle'
   const zone = { tension, widthMm: ribMm, webMm: ribMm, flangeMm: widthMm, heightMm, depthMm } as const
+  const limits = steelLimitFindings(basis, where, zone, concreteAreaMm2(section), providedMm2)
+  if (analysis.position === 'cantilever')
+    return [...limits.filter(({ name }) => name === 'steel.most'), fitFinding(context, bars), ...fireFindings(context, bars)]
   return [
     ...flexureFindings('flexure.midspan', where, flexure, providedMm2),
     deflectionFinding(basis, where, {
@@ -33,7 +37,7 @@ export function bottomFindings(context: RibContext, bars: BarSet): Finding[] {
       providedMm2,
       carriesPartitions: context.carriesPartitions,
     }),
-    ...steelLimitFindings(basis, where, zone, concreteAreaMm2(section), providedMm2),
+    ...limits,
     fitFinding(context, bars),
     ...fireFindings(context, bars),
   ]

@@ -1,8 +1,10 @@
 import type { EndOfSpan } from '../../analysis/spanForces'
 import { type BarSet, areaOf, thickest } from '../../bars/barSet'
+import type { Answer } from '../../codeBasis'
 import { figure } from '../../figure'
 import type { Finding } from '../../finding'
-import { type RibContext, TOP_REACH, endName, perRib } from '../ribContext'
+import { remember } from '../../remember'
+import { type RibContext, endName, perRib, topReachMm } from '../ribContext'
 import { effectiveDepthMm } from '../ribSection'
 
 /** Bottom bars of a rib and its top bars at one end. */
@@ -20,11 +22,22 @@ export interface RibBars {
  */
 export function shearFindings(context: RibContext, end: EndOfSpan, bars: RibBars): Finding[] {
   const { section, solidZoneMm } = context
-  if (solidZoneMm === 0) return [shearFinding(context, end, bars, 0, section.ribMm, 'at the face of the support')]
+  if (solidZoneMm === 0) return [ribShearFinding(context, end, bars)]
   return [
-    shearFinding(context, end, bars, solidZoneMm, section.ribMm, 'where the solid zone ends'),
+    ribShearFinding(context, end, bars),
     shearFinding(context, end, bars, 0, section.spacingMm, 'at the face of the support, solid'),
   ]
+}
+
+/**
+ * Shear at one end on the rib itself: where the solid zone ends, or at the face of the support where there is none.
+ *
+ * Source: as `shearFindings`
+ */
+export function ribShearFinding(context: RibContext, end: EndOfSpan, bars: RibBars): Finding {
+  const { section, solidZoneMm } = context
+  const place = solidZoneMm === 0 ? 'at the face of the support' : 'where the solid zone ends'
+  return shearFinding(context, end, bars, solidZoneMm, section.ribMm, place)
 }
 
 function shearFinding(
@@ -35,16 +48,17 @@ function shearFinding(
   widthMm: number,
   place: string,
 ): Finding {
-  const { basis, analysis, section } = context
+  const { analysis, section } = context
   const fromSupportMm = analysis.faceMm[end] + fromFaceMm
-  const judged = analysis.forces.casesAt(end, fromSupportMm).map((forces) => {
-    const { depthMm, steelMm2 } = tensionSteel(context, bars, perRib(context, forces.hoggingNmm), fromFaceMm)
-    const resistance = basis.shearResistanceN({ widthMm, depthMm, steelMm2 })
-    return { shearN: Math.max(0, perRib(context, forces.shearN)), steelMm2, resistance }
-  })
-  const { shearN, steelMm2, resistance } = judged.reduce((worst, each) =>
-    each.shearN * worst.resistance.value > worst.shearN * each.resistance.value ? each : worst,
+  const tension = tensionAt(context, end, bars, fromFaceMm, widthMm)
+  const judged = analysis.forces.casesAt(end, fromSupportMm).map((forces) => ({
+    shearN: Math.max(0, perRib(context, forces.shearN)),
+    tension: tension(perRib(context, forces.hoggingNmm)),
+  }))
+  const { shearN, tension: worstTension } = judged.reduce((worst, each) =>
+    each.shearN * worst.tension.resistance.value > worst.shearN * each.tension.resistance.value ? each : worst,
   )
+  const { steelMm2, resistance } = worstTension
   return {
     name: 'shear',
     place: () => `${endName(context, end)}, ${widthMm === section.ribMm ? 'rib' : 'solid'}`,
@@ -58,27 +72,48 @@ function shearFinding(
   }
 }
 
-/** Bars in tension at a section and anchored there: top bars where it hogs, bottom bars, which run on to the support, elsewhere. */
-function tensionSteel(context: RibContext, { bottom, top }: RibBars, hoggingNmm: number, fromFaceMm: number) {
-  const { section } = context
-  if (hoggingNmm <= 0) return { depthMm: effectiveDepthMm(section, bottom), steelMm2: areaOf(bottom) }
-  const steelMm2 = isAnchored(context, top, hoggingNmm, fromFaceMm) ? areaOf(top) : 0
-  return { depthMm: effectiveDepthMm(section, top), steelMm2 }
+/** Tension steel of a section, and its resistance with it. */
+interface Tension {
+  readonly steelMm2: number
+  readonly resistance: Answer
 }
 
-/** Whether top bars, as far as they are stressed, run an anchorage and d past a section. */
-function isAnchored(
-  { basis, section, analysis, clearMm }: RibContext,
-  top: BarSet,
-  hoggingNmm: number,
+/**
+ * What is in tension at a section by the moment there: top bars where it hogs and they are anchored, bottom bars, which run on to the
+ * support, elsewhere. The resistance of each is worked out once.
+ */
+function tensionAt(
+  context: RibContext,
+  end: EndOfSpan,
+  { bottom, top }: RibBars,
   fromFaceMm: number,
-): boolean {
-  if (top.length === 0) return false
+  widthMm: number,
+): (hoggingNmm: number) => Tension {
+  const { basis, section } = context
+  const once = remember<Tension>()
+  const tension = (bars: BarSet, steelMm2: number): Tension => ({
+    steelMm2,
+    resistance: basis.shearResistanceN({ widthMm, depthMm: effectiveDepthMm(section, bars), steelMm2 }),
+  })
+  const isAnchored = anchorageAt(context, end, top, fromFaceMm)
+  return (hoggingNmm) => {
+    if (hoggingNmm <= 0) return once('bottom', () => tension(bottom, areaOf(bottom)))
+    if (isAnchored(hoggingNmm)) return once('top', () => tension(top, areaOf(top)))
+    return once('none', () => tension(top, 0))
+  }
+}
+
+/** Whether top bars, as far as a moment stresses them, run an anchorage and d past a section. */
+function anchorageAt(context: RibContext, end: EndOfSpan, top: BarSet, fromFaceMm: number): (hoggingNmm: number) => boolean {
+  const { basis, section, analysis, clearMm } = context
+  if (top.length === 0) return () => false
   const depthMm = effectiveDepthMm(section, top)
-  const rib = { widthMm: section.ribMm, depthMm, flange: null }
-  const { requiredMm2 } = basis.flexure(rib, hoggingNmm, analysis.forces.redistributedShare)
-  const stressShare = Math.min(1, requiredMm2 / areaOf(top))
+  const roomMm = topReachMm(context, end, clearMm) - fromFaceMm - depthMm
   const bond = { isTop: true, sectionMm: section.heightMm, isCorner: false }
-  const anchorage = basis.anchorageMm(thickest(top), bond, stressShare).value
-  return fromFaceMm + anchorage + depthMm <= TOP_REACH * clearMm
+  const fits = (stressShare: number) => basis.anchorageMm(thickest(top), bond, stressShare).value <= roomMm
+  if (fits(1)) return () => true
+  if (!fits(0)) return () => false
+  const rib = { widthMm: section.ribMm, depthMm, flange: null }
+  return (hoggingNmm) =>
+    fits(Math.min(1, basis.flexure(rib, hoggingNmm, analysis.forces.redistributedShare).requiredMm2 / areaOf(top)))
 }

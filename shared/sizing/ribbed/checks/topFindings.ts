@@ -1,12 +1,12 @@
 import type { EndOfSpan } from '../../analysis/spanForces'
 import { type BarSet, areaOf, countOf, setText, thickest } from '../../bars/barSet'
-import type { BendingSection, TensionZone } from '../../codeBasis'
+import type { BendingSection, Flexure, TensionZone } from '../../codeBasis'
 import { figure } from '../../figure'
 import type { Finding } from '../../finding'
-import { flexureFindings, steelLimitFindings } from '../../flexureFindings'
+import { deflectionFinding, flexureFindings, steelLimitFindings } from '../../flexureFindings'
 import { type RibContext, RIB_AGGREGATE_MM, endName, perRib, zoneFaceMm } from '../ribContext'
 import { simpleEdgeFlexure } from '../../simpleEdgeFlexure'
-import { effectiveDepthMm, type RibSection } from '../ribSection'
+import { effectiveDepthMm, midspanSection, type RibSection } from '../ribSection'
 import { midspanBending } from './bottomFindings'
 
 /** A section whose compression face, at the bottom, is as wide as the spacing (solid over a support) or the rib. */
@@ -37,9 +37,19 @@ export function supportBending(context: RibContext, end: EndOfSpan, bars: BarSet
   const { forces } = analysis
   const momentAt = (fromMm: number) => perRib(context, forces.hoggingNmm(end, fromMm))
   const over = basis.flexure(hoggingSection(context, section.spacingMm, bars), momentAt(0), forces.redistributedShare)
-  const atRibNmm = momentAt(zoneFaceMm(context, end))
-  const atRib = basis.flexure(hoggingSection(context, section.ribMm, bars), atRibNmm, forces.redistributedShare)
+  const atRib = ribBending(context, end, bars)
   return { over, atRib, requiredMm2: Math.max(over.requiredMm2, atRib.requiredMm2) }
+}
+
+/**
+ * Bending where the rib begins, at a continuous end.
+ *
+ * Source: as `supportBending`
+ */
+export function ribBending(context: RibContext, end: EndOfSpan, bars: BarSet): Flexure {
+  const { basis, section, analysis } = context
+  const momentNmm = perRib(context, analysis.forces.hoggingNmm(end, zoneFaceMm(context, end)))
+  return basis.flexure(hoggingSection(context, section.ribMm, bars), momentNmm, analysis.forces.redistributedShare)
 }
 
 /**
@@ -78,7 +88,27 @@ export function topFindings(context: RibContext, end: EndOfSpan, bars: BarSet): 
       provided,
     ),
     ...(section.toppingMm >= section.coverMm + section.linkMm + thickest(bars) ? [] : [topFitFinding(context, end, bars)]),
+    ...(context.analysis.position === 'cantilever' ? [cantileverDeflection(context, end, bars)] : []),
   ]
+}
+
+/** Span to depth of a cantilever, by the steel that its support asks for. */
+function cantileverDeflection(context: RibContext, end: EndOfSpan, bars: BarSet): Finding {
+  const { basis, section, analysis } = context
+  const { over, atRib } = supportBending(context, end, bars)
+  return deflectionFinding(
+    basis,
+    { place: () => `cantilever, ${endName(context, end)}`, bars: () => `${setText(bars)} a rib` },
+    {
+      position: analysis.position,
+      spanMm: analysis.spanMm,
+      section: midspanSection(section, effectiveDepthMm(section, bars), section.spacingMm),
+      momentNmm: perRib(context, analysis.forces.hoggingNmm(end, 0)),
+      requiredMm2: Math.max(over.requiredMm2, atRib.requiredMm2),
+      providedMm2: areaOf(bars),
+      carriesPartitions: context.carriesPartitions,
+    },
+  )
 }
 
 function topFitFinding(context: RibContext, end: EndOfSpan, bars: BarSet): Finding {
