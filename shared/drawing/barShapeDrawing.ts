@@ -3,7 +3,7 @@ import { round } from './sectionFrame'
 import { type SvgNode, svgNode } from './svgNode'
 
 const WIDTH = 132
-const HEIGHT = 44
+const HEIGHT = 40
 /** Length that the longest side of any bar is drawn with, and the least a leg is, px. */
 const LONGEST = 96
 const LEAST_LEG = 12
@@ -15,11 +15,11 @@ function legPx(legMm: number, sideMm: number): number {
   return Math.min(MOST_LEG, Math.max(LEAST_LEG, (LONGEST * legMm) / sideMm))
 }
 
-/** The bent bar as a path, its sides named by the letters of the schedule: a straight bar level, legs turned down. */
+/** The bent bar as a path, its sides named by the letters of the schedule; a straight bar without letters. */
 export function barShapeDrawing({ code, dimensionsMm }: BarShape): SvgNode {
   const [a, b, c] = dimensionsMm as [number, number | undefined, number | undefined]
   const side = code === '21' ? b! : a
-  const [left, right, top] = [(WIDTH - LONGEST) / 2, (WIDTH + LONGEST) / 2, 15]
+  const [left, right, top] = [(WIDTH - LONGEST) / 2, (WIDTH + LONGEST) / 2, code === '00' ? HEIGHT / 2 : 15]
   const legs = { '00': [0, 0], '11': [0, legPx(b ?? 0, side)], '21': [legPx(a, side), legPx(c ?? 0, side)] }[code] as [
     number,
     number,
@@ -30,7 +30,7 @@ export function barShapeDrawing({ code, dimensionsMm }: BarShape): SvgNode {
   const letter = (text: string, x: number, y: number, anchor: string) =>
     svgNode('text', { x, y, 'font-size': 12, 'text-anchor': anchor, fill: 'var(--ink-2)' }, [text])
   const letters = {
-    '00': [letter('A', WIDTH / 2, top - 4, 'middle')],
+    '00': [],
     '11': [letter('A', WIDTH / 2, top - 4, 'middle'), letter('B', right + 6, top + 12, 'start')],
     '21': [
       letter('A', left - 6, top + 12, 'end'),
