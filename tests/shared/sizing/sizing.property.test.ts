@@ -5,7 +5,7 @@ import type { AppraisalFile } from '#shared/contracts/appraisal'
 import type { SizedScheme } from '#shared/sizing/sizedPanel'
 import { sizeScheme } from '#shared/sizing/sizeScheme'
 import { BAR_MASS_KG_PER_M } from '#shared/sizing/tables/bars'
-import { fileOf, panelOf, rectangle, ribbed, row, schemeOf, solid } from './support/floors'
+import { britishFileOf, fileOf, panelOf, rectangle, ribbed, row, schemeOf, solid } from './support/floors'
 
 const RELATIVE = 1e-9
 
@@ -21,6 +21,13 @@ const schemes = [
   ['solid, thickness given', schemeOf({ ...solid, thickness: 170 })],
   ['solid, thickness left to the engine', schemeOf(solid)],
 ] as const
+
+/** Floors by either code, with the loads that a property varies. */
+const bases: readonly [string, (panels: ReturnType<typeof row>, changes: { imposedLoad: number }) => AppraisalFile][] = [
+  ['EN 1992', fileOf],
+  ['BS 8110', britishFileOf],
+]
+const cases = bases.flatMap(([basis, fileBy]) => schemes.map(([name, scheme]) => [`${basis}, ${name}`, scheme, fileBy] as const))
 
 const massOf = ({ panels }: SizedScheme) =>
   panels
@@ -60,7 +67,7 @@ function near(actual: number, expected: number) {
   )
 }
 
-describe.each(schemes)('%s', (_, scheme) => {
+describe.each(cases)('%s', (_, scheme, fileBy) => {
   it('is the same wherever the floor stands, however it is turned and whatever it is called', () => {
     fc.assert(
       fc.property(
@@ -70,7 +77,7 @@ describe.each(schemes)('%s', (_, scheme) => {
         fc.integer({ min: 0, max: 359 }),
         fc.tuple(fc.integer({ min: -5e4, max: 5e4 }), fc.integer({ min: -5e4, max: 5e4 })),
         (widths, deep, imposedLoad, degrees, by) => {
-          const file = fileOf(row(widths, deep), { imposedLoad })
+          const file = fileBy(row(widths, deep), { imposedLoad })
           const [here, there] = [sizeScheme(scheme, file), sizeScheme(scheme, moved(file, degrees, by))]
           expect([there.depth, there.passes]).toEqual([here.depth, here.passes])
           near(massOf(there), massOf(here))
@@ -90,8 +97,8 @@ describe.each(schemes)('%s', (_, scheme) => {
   it('never gets thinner, nor lighter bars at the same thickness, under more load', () => {
     fc.assert(
       fc.property(spans, height, load, fc.double({ min: 0.01, max: 6, noNaN: true }), (widths, deep, imposedLoad, more) => {
-        const less = sizeScheme(scheme, fileOf(row(widths, deep), { imposedLoad }))
-        const most = sizeScheme(scheme, fileOf(row(widths, deep), { imposedLoad: imposedLoad + more }))
+        const less = sizeScheme(scheme, fileBy(row(widths, deep), { imposedLoad }))
+        const most = sizeScheme(scheme, fileBy(row(widths, deep), { imposedLoad: imposedLoad + more }))
         fc.pre(methodOf(less) === methodOf(most) && !isNarrower(most, less))
         expect(most.depth).toBeGreaterThanOrEqual(less.depth)
         if (most.depth === less.depth) expect(massOf(most)).toBeGreaterThanOrEqual(massOf(less) * (1 - RELATIVE))
@@ -103,7 +110,7 @@ describe.each(schemes)('%s', (_, scheme) => {
   it('schedules bars whose workings come to their count and length', () => {
     fc.assert(
       fc.property(spans, height, load, (widths, deep, imposedLoad) => {
-        const { panels } = sizeScheme(scheme, fileOf(row(widths, deep), { imposedLoad }))
+        const { panels } = sizeScheme(scheme, fileBy(row(widths, deep), { imposedLoad }))
         for (const { count, lengthMm, shape, countWorking, lengthWorking } of panels.flatMap(({ bars }) => bars)) {
           const [, terms, plan, formula, cut] = WORKING.exec(lengthWorking.replaceAll('−', '-')) ?? []
           const sum = terms!.split(/ (?=[+-] )/).reduce((total, term) => total + Number(term.replace(' ', '')), 0)
@@ -122,11 +129,11 @@ describe.each(schemes)('%s', (_, scheme) => {
   })
 })
 
-describe('the least thickness', () => {
+describe.each(bases)('the least thickness by %s', (_, fileBy) => {
   it('passes, and the next thinner slab does not', () => {
     fc.assert(
       fc.property(spans, height, load, (widths, deep, imposedLoad) => {
-        const file = fileOf(row(widths, deep), { imposedLoad })
+        const file = fileBy(row(widths, deep), { imposedLoad })
         const { depth, passes } = sizeScheme(schemeOf(solid), file)
         expect(passes).toBe(true)
         if (depth > 100) expect(sizeScheme(schemeOf({ ...solid, thickness: depth - 5 }), file).passes).toBe(false)
@@ -136,7 +143,7 @@ describe('the least thickness', () => {
   })
 })
 
-describe('the least solid zone', () => {
+describe.each(bases)('the least solid zone by %s', (_, fileBy) => {
   const passes = ({ panels }: SizedScheme) =>
     panels.every(({ checks }) => checks.every(({ name, pass }) => pass || (name !== 'shear' && name !== 'flexure.support')))
 
@@ -147,7 +154,7 @@ describe('the least solid zone', () => {
         fc.constantFrom([], [1], [1, 3]),
         load,
         (decimetres, continuous, imposedLoad) => {
-          const file = fileOf([panelOf('P1', rectangle(0, 0, decimetres * 100, 5000), continuous)], { imposedLoad })
+          const file = fileBy([panelOf('P1', rectangle(0, 0, decimetres * 100, 5000), continuous)], { imposedLoad })
           const given = (solidZone: number | 'least') => sizeScheme(schemeOf({ ...ribbed, solidZone }), file)
           const chosen = given('least')
           const zone = chosen.panels[0]!.layout!.solidZone

@@ -4,6 +4,7 @@ type Point = [number, number]
 type PanelInput = AppraisalFileInput['levels'][number]['panels'][number]
 type SchemeInput = AppraisalFileInput['schemes'][number]
 type Basis = Extract<AppraisalFileInput['brief'], { basis: 'EN1992' }>
+type BritishBasis = Extract<AppraisalFileInput['brief'], { basis: 'BS8110' }>
 
 export const loads = { imposedLoad: 2, finishesLoad: 1.5, partitionsLoad: 0.8, cover: 25, fireMinutes: 30 } as const
 
@@ -55,6 +56,11 @@ export function fileOf(panels: readonly PanelInput[], changes: Partial<Basis> = 
     levels: [{ mark: 'L1', panels }],
     schemes: [ribbed, solid],
   })
+}
+
+/** The same floor by BS 8110: concrete of the same class, high yield steel. */
+export function britishFileOf(panels: readonly PanelInput[], changes: Partial<BritishBasis> = {}): AppraisalFile {
+  return appraisalFile.parse({ ...fileOf(panels), brief: { basis: 'BS8110', ...loads, fcu: 37, fy: 460, ...changes } })
 }
 
 /** A scheme with its defaults filled in. */
