@@ -83,12 +83,34 @@ function limitFindings(context: SlabContext, where: Where, bars: SpacedAt, layer
  * Source: by the basis, `spanDepthLimit` (short span of two-way panels)
  */
 export function slabDeflection(context: SlabContext, layer: BarLayer, flexure: Flexure): Finding {
+  return deflectionAt(context, at('short span, midspan', layer), context.analysis.short.saggingNmm, layer, flexure)
+}
+
+/**
+ * Deflection of a cantilever, by its top bars; nothing where a panel is none.
+ *
+ * Source: by the basis, `spanDepthLimit`
+ */
+export function cantileverDeflection(context: SlabContext, place: TopPlace, layer: BarLayer, flexure: Flexure): Finding[] {
+  const { short } = context.analysis
+  if (short.position !== 'cantilever') return []
+  const where = at(`cantilever, ${placeName(place)}`, layer)
+  return [deflectionAt(context, where, short.ends[place.end].hoggingNmm, layer, flexure)]
+}
+
+function deflectionAt(
+  context: SlabContext,
+  where: ReturnType<typeof at>,
+  momentNmm: number,
+  layer: BarLayer,
+  flexure: Flexure,
+): Finding {
   const { basis, analysis, brief } = context
-  return deflectionFinding(basis, at('short span, midspan', layer), {
+  return deflectionFinding(basis, where, {
     position: analysis.short.position,
     spanMm: analysis.short.spanMm,
     section: slabSection(context, layer.diameter, null),
-    momentNmm: analysis.short.saggingNmm,
+    momentNmm,
     requiredMm2: flexure.requiredMm2,
     providedMm2: layerAreaMm2(layer),
     carriesPartitions: brief.partitionsLoad > 0,
@@ -96,17 +118,21 @@ export function slabDeflection(context: SlabContext, layer: BarLayer, flexure: F
 }
 
 /**
- * What the checks find for the bottom bars of the direction that the panel spans first.
+ * What the checks find for the bottom bars of the direction that the panel spans first. A cantilever has no midspan moment.
  *
  * Source: by the basis
  */
 export function shortBottomFindings(context: SlabContext, layer: BarLayer, flexure: Flexure): Finding[] {
   const where = at('short span, midspan', layer)
+  const rest = [
+    ...limitFindings(context, where, unredistributed(layerDepthMm(context, layer.diameter, null)), layer),
+    ...fireFindings(context, layer),
+  ]
+  if (context.analysis.short.position === 'cantilever') return rest
   return [
     ...flexureFindings('flexure.midspan', where, flexure, layerAreaMm2(layer)),
     slabDeflection(context, layer, flexure),
-    ...limitFindings(context, where, unredistributed(layerDepthMm(context, layer.diameter, null)), layer),
-    ...fireFindings(context, layer),
+    ...rest,
   ]
 }
 

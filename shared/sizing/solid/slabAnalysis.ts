@@ -1,7 +1,6 @@
-import { OutOfScopeError } from '../../outOfScope'
 import { type FloorLoads, ultimateLoad } from '../actions'
 import type { AnalysisRules } from '../analysis/analysisRules'
-import { bayAreas, type NeighboursOf, type SpanLine, stripOf } from '../analysis/levelStrips'
+import { bayAreas, type NeighboursOf, overhangBehind, type SpanLine, type SpanLines, stripOf } from '../analysis/levelStrips'
 import { type EdgeMoments, momentFromBehind } from '../analysis/sharedSupports'
 import type { EndOfSpan } from '../analysis/spanForces'
 import type { Strip } from '../analysis/strip'
@@ -13,11 +12,13 @@ import type { LevelSite } from '../panelSite'
 import { COEFFICIENT_REDISTRIBUTION } from '../tables/oneWayCoefficients'
 import type { TwoWayCase } from '../tables/twoWayCase'
 import type { SlabAxis, SlabPlan } from './slabPlan'
+import { continuousEnds, refuseUnheld, type SlabThickness, type Spanning, spanning } from './slabSpanning'
 
-/** Force at one end of a span: moment, N·mm per metre, and shear, N per metre. */
+/** Force at one end of a span: moment, N·mm per metre, and shear, N per metre; length of a cantilever that goes on behind it, mm, or 0. */
 export interface EndForces {
   readonly hoggingNmm: number
   readonly shearN: number
+  readonly overhangMm: number
 }
 
 /** One direction of a slab that carries load. */
@@ -45,58 +46,13 @@ export interface SlabAnalysis {
   readonly strip: Strip | null
 }
 
-/** Thickness of one panel of a level, mm, `depthMm` less the cover, and the loads that go with it. */
-export interface SlabThickness {
-  readonly heightMm: number
-  readonly depthMm: number
-  readonly loads: FloorLoads
-}
-
-/** Effective spans closer than this are equal, mm. */
-const EQUAL_SPANS_MM = 0.01
-
-/** A panel's two directions, the one it spans first, with their effective spans. */
-interface Spanning {
-  readonly plan: SlabPlan
-  readonly first: SlabAxis
-  readonly second: SlabAxis
-  readonly firstMm: number
-  readonly secondMm: number
-  readonly isTwoWay: boolean
-  readonly loads: FloorLoads
-}
-
-const isFree = ({ ends }: SlabAxis) => ends.start.isFree || ends.end.isFree
-const continuousEnds = ({ ends }: SlabAxis) => Number(ends.start.isContinuous) + Number(ends.end.isContinuous)
-
-/**
- * Which way a panel spans at a given thickness: one way past an aspect of 2, or between opposite supports where an edge is free.
- *
- * Source: BS 8110-1:1997, 3.5.3 and EN 1992-1-1:2004, 5.3.1(5) (engine design section 3); equal spans: the more continuous one first
- * @throws OutOfScopeError `edges` where free edges leave no two opposite supports
- */
-function spanning(plan: SlabPlan, { heightMm, depthMm, loads }: SlabThickness, basis: CodeBasis): Spanning {
-  const [a, b] = plan.axes
-  const spanOf = ({ clearMm, ends }: SlabAxis) => basis.effectiveSpanMm(clearMm, heightMm, depthMm, [ends.start, ends.end])
-  const [aMm, bMm] = [spanOf(a), spanOf(b)]
-  if (isFree(a) && isFree(b))
-    throw new OutOfScopeError(
-      `${plan.site.path}.edges`,
-      'expected two opposite supported edges, none of them free, for a solid panel',
-    )
-  const isEqual = Math.abs(aMm - bMm) < EQUAL_SPANS_MM
-  const aFirst = isFree(b) || (!isFree(a) && (isEqual ? continuousEnds(a) > continuousEnds(b) : aMm < bMm))
-  const [first, second, firstMm, secondMm] = aFirst ? [a, b, aMm, bMm] : [b, a, bMm, aMm]
-  return { plan, first, second, firstMm, secondMm, isTwoWay: !isFree(second) && secondMm / firstMm <= 2, loads }
-}
-
 /**
  * Effective spans and forces of every solid panel of a level, each at its thickness: two-way by coefficients, one-way along its strip, all
  * spans equally stiff. Of unequal moments at a shared support both sides take the larger.
  *
  * Source: engine design sections 3 and 4; BS 8110-1:1997, Tables 3.12 to 3.15; elastic analysis elsewhere
  * @param thicknesses - one for each panel
- * @throws OutOfScopeError `levels.I.panels.J.edges` where free edges leave no two opposite supports
+ * @throws OutOfScopeError `levels.I.panels.J.edges` where free edges leave no two opposite supports, nor a cantilever that is held
  */
 export function analyseSlabs(
   { neighboursOf }: LevelSite,
@@ -106,6 +62,7 @@ export function analyseSlabs(
   rules: AnalysisRules,
 ): SlabAnalysis[] {
   const spannings = plans.map((plan, i) => spanning(plan, thicknesses[i]!, basis))
+  refuseUnheld(spannings, neighboursOf)
   const lines = spannings.map(spanLine)
   const bays = bayAreas(lines, neighboursOf)
   const withBays = lines.map((line, i) => line && { ...line, span: { ...line.span, bayMm2: bays[i]! } })
@@ -114,27 +71,31 @@ export function analyseSlabs(
       ? twoWay(each, ultimateLoad(each.loads, rules.factors))
       : oneWay(each, stripOf(i, withBays, neighboursOf), rules),
   )
-  const moments = raw.map(edgeMoments)
+  const beside = { moments: raw.map(edgeMoments), lines, neighboursOf }
   return raw.map((analysis, i) => ({
     ...analysis,
-    short: raised(analysis.short, i, moments, neighboursOf),
-    long: analysis.long && raised(analysis.long, i, moments, neighboursOf),
+    short: besideOthers(analysis.short, i, beside),
+    long: analysis.long && besideOthers(analysis.long, i, beside),
   }))
 }
 
-function spanLine({ plan, first, firstMm, isTwoWay, loads }: Spanning): SpanLine | null {
+function spanLine({ plan, first, firstMm, isTwoWay, isCantilever, loads }: Spanning): SpanLine | null {
   if (isTwoWay) return null
   return {
     mark: plan.site.panel.mark,
     direction: first.direction,
     ends: first.ends,
-    span: { spanMm: firstMm, loads, bayMm2: plan.areas.gross },
+    span: { spanMm: firstMm, loads, bayMm2: plan.areas.gross, isCantilever },
   }
 }
 
 function oneWay({ first, second, firstMm, secondMm, loads }: Spanning, strip: Strip, rules: AnalysisRules): SlabAnalysis {
   const forces = stripForces(strip, rules)
-  const at = (end: EndOfSpan): EndForces => ({ hoggingNmm: forces.hoggingNmm(end, 0), shearN: forces.shearN(end, 0) })
+  const at = (end: EndOfSpan): EndForces => ({
+    hoggingNmm: forces.hoggingNmm(end, 0),
+    shearN: forces.shearN(end, 0),
+    overhangMm: 0,
+  })
   return {
     short: {
       axis: first,
@@ -171,8 +132,8 @@ function twoWay({ plan, first, second, firstMm, secondMm, loads }: Spanning, loa
     redistributedShare: COEFFICIENT_REDISTRIBUTION,
     saggingNmm,
     ends: {
-      start: { hoggingNmm: hoggingNmm[0], shearN: shearN[0] },
-      end: { hoggingNmm: hoggingNmm[1], shearN: shearN[1] },
+      start: { hoggingNmm: hoggingNmm[0], shearN: shearN[0], overhangMm: 0 },
+      end: { hoggingNmm: hoggingNmm[1], shearN: shearN[1], overhangMm: 0 },
     },
   })
   return {
@@ -194,12 +155,21 @@ function edgeMoments({ short, long }: SlabAnalysis): Map<number, number> {
   return new Map([...of(short), ...(long ? of(long) : [])])
 }
 
-function raised(span: SlabSpan, panel: number, moments: EdgeMoments, neighboursOf: NeighboursOf): SlabSpan {
+/** What the other panels of a level bring to a panel's supports. */
+interface Beside {
+  readonly moments: EdgeMoments
+  readonly lines: SpanLines
+  readonly neighboursOf: NeighboursOf
+}
+
+/** A span with its support moments raised to those from behind, and the cantilevers that go on there. */
+function besideOthers(span: SlabSpan, panel: number, { moments, lines, neighboursOf }: Beside): SlabSpan {
   const at = (end: EndOfSpan): EndForces => {
     const side = span.axis.ends[end]
     if (!side.isContinuous) return span.ends[end]
     const behind = momentFromBehind(panel, side.edges, moments, neighboursOf)
-    return { ...span.ends[end], hoggingNmm: Math.max(span.ends[end].hoggingNmm, behind) }
+    const overhangMm = overhangBehind(panel, side.edges, lines, neighboursOf)
+    return { ...span.ends[end], hoggingNmm: Math.max(span.ends[end].hoggingNmm, behind), overhangMm }
   }
   return { ...span, ends: { start: at('start'), end: at('end') } }
 }

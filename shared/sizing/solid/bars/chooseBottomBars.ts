@@ -27,7 +27,7 @@ export function shortLayer(context: SlabContext, diameter: BarDiameter): BarLaye
   const needed = Math.max(flexure.requiredMm2, leastMm2(context, depthMm))
   const greatest = greatestSpacingMm(context, 'greatestMoment', diameter, depthMm)
   return firstMeeting(layerFor(diameter, needed, greatest), (layer) => [
-    slabDeflection(context, layer, flexure),
+    ...(context.analysis.short.position === 'cantilever' ? [] : [slabDeflection(context, layer, flexure)]),
     ...bottomShears(context, 'short', depthMm, layer),
   ])
 }

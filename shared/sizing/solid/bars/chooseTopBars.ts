@@ -4,7 +4,7 @@ import type { Flexure } from '../../codeBasis'
 import type { Finding } from '../../finding'
 import { CHOSEN_DIAMETERS } from '../../tables/bars'
 import { firstMeeting, inStrips, leastMm2 } from './firstMeeting'
-import { slabShearFinding, topFlexure, topLayerFindings } from '../layerFindings'
+import { cantileverDeflection, slabShearFinding, topFlexure, topLayerFindings } from '../layerFindings'
 import { greatestSpacingMm, redistributedAt } from '../slabLimits'
 import { givenTop, isHogging, layerDepthMm, type SlabContext, type TopPlace } from '../slabContext'
 import { layerAreaMm2, layerFor, type StripLayers } from './slabLayer'
@@ -34,7 +34,11 @@ function judged(context: SlabContext, place: TopPlace, layer: BarLayer | null, l
   const outer = outerOf(context, place, diameter)
   const flexure = topFlexure(context, place, diameter, outer)
   const depthMm = layerDepthMm(context, diameter, outer)
-  const findings = [...topLayerFindings(context, place, layer, flexure, depthMm), ...shearOf(context, place, depthMm, layer)]
+  const findings = [
+    ...topLayerFindings(context, place, layer, flexure, depthMm),
+    ...shearOf(context, place, depthMm, layer),
+    ...(layer ? cantileverDeflection(context, place, layer, flexure) : []),
+  ]
   return { place, layers, flexure, findings }
 }
 
@@ -42,11 +46,15 @@ function judged(context: SlabContext, place: TopPlace, layer: BarLayer | null, l
 function topLayer(context: SlabContext, place: TopPlace, diameter: BarDiameter): BarLayer {
   const outer = outerOf(context, place, diameter)
   const depthMm = layerDepthMm(context, diameter, outer)
-  const { requiredMm2 } = topFlexure(context, place, diameter, outer)
+  const flexure = topFlexure(context, place, diameter, outer)
+  const { requiredMm2 } = flexure
   const hogging = isHogging(place)
   const needed = hogging ? Math.max(requiredMm2, leastMm2(context, depthMm)) : requiredMm2
   const greatest = greatestSpacingMm(context, hogging ? 'greatestMoment' : 'principal', diameter, depthMm, redistributedAt(place))
-  return firstMeeting(layerFor(diameter, needed, greatest), (each) => shearOf(context, place, depthMm, each))
+  return firstMeeting(layerFor(diameter, needed, greatest), (each) => [
+    ...shearOf(context, place, depthMm, each),
+    ...cantileverDeflection(context, place, each, flexure),
+  ])
 }
 
 /** The lightest bars of one diameter; what the checks find is worked out when it is first asked for. */

@@ -7,7 +7,7 @@ import type { TopBars } from './chooseTopBars'
 import { isHogging, type SlabContext } from '../slabContext'
 import { layerText, type StripLayers } from './slabLayer'
 import { type SlabLine, slabLines } from './slabLines'
-import { lineCount, simpleTopPiece, SLAB_TOP_REACH, slabBond } from './slabMass'
+import { lineCount, simpleTopPiece, slabBond, topReachMm } from './slabMass'
 import { stripsOf } from './slabStrips'
 import { trimmerLines } from './slabTrimmers'
 import type { SlabAxis } from '../slabPlan'
@@ -107,7 +107,7 @@ export function topBarLines(context: SlabContext, { place, layers }: TopBars): B
     if (edge === null || !place.side.edges.includes(edge)) return null
     const roomMm = line[opposite(place.end)].edge === null ? line.clearMm - context.brief.cover : Infinity
     if (!hogging) return simpleTopPiece(context, place, diameter, supportMm, roomMm)
-    return { parts: [supportMm / 2, Math.min(SLAB_TOP_REACH * line.fullMm, roomMm)], legs: [0, 0], over: edge }
+    return { parts: [supportMm / 2, Math.min(topReachMm(context, place, line.fullMm), roomMm)], legs: [0, 0], over: edge }
   }
   const edges = place.side.edges.map((edge) => edge + 1).join(', ')
   const position = `top, edge ${edges}`

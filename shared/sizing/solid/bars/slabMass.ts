@@ -48,13 +48,24 @@ export function bottomParts(
 }
 
 /**
+ * How far top bars run past the face of a continuous support into a clear length, mm: over the whole of a cantilever, and as far behind it;
+ * else the usual share.
+ *
+ * Source: see SLAB_TOP_REACH; behind a cantilever as long as it: common practice, no source
+ */
+export function topReachMm({ brief }: SlabContext, { span, end }: TopPlace, clearMm: number): number {
+  if (span?.position === 'cantilever') return clearMm - brief.cover
+  return Math.max(SLAB_TOP_REACH * clearMm, Math.min(clearMm, span?.ends[end].overhangMm ?? 0))
+}
+
+/**
  * A top bar at one end: half the support and 0.3 of the clear span; at an edge taken as simple see `simpleTopPiece`.
  *
  * Source: engine design section 4; for the floor behind see `overSupports`
  */
 export function topParts(context: SlabContext, place: TopPlace, { diameter }: BarLayer, clearMm: number): BarPiece {
   const { supportMm } = place.side
-  if (isHogging(place)) return { parts: [supportMm / 2, SLAB_TOP_REACH * clearMm], legs: [0, 0] }
+  if (isHogging(place)) return { parts: [supportMm / 2, topReachMm(context, place, clearMm)], legs: [0, 0] }
   return simpleTopPiece(context, place, diameter, supportMm)
 }
 

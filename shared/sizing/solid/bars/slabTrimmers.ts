@@ -14,7 +14,7 @@ import type { SlabBars } from './chooseSlabBars'
 import type { TopBars } from './chooseTopBars'
 import type { StripLayers } from './slabLayer'
 import { lineLevels, linesAt, type PlacedLine } from './slabLines'
-import { lineCount, SLAB_TOP_REACH, slabBond } from './slabMass'
+import { lineCount, slabBond, topReachMm } from './slabMass'
 import { stripsOf } from './slabStrips'
 
 /** One direction of bars beside the voids of a panel. */
@@ -100,7 +100,7 @@ function topTrimmers(context: SlabContext, { place, layers }: TopBars): BarLines
     const near = (y: number) =>
       chordsAt(field.clear, y).some(({ start, end }) => {
         const fromFace = place.end === 'start' ? minX - start : end - maxX
-        return fromFace < SLAB_TOP_REACH * (end - start)
+        return fromFace < topReachMm(context, place, end - start)
       })
     const cut = linesCut(field, course, ring).filter(near).length
     const sides = sideLines(context, course, field, ring).map((lines) =>
@@ -108,7 +108,7 @@ function topTrimmers(context: SlabContext, { place, layers }: TopBars): BarLines
     )
     const pieces = sides.map((lines) =>
       lines.map(({ line }): BarPiece => {
-        const reach = SLAB_TOP_REACH * line.fullMm
+        const reach = topReachMm(context, place, line.fullMm)
         return { parts: [reach, line[place.end].supportMm, reach], legs: [0, 0] }
       }),
     )
