@@ -4,7 +4,7 @@ import { AppraisalRefusedError } from '#shared/appraisalRefused'
 import { type AppraisalFileInput, appraisalFile } from '#shared/contracts/appraisal'
 import { OutOfScopeError } from '#shared/outOfScope'
 import { parseAppraisalFile } from '#shared/parseAppraisalFile'
-import { computedFile, givenFile } from './support/richFiles'
+import { britishFile, computedFile, givenFile } from './support/richFiles'
 
 type Path = readonly (string | number)[]
 
@@ -38,6 +38,9 @@ const OTHER_WORD: Readonly<Record<string, unknown>> = {
   solid: 'ribbed',
   USD: 'JPY',
   XC1: 'XC4',
+  mild: 'moderate',
+  held: 'mayLift',
+  mayLift: 'held',
 }
 /** Other values of single fields, where the next number or word would not do, or is too near to change how many blocks fit. */
 const OTHER_VALUE: Readonly<Record<string, unknown>> = {
@@ -55,6 +58,16 @@ const OTHER_VALUE: Readonly<Record<string, unknown>> = {
   leastPiece: 190,
   link: 10,
   mark: 'M9',
+  gammaPermanent: 1.25,
+  gammaVariable: 1.6,
+  gammaConcrete: 1.4,
+  gammaSteel: 1.05,
+  alphaCc: 1,
+  redistributionK1: 0.4,
+  redistributionK2: 1,
+  vMinCoefficient: 0.05,
+  greatestSteelFactor: 1.2,
+  greatestSpanDepth: 20,
 }
 
 function otherThan(path: Path, value: unknown): unknown {
@@ -83,6 +96,7 @@ function outcomeOf(file: unknown): string {
 const files: [string, AppraisalFileInput][] = [
   ['sizes left to the engine', computedFile],
   ['sizes given', givenFile],
+  ['BS 8110', britishFile],
 ]
 
 describe.each(files)('with %s', (_name, input) => {

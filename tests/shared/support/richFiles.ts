@@ -63,10 +63,24 @@ const loads = {
   stockLength: 6000,
 } as const
 
+/** Every value that a country chooses, as recommended, and a cap of span to depth. */
+const nationalValues = {
+  gammaPermanent: 1.35,
+  gammaVariable: 1.5,
+  gammaConcrete: 1.5,
+  gammaSteel: 1.15,
+  alphaCc: 0.85,
+  redistributionK1: 0.44,
+  redistributionK2: 1.25,
+  vMinCoefficient: 0.035,
+  greatestSteelFactor: 1.5,
+  greatestSpanDepth: 70,
+}
+
 /** A file in which every field of EN 1992-1-1 schemes with sizes left to the engine has something to do. */
 export const computedFile: AppraisalFileInput = {
   format: 'bothways.appraisal/1',
-  brief: { basis: 'EN1992', ...loads, exposure: 'XC1', fck: 30, fyk: 500 },
+  brief: { basis: 'EN1992', ...loads, exposure: 'XC1', fck: 30, fyk: 500, nationalValues },
   levels,
   schemes: [
     {
@@ -134,6 +148,27 @@ export const givenFile: AppraisalFileInput = {
             topX: { diameter: 12, spacing: 200 },
             topY: { diameter: 8, spacing: 175 },
           },
+        },
+      ],
+    },
+  ],
+}
+
+/** The floor by BS 8110, with a panel beside it that is simple all round and whose corners may lift. */
+export const britishFile: AppraisalFileInput = {
+  ...computedFile,
+  brief: { basis: 'BS8110', ...loads, exposure: 'mild', fcu: 37, fy: 460, nationalValues: { gammaSteel: 1.15 } },
+  levels: [
+    ...levels,
+    {
+      mark: 'L2',
+      panels: [
+        {
+          mark: 'P3',
+          outline: rectangle(0, 0, 5010, 4070),
+          edges: [edge('discontinuous')],
+          ribDirection: 90,
+          corners: 'mayLift',
         },
       ],
     },
