@@ -1,4 +1,5 @@
 import { appraiseInFull } from '#shared/appraise'
+import { type CuttingQuestion, plansOf } from '#shared/schedule/cutting/diameterPlans'
 import { vi } from 'vitest'
 import type { AppraisalAnswer, AppraisalRequest } from '../../src/workers/appraisalAnswer'
 import { appraiseWhatStands } from '../../src/workers/appraiseWhatStands'
@@ -18,7 +19,23 @@ class AnsweringWorker extends EventTarget {
   terminate(): void {}
 }
 
+/** A worker that plans the cuts at once, a message for each diameter. */
+class CuttingWorker extends EventTarget {
+  private isRunning = true
+
+  postMessage(question: CuttingQuestion): void {
+    for (const data of plansOf(question))
+      queueMicrotask(() => this.isRunning && this.dispatchEvent(new MessageEvent('message', { data })))
+  }
+
+  terminate(): void {
+    this.isRunning = false
+  }
+}
+
 /** Puts the engine itself in place of the browser's workers, which jsdom lacks. */
 export function answeringWorkers(): void {
-  vi.stubGlobal('Worker', AnsweringWorker)
+  vi.stubGlobal('Worker', function workerOf(url: URL) {
+    return url.href.includes('cuttingWorker') ? new CuttingWorker() : new AnsweringWorker()
+  })
 }
