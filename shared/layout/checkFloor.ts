@@ -1,5 +1,6 @@
 import type { ApiIssue } from '../contracts/apiError'
 import type { AppraisalFile } from '../contracts/appraisal'
+import { checkBeyond } from './checks/checkBeyond'
 import { checkBlockFit } from './checks/checkBlockFit'
 import { checkGivenPanels } from './checks/checkGivenPanels'
 import { checkMarks } from './checks/checkMarks'
@@ -24,7 +25,8 @@ export function checkFloor(file: AppraisalFile): ApiIssue[] {
       const where = `panel ${panel.mark} of level ${level.mark}`
       return ribbed.flatMap(({ scheme, path: schemePath }) => checkBlockFit(panel, scheme, where, schemePath))
     })
-    return ofPanels.some((issue) => issue.path.startsWith(path)) ? ofPanels : [...ofPanels, ...checkOverlaps(level, path)]
+    if (ofPanels.some((issue) => issue.path.startsWith(path))) return ofPanels
+    return [...ofPanels, ...checkOverlaps(level, path), ...checkBeyond(level, path)]
   })
   return [...checkMarks(file), ...ofLevels, ...checkGivenPanels(file)]
 }

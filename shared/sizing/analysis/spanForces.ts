@@ -22,6 +22,17 @@ export interface SpanForces {
 }
 
 /**
+ * Ends of a span that are not continuous and off which some load case lifts it.
+ *
+ * Source: statics, the reaction there is negative
+ */
+export function liftedEnds(forces: SpanForces, isContinuous: Readonly<Record<EndOfSpan, boolean>>): EndOfSpan[] {
+  return (['start', 'end'] as const).filter(
+    (end) => !isContinuous[end] && forces.casesAt(end, 0).some(({ shearN }) => shearN < 0),
+  )
+}
+
+/**
  * Forces of a single span on simple supports under an even load.
  *
  * Source: statics, w·l²/8 and w·(l/2 − x)

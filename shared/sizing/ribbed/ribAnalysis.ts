@@ -1,7 +1,7 @@
 import type { AnalysisRules } from '../analysis/analysisRules'
 import { bayAreas, overhangBehind, type SpanLine, stripOf } from '../analysis/levelStrips'
 import { momentFromBehind, raisedTo } from '../analysis/sharedSupports'
-import type { EndOfSpan, SpanForces } from '../analysis/spanForces'
+import { type EndOfSpan, liftedEnds, type SpanForces } from '../analysis/spanForces'
 import type { Strip } from '../analysis/strip'
 import { positionIn, stripForces } from '../analysis/stripForces'
 import type { CodeBasis, SpanPosition } from '../codeBasis'
@@ -21,6 +21,10 @@ export interface RibAnalysis {
   readonly overhangMm: Readonly<Record<EndOfSpan, number>>
   /** The strip it was analysed in. */
   readonly strip: Strip
+  /** Share of redistribution that was asked for. */
+  readonly askedShare: number
+  /** Ends off which load on other spans may lift it. */
+  readonly lifted: readonly EndOfSpan[]
 }
 
 /** Overall depth of the ribs, and to the near side of their bars, mm. */
@@ -69,6 +73,10 @@ export function analyseRibs(
         end: overhangBehind(i, ends.end.edges, lines, neighboursOf),
       },
       strip,
+      askedShare: rules.redistributedShare,
+      lifted: strip.spans[strip.index]!.isCantilever
+        ? []
+        : liftedEnds(forces, { start: ends.start.isContinuous, end: ends.end.isContinuous }),
     }
   })
 }

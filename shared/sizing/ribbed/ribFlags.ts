@@ -1,11 +1,11 @@
 import type { EndOfSpan } from '../analysis/spanForces'
+import { idleBeyondFlags, type StripAnalysis, stripFlags } from '../analysis/stripFlags'
 import { figure } from '../figure'
 import { fireFlags } from '../fireFlags'
 import { slenderFlags } from '../slenderFlags'
 import { type Finding, isMet } from '../finding'
 import { FABRIC } from '../tables/fabric'
 import { endName } from './ribContext'
-import type { RibAnalysis } from './ribAnalysis'
 import { isMixedEnd, type RibbedPanel } from './ribbedPanel'
 import type { RibTask } from './ribDesign'
 import { zoneFlags } from './zoneFlags'
@@ -17,14 +17,11 @@ import { zoneFlags } from './zoneFlags'
  */
 export function ribFlags(task: RibTask, findings: readonly Finding[]): string[] {
   const { panel, context } = task
-  const { analysis } = context
   const lengths = panel.ribs.map(({ clearMm }) => clearMm)
   const varies = Math.max(...lengths) - Math.min(...lengths) > 1
   return [
-    methodFlag(analysis),
-    ...(analysis.assumedEnds > 0
-      ? ['continuous edge without a neighbour spanning the same way: an equal span is assumed behind it']
-      : []),
+    ...stripFlags(stripAnalysisOf(task), context.basis.redistribution),
+    ...idleBeyondFlags(panel.site.edges, [...panel.ends.start.edges, ...panel.ends.end.edges]),
     ...(['start', 'end'] as const).filter((end) => isMixedEnd(panel, end)).map((end) => mixedFlag(panel, end)),
     ...(varies ? [`ribs differ in length: sized on the longest clear rib, ${figure(panel.clearMm, 0)} mm`] : []),
     ...(panel.site.panel.voids.length > 0
@@ -40,11 +37,11 @@ export function ribFlags(task: RibTask, findings: readonly Finding[]): string[] 
   ]
 }
 
-function methodFlag({ position, forces }: RibAnalysis): string {
-  if (position === 'simple') return 'one way, simple span'
-  return forces.method === 'coefficients'
-    ? 'one way, coefficients of BS 8110-1 Table 3.12 (3.5.2.3 holds; 20 % redistribution included)'
-    : 'one way, elastic continuous beam with pattern loading (conditions of BS 8110-1 3.5.2.3 do not hold)'
+function stripAnalysisOf({ panel, context: { analysis } }: RibTask): StripAnalysis {
+  const { strip, position, forces, askedShare, lifted } = analysis
+  const { method, redistributedShare } = forces
+  const liftedEdges = lifted.flatMap((end) => panel.ends[end].edges)
+  return { strip, position, method, redistributedShare, askedShare, liftedEdges }
 }
 
 function mixedFlag(panel: RibbedPanel, end: EndOfSpan): string {

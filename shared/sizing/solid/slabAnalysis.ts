@@ -2,8 +2,9 @@ import { type FloorLoads, ultimateLoad } from '../actions'
 import type { AnalysisRules } from '../analysis/analysisRules'
 import { bayAreas, type NeighboursOf, overhangBehind, type SpanLine, type SpanLines, stripOf } from '../analysis/levelStrips'
 import { type EdgeMoments, momentFromBehind } from '../analysis/sharedSupports'
-import type { EndOfSpan } from '../analysis/spanForces'
+import { type EndOfSpan, liftedEnds, type SpanForces } from '../analysis/spanForces'
 import type { Strip } from '../analysis/strip'
+import type { StripAnalysis } from '../analysis/stripFlags'
 import { positionIn, stripForces } from '../analysis/stripForces'
 import { liftedTwoWayForces } from '../analysis/liftedTwoWayForces'
 import { twoWayForces } from '../analysis/twoWayForces'
@@ -40,10 +41,11 @@ export interface SlabAnalysis {
   readonly method: 'coefficients' | 'elastic' | 'twoWay'
   /** Null one way, and of a two-way panel whose corners may lift. */
   readonly panelCase: TwoWayCase | null
-  readonly assumedEnds: number
   readonly loads: FloorLoads
   /** The strip it was analysed in; null where it spans two ways. */
   readonly strip: Strip | null
+  /** How it was analysed there. */
+  readonly stripAnalysis: StripAnalysis | null
 }
 
 /**
@@ -110,9 +112,23 @@ function oneWay({ first, second, firstMm, secondMm, loads }: Spanning, strip: St
     aspect: secondMm / firstMm,
     method: forces.method,
     panelCase: null,
-    assumedEnds: strip.assumedEnds,
     loads,
     strip,
+    stripAnalysis: stripAnalysis(first, strip, forces, rules),
+  }
+}
+
+function stripAnalysis({ ends }: SlabAxis, strip: Strip, forces: SpanForces, rules: AnalysisRules): StripAnalysis {
+  const position = positionIn(strip)
+  const isContinuous = { start: ends.start.isContinuous, end: ends.end.isContinuous }
+  const lifted = position === 'cantilever' ? [] : liftedEnds(forces, isContinuous)
+  return {
+    strip,
+    position,
+    method: forces.method,
+    redistributedShare: forces.redistributedShare,
+    askedShare: rules.redistributedShare,
+    liftedEdges: lifted.flatMap((end) => ends[end].edges),
   }
 }
 
@@ -143,9 +159,9 @@ function twoWay({ plan, first, second, firstMm, secondMm, loads }: Spanning, loa
     aspect: forces.aspect,
     method: 'twoWay',
     panelCase: forces.panelCase,
-    assumedEnds: 0,
     loads,
     strip: null,
+    stripAnalysis: null,
   }
 }
 

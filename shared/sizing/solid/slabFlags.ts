@@ -1,3 +1,4 @@
+import { idleBeyondFlags, stripFlags } from '../analysis/stripFlags'
 import type { Finding } from '../finding'
 import { fireFlags } from '../fireFlags'
 import { slenderFlags } from '../slenderFlags'
@@ -12,16 +13,19 @@ export function slabFlags(context: SlabContext, findings: readonly Finding[]): s
   const { plan, analysis } = context
   const sides = [...Object.values(analysis.short.axis.ends), ...Object.values(analysis.other.ends)]
   return [
-    methodFlag(context),
+    ...(analysis.stripAnalysis ? stripFlags(analysis.stripAnalysis, context.basis.redistribution) : [twoWayFlag(context)]),
+    ...idleBeyondFlags(
+      plan.site.edges,
+      analysis.strip ? Object.values(analysis.short.axis.ends).flatMap(({ edges }) => edges) : [],
+    ),
     ...(plan.isRectangle ? [] : ['not a rectangle: sized on its least-area enclosing rectangle']),
-    ...(analysis.assumedEnds > 0
-      ? ['continuous edge without a neighbour spanning the same way: an equal span is assumed behind it']
-      : []),
     ...sides
       .filter(({ isMixed }) => isMixed)
       .map(({ edges }) => `edges ${edges.map((edge) => edge + 1).join(', ')}: continuous in part only, taken as discontinuous`),
     ...(plan.site.panel.voids.length > 0
-      ? ['sized as without its voids; bars that they cut are made up beside them, half on each side (common practice), and not checked']
+      ? [
+          'sized as without its voids; bars that they cut are made up beside them, half on each side (common practice), and not checked',
+        ]
       : []),
     ...cornerFlag(context),
     ...fireFlags(findings),
@@ -29,16 +33,10 @@ export function slabFlags(context: SlabContext, findings: readonly Finding[]): s
   ]
 }
 
-function methodFlag({ analysis }: SlabContext): string {
-  const { method, short, panelCase } = analysis
-  if (method === 'twoWay' && panelCase === null)
+function twoWayFlag({ analysis: { panelCase } }: SlabContext): string {
+  if (panelCase === null)
     return 'two way, corners may lift: coefficients of BS 8110-1 Table 3.13, no torsion steel; shear of half the short span at every edge'
-  if (method === 'twoWay')
-    return `two way, coefficients of BS 8110-1 Tables 3.14 and 3.15, case ${panelCase}; of unequal support moments the larger counts on both sides`
-  if (short.position === 'simple') return 'one way, simple span'
-  return method === 'coefficients'
-    ? 'one way, coefficients of BS 8110-1 Table 3.12 (3.5.2.3 holds; 20 % redistribution included)'
-    : 'one way, elastic continuous beam with pattern loading (conditions of BS 8110-1 3.5.2.3 do not hold)'
+  return `two way, coefficients of BS 8110-1 Tables 3.14 and 3.15, case ${panelCase}; of unequal support moments the larger counts on both sides`
 }
 
 function cornerFlag({ plan, analysis }: SlabContext): string[] {
