@@ -1,6 +1,7 @@
 import type { Edge, Panel } from '../../contracts/appraisal'
 import { findNeighbours, findSharedEdges } from '../neighbours'
 import { edgeRecords } from './edgeRecords'
+import { withoutBeyond } from './withoutBeyond'
 
 /**
  * Brings continuity in line after panels were added, moved, reshaped or removed: an edge that has come to meet a neighbour
@@ -40,5 +41,5 @@ function joined(edge: Edge, neighbour: Edge | null): Edge {
 }
 
 function parted(edge: Edge): Edge {
-  return edge.continuity === 'continuous' ? { ...edge, continuity: 'discontinuous' } : edge
+  return edge.continuity === 'continuous' ? { ...withoutBeyond(edge), continuity: 'discontinuous' } : edge
 }
