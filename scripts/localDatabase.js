@@ -8,10 +8,15 @@ import { join } from 'node:path'
 
 const isRoot = process.getuid?.() === 0
 
-/** Statements run before the first connection is accepted: root is locked away, one user owns the databases named bothways…. */
+/**
+ * Statements run before the first connection is accepted: root is locked away, one user owns the databases named bothways…. The
+ * installation also makes a root of 127.0.0.1 and nameless users, none with a password: they go.
+ */
 function initialStatements(password) {
   const owners = ["'bothways'@'localhost'", "'bothways'@'127.0.0.1'"]
   return [
+    "DELETE FROM mysql.global_priv WHERE User = '' OR (User = 'root' AND Host <> 'localhost');",
+    'FLUSH PRIVILEGES;',
     `ALTER USER 'root'@'localhost' IDENTIFIED BY '${randomBytes(24).toString('hex')}';`,
     ...owners.flatMap((owner) => [
       `CREATE USER IF NOT EXISTS ${owner};`,
