@@ -12,8 +12,11 @@ type Path = readonly PropertyKey[]
  * @param input - what was parsed, to quote from
  */
 export function readableIssues(issues: readonly ContractIssue[], input: unknown): ApiIssue[] {
-  const readable = issues.flatMap((issue) => readIssue(issue, [], input))
-  return readable.filter(({ path }, index) => readable.findIndex((earlier) => earlier.path === path) === index)
+  const firstOfField = new Map<string, ApiIssue>()
+  for (const issue of issues.flatMap((found) => readIssue(found, [], input))) {
+    if (!firstOfField.has(issue.path)) firstOfField.set(issue.path, issue)
+  }
+  return [...firstOfField.values()]
 }
 
 function readIssue(issue: ContractIssue, parent: Path, input: unknown): ApiIssue[] {

@@ -130,6 +130,11 @@ describe('what a contract refuses, in words', () => {
     expect(issues.map(({ path }) => path)).toEqual(['brief.cover', 'brief.fck', 'brief.a', 'brief.b', 'levels'])
   })
 
+  it('takes time in proportion to how much is wrong: a body of unknown fields holds nobody up', { timeout: 20_000 }, () => {
+    const many = Object.fromEntries(Array.from({ length: 150_000 }, (_, index) => [`f${index}`, 1]))
+    expect(issuesOf({ ...sound, ...many })).toHaveLength(150_000)
+  })
+
   it('lets no key reach a prototype', () => {
     const file: unknown = JSON.parse(JSON.stringify(sound).replace('"concrete.slab":"150"', '"__proto__":{"polluted":"1"}'))
     const items = appraisalFile.parse(file).rates!.items
