@@ -27,6 +27,24 @@ describe('supportMoments', () => {
     expect(supportMoments([l, l], [w, 0])[1]).toBeCloseTo((w * l ** 2) / 16, 10)
   })
 
+  it.each([
+    // Printed in tables of continuous beams to three decimals (from memory): five equal spans 0.105 and 0.079.
+    [5, [0.105, 0.079, 0.079, 0.105]],
+    [4, [0.107, 0.071, 0.107]],
+    [3, [0.1, 0.1]],
+  ])('rounds to the printed coefficients of %i equal spans', (count, printed) => {
+    const moments = supportMoments(new Array<number>(count).fill(l), new Array<number>(count).fill(w)).slice(1, -1)
+    expect(moments.map((moment) => Math.round((1000 * moment) / (w * l ** 2)) / 1000)).toEqual(printed)
+  })
+
+  it('takes the moment of an overhang, w·a²/2, on into the spans: −1/4 of it over the next support of two', () => {
+    const moment = (w * 2 ** 2) / 2
+    const [first, second, last] = supportMoments([l, l], [0, 0], [moment, 0])
+    expect(first).toBe(moment)
+    expect(second).toBeCloseTo(-moment / 4, 10)
+    expect(last).toBe(0)
+  })
+
   it('comes to the propped cantilever, w·l²/8, beside a span of no length', () => {
     expect(supportMoments([l, 1e-9], [w, 0])[1]).toBeCloseTo((w * l ** 2) / 8, 6)
   })
@@ -39,6 +57,18 @@ describe('supportMoments', () => {
         const [spans, loads] = [beam.map(([length]) => length), beam.map(([, each]) => each)]
         const expected = stiffnessMoments(spans, loads)
         supportMoments(spans, loads).forEach((moment, i) => expect(moment).toBeCloseTo(expected[i]!, 6))
+      }),
+    )
+  })
+
+  it('agrees with it under moments at the outer supports', () => {
+    const span = fc.double({ min: 1, max: 12, noNaN: true })
+    const load = fc.double({ min: 0, max: 50, noNaN: true })
+    fc.assert(
+      fc.property(fc.array(fc.tuple(span, load), { minLength: 1, maxLength: 7 }), load, load, (beam, first, last) => {
+        const [spans, loads] = [beam.map(([length]) => length), beam.map(([, each]) => each)]
+        const expected = stiffnessMoments(spans, loads, [first, last])
+        supportMoments(spans, loads, [first, last]).forEach((moment, i) => expect(moment).toBeCloseTo(expected[i]!, 6))
       }),
     )
   })

@@ -4,8 +4,13 @@
  *
  * @param spans - lengths
  * @param loads - even load on each span
+ * @param outer - hogging moments put on the first and the last knot, as overhangs do
  */
-export function stiffnessMoments(spans: readonly number[], loads: readonly number[]): number[] {
+export function stiffnessMoments(
+  spans: readonly number[],
+  loads: readonly number[],
+  outer: readonly [number, number] = [0, 0],
+): number[] {
   const knots = spans.length + 1
   const matrix = Array.from({ length: knots }, () => new Array<number>(knots + 1).fill(0))
   spans.forEach((length, i) => {
@@ -17,9 +22,11 @@ export function stiffnessMoments(spans: readonly number[], loads: readonly numbe
     matrix[i]![knots]! -= fixed
     matrix[i + 1]![knots]! += fixed
   })
+  matrix[0]![knots]! += outer[0]
+  matrix[knots - 1]![knots]! -= outer[1]
   const rotations = eliminate(matrix)
   return Array.from({ length: knots }, (_, knot) => {
-    if (knot === knots - 1) return 0
+    if (knot === knots - 1) return outer[1]
     const length = spans[knot]!
     const atStart = (4 / length) * rotations[knot]! + (2 / length) * rotations[knot + 1]! + (loads[knot]! * length ** 2) / 12
     return Math.abs(atStart) < 1e-9 ? 0 : atStart
