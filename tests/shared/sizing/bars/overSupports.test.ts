@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { sizeScheme } from '#shared/sizing/sizeScheme'
-import { fileOf, panelOf, rectangle, ribbed, row, schemeOf, solid } from '../support/floors'
+import { edge, fileOf, panelOf, rectangle, ribbed, row, schemeOf, solid } from '../support/floors'
 
 const countOf = (panel: { bars: readonly { position: string; count: number }[] }, position: string) =>
   panel.bars.filter((run) => run.position.startsWith(position)).reduce((sum, { count }) => sum + count, 0)
@@ -42,5 +42,24 @@ describe('top bars over a support that two panels share', () => {
     const [run] = panels[0]!.bars.filter(({ position }) => position === 'top, edge 2')
     // 2 · 0.3 · 4750 + 250 = 3100
     expect([run?.count, run?.lengthMm]).toEqual([Math.ceil(ribs / 2), 3100])
+  })
+})
+
+describe('top bars of a cantilever', () => {
+  const cantilever = {
+    ...panelOf('P2', rectangle(5000, 0, 1500, 5000), []),
+    edges: [edge('free'), edge('free'), edge('free'), edge('continuous')],
+  }
+  const behind = panelOf('P1', rectangle(0, 0, 5000, 5000), [1])
+
+  it.each([
+    ['ribbed', schemeOf({ ...ribbed, ribWidth: 140, topping: 100 }), 3100],
+    ['solid', schemeOf({ ...solid, thickness: 200 }), 3075],
+  ])('of a %s floor run from its end to as far behind its support', (_, scheme, lengthMm) => {
+    const { panels } = sizeScheme(scheme, fileOf([behind, cantilever]))
+    const over = panels.map(({ bars }, i) => bars.filter(({ position }) => position.startsWith(`top, edge ${i === 0 ? 2 : 4}`)))
+    // clear 1375 less the cover of 25, the support of 250, and behind it the span of the cantilever: 1375 + min(h/2, t/2) = 1500 or 1475
+    for (const run of over.flat()) expect([run.lengthMm, run.shape.code]).toEqual([lengthMm, '00'])
+    expect(over.every((runs) => runs.length > 0)).toBe(true)
   })
 })
