@@ -4,10 +4,12 @@ import { offsetRing } from '../geometry/offsetRing'
 import { edgeRecords } from '../layout/edit/edgeRecords'
 import { patternDefinitions, patternFill } from './patterns'
 import { panelDimensions } from './panelDimensions'
+import { panelSizes, ribCentres } from './panelSizes'
 import type { PlanPanel } from './planPanel'
 import { blockNodes, solidParts, voidNode } from './planPanel'
-import type { PlanMargins, PlanScale } from './planScale'
-import { fitPlan, pointsText, toPx } from './planScale'
+import type { PlanFit, PlanMargins, PlanScale } from './planScale'
+import { placePlan, pointsText, toPx } from './planScale'
+import { SCALE_BAR_PX } from './planDrawing'
 import { scaleBar } from './scaleBar'
 import type { SvgNode } from './svgNode'
 import { svgNode } from './svgNode'
@@ -30,21 +32,20 @@ export interface PanelDrawingInput {
   /** Unique in the page: prefix of the hatches. */
   readonly id: string
   readonly panel: PlanPanel
-  readonly widthPx: number
-  readonly mostHeightPx: number
+  readonly fit: PlanFit
   /** Room for the fields around the drawing: left, right, above and below, px. */
   readonly margins: PlanMargins
   /** Width of the solid strip around voids, mm; null: there is no room to dimension it and the solid zones. */
   readonly trimmerMm: number | null
+  /** With its sizes and the centre-lines of its ribs, as a drawing that stands alone. */
+  readonly isWhole?: boolean
 }
 
-const SCALE_BAR_PX = 34
-
 /** A panel opened: support strips, clear outline, every block, solid parts, voids and their dimensions. */
-export function panelDrawing({ id, panel: input, widthPx, mostHeightPx, margins, trimmerMm }: PanelDrawingInput): PanelDrawing {
+export function panelDrawing({ id, panel: input, fit, margins, trimmerMm, isWhole }: PanelDrawingInput): PanelDrawing {
   const { panel, kind, layout } = input
   const half = edgeRecords(panel).map(({ supportWidth }) => supportWidth / 2)
-  const { scale, heightPx } = fitPlan(boundsOf(panel.outline), margins, widthPx, mostHeightPx)
+  const { scale, widthPx, heightPx } = placePlan(boundsOf(panel.outline), margins, fit)
   const clear = layout?.clear ?? offsetRing(panel.outline, half).ring
   const colour = kind === 'ribbed' ? 'var(--clay)' : 'var(--slate)'
   const body =
@@ -74,7 +75,9 @@ export function panelDrawing({ id, panel: input, widthPx, mostHeightPx, margins,
       'stroke-width': 0.75,
       'stroke-dasharray': '10 3 2 3',
     }),
+    ...(isWhole === true && layout !== null ? [ribCentres(layout, scale)] : []),
     ...panelDimensions(input, scale, clear, trimmerMm),
+    ...(isWhole === true ? [panelSizes(panel.outline, clear, scale)] : []),
     scaleBar(widthPx - 8, heightPx + 4, Math.min(240, widthPx * 0.4), scale.pxPerMm),
   ])
   return { node, widthPx, heightPx: fullHeightPx, edges: panel.outline.map((_, i) => edgePlace(panel.outline, i, scale)) }

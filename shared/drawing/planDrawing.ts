@@ -7,8 +7,8 @@ import { planDimensions, planMargins } from './planDimensions'
 import type { TypedLength } from './planDimensions'
 import type { PlanPanel } from './planPanel'
 import { planPanel } from './planPanel'
-import type { PlanScale } from './planScale'
-import { fitPlan, toPx } from './planScale'
+import type { PlanFit, PlanScale } from './planScale'
+import { placePlan, toPx } from './planScale'
 import { planSupports } from './planSupports'
 import { scaleBar } from './scaleBar'
 import { spanMark } from './spanMark'
@@ -17,15 +17,15 @@ import { svgNode } from './svgNode'
 
 /** Up to so many blocks each is an element of its own; beyond, each is a subpath of its panel's path. */
 const MOST_BLOCK_ELEMENTS = 6000
-const SCALE_BAR_PX = 34
+/** Height of the scale bar below a drawing. */
+export const SCALE_BAR_PX = 34
 
 /** What a plan is drawn from. */
 export interface PlanInput {
   /** Unique in the page: prefix of the hatches. */
   readonly id: string
   readonly panels: readonly PlanPanel[]
-  readonly widthPx: number
-  readonly mostHeightPx: number
+  readonly fit: PlanFit
   /** Ground shown around the floor on every side, to draw on, mm; a level without a panel shows twice that. */
   readonly aroundMm?: number
 }
@@ -47,7 +47,7 @@ export interface PlanLayers {
  * A level drawn to scale from the blocks that are counted: ground, solid parts, blocks, voids, support lines, marks with span
  * arrows, scale bar. Dimensions are a layer of their own (`planDimensions`).
  */
-export function planLayers({ id, panels, widthPx, mostHeightPx, aroundMm = 0 }: PlanInput): PlanLayers {
+export function planLayers({ id, panels, fit, aroundMm = 0 }: PlanInput): PlanLayers {
   const outlines = panels.map(({ panel }) => panel.outline)
   const corners = outlines.length === 0 ? [[aroundMm, aroundMm] as const] : outlines.flat()
   const box = boundsOf(
@@ -57,7 +57,7 @@ export function planLayers({ id, panels, widthPx, mostHeightPx, aroundMm = 0 }: 
     ]),
   )
   const margins = planMargins(outlines)
-  const { scale, heightPx } = fitPlan(box, margins, widthPx, mostHeightPx)
+  const { scale, widthPx, heightPx } = placePlan(box, margins, fit)
   const blockCount = panels.reduce((sum, { layout }) => sum + (layout?.blocks.length ?? 0), 0)
   const each = blockCount > MOST_BLOCK_ELEMENTS ? 'subpath' : 'shape'
   return {

@@ -75,7 +75,12 @@ export function blockNodes(blocks: readonly PlacedBlock[], mark: string, scale: 
       'g',
       paint,
       blocks.map(({ ring, isCut }) =>
-        svgNode('polygon', { class: isCut ? 'block cut' : 'block', 'data-panel': mark, points: pointsText(scale, ring) }),
+        svgNode('polygon', {
+          class: isCut ? 'block cut' : 'block',
+          'data-panel': mark,
+          points: pointsText(scale, ring),
+          fill: isCut ? 'var(--clay-wash)' : undefined,
+        }),
       ),
     ),
   ]

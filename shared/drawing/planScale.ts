@@ -17,25 +17,36 @@ export interface PlanMargins {
   readonly bottom: number
 }
 
-/** A floor fitted into a width and a greatest height: the scale, and the height it comes to, px. */
-export function fitPlan(
+/** What a floor is drawn to: a width and a greatest height it is fitted into, or a scale that is stated. */
+export type PlanFit = { readonly widthPx: number; readonly mostHeightPx: number } | { readonly pxPerMm: number }
+
+/** A floor placed on its drawing: the scale, and the size that the drawing comes to, px. */
+export function placePlan(
   box: Bounds,
   margins: PlanMargins,
-  widthPx: number,
-  mostHeightPx: number,
-): { readonly scale: PlanScale; readonly heightPx: number } {
+  fit: PlanFit,
+): { readonly scale: PlanScale; readonly widthPx: number; readonly heightPx: number } {
   const lengthX = Math.max(box.maxX - box.minX, 1)
   const lengthY = Math.max(box.maxY - box.minY, 1)
-  const roomX = Math.max(widthPx - margins.left - margins.right, 40)
-  const roomY = Math.max(mostHeightPx - margins.top - margins.bottom, 40)
-  const pxPerMm = Math.min(roomX / lengthX, roomY / lengthY)
+  const pxPerMm = 'pxPerMm' in fit ? fit.pxPerMm : fittedPxPerMm([lengthX, lengthY], margins, fit)
+  const widthPx = 'pxPerMm' in fit ? Math.ceil(margins.left + lengthX * pxPerMm + margins.right) : fit.widthPx
   const floorHeightPx = lengthY * pxPerMm
   const scale = {
     pxPerMm,
     originPx: [margins.left, margins.top + floorHeightPx] as const,
     originMm: [box.minX, box.minY] as const,
   }
-  return { scale, heightPx: Math.ceil(margins.top + floorHeightPx + margins.bottom) }
+  return { scale, widthPx, heightPx: Math.ceil(margins.top + floorHeightPx + margins.bottom) }
+}
+
+function fittedPxPerMm(
+  [lengthX, lengthY]: readonly [number, number],
+  margins: PlanMargins,
+  { widthPx, mostHeightPx }: { readonly widthPx: number; readonly mostHeightPx: number },
+): number {
+  const roomX = Math.max(widthPx - margins.left - margins.right, 40)
+  const roomY = Math.max(mostHeightPx - margins.top - margins.bottom, 40)
+  return Math.min(roomX / lengthX, roomY / lengthY)
 }
 
 /** Place of a level point on the drawing, px, to a hundredth. */

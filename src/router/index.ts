@@ -35,11 +35,18 @@ const projectSheets: NamedRoute[] = [
     meta: { title: 'Schemes', roles: surveyor },
   },
   {
+    path: 'layout',
+    name: 'layout',
+    component: () => import('../views/LayoutView.vue'),
+    meta: { title: 'Layout', roles: ['surveyor', 'engineer'] },
+  },
+  {
     path: 'bars',
     name: 'bars',
     component: () => import('../views/BarsView.vue'),
     meta: { title: 'Bars', roles: ['surveyor', 'engineer'] },
   },
+  { path: 'scope', name: 'scope', component: () => import('../views/ScopeView.vue'), meta: { title: 'Scope', roles: surveyor } },
   {
     path: 'quantities',
     name: 'quantities',

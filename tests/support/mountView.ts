@@ -20,6 +20,7 @@ const NAMES = [
   'brief',
   'levels',
   'schemes',
+  'layout',
   'bars',
   'quantities',
   'bill',

@@ -5,10 +5,12 @@ export const PROJECT_SHEETS = [
   { name: 'brief', word: 'Brief', roles: ['surveyor'] },
   { name: 'levels', word: 'Levels', roles: ['surveyor'] },
   { name: 'schemes', word: 'Schemes', roles: ['surveyor'] },
+  { name: 'scope', word: 'Scope', roles: ['surveyor'] },
   { name: 'quantities', word: 'Quantities', roles: ['surveyor'] },
   { name: 'bill', word: 'Bill', roles: ['surveyor'] },
   { name: 'compare', word: 'Compare', roles: ['surveyor', 'developer'] },
   { name: 'checks', word: 'Checks', roles: ['surveyor', 'engineer'] },
+  { name: 'layout', word: 'Layout', roles: ['surveyor', 'engineer'] },
   { name: 'bars', word: 'Bars', roles: ['surveyor', 'engineer'] },
   { name: 'sent', word: 'Sent', roles: ['surveyor'] },
 ] as const satisfies readonly { name: string; word: string; roles: readonly Role[] }[]

@@ -4,7 +4,7 @@ import { appraiseInFull } from '../../../shared/appraise'
 import { appraisalFile } from '../../../shared/contracts/appraisal'
 import { planLayers, planPanels, planSvg } from '../../../shared/drawing/planDrawing'
 import type { PlanPanel } from '../../../shared/drawing/planPanel'
-import { fitPlan, toMm, toPx } from '../../../shared/drawing/planScale'
+import { placePlan, toMm, toPx } from '../../../shared/drawing/planScale'
 import type { SvgNode } from '../../../shared/drawing/svgNode'
 import { signedArea } from '../../../shared/geometry/ring'
 
@@ -16,7 +16,7 @@ const level = file.levels[0]!
 const ribbed = full.sized.find(({ kind }) => kind === 'ribbed')!
 const solid = full.sized.find(({ kind }) => kind === 'solid')!
 const drawn = planPanels(level, ribbed, 'ribbed')
-const layersOf = (panels: readonly PlanPanel[]) => planLayers({ id: 't', panels, widthPx: 736, mostHeightPx: 560 })
+const layersOf = (panels: readonly PlanPanel[]) => planLayers({ id: 't', panels, fit: { widthPx: 736, mostHeightPx: 560 } })
 
 function nodesOf(node: SvgNode): SvgNode[] {
   return [node, ...node.children.flatMap((child) => (typeof child === 'string' ? [] : nodesOf(child)))]
@@ -105,7 +105,7 @@ describe('planLayers', () => {
   })
 
   it('has ground to draw on for a level without a panel', () => {
-    const layers = planLayers({ id: 't', panels: [], widthPx: 600, mostHeightPx: 400, aroundMm: 8000 })
+    const layers = planLayers({ id: 't', panels: [], fit: { widthPx: 600, mostHeightPx: 400 }, aroundMm: 8000 })
     expect(layers.scale.pxPerMm).toBeGreaterThan(0)
   })
 })
@@ -113,7 +113,10 @@ describe('planLayers', () => {
 describe('planScale', () => {
   it('fits the floor into the width and turns y about', () => {
     const margins = { left: 50, right: 10, top: 20, bottom: 30 }
-    const { scale, heightPx } = fitPlan({ minX: 0, minY: 0, maxX: 10_000, maxY: 5000 }, margins, 260, 1000)
+    const { scale, heightPx } = placePlan({ minX: 0, minY: 0, maxX: 10_000, maxY: 5000 }, margins, {
+      widthPx: 260,
+      mostHeightPx: 1000,
+    })
     expect(scale.pxPerMm).toBeCloseTo(0.02, 12)
     expect(heightPx).toBe(150)
     expect(toPx(scale, [0, 0])).toEqual([50, 120])

@@ -66,7 +66,7 @@ describe('panelDrawing', () => {
       isBothWays: false,
     } as const
     const margins = { left: 100, right: 100, top: 50, bottom: 50 }
-    const { edges } = panelDrawing({ id: 't', panel: given, widthPx: 600, mostHeightPx: 600, margins, trimmerMm: 0 })
+    const { edges } = panelDrawing({ id: 't', panel: given, fit: { widthPx: 600, mostHeightPx: 600 }, margins, trimmerMm: 0 })
     expect(edges.map(({ outward }) => outward.map((each) => Math.round(each) + 0))).toEqual([
       [0, 1],
       [1, 0],

@@ -1,0 +1,50 @@
+import type { StoredLevel, StoredScheme } from '#shared/contracts/project'
+import { levelOnPaper } from '#shared/drawing/paper/levelOnPaper'
+import type { OnPaper } from '#shared/drawing/paper/levelOnPaper'
+import { panelOnPaper } from '#shared/drawing/paper/panelOnPaper'
+import type { PaperName } from '#shared/drawing/paper/paperSize'
+import { planPanels } from '#shared/drawing/planDrawing'
+import type { PlanPanel } from '#shared/drawing/planPanel'
+import type { Ref } from 'vue'
+import { computed, ref, useId } from 'vue'
+import { useProjectStore } from '../../stores/project'
+
+/** What stands on the paper besides the drawing. */
+export interface PaperContent extends OnPaper {
+  readonly level: StoredLevel
+  readonly scheme: StoredScheme
+  /** Panels drawn: all of the level, or the one chosen. */
+  readonly panels: readonly PlanPanel[]
+}
+
+/** The level, or one panel of it, that is put on paper, as the chosen scheme builds it. `panelMark` '' means the whole level. */
+export function usePaper(scheme: Ref<StoredScheme | null>) {
+  const store = useProjectStore()
+  const id = useId()
+  const paper = ref<PaperName>('A4')
+  const chosenLevel = ref<string | null>(null)
+  const chosenPanel = ref('')
+  const levels = computed(() => store.levels.filter(({ panels }) => panels.length > 0))
+  const level = computed(() => levels.value.find((each) => each.id === chosenLevel.value) ?? levels.value[0] ?? null)
+  const levelId = computed({ get: () => level.value?.id ?? '', set: (value: string) => (chosenLevel.value = value) })
+  const panelMark = computed({
+    get: () => (level.value?.panels.some(({ mark }) => mark === chosenPanel.value) ? chosenPanel.value : ''),
+    set: (value: string) => (chosenPanel.value = value),
+  })
+  const sized = computed(() => store.full?.sized.find(({ mark }) => mark === scheme.value?.specification.mark) ?? null)
+
+  const content = computed<PaperContent | null>(() => {
+    const [row, stored] = [scheme.value, level.value]
+    if (row === null || stored === null || sized.value === null) return null
+    const all = planPanels(stored, sized.value, row.specification.kind)
+    const panels = panelMark.value === '' ? all : all.filter(({ panel }) => panel.mark === panelMark.value)
+    const title = `${panelMark.value === '' ? `Level ${stored.mark}` : `Panel ${panelMark.value} of level ${stored.mark}`}, ${row.specification.mark}`
+    const trimmerMm = row.specification.kind === 'ribbed' ? row.specification.trimmerWidth : 0
+    const drawn =
+      panelMark.value === ''
+        ? levelOnPaper(id, panels, paper.value, title)
+        : panelOnPaper(id, panels[0]!, trimmerMm, paper.value, title)
+    return { ...drawn, level: stored, scheme: row, panels }
+  })
+  return { paper, levels, level, levelId, panelMark, sized, content }
+}
