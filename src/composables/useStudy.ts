@@ -15,7 +15,7 @@ export function useStudy<Kind extends StudyKind>(
   kind: Kind,
   question: () => StudyQuestions[Kind] | null,
 ): Study<StudyAnswers[Kind]> {
-  const answer = shallowRef<StudyAnswers[Kind] | null>(null)
+  const answer = shallowRef(null) as ShallowRef<StudyAnswers[Kind] | null> // nothing yet, of the kind that is asked
   const running = ref(false)
   const problem = ref<string | null>(null)
   let latest = 0

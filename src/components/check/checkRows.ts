@@ -1,4 +1,5 @@
 import type { Check, SchemeResult } from '#shared/contracts/appraisal'
+import type { SizedPanel } from '#shared/sizing/sizedPanel'
 
 /** Checks of a scheme, failing first, then the tightest. */
 export function checkRows({ checks }: SchemeResult): Check[] {
@@ -17,4 +18,17 @@ export function checksInWords({ checks }: SchemeResult): string {
   if (checks.length === 0) return 'No check was made.'
   if (failing > 0) return `${failing} of ${checks.length} ${failing === 1 ? 'fails' : 'fail'}.`
   return `All ${checks.length} pass; the tightest is used to ${Math.max(...checks.map(({ utilisation }) => utilisation)).toFixed(2)}.`
+}
+
+/** The panel that fails most, or of those that pass the one used most. */
+export function tightestPanel(panels: readonly SizedPanel[]): SizedPanel | null {
+  const worst = ({ checks }: SizedPanel) => Math.max(0, ...checks.map(({ utilisation }) => utilisation))
+  return panels.reduce<SizedPanel | null>((most, each) => (most === null || worst(each) > worst(most) ? each : most), null)
+}
+
+/** What the checks of a panel say: '2 of 24 checks fail' or 'all 24 checks pass, used to 0.93'. */
+export function panelChecksInWords({ checks }: Pick<SizedPanel, 'checks'>): string {
+  const failing = checks.filter(({ pass }) => !pass).length
+  if (failing > 0) return `${failing} of ${checks.length} checks ${failing === 1 ? 'fails' : 'fail'}`
+  return `all ${checks.length} checks pass, used to ${Math.max(0, ...checks.map(({ utilisation }) => utilisation)).toFixed(2)}`
 }

@@ -32,8 +32,8 @@ export function newRibbed(block: CatalogueBlock, schemes: readonly StoredScheme[
   return { name: `Ribs with ${block.name}`.slice(0, 120), blockId: block.id, specification }
 }
 
-/** A solid scheme to begin with: the engine finds thickness and bars. */
-export function newSolid(schemes: readonly StoredScheme[]): SchemeInput {
+/** A solid scheme to begin with: the engine finds thickness and bars. Its cheapest thickness is looked for before it is added. */
+export function newSolid(schemes: readonly StoredScheme[]): SchemeInput & { readonly specification: SolidScheme } {
   const specification: SolidScheme = {
     mark: nextMark('solid', schemes),
     kind: 'solid',

@@ -16,5 +16,8 @@ export const SCHEME_FIELDS: readonly string[] = [
   'topBars',
   'link',
   'thickness',
+  'thicknessPer',
+  'thicknessNote',
+  'givenPanels',
   'bars',
 ]

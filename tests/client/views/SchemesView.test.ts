@@ -1,6 +1,7 @@
 import { flushPromises } from '@vue/test-utils'
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
 import type { SchemeInput } from '../../../shared/contracts/project'
+import { schemeInputOf } from '../../../src/stores/sheetRow'
 import SchemesView from '../../../src/views/SchemesView.vue'
 import { failing } from '../../support/fakeApi'
 import { aPricedSheet, openSheet } from '../../support/openSheet'
@@ -132,6 +133,48 @@ describe('SchemesView', () => {
     byRole('button', 'Read the catalogue again').click()
     await flushPromises()
     expect((byRole('button', 'Add a ribbed scheme') as HTMLButtonElement).disabled).toBe(false)
+  })
+
+  it('adds a solid scheme at the thickness that is cheapest, with a note of how it was found', async () => {
+    const { api, settle } = await shown()
+    byRole('button', 'Add a solid scheme').click()
+    await settle()
+    const { body } = api.calls.find(({ method, path }) => method === 'POST' && path === SCHEMES)!
+    const { specification } = body as SchemeInput
+    if (specification.kind !== 'solid') throw new Error('expected a solid scheme')
+    expect(specification.thickness).toBeTypeOf('number')
+    expect(specification.thicknessNote).toMatch(/cheapest of \d+ thicknesses/)
+  })
+
+  it('finds the cheapest thickness on request, and forgets its note when another is typed', async () => {
+    const { store, settle } = await shown({
+      [`PUT ${SCHEMES}/${solidId}`]: ({ body }) => ({
+        status: 200,
+        json: { ...aPricedSheet().schemes[1], ...(body as SchemeInput), version: 3 },
+      }),
+    })
+    byRole('button', /^S1 solid/).click()
+    await settle()
+    byRole('button', 'Find the cheapest thickness').click()
+    await settle()
+    const specification = () => store.schemes[1]!.specification
+    expect(specification()).toMatchObject({ thicknessNote: expect.stringContaining('cheapest of') as string })
+    type(byRole('textbox', 'Thickness, given, mm'), '310')
+    await settle()
+    expect(specification()).toMatchObject({ thickness: 310 })
+    expect(specification()).not.toHaveProperty('thicknessNote')
+  })
+
+  it('lets each panel have its least thickness', async () => {
+    const { store, settle } = await shown()
+    byRole('button', /^S1 solid/).click()
+    await settle()
+    store.changeScheme(solidId, {
+      ...schemeInputOf(store.schemes[1]!),
+      specification: { ...store.schemes[1]!.specification, thicknessPer: 'panel' } as SchemeInput['specification'],
+    })
+    await settle()
+    expect(byRole('combobox', 'Thickness of the panels').closest('.el-select')?.textContent).toContain('the least of each panel')
   })
 
   it('takes a scheme out only after asking, over its version', async () => {
