@@ -37,6 +37,8 @@ export function errorHandler(db: EntityManager, log: Log): ErrorRequestHandler {
     const known = toAppError(error)
     const requestId = String(request.id)
     if (STATUS[known.code] >= 500) log.error({ err: error, requestId }, 'request failed')
+    // after a whole answer the connection stays: cutting it would tell the caller how the work behind the answer went
+    if (response.writableEnded) return
     if (response.headersSent) return next(error)
     const body: ApiError = { code: known.code, message: known.message, requestId }
     if (known.retryAfterS !== undefined) response.set('Retry-After', String(known.retryAfterS))
