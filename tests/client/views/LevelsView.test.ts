@@ -184,6 +184,26 @@ describe('LevelsView', () => {
     expect(panels()[1]!.edges[3]!.supportWidth).toBe(300)
   })
 
+  it('lets the corners of a panel lift once all its edges are discontinuous', async () => {
+    const sheet = aSheet()
+    const [first, ...rest] = sheet.levels
+    const [panel] = first!.panels
+    const edges = [{ supportWidth: 250, kind: 'beam' as const, continuity: 'discontinuous' as const }]
+    const { panels } = await shown({ ...sheet, levels: [{ ...first!, panels: [{ ...panel!, edges }] }, ...rest] })
+    byRole('combobox', 'Corners of a solid slab').click()
+    await settled()
+    ;[...document.querySelectorAll<HTMLElement>('[role=option]')]
+      .find(({ textContent }) => textContent.includes('may lift'))!
+      .click()
+    await settled()
+    expect(panels()[0]!.corners).toBe('mayLift')
+  })
+
+  it('asks nothing of corners where an edge is continuous', async () => {
+    await shown()
+    expect(allByRole('combobox', 'Corners of a solid slab')).toEqual([])
+  })
+
   it('inserts a void, draws it, and refuses one that reaches a support', async () => {
     const { panels } = await shown()
     byRole('button', 'Insert a void').click()
