@@ -18,6 +18,8 @@ export const labourFactors = z.strictObject({
   edge: labourOutput.default(PROPOSED_LABOUR.edge), // man-hours per m, fix and strike
   leastGang: z.int().min(1).max(500).default(PROPOSED_LABOUR.leastGang), // people at work together
   hoursPerDay: z.number().min(1).max(24).default(PROPOSED_LABOUR.hoursPerDay),
+  daysPerWeek: z.int().min(1).max(7).default(PROPOSED_LABOUR.daysPerWeek),
+  airTemperature: z.number().min(1).max(50).default(PROPOSED_LABOUR.airTemperature), // °C, mean while the concrete hardens
 })
 
 export const carbonMaterial = z.enum(['concrete', 'bars', 'mesh', 'blocks', 'formwork'])
@@ -32,14 +34,14 @@ const UNITS: Readonly<Record<z.infer<typeof carbonMaterial>, readonly z.infer<ty
   formwork: ['m²'],
 }
 
-/** A carbon factor, kg CO₂e per declared unit, of the modules of EN 15978 that it covers. */
+/** A carbon factor, kg CO2e per declared unit, of the modules of EN 15978 that it covers. */
 export const carbonFactor = z
   .strictObject({
     material: carbonMaterial,
     modules: carbonModules,
     value: z.number().min(0).max(1_000_000),
     unit: carbonUnit,
-    wastePercent: z.number().min(0).max(100).default(0), // of A1-A3: what is made, carried and thrown away (A5)
+    wastePercent: z.number().min(0).max(100).optional(), // with A1-A3: made, carried and thrown away (A5); absent: not stated
     uses: z.int().min(1).max(200).default(1), // of formwork
     source: line(240),
     date: z.iso.date(),
@@ -47,7 +49,7 @@ export const carbonFactor = z
   .superRefine(({ material, modules, unit, wastePercent, uses }, context) => {
     const refuse = (field: string, message: string) => context.addIssue({ code: 'custom', path: [field], message })
     if (!UNITS[material].includes(unit)) refuse('unit', `expected ${UNITS[material].join(' or ')} for ${material}`)
-    if (modules !== 'A1-A3' && wastePercent !== 0) refuse('wastePercent', 'expected 0: waste is stated with A1-A3')
+    if (modules !== 'A1-A3' && wastePercent !== undefined) refuse('wastePercent', 'expected none: waste is stated with A1-A3')
     if (material !== 'formwork' && uses !== 1) refuse('uses', 'expected 1: only formwork is used again')
   })
 

@@ -20,4 +20,6 @@ export const PROPOSED_LABOUR = {
   edge: { value: 0.5, source: `Proposed: as soffit formwork over an edge 0.25 m deep (${NO_SOURCE})` },
   leastGang: 8,
   hoursPerDay: 8,
+  daysPerWeek: 5,
+  airTemperature: 16,
 }

@@ -67,9 +67,27 @@ export const scope = z
     })
   })
 
-/** Those declarations that name one of the schemes; a scheme that is no more leaves its declarations behind. */
-export const declaredFor = (declarations: readonly ScopeDeclaration[], schemes: readonly { readonly mark: string }[]) =>
-  declarations.filter(({ scheme }) => schemes.some((each) => each.mark === scheme))
+type DeclaredScheme = { readonly mark: string; readonly kind: 'ribbed' | 'solid' }
+
+/** What a declaration cannot say of the schemes there are: of one that is none of them, or by the block where there is no block. */
+export function scopeFaults(
+  declarations: readonly ScopeDeclaration[],
+  schemes: readonly DeclaredScheme[],
+): { readonly index: number; readonly field: 'scheme' | 'per'; readonly message: string }[] {
+  return declarations.flatMap((declaration, index) => {
+    const scheme = schemes.find(({ mark }) => mark === declaration.scheme)
+    if (scheme === undefined)
+      return [{ index, field: 'scheme', message: `expected one of ${schemes.map(({ mark }) => mark).join(', ')}` } as const]
+    if (scheme.kind === 'ribbed' || declaration.state !== 'priced' || declaration.per !== 'blocks') return []
+    return [{ index, field: 'per', message: 'expected another basis: a solid scheme has no blocks' } as const]
+  })
+}
+
+/** Those declarations that the schemes can have; a scheme that is no more leaves its own behind. */
+export function declaredFor(declarations: readonly ScopeDeclaration[], schemes: readonly DeclaredScheme[]): ScopeDeclaration[] {
+  const faulty = new Set(scopeFaults(declarations, schemes).map(({ index }) => index))
+  return declarations.filter((_, index) => !faulty.has(index))
+}
 
 /** A declaration as those who may see no rate see it. */
 export const scopeStanding = z.strictObject({
