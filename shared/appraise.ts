@@ -1,3 +1,5 @@
+import { alsoCompared, type AlsoCompared } from './alsoCompared/alsoCompared'
+import { allScopeDifferences, type ScopeDifference } from './alsoCompared/scopeDifferences'
 import { AppraisalRefusedError } from './appraisalRefused'
 import { compareSchemes } from './comparison/compareSchemes'
 import type { ApiIssue } from './contracts/apiError'
@@ -5,12 +7,15 @@ import type { Appraisal, AppraisalFile, PanelResult, Scheme, SchemeResult } from
 import { checkFloor } from './layout/checkFloor'
 import { OutOfScopeError } from './outOfScope'
 import { priceScheme } from './pricing/priceScheme'
+import { scopeLines } from './pricing/scopeLines'
 import type { SizedPanel, SizedScheme } from './sizing/sizedPanel'
 import { sizeScheme } from './sizing/sizeScheme'
 import { deadLoadOf, grossAreaM2 } from './takeoff/deadLoad'
 import { toM2 } from './units'
 import { measuredPanels } from './takeoff/measuredPanel'
-import { netRules } from './takeoff/measurementRules'
+import { RULE_SETS } from './takeoff/ruleSets'
+import { comparingRules } from './takeoff/rules/comparingRules'
+import { schemeMeasures, type SchemeMeasures } from './takeoff/schemeMeasures'
 import { takeOffScheme } from './takeoff/takeOffScheme'
 
 /** A scheme that lies outside what the rules cover, and why: it has no result, the other schemes have. */
@@ -24,6 +29,10 @@ export interface FullAppraisal {
   readonly appraisal: Appraisal
   /** Beside `appraisal.schemes`, in the same order. */
   readonly sized: readonly SizedScheme[]
+  /** What is compared beside the cost, beside `appraisal.schemes`, in the same order. */
+  readonly alsoCompared: readonly AlsoCompared[]
+  /** Where ribbed and solid schemes differ in what their totals hold, or do not say; each pair of them. */
+  readonly scopeDifferences: readonly ScopeDifference[]
   /** Schemes left out of both. */
   readonly problems: readonly SchemeProblem[]
 }
@@ -55,6 +64,13 @@ export function appraiseInFull(file: AppraisalFile): FullAppraisal {
       file,
     ),
     sized: done.map(({ sized }) => sized),
+    alsoCompared: done.map(({ result: { mark, kind, deadLoad }, sized: { panels }, measures }) =>
+      alsoCompared({ mark, kind, deadLoad, panels, measures }, file),
+    ),
+    scopeDifferences: allScopeDifferences(
+      file.scope,
+      done.map(({ result }) => result),
+    ),
     problems: outcomes.filter((outcome) => 'issue' in outcome),
   }
 }
@@ -74,7 +90,14 @@ function appraisalOf(schemes: SchemeResult[], file: AppraisalFile): Appraisal {
   return { format: 'bothways.appraisal-result/1', schemes, comparison: ribbed && solid ? compareSchemes(ribbed, solid) : null }
 }
 
-function attempt(scheme: Scheme, file: AppraisalFile): { result: SchemeResult; sized: SizedScheme } | SchemeProblem {
+/** A scheme's result, and what it rests on. */
+interface AppraisedScheme {
+  readonly result: SchemeResult
+  readonly sized: SizedScheme
+  readonly measures: SchemeMeasures
+}
+
+function attempt(scheme: Scheme, file: AppraisalFile): AppraisedScheme | SchemeProblem {
   try {
     return appraiseScheme(scheme, file)
   } catch (error) {
@@ -83,10 +106,14 @@ function attempt(scheme: Scheme, file: AppraisalFile): { result: SchemeResult; s
   }
 }
 
-function appraiseScheme(scheme: Scheme, { brief, levels, rates }: AppraisalFile): { result: SchemeResult; sized: SizedScheme } {
+function appraiseScheme(scheme: Scheme, file: AppraisalFile): AppraisedScheme {
+  const { brief, levels, rates, scope } = file
   const sized = sizeScheme(scheme, { brief, levels })
-  const quantities = takeOffScheme(scheme, sized, levels, netRules)
+  const rules = RULE_SETS[file.measurement]
+  const quantities = takeOffScheme(scheme, sized, levels, rules, brief.basis)
   const panels = measuredPanels(sized, levels)
+  const measures = schemeMeasures(panels, scheme, levels)
+  const declared = rates ? scopeLines(scope, scheme.mark, measures, rates.currency) : []
   const result: SchemeResult = {
     mark: scheme.mark,
     kind: scheme.kind,
@@ -95,10 +122,10 @@ function appraiseScheme(scheme: Scheme, { brief, levels, rates }: AppraisalFile)
     checks: sized.panels.flatMap(({ checks }) => checks),
     panels: sized.panels.map(panelResultOf),
     quantities,
-    deadLoad: deadLoadOf(panels, scheme, netRules),
-    cost: rates ? priceScheme(quantities, rates, grossAreaM2(panels)) : null,
+    deadLoad: deadLoadOf(panels, scheme, comparingRules),
+    cost: rates ? priceScheme(quantities, rates, grossAreaM2(panels), declared, rules) : null,
   }
-  return { result, sized }
+  return { result, sized, measures }
 }
 
 function panelResultOf({ level, mark, depth, areas, layout, moments, steel }: SizedPanel): PanelResult {

@@ -43,6 +43,7 @@ export const GANNET_HOUSE: DemoProject = {
       mark: 'L1',
       name: 'Office floors',
       repeat: 3,
+      proppingHeight: 3300,
       panels: [
         panelOf('P1', rectangle(0, 0, 7500, 18_000), edgesOf('dcdd', BEAM), { ribDirection: 0 }),
         panelOf('P2', rectangle(7500, 0, 8100, 18_000), edgesOf('dcdc', BEAM), { ribDirection: 0 }),

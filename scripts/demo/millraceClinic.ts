@@ -46,6 +46,7 @@ export const MILLRACE_CLINIC: DemoProject = {
       mark: 'L1',
       name: 'Levels 1 and 2, treatment',
       repeat: 2,
+      proppingHeight: 3100,
       panels: [
         panelOf('P1', rectangle(0, 0, 5400, 5700), edgesOf('dccd', BEAM)),
         panelOf('P2', rectangle(5400, 0, 5400, 5700), edgesOf('dccc', BEAM)),
@@ -64,6 +65,7 @@ export const MILLRACE_CLINIC: DemoProject = {
       mark: 'R',
       name: 'Roof slab',
       repeat: 1,
+      proppingHeight: 3100,
       panels: [
         panelOf('P1', rectangle(0, 0, 5400, 5700), edgesOf('dccd', BEAM)),
         panelOf('P2', rectangle(5400, 0, 5400, 5700), edgesOf('dccc', BEAM)),

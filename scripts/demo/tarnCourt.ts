@@ -48,6 +48,7 @@ export const TARN_COURT: DemoProject = {
       mark: 'L1',
       name: 'Level 1, the typical floor',
       repeat: 4,
+      proppingHeight: 2700,
       panels: [
         panelOf('P1', rectangle(0, 0, 6600, 6000), edgesOf('dccd', BEAM)),
         panelOf('P2', rectangle(6600, 0, 6600, 6000), edgesOf('dccc', BEAM)),

@@ -9,6 +9,7 @@ import { CreatePersonRole1796100000003 } from './firm/1796100000003-CreatePerson
 import { CreateProject1796100000014 } from './project/1796100000014-CreateProject'
 import { CreateLevel1796100000015 } from './project/1796100000015-CreateLevel'
 import { CreateScheme1796100000016 } from './project/1796100000016-CreateScheme'
+import { AddLevelProppingHeight1796100000045 } from './project/1796100000045-AddLevelProppingHeight'
 import { AddProjectScope1796100000043 } from './project/1796100000043-AddProjectScope'
 import { CreateProjectShare1796100000017 } from './project/1796100000017-CreateProjectShare'
 import { CreateRateBook1796100000010 } from './rates/1796100000010-CreateRateBook'
@@ -53,4 +54,5 @@ export const MIGRATIONS = [
   CreateDispatch1796100000041,
   CreateOutbox1796100000042,
   AddProjectScope1796100000043,
+  AddLevelProppingHeight1796100000045,
 ]

@@ -3,10 +3,12 @@ import type { CatalogueBlock } from '#shared/contracts/blockCatalogue'
 import type { Project, StoredScheme } from '#shared/contracts/project'
 import type { Edition } from '#shared/contracts/rateBook'
 import { Decimal } from '#shared/pricing/decimal'
+import { itemisedCost } from '#shared/pricing/itemisedCost'
 import { comparisonSections } from '#shared/drawing/comparisonSections'
 import type { SectionSubject } from '#shared/drawing/sectionBody'
 import { sectionReinforcement } from '#shared/drawing/sectionReinforcement'
 import type { SizedPanel } from '#shared/sizing/sizedPanel'
+import { itemisedQuantities } from '#shared/takeoff/itemisedQuantities'
 import { differenceGroups } from './content/differenceGroups'
 import { tightestChecks } from './content/tightestChecks'
 import type { FrozenComparison } from './frozenComparison'
@@ -39,7 +41,9 @@ function frozenScheme(row: StoredScheme, { depth, passes, checks, deadLoad, quan
     failedCount: checks.filter(({ pass }) => !pass).length,
     checks: tightestChecks(checks),
     deadLoad,
-    quantities: quantities.filter(({ net }) => net !== 0).map(({ item, unit, net }) => ({ item, unit, net })),
+    quantities: itemisedQuantities(quantities)
+      .filter(({ net }) => net !== 0)
+      .map(({ item, unit, net }) => ({ item, unit, net })),
     total: cost.total,
     perArea: cost.perArea,
   }
@@ -102,7 +106,7 @@ export function freezeComparison(compared: ComparedProject, sending: Sending, fr
     floor: floorOf(file, ribbed),
     ribbed: { ...frozenScheme(schemes[0], ribbed), specification: schemes[0].specification as RibbedScheme },
     solid: { ...frozenScheme(schemes[1], solid), specification: schemes[1].specification as SolidScheme },
-    groups: differenceGroups(ribbed.cost, solid.cost),
+    groups: differenceGroups(itemisedCost(ribbed.cost), itemisedCost(solid.cost)),
     markups: ribbed.cost.markups.filter(({ percent }) => !new Decimal(percent).isZero()).map(({ name: markup }) => markup),
     sections: sections(compared),
   }

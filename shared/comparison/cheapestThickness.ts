@@ -1,5 +1,6 @@
 import type { AppraisalFile, Cost, ItemCode, SchemeResult, SolidScheme } from '../contracts/appraisal'
 import { Decimal, sumOf } from '../pricing/decimal'
+import { itemisedCost } from '../pricing/itemisedCost'
 import { markupFactor } from './unroundedTotal'
 
 /** One thickness tried: whether it passes, and its total where it is priced. */
@@ -97,9 +98,11 @@ function failuresOf({ checks }: SchemeResult): Set<string> {
   return new Set(checks.flatMap(({ level, panel, name, pass }) => (pass ? [] : [`${level} ${panel} ${name}`])))
 }
 
-/** What all but the bars costs, markups included. */
+/** What all but the bars costs, markups included; without declared scope, which may go by the steel. */
 function besideBars(cost: Cost): Decimal {
-  const amounts = cost.lines.filter(({ item }) => !item.startsWith('steel.')).map(({ amount }) => new Decimal(amount))
+  const amounts = itemisedCost(cost)
+    .lines.filter(({ item }) => !item.startsWith('steel.') && !item.startsWith('scope.'))
+    .map(({ amount }) => new Decimal(amount))
   return sumOf(amounts).times(markupFactor(cost))
 }
 

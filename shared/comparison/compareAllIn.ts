@@ -2,6 +2,7 @@ import type { Comparison, Cost, SchemeResult, TippingPoint } from '../contracts/
 import { allInCost } from '../pricing/allInCost'
 import { allInRate } from '../pricing/allInRate'
 import { Decimal } from '../pricing/decimal'
+import { itemisedCost } from '../pricing/itemisedCost'
 import { markupFactor } from '../pricing/markupFactor'
 import { compareSchemes } from './compareSchemes'
 import { ledger } from './ledger'
@@ -22,7 +23,7 @@ export function compareAllIn(first: SchemeResult, second: SchemeResult): Compari
   const { cost } = first
   return {
     between: comparison.between,
-    ledger: ledger(allInCost(first.cost), allInCost(second.cost)),
+    ledger: ledger(itemisedCost(allInCost(first.cost)), itemisedCost(allInCost(second.cost))),
     tippingPoints: comparison.tippingPoints.map((point) => allInPoint(point, cost)),
   }
 }

@@ -1,10 +1,11 @@
 import { type Comparison, itemCode, type SchemeResult } from '../contracts/appraisal'
+import { itemisedCost } from '../pricing/itemisedCost'
 import { ledger } from './ledger'
 import { type PricedScheme, tippingPoint } from './tippingPoint'
 
 /**
  * Two priced schemes set against each other: the difference ledger and the tipping point of every rate that either uses.
- * Null where one of them is not priced.
+ * Both are compared item by item, whatever rules they are billed by. Null where one of them is not priced.
  */
 export function compareSchemes(first: SchemeResult, second: SchemeResult): Comparison | null {
   const [a, b] = [pricedOf(first), pricedOf(second)]
@@ -33,5 +34,5 @@ export function compareMarks(schemes: readonly SchemeResult[], between: readonly
 }
 
 function pricedOf({ mark, cost }: SchemeResult): PricedScheme | null {
-  return cost && { mark, cost }
+  return cost && { mark, cost: itemisedCost(cost) }
 }

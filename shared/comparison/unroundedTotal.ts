@@ -1,5 +1,6 @@
 import type { Cost, ItemCode } from '../contracts/appraisal'
 import { Decimal, sumOf } from '../pricing/decimal'
+import { itemisedCost } from '../pricing/itemisedCost'
 import { markupFactor } from '../pricing/markupFactor'
 
 export { markupFactor }
@@ -11,6 +12,8 @@ export { markupFactor }
  * Source: project rule, tipping points rest on unrounded totals
  */
 export function unroundedTotal(cost: Cost, item?: ItemCode, rate?: Decimal): Decimal {
-  const lines = cost.lines.map((line) => new Decimal(line.quantity).times(line.item === item && rate ? rate : line.rate))
+  const lines = itemisedCost(cost).lines.map((line) =>
+    new Decimal(line.quantity).times(line.item === item && rate ? rate : line.rate),
+  )
   return sumOf(lines).times(markupFactor(cost))
 }

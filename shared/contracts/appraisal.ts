@@ -2,9 +2,10 @@
 import { z } from 'zod'
 import { britishExposure, europeanExposure } from './exposure'
 import { factors } from './factors'
+import { band, compositeItem, measurement } from './measurement'
 import { britishValues, europeanValues } from './nationalValues'
 import { line, mark } from './primitives'
-import { scope } from './sameScope'
+import { scope, scopeFaults, scopeItem } from './sameScope'
 
 export { mark }
 const coordinate = z.number().min(-1_000_000).max(1_000_000)
@@ -41,6 +42,7 @@ export const itemCode = z.enum([
   'steel.mesh.A393',
   'formwork.soffit',
   'formwork.edge',
+  'formwork.edgeDeep', // by area, where the rules measure deep edges so
   'curing.area',
   'propping.area',
 ])
@@ -141,7 +143,12 @@ export const solid = z
     path: ['thicknessNote'],
     error: 'expected no note on a thickness that the engine finds',
   })
-export const level = z.strictObject({ mark, repeat, panels: z.array(panel).min(1).max(500) })
+export const level = z.strictObject({
+  mark,
+  repeat,
+  proppingHeight: z.int().min(1000).max(30_000).default(2800), // clear, from what the props stand on to the soffit
+  panels: z.array(panel).min(1).max(500),
+})
 export const scheme = z.discriminatedUnion('kind', [ribbed, solid])
 export const markups = z.strictObject({
   preliminariesPercent: percent.default('0'),
@@ -160,15 +167,13 @@ export const appraisalFile = z
     levels: z.array(level).min(1).max(100),
     schemes: z.array(scheme).min(1).max(20),
     rates: rates.optional(),
+    measurement: measurement.default('comparing'), // rules that the quantities are measured and billed by
     scope: scope.default([]),
     factors: factors.prefault({}),
   })
   .superRefine(({ schemes, scope: declarations }, context) => {
-    const marks = schemes.map((each) => each.mark)
-    declarations.forEach((declaration, index) => {
-      if (!marks.includes(declaration.scheme))
-        context.addIssue({ code: 'custom', path: ['scope', index, 'scheme'], message: `expected one of ${marks.join(', ')}` })
-    })
+    for (const { index, field, message } of scopeFaults(declarations, schemes))
+      context.addIssue({ code: 'custom', path: ['scope', index, field], message })
   })
 
 export const money = z.string().regex(/^-?\d+(\.\d+)?$/)
@@ -220,7 +225,7 @@ export const panelResult = z.strictObject({
     supportProvided: z.number(),
   }),
 }) // mm² per rib or m; short direction
-export const unit = z.enum(['m³', 'm²', 'm', 't', 'nr'])
+export const unit = z.enum(['m³', 'm²', 'm', 't', 'kg', 'nr'])
 export const part = z.strictObject({ level: mark, panel: mark, expression: z.string(), value: z.number() })
 export const split = z.strictObject({
   topping: z.number(),
@@ -233,9 +238,32 @@ export const split = z.strictObject({
   slab: z.number(),
   wallStrips: z.number(),
 })
-export const quantity = z.strictObject({ item: itemCode, unit, net: z.number(), parts: z.array(part), split: split.optional() })
+export const itemQuantity = z.strictObject({
+  item: itemCode,
+  unit,
+  net: z.number(),
+  parts: z.array(part),
+  split: split.optional(),
+  bands: z.array(band).optional(), // where the rules bill the item by stages, or by overall depth
+})
+export const quantity = itemQuantity.extend({
+  item: z.enum([...itemCode.options, ...compositeItem.options]),
+  analysis: z.array(itemQuantity).optional(), // of a composite item: what it is made up of
+})
 export const deadLoad = z.strictObject({ perArea: z.number(), total: z.number() }) // concrete + blocks only; kN/m² of gross area; kN
-export const billLine = z.strictObject({ item: itemCode, quantity: z.string(), unit: z.string(), rate: decimal, amount: money })
+/** What a bill line prices: a measured item, or an entry of the same-scope list where a file prices one. */
+export const billItem = z.enum([...itemCode.options, ...compositeItem.options, ...scopeItem.options])
+/** As `decimal`, with three digits more: a rate per tonne billed by the kilogram keeps all of its own. */
+export const billRate = z.string().regex(/^\d{1,9}(\.\d{1,9})?$/)
+export const itemLine = z.strictObject({
+  item: billItem,
+  quantity: z.string(),
+  unit: z.string(),
+  rate: billRate,
+  amount: money,
+  bands: z.array(band).optional(),
+})
+export const billLine = itemLine.extend({ analysis: z.array(itemLine).optional() }) // the lines that a composite adds up
 export const markupLine = z.strictObject({ name: z.enum(['preliminaries', 'contingency', 'tax']), percent, amount: money })
 export const cost = z.strictObject({
   currency: z.string(),
@@ -275,6 +303,7 @@ export const appraisal = z.strictObject({
 })
 
 export type ItemCode = z.infer<typeof itemCode>
+export type BillItem = z.infer<typeof billItem>
 export type Brief = z.infer<typeof brief>
 export type Edge = z.infer<typeof edge>
 export type Beyond = z.infer<typeof beyond>
@@ -298,9 +327,11 @@ export type PanelResult = z.infer<typeof panelResult>
 export type Part = z.infer<typeof part>
 export type ConcreteSplit = z.infer<typeof split>
 export type Quantity = z.infer<typeof quantity>
+export type ItemQuantity = z.infer<typeof itemQuantity>
 export type Unit = z.infer<typeof unit>
 export type DeadLoad = z.infer<typeof deadLoad>
 export type BillLine = z.infer<typeof billLine>
+export type ItemLine = z.infer<typeof itemLine>
 export type MarkupLine = z.infer<typeof markupLine>
 export type Cost = z.infer<typeof cost>
 export type SchemeResult = z.infer<typeof schemeResult>

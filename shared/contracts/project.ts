@@ -1,6 +1,7 @@
 import { z } from 'zod'
 import { brief, level, mark, markups, panel, scheme } from './appraisal'
 import { factors } from './factors'
+import { measurement } from './measurement'
 import { edition, editionWithRates } from './rateBook'
 import { id, line, moment, optionalLine, version } from './primitives'
 import { scope } from './sameScope'
@@ -8,9 +9,6 @@ import { scope } from './sameScope'
 /** Use of the floor by EN 1991-1-1 Table 6.1; it proposes an imposed load, which stays editable. */
 export const useCategory = z.enum(['A', 'B', 'C1', 'C2', 'C3', 'C4', 'C5', 'D1', 'D2', 'E1'])
 export type UseCategory = z.infer<typeof useCategory>
-
-/** Set of rules that the quantities are measured by. */
-export const measurement = z.enum(['comparing'])
 
 export const projectInput = z.strictObject({
   name: line(120),

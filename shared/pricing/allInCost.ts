@@ -1,7 +1,7 @@
-import type { Cost } from '../contracts/appraisal'
+import type { Cost, ItemLine } from '../contracts/appraisal'
 import { allInRate } from './allInRate'
 import { allocate } from './allocate'
-import { Decimal } from './decimal'
+import { Decimal, sumOf } from './decimal'
 import { markupFactor } from './markupFactor'
 import { minorUnit } from './minorUnit'
 import { printMoney } from './money'
@@ -9,23 +9,31 @@ import { printMoney } from './money'
 /**
  * The same cost for readers who may not see margins: preliminaries, contingency and tax are folded into amounts and rates, and no
  * markup is left. Amounts add up to the total exactly, by the largest remainder; a rate is the same wherever its item stands, and
- * explains an amount to the digits it is printed with.
+ * explains an amount to the digits it is printed with. A composite is the sum of the lines it is made up of.
  *
  * Source: project rule, readers outside the office see all-in rates
  */
 export function allInCost(cost: Cost): Cost {
   const { currency, lines } = cost
-  const amounts = lines.map(({ amount }) => new Decimal(amount))
+  const amounts = lines.flatMap(({ amount, analysis }) => (analysis ?? [{ amount }]).map((each) => new Decimal(each.amount)))
   const isNothing = amounts.every((amount) => amount.isZero())
   const shares = isNothing ? amounts : allocate(new Decimal(cost.total), amounts, minorUnit(currency))
   const factor = markupFactor(cost)
+  let at = 0
+  const next = () => shares[at++]!
+  const allIn = (line: ItemLine, share: Decimal): ItemLine => ({
+    ...line,
+    rate: allInRate(line.rate, factor, currency),
+    amount: printMoney(share, currency),
+  })
   return {
     ...cost,
-    lines: lines.map((line, index) => ({
-      ...line,
-      rate: allInRate(line.rate, factor, currency),
-      amount: printMoney(shares[index]!, currency),
-    })),
+    lines: lines.map(({ analysis, ...line }) => {
+      if (analysis === undefined) return allIn(line, next())
+      const parts = analysis.map((part) => ({ part, share: next() }))
+      const whole = allIn(line, sumOf(parts.map(({ share }) => share)))
+      return { ...whole, analysis: parts.map(({ part, share }) => allIn(part, share)) }
+    }),
     markups: [],
   }
 }

@@ -1,8 +1,9 @@
-import type { BillLine, Cost, MarkupLine, Markups, Quantity, Rates } from '../contracts/appraisal'
-import { netRules } from '../takeoff/measurementRules'
+import type { BillLine, Cost, ItemQuantity, MarkupLine, Markups, Quantity, Rates } from '../contracts/appraisal'
+import type { MeasurementRules } from '../takeoff/measurementRules'
+import { comparingRules } from '../takeoff/rules/comparingRules'
+import { billLine } from './billLine'
 import { Decimal, sumOf } from './decimal'
 import { printMoney, roundMoney } from './money'
-import { toQuantity } from './toQuantity'
 
 /** In the order they are charged; each on the sum of all that stands before it. */
 const MARKUPS = [
@@ -16,12 +17,21 @@ const MARKUPS = [
  * each rounded; the total is the sum of what is printed. Items without a rate are named in `unpriced` and cost nothing.
  *
  * Source: project rule, a printed bill adds up
- * @param quantities - of all levels, each item once
+ * @param quantities - of all levels, each item once in each of its stages
  * @param grossAreaM2 - > 0, repeats included: what the cost per m² is reckoned on
+ * @param scope - lines of what the scheme's same-scope declarations price
+ * @param rules - that the quantities are measured by
  */
-export function priceScheme(quantities: readonly Quantity[], rates: Rates, grossAreaM2: number): Cost {
+export function priceScheme(
+  quantities: readonly Quantity[],
+  rates: Rates,
+  grossAreaM2: number,
+  scope: readonly BillLine[] = [],
+  { decimals }: Pick<MeasurementRules, 'decimals'> = comparingRules,
+): Cost {
   const { currency } = rates
-  const lines = quantities.flatMap((quantity) => billLine(quantity, rates) ?? [])
+  const lines = [...quantities.flatMap((quantity) => billLine(quantity, rates, decimals) ?? []), ...scope]
+  const items = quantities.flatMap((quantity) => quantity.analysis ?? [quantity as ItemQuantity]).map(({ item }) => item)
   const measured = sumOf(lines.map(({ amount }) => new Decimal(amount)))
   const markups = markupLines(measured, rates)
   const total = measured.plus(sumOf(markups.map(({ amount }) => new Decimal(amount))))
@@ -29,17 +39,10 @@ export function priceScheme(quantities: readonly Quantity[], rates: Rates, gross
     currency,
     lines,
     markups,
-    unpriced: quantities.map(({ item }) => item).filter((item) => rates.items[item] === undefined),
+    unpriced: [...new Set(items.filter((item) => rates.items[item] === undefined))],
     total: printMoney(total, currency),
     perArea: printMoney(total.div(grossAreaM2), currency),
   }
-}
-
-function billLine({ item, unit, net }: Quantity, { items, currency }: Rates): BillLine | null {
-  const rate = items[item]
-  if (rate === undefined) return null
-  const quantity = toQuantity(net, netRules.decimals[unit])
-  return { item, quantity, unit, rate, amount: printMoney(new Decimal(quantity).times(rate), currency) }
 }
 
 function markupLines(measured: Decimal, { markups, currency }: Rates): MarkupLine[] {

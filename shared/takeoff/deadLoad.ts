@@ -5,7 +5,7 @@ import { type MeasuredPanel, repeatsOf } from './measuredPanel'
 import type { MeasurementRules } from './measurementRules'
 
 /** Source: EN 1991-1-1:2002, Table A.1: normal weight concrete 24 kN/m³, reinforced + 1 */
-const REINFORCED_CONCRETE_KN_PER_M3 = 25
+export const REINFORCED_CONCRETE_KN_PER_M3 = 25
 
 /**
  * Weight of a scheme's concrete and blocks: in all, kN, repeats in, and over the gross area, kN/m². Cut blocks weigh by length.
@@ -24,8 +24,8 @@ export function grossAreaM2(panels: readonly MeasuredPanel[]): number {
   return panels.reduce((sum, measured) => sum + toM2(measured.sized.areas.gross) * repeatsOf(measured), 0)
 }
 
-/** Mass of the blocks of one panel, kg. */
-function blockMassKg({ sized: { layout } }: MeasuredPanel, scheme: Scheme): number {
+/** Mass of the blocks of one panel without repeats, kg; cut blocks weigh by length. */
+export function blockMassKg({ sized: { layout } }: MeasuredPanel, scheme: Scheme): number {
   if (scheme.kind === 'solid' || !layout) return 0
   return (layout.blocksWhole + layout.cutLength / scheme.block.length) * scheme.block.mass
 }

@@ -47,9 +47,15 @@ export function less(whole: Expression, ...parts: readonly Expression[]): Expres
   return { text: [whole.text, ...parts.map(inBrackets)].join(' - '), value, form: 'sum' }
 }
 
+/** One expression divided by another that is above zero. */
+export function dividedBy(dividend: Expression, divisor: Expression): Expression {
+  const below = divisor.form === 'number' ? divisor.text : `(${divisor.text})`
+  return { text: `${inBrackets(dividend)} / ${below}`, value: dividend.value / divisor.value, form: 'product' }
+}
+
 /** A number of kilograms as tonnes. */
 export function inTonnes(massKg: Expression): Expression {
-  return { text: `${inBrackets(massKg)} / 1000`, value: massKg.value / 1000, form: 'product' }
+  return dividedBy(massKg, figure(1000))
 }
 
 /** An expression timesed by repeat counts; a count of one is not written. */

@@ -2,7 +2,7 @@ import { offsetRing } from '../geometry/offsetRing'
 import { distance } from '../geometry/ring'
 import { panelEdges } from '../layout/panelEdges'
 import { toM } from '../units'
-import { type Expression, figure, plus } from './expression'
+import { type Expression, figure, plus, times } from './expression'
 import type { MeasuredPanel } from './measuredPanel'
 import type { MeasurementRules } from './measurementRules'
 import { soffitAreaOf } from './planAreas'
@@ -27,4 +27,10 @@ export function edgesOf({ panel, sharedEdges }: MeasuredPanel): Expression | nul
   const freeEdges = moved.filter((_, index) => edges[index]!.continuity === 'free')
   const lengths = [...freeEdges.map(({ start, end }) => figure(toM(distance(start, end)))), ...panel.voids.map(perimeterOf)]
   return lengths.length === 0 ? null : plus(...lengths)
+}
+
+/** The same edges by their area, m²: length × depth of the floor. None: null. */
+export function deepEdgesOf(measured: MeasuredPanel): Expression | null {
+  const length = edgesOf(measured)
+  return length && times(length, figure(toM(measured.sized.depth)))
 }

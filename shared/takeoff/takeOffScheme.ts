@@ -1,45 +1,43 @@
-import type { BarDiameter, ItemCode, Level, Quantity, Scheme } from '../contracts/appraisal'
+import type { Brief, Level, Quantity, Scheme } from '../contracts/appraisal'
 import type { SizedScheme } from '../sizing/sizedPanel'
-import { blockCount } from './blocks'
-import { concreteOf, concreteSplit } from './concrete'
-import type { Expression } from './expression'
-import { edgesOf, soffitOf } from './formwork'
 import { type MeasuredPanel, measuredPanels } from './measuredPanel'
-import type { MeasurementRules } from './measurementRules'
+import type { Composite, MeasurementRules } from './measurementRules'
 import { floorAreaOf } from './planAreas'
 import { quantityOf } from './quantityOf'
-import { barsOf, meshOf } from './reinforcement'
-
-const BARS: readonly BarDiameter[] = [6, 8, 10, 12, 16, 20, 25, 32, 40]
+import { type TakeOff, takeOffItems } from './takeOffItems'
 
 /**
  * Everything a scheme takes, item by item in the order of a bill, all levels and repeats together. Items of which it takes
- * nothing are left out. Every part is one panel (for bars one run of bars), with the arithmetic that yields it.
+ * nothing are left out. Every part is one panel (for bars one run of bars), with the arithmetic that yields it. A composite item
+ * holds the items that it is made up of as its analysis, measured over the same panels.
  *
  * Source: measurement rules in `rules`
  * @param sized - the same scheme, sized over the same levels
+ * @param basis - that it was sized by
  * @throws RangeError when `sized` belongs to other levels
  */
-export function takeOffScheme(scheme: Scheme, sized: SizedScheme, levels: readonly Level[], rules: MeasurementRules): Quantity[] {
+export function takeOffScheme(
+  scheme: Scheme,
+  sized: SizedScheme,
+  levels: readonly Level[],
+  rules: MeasurementRules,
+  basis: Brief['basis'],
+): Quantity[] {
   const panels = measuredPanels(sized, levels)
-  const take = (item: ItemCode, measure: (measured: MeasuredPanel) => Expression | readonly Expression[] | null) =>
-    quantityOf(item, panels, rules, (measured) => [measure(measured) ?? []].flat())
-  const concrete = take('concrete.slab', (measured) => concreteOf(measured, scheme, rules))
-  const quantities = [
-    concrete && { ...concrete, split: concreteSplit(panels, scheme, rules) },
-    take('blocks.whole', (measured) => blockCount(measured, 'blocksWhole')),
-    take('blocks.cut', (measured) => blockCount(measured, 'blocksCut')),
-    take('blocks.closedEnds', (measured) => blockCount(measured, 'closedEnds')),
-    ...BARS.map((diameter) => take(`steel.bar.${diameter}`, (measured) => barsOf(measured, diameter))),
-    ...meshItem(scheme).map((item) => take(item, (measured) => meshOf(measured, rules))),
-    take('formwork.soffit', (measured) => soffitOf(measured, rules)),
-    take('formwork.edge', edgesOf),
-    take('curing.area', (measured) => floorAreaOf(measured, rules.deductVoidsOver.curingM2)),
-    take('propping.area', (measured) => soffitOf(measured, rules)),
-  ]
-  return quantities.filter((quantity) => quantity !== null)
+  const job = { scheme, rules, basis }
+  const composite = rules.composites[scheme.kind]
+  return composite === undefined ? takeOffItems(job, panels) : withComposite(job, panels, composite)
 }
 
-function meshItem(scheme: Scheme): ItemCode[] {
-  return scheme.kind === 'ribbed' && scheme.mesh !== 'none' ? [`steel.mesh.${scheme.mesh}`] : []
+/** One composite for each overall depth, then what is not in it. */
+function withComposite(job: TakeOff, panels: readonly MeasuredPanel[], { item, of }: Composite): Quantity[] {
+  const isIn = (other: string) => of.some((family) => other === family || other.startsWith(`${family}.`))
+  const depths = [...new Set(panels.map(({ sized }) => sized.depth))].sort((a, b) => a - b)
+  const floors = depths.flatMap((mm): Quantity[] => {
+    const members = panels.filter(({ sized }) => sized.depth === mm)
+    const area = quantityOf(item, members, job.rules, (measured) => [floorAreaOf(measured, job.rules.deductVoidsOver.floorM2)])
+    const analysis = takeOffItems(job, members).filter((quantity) => isIn(quantity.item))
+    return area === null ? [] : [{ ...area, bands: [{ of: 'overallDepth', mm }], analysis }]
+  })
+  return [...floors, ...takeOffItems(job, panels).filter((quantity) => !isIn(quantity.item))]
 }

@@ -1,18 +1,16 @@
 import type { ApiIssue } from '#shared/contracts/apiError'
 import type { AppraisalFile, Rates } from '#shared/contracts/appraisal'
 import { brief, level, panel, rates, scheme } from '#shared/contracts/appraisal'
-import { factors } from '#shared/contracts/factors'
 import type { Project, StoredLevel, StoredScheme } from '#shared/contracts/project'
 import type { EditionWithRates } from '#shared/contracts/rateBook'
-import type { ScopeDeclaration } from '#shared/contracts/sameScope'
-import { scopeDeclaration } from '#shared/contracts/sameScope'
 import type { z } from 'zod'
 import type { FileOrigin } from '../workers/appraisalAnswer'
+import { readFactors, readScope } from './sheetDeclared'
 import { panelsLeftOut, withoutGiven } from '../workers/withoutGiven'
 
 /** What an appraisal file is made from: a surveyor's sheet, or a reader's, which has no prices. */
 export interface AppraisalSource {
-  readonly project: Pick<Project, 'brief' | 'factors'> & Partial<Pick<Project, 'markups' | 'scope'>>
+  readonly project: Pick<Project, 'brief' | 'factors' | 'measurement'> & Partial<Pick<Project, 'markups' | 'scope'>>
   readonly levels: readonly StoredLevel[]
   readonly schemes: readonly StoredScheme[]
   readonly edition: EditionWithRates | null
@@ -40,7 +38,12 @@ function readLevel(row: StoredLevel, index: number, problems: ApiIssue[]) {
     return value === null ? [] : [{ value, at }]
   })
   if (panels.length === 0) return []
-  const given = { mark: row.mark, repeat: row.repeat, panels: panels.map(({ value }) => value) }
+  const given = {
+    mark: row.mark,
+    repeat: row.repeat,
+    proppingHeight: row.proppingHeight,
+    panels: panels.map(({ value }) => value),
+  }
   const value = read(level, given, `levels.${index}`, problems)
   return value === null ? [] : [{ value, origin: { index, panels: panels.map(({ at }) => at) } }]
 }
@@ -49,17 +52,6 @@ function ratesOf({ project, edition }: AppraisalSource, problems: ApiIssue[]): R
   if (edition === null || project.markups === undefined) return undefined
   const items = Object.fromEntries(edition.rates.map(({ item, likely }) => [item, likely]))
   return read(rates, { currency: edition.currency, items, markups: project.markups }, 'rates', problems) ?? undefined
-}
-
-/** Declarations that can stand: a wrong one, or one of a scheme that is not in the file, is left out and its reason kept. */
-function scopeOf({ project }: AppraisalSource, marks: readonly string[], problems: ApiIssue[]): ScopeDeclaration[] {
-  return (project.scope ?? []).flatMap((given, index) => {
-    const value = read(scopeDeclaration, given, `scope.${index}`, problems)
-    if (value === null) return []
-    if (marks.includes(value.scheme)) return [value]
-    problems.push({ path: `scope.${index}.scheme`, message: `no scheme has the mark ${value.scheme}` })
-    return []
-  })
 }
 
 /** The appraisal file of a sheet: rows that the contract refuses are left out, their reasons kept. */
@@ -73,10 +65,13 @@ export function toAppraisalFile(source: AppraisalSource): AppraisalDraft {
   })
   const rows = levels.map(({ value }) => value)
   const priced = ratesOf(source, problems)
-  const marks = schemes.map(({ value }) => value.mark)
-  const declared = scopeOf(source, marks, problems)
-  const readFactors = read(factors, source.project.factors, 'factors', problems)
-  const canStand = readBrief !== null && readFactors !== null && levels.length > 0 && schemes.length > 0
+  const declared = readScope(
+    source.project.scope ?? [],
+    schemes.map(({ value }) => value),
+    problems,
+  )
+  const factors = readFactors(source.project.factors, problems)
+  const canStand = readBrief !== null && factors !== null && levels.length > 0 && schemes.length > 0
   return {
     origin: { levels: levels.map(({ origin }) => origin), schemes: schemes.map(({ index }) => index) },
     problems,
@@ -89,8 +84,9 @@ export function toAppraisalFile(source: AppraisalSource): AppraisalDraft {
             schemes.map(({ value }) => value),
             panelsLeftOut(source.levels, rows),
           ),
+          measurement: source.project.measurement,
           scope: declared,
-          factors: readFactors,
+          factors,
           ...(priced === undefined ? {} : { rates: priced }),
         }
       : null,

@@ -33,7 +33,13 @@ export const projectInputOf = (project: Project): ProjectInput => ({
   factors: project.factors,
 })
 
-export const levelInputOf = ({ mark, name, repeat, panels }: StoredLevel): LevelInput => ({ mark, name, repeat, panels })
+export const levelInputOf = ({ mark, name, repeat, proppingHeight, panels }: StoredLevel): LevelInput => ({
+  mark,
+  name,
+  repeat,
+  proppingHeight,
+  panels,
+})
 
 export const schemeInputOf = ({ name, blockId, specification }: StoredScheme): SchemeInput => ({ name, blockId, specification })
 

@@ -6,7 +6,7 @@ import { type Appraisal, appraisal as appraisalContract, type AppraisalFile } fr
 import { OutOfScopeError } from '#shared/outOfScope'
 import { Decimal, sumOf } from '#shared/pricing/decimal'
 import { parseAppraisalFile } from '#shared/parseAppraisalFile'
-import { netRules } from '#shared/takeoff/measurementRules'
+import { comparingRules } from '#shared/takeoff/rules/comparingRules'
 import { evaluate } from './support/evaluate'
 import { computedFile, givenFile } from './support/richFiles'
 
@@ -39,7 +39,7 @@ describe.each(files)('%s', (_name, file) => {
         expect(Math.abs(evaluate(expression) - value), `${item}: ${expression}`).toBeLessThanOrEqual(ARITHMETIC * value)
       }
       const whole = parts.reduce((sum, { value }) => sum + value, 0)
-      expect(Math.abs(net - whole)).toBeLessThanOrEqual(0.5 * 10 ** -netRules.decimals[unit] + ARITHMETIC * whole)
+      expect(Math.abs(net - whole)).toBeLessThanOrEqual(0.5 * 10 ** -comparingRules.decimals[unit] + ARITHMETIC * whole)
       const splitSum = Object.values(split ?? { whole }).reduce((sum, value) => sum + value, 0)
       expect(Math.abs(splitSum - whole), item).toBeLessThanOrEqual(ARITHMETIC * whole)
     }

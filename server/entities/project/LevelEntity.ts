@@ -13,6 +13,7 @@ export class LevelEntity {
   @Column({ type: 'varchar', length: 20, collation: 'utf8mb4_bin' }) mark: string
   @Column({ type: 'varchar', length: 120 }) name: string
   @Column({ name: 'repeat_count', type: 'int', unsigned: true }) repeat: number
+  @Column({ name: 'propping_height_mm', type: 'int', unsigned: true, default: 2800 }) proppingHeight: number
   @Column({ type: 'json' }) panels: Panel[]
   @Column({ type: 'int', unsigned: true, default: 1 }) version: number
 }

@@ -12,11 +12,20 @@ function ratesOf({ project, edition }: ProjectSheet): Rates | undefined {
 export function storedAppraisalFile(sheet: ProjectSheet): AppraisalFile | null {
   const levels = sheet.levels
     .filter(({ panels }) => panels.length > 0)
-    .map(({ mark, repeat, panels }) => ({ mark, repeat, panels }))
+    .map(({ mark, repeat, proppingHeight, panels }) => ({ mark, repeat, proppingHeight, panels }))
   const schemes = sheet.schemes.map(({ specification }) => specification)
   if (levels.length === 0 || schemes.length === 0) return null
   const rates = ratesOf(sheet)
-  const { brief, scope, factors } = sheet.project
+  const { brief, measurement, scope, factors } = sheet.project
   const declared = declaredFor(scope, schemes)
-  return { format: 'bothways.appraisal/1', brief, levels, schemes, scope: declared, factors, ...(rates ? { rates } : {}) }
+  return {
+    format: 'bothways.appraisal/1',
+    brief,
+    levels,
+    schemes,
+    measurement,
+    scope: declared,
+    factors,
+    ...(rates ? { rates } : {}),
+  }
 }

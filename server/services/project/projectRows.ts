@@ -31,8 +31,10 @@ export async function toProject(db: EntityManager, row: ProjectEntity): Promise<
 }
 
 /** A level's row as the contract has it; fields of its panels younger than the row take their defaults. */
-export function toStoredLevel({ id, position, mark, name, repeat, panels, version }: LevelEntity): StoredLevel {
-  return { id, position, mark, name, repeat, panels: panels.map((panel) => panelContract.parse(panel)), version }
+export function toStoredLevel({ panels, ...row }: LevelEntity): StoredLevel {
+  const { id, position, mark, name, repeat, proppingHeight, version } = row
+  const read = panels.map((panel) => panelContract.parse(panel))
+  return { id, position, mark, name, repeat, proppingHeight, panels: read, version }
 }
 
 /** A scheme's row as the contract has it; fields younger than the row take their defaults. */

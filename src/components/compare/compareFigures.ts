@@ -1,6 +1,7 @@
 import type { SchemeResult } from '#shared/contracts/appraisal'
 import { mesh } from '#shared/contracts/appraisal'
 import { FABRIC } from '#shared/sizing/tables/fabric'
+import { itemisedQuantities } from '#shared/takeoff/itemisedQuantities'
 import type { Pair } from './phrase'
 
 /** One column of what each scheme makes; money as its exact decimal string, measures as numbers. */
@@ -22,7 +23,9 @@ export interface FigureVerdict {
 }
 
 const netOf = (scheme: SchemeResult, matches: (item: string) => boolean): number =>
-  scheme.quantities.filter(({ item }) => matches(item)).reduce((sum, { net }) => sum + net, 0)
+  itemisedQuantities(scheme.quantities)
+    .filter(({ item }) => matches(item))
+    .reduce((sum, { net }) => sum + net, 0)
 
 /** Bars and mesh together, t. */
 export function steelTonnes(scheme: SchemeResult): number {

@@ -1,5 +1,6 @@
 import type { Cost, SchemeResult } from '#shared/contracts/appraisal'
 import { Decimal, sumOf } from '#shared/pricing/decimal'
+import { itemisedCost } from '#shared/pricing/itemisedCost'
 import type { WorkSection } from '../quantity/itemInWords'
 import { WORK_SECTIONS, workSectionOf } from '../quantity/itemInWords'
 import type { Pair } from './phrase'
@@ -11,7 +12,11 @@ export interface SectionCost {
 }
 
 function ofSection(cost: Cost, section: WorkSection): Decimal {
-  return sumOf(cost.lines.filter(({ item }) => workSectionOf(item) === section).map(({ amount }) => new Decimal(amount)))
+  return sumOf(
+    itemisedCost(cost)
+      .lines.filter(({ item }) => workSectionOf(item) === section)
+      .map(({ amount }) => new Decimal(amount)),
+  )
 }
 
 /** Costs by work section, markups last, sections that cost nothing in both left out; empty where either is not priced. */

@@ -1,8 +1,8 @@
-import type { Comparison, Cost, SchemeResult } from '#shared/contracts/appraisal'
-import { itemCode } from '#shared/contracts/appraisal'
+import type { BillLine, Comparison, Cost, SchemeResult } from '#shared/contracts/appraisal'
+import { billItem } from '#shared/contracts/appraisal'
 import { Decimal, sumOf } from '#shared/pricing/decimal'
+import { itemisedCost } from '#shared/pricing/itemisedCost'
 import { printMoney } from '#shared/pricing/money'
-import { unitOf } from '#shared/takeoff/measurementRules'
 import { formatDecimal } from '../base/formatDecimal'
 import { rateDecimals } from '../bill/rateDecimals'
 import type { Pair } from '../compare/phrase'
@@ -61,18 +61,20 @@ export function ledgerRows(comparison: Comparison, pair: Pair<SchemeResult>): Le
 }
 
 function named(item: string, ribbed: Cost, solid: Cost): { name: string; working: string } {
-  const code = itemCode.safeParse(item)
+  const code = billItem.safeParse(item)
   if (!code.success) {
     const percent =
       ribbed.markups.find(({ name }) => name === item)?.percent ?? solid.markups.find(({ name }) => name === item)?.percent
     return { name: `${MARKUPS[item] ?? item}, ${percent} %`, working: 'on every item, same ones included' }
   }
-  const lines = [ribbed, solid].map(({ lines: all }) => all.find((line) => line.item === item))
-  const quantities = lines.flatMap((line) => (line ? [formatDecimal(line.quantity)] : []))
-  const rates = [
-    ...new Set(
-      lines.flatMap((line) => (line ? [formatDecimal(line.rate, { decimals: rateDecimals(line.rate, ribbed.currency) })] : [])),
-    ),
-  ]
-  return { name: itemInWords(code.data), working: `${quantities.join(' and ')} ${unitOf(code.data)} at ${rates.join(' and ')}` }
+  const lines = [ribbed, solid].flatMap((cost) => itemisedCost(cost).lines.find((line) => line.item === item) ?? [])
+  const quantities = lines.map((line) => formatDecimal(line.quantity))
+  const units = [...new Set(lines.map((line) => line.unit))]
+  const rateOf = (line: BillLine) => formatDecimal(line.rate, { decimals: rateDecimals(line.rate, ribbed.currency) })
+  const rates = [...new Set(lines.map(rateOf))]
+  const working =
+    units.length === 1
+      ? `${quantities.join(' and ')} ${units[0]} at ${rates.join(' and ')}`
+      : lines.map((line, at) => `${quantities[at]} ${line.unit} at ${rateOf(line)}`).join(' and ')
+  return { name: itemInWords(code.data), working }
 }

@@ -1,5 +1,6 @@
 import type { ItemCode, SchemeResult } from '#shared/contracts/appraisal'
 import type { StoredLevel } from '#shared/contracts/project'
+import { itemisedQuantities } from '#shared/takeoff/itemisedQuantities'
 import { itemInWords } from '../quantity/itemInWords'
 
 /** What one floor of a level makes of one item, unrounded. */
@@ -15,7 +16,7 @@ export interface LevelMade {
  * that the level does not make are left out.
  */
 export function levelMakes(level: Pick<StoredLevel, 'mark' | 'repeat'>, result: SchemeResult): LevelMade[] {
-  const made = result.quantities.flatMap(({ item, unit, parts }) => {
+  const made = itemisedQuantities(result.quantities).flatMap(({ item, unit, parts }) => {
     const value = parts.filter((part) => part.level === level.mark).reduce((sum, part) => sum + part.value, 0) / level.repeat
     if (value === 0) return []
     const words = item === 'concrete.slab' ? `${itemInWords(item)}, ${result.depth} overall` : itemInWords(item)

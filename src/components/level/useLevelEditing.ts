@@ -55,8 +55,8 @@ export function useLevelEditing(levelId: Ref<string | null>) {
 
 export type LevelEditing = ReturnType<typeof useLevelEditing>
 
-function inputOf({ mark, name, repeat, panels }: StoredLevel): LevelInput {
-  return { mark, name, repeat, panels }
+function inputOf({ mark, name, repeat, proppingHeight, panels }: StoredLevel): LevelInput {
+  return { mark, name, repeat, proppingHeight, panels }
 }
 
 function snapshotOf(levels: readonly StoredLevel[]): LevelsSnapshot {
@@ -64,5 +64,6 @@ function snapshotOf(levels: readonly StoredLevel[]): LevelsSnapshot {
 }
 
 function isSame(a: LevelInput, b: LevelInput): boolean {
-  return a.mark === b.mark && a.name === b.name && a.repeat === b.repeat && a.panels === b.panels
+  const keys = ['mark', 'name', 'repeat', 'proppingHeight', 'panels'] as const
+  return keys.every((key) => a[key] === b[key])
 }

@@ -5,6 +5,9 @@ import type { Ref } from 'vue'
 import { useTask } from '../../composables/useTask'
 import { useProjectStore } from '../../stores/project'
 
+/** Clear height under a new level, as the contract has it where none is given. */
+const NEW_PROPPING_HEIGHT_MM = 2800
+
 /** Adds, copies and removes levels of the open project; the new one is shown. */
 export function useLevelRows(levelId: Ref<string | null>) {
   const store = useProjectStore()
@@ -17,10 +20,10 @@ export function useLevelRows(levelId: Ref<string | null>) {
 
   const adding = useTask(() => {
     const mark = nextMark(marks(), 'L1')
-    return show({ mark, name: `Level ${mark.replace(/^L/, '')}`, repeat: 1, panels: [] })
+    return show({ mark, name: `Level ${mark.replace(/^L/, '')}`, repeat: 1, proppingHeight: NEW_PROPPING_HEIGHT_MM, panels: [] })
   })
-  const copying = useTask(({ mark, name, repeat, panels }: StoredLevel) =>
-    show(copyLevel({ mark, name, repeat, panels }, marks())),
+  const copying = useTask(({ mark, name, repeat, proppingHeight, panels }: StoredLevel) =>
+    show(copyLevel({ mark, name, repeat, proppingHeight, panels }, marks())),
   )
   const removing = useTask(async (id: string) => {
     await store.removeLevel(id)

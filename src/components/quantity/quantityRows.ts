@@ -1,14 +1,18 @@
-import type { ItemCode, Quantity, SchemeResult } from '#shared/contracts/appraisal'
+import type { Quantity, SchemeResult, Unit } from '#shared/contracts/appraisal'
 import { itemCode } from '#shared/contracts/appraisal'
-import { netRules, unitOf } from '#shared/takeoff/measurementRules'
+import { compositeItem } from '#shared/contracts/measurement'
+import type { MeasurementRules } from '#shared/takeoff/measurementRules'
 import { formatQuantity } from '../base/formatQuantity'
 import type { Pair } from '../compare/phrase'
+import { withBands } from './bandInWords'
 import type { WorkSection } from './itemInWords'
 import { byWorkSection, itemInWords } from './itemInWords'
 
-/** One item as both schemes have it; null where a scheme has none. */
+/** One item, in one of its stages, as both schemes have it; null where a scheme has none. */
 export interface QuantityRow {
-  readonly item: ItemCode
+  readonly item: Quantity['item']
+  /** The item with its stages. */
+  readonly key: string
   readonly name: string
   readonly unit: string
   readonly quantities: Pair<Quantity | null>
@@ -16,22 +20,40 @@ export interface QuantityRow {
 }
 
 /** Decimals that a quantity is printed with. */
-export function printedDecimals(item: ItemCode): number {
-  return netRules.decimals[unitOf(item)]
+export function printedDecimals({ unit }: { readonly unit: Unit }, { decimals }: Pick<MeasurementRules, 'decimals'>): number {
+  return decimals[unit]
 }
 
-/** Items that either scheme has, by work section. */
-export function quantityRows({
-  ribbed,
-  solid,
-}: Pair<SchemeResult>): { readonly section: WorkSection; readonly rows: readonly QuantityRow[] }[] {
-  const find = (scheme: SchemeResult, item: ItemCode) => scheme.quantities.find((quantity) => quantity.item === item) ?? null
-  const rows = itemCode.options.flatMap((item) => {
-    const quantities = { ribbed: find(ribbed, item), solid: find(solid, item) }
-    if (quantities.ribbed === null && quantities.solid === null) return []
-    const difference = (quantities.ribbed?.net ?? 0) - (quantities.solid?.net ?? 0)
-    const printed = formatQuantity(difference, { decimals: printedDecimals(item), isSigned: true })
-    return [{ item, name: itemInWords(item), unit: unitOf(item), quantities, difference: printed }]
+/** What tells a quantity from all others of its scheme. */
+export function quantityKey({ item, bands = [] }: Pick<Quantity, 'item' | 'bands'>): string {
+  return [item, ...bands.map((band) => JSON.stringify(band))].join(' ')
+}
+
+/** Items that either scheme has, by work section; stages of one item in the order in which they are billed. */
+export function quantityRows(
+  { ribbed, solid }: Pair<SchemeResult>,
+  rules: MeasurementRules,
+): { readonly section: WorkSection; readonly rows: readonly QuantityRow[] }[] {
+  const all = [...ribbed.quantities, ...solid.quantities]
+  const rows = [...compositeItem.options, ...itemCode.options].flatMap((item) => {
+    const ofItem = new Map(all.filter((quantity) => quantity.item === item).map((quantity) => [quantityKey(quantity), quantity]))
+    return [...ofItem].map(([key, quantity]) => rowOf(key, quantity, { ribbed, solid }, rules))
   })
   return byWorkSection(rows)
+}
+
+function rowOf(key: string, one: Quantity, { ribbed, solid }: Pair<SchemeResult>, rules: MeasurementRules): QuantityRow {
+  const find = (scheme: SchemeResult) => scheme.quantities.find((quantity) => quantityKey(quantity) === key) ?? null
+  const quantities = { ribbed: find(ribbed), solid: find(solid) }
+  const difference = (quantities.ribbed?.net ?? 0) - (quantities.solid?.net ?? 0)
+  const { item, unit, bands } = one
+  const name = withBands(itemInWords(item), bands)
+  return {
+    item,
+    key,
+    name,
+    unit,
+    quantities,
+    difference: formatQuantity(difference, { decimals: printedDecimals(one, rules), isSigned: true }),
+  }
 }

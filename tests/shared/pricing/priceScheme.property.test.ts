@@ -1,7 +1,7 @@
 import Big from 'big.js'
 import fc from 'fast-check'
 import { expect, it } from 'vitest'
-import type { Quantity, Rates } from '#shared/contracts/appraisal'
+import type { ItemQuantity, Rates } from '#shared/contracts/appraisal'
 import { cost as costContract } from '#shared/contracts/appraisal'
 import { minorUnit } from '#shared/pricing/minorUnit'
 import { priceScheme } from '#shared/pricing/priceScheme'
@@ -10,7 +10,7 @@ import { arbitraryQuantities, arbitraryRates } from '../support/arbitraryBill'
 const BILLS = 10_000
 
 /** The same bill by another decimal library, written out step by step. */
-function billByBig(quantities: readonly Quantity[], { items, markups, currency }: Rates) {
+function billByBig(quantities: readonly ItemQuantity[], { items, markups, currency }: Rates) {
   const places = minorUnit(currency)
   const round = (amount: Big) => amount.round(places, Big.roundHalfUp)
   const amounts = quantities

@@ -9,7 +9,7 @@
 import { describe, expect, it } from 'vitest'
 import type { BarDiameter, Quantity } from '#shared/contracts/appraisal'
 import { FABRIC } from '#shared/sizing/tables/fabric'
-import { netRules } from '#shared/takeoff/measurementRules'
+import { comparingRules } from '#shared/takeoff/rules/comparingRules'
 import { steelMassKg } from '#shared/takeoff/steelMass'
 import { takeOffScheme } from '#shared/takeoff/takeOffScheme'
 import { barRun, handSized, levelOf, rectangle, solidOf } from '../support/handSized'
@@ -35,7 +35,7 @@ const bars: [BarDiameter, number][] = [
 function tonnesOf(diameter: BarDiameter, count: number, lengthMm: number): number {
   const level = levelOf({ outline: rectangle(0, 0, 4000, 3000) })
   const sized = handSized(solidOf(150), [level], [barRun(diameter, count, lengthMm)])
-  const quantities = takeOffScheme(solidOf(150), sized, [level], netRules)
+  const quantities = takeOffScheme(solidOf(150), sized, [level], comparingRules, 'EN1992')
   return quantities.find(({ item }) => item === `steel.bar.${diameter}`)!.net
 }
 

@@ -1,6 +1,7 @@
 import fc from 'fast-check'
-import { itemCode, type Quantity, type Rates } from '#shared/contracts/appraisal'
-import { netRules, unitOf } from '#shared/takeoff/measurementRules'
+import { itemCode, type ItemQuantity, type Rates } from '#shared/contracts/appraisal'
+import { unitOf } from '#shared/takeoff/measurementRules'
+import { comparingRules } from '#shared/takeoff/rules/comparingRules'
 import { roundAsPrinted } from '#shared/takeoff/roundAsPrinted'
 
 const decimalText = (most: number, decimals: number) =>
@@ -9,12 +10,12 @@ const decimalText = (most: number, decimals: number) =>
   })
 
 /** Quantities of some items, each once, rounded as printed. */
-export const arbitraryQuantities: fc.Arbitrary<Quantity[]> = fc
+export const arbitraryQuantities: fc.Arbitrary<ItemQuantity[]> = fc
   .array(fc.tuple(fc.constantFrom(...itemCode.options), fc.double({ min: 0, max: 50_000, noNaN: true })), { maxLength: 22 })
   .map((entries) =>
     [...new Map(entries)].map(([item, value]) => {
       const unit = unitOf(item)
-      return { item, unit, net: roundAsPrinted(value, netRules.decimals[unit]), parts: [] }
+      return { item, unit, net: roundAsPrinted(value, comparingRules.decimals[unit]), parts: [] }
     }),
   )
 

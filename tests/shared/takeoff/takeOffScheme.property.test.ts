@@ -1,6 +1,6 @@
 import fc from 'fast-check'
 import { expect, it } from 'vitest'
-import { netRules } from '#shared/takeoff/measurementRules'
+import { comparingRules } from '#shared/takeoff/rules/comparingRules'
 import { takeOffScheme } from '#shared/takeoff/takeOffScheme'
 import { evaluate } from '../support/evaluate'
 import { handSized, levelOf, rectangle, ribbedOf, solidOf } from '../support/handSized'
@@ -52,7 +52,7 @@ const arbitraryScheme = fc.oneof(
 it('yields arithmetic that evaluates, and concrete whose members add up, on any bay', () => {
   fc.assert(
     fc.property(arbitraryLevel, arbitraryScheme, (level, scheme) => {
-      const quantities = takeOffScheme(scheme, handSized(scheme, [level]), [level], netRules)
+      const quantities = takeOffScheme(scheme, handSized(scheme, [level]), [level], comparingRules, 'EN1992')
       for (const { expression, value } of quantities.flatMap(({ parts }) => parts)) {
         expect(Math.abs(evaluate(expression) - value)).toBeLessThanOrEqual(ARITHMETIC * value)
       }

@@ -1,7 +1,8 @@
 import { describe, expect, it } from 'vitest'
 import type { ItemCode, Level, Quantity, Scheme } from '#shared/contracts/appraisal'
 import { quantity as quantityContract } from '#shared/contracts/appraisal'
-import { netRules, unitOf } from '#shared/takeoff/measurementRules'
+import { unitOf } from '#shared/takeoff/measurementRules'
+import { comparingRules } from '#shared/takeoff/rules/comparingRules'
 import { takeOffScheme } from '#shared/takeoff/takeOffScheme'
 import { evaluate } from '../support/evaluate'
 import { barRun, handSized, levelOf, rectangle, ribbedOf, solidOf } from '../support/handSized'
@@ -9,7 +10,7 @@ import { barRun, handSized, levelOf, rectangle, ribbedOf, solidOf } from '../sup
 const ARITHMETIC = 1e-9
 
 const takeOff = (scheme: Scheme, levels: readonly Level[], bars: Parameters<typeof handSized>[2] = []) =>
-  takeOffScheme(scheme, handSized(scheme, levels, bars), levels, netRules)
+  takeOffScheme(scheme, handSized(scheme, levels, bars), levels, comparingRules, 'EN1992')
 const find = (quantities: readonly Quantity[], item: ItemCode) => quantities.find((quantity) => quantity.item === item)
 const netOf = (quantities: readonly Quantity[], item: ItemCode) => find(quantities, item)?.net ?? 0
 const sumOf = (values: readonly number[]) => values.reduce((sum, value) => sum + value, 0)
@@ -97,8 +98,8 @@ describe('voids', () => {
 
   it('stay in where the rules in force leave small ones in', () => {
     const scheme = solidOf(160)
-    const rules = { ...netRules, deductVoidsOver: { ...netRules.deductVoidsOver, concreteM3: 0.1 } }
-    const [concrete] = takeOffScheme(scheme, handSized(scheme, [level]), [level], rules)
+    const rules = { ...comparingRules, deductVoidsOver: { ...comparingRules.deductVoidsOver, concreteM3: 0.1 } }
+    const [concrete] = takeOffScheme(scheme, handSized(scheme, [level]), [level], rules, 'EN1992')
     expect(concrete!.parts[0]!.expression).toBe('(6.35 * 5.75 - 2.6 * 3.6) * 0.16') // the shaft is 0.08 m³
     expect(sumOf(Object.values(concrete!.split!))).toBeCloseTo(concrete!.parts[0]!.value, 9)
   })
@@ -154,7 +155,7 @@ describe('every quantity', () => {
       }
       const whole = sumOf(parts.map(({ value }) => value))
       expect(unit).toBe(unitOf(item))
-      expect(Math.abs(net - whole)).toBeLessThanOrEqual(0.5 * 10 ** -netRules.decimals[unit] + ARITHMETIC * whole)
+      expect(Math.abs(net - whole)).toBeLessThanOrEqual(0.5 * 10 ** -comparingRules.decimals[unit] + ARITHMETIC * whole)
       if (split) expect(Math.abs(sumOf(Object.values(split)) - whole)).toBeLessThanOrEqual(ARITHMETIC * whole)
       expect(split !== undefined).toBe(item === 'concrete.slab')
     }
@@ -172,7 +173,9 @@ describe('every quantity', () => {
 
   it('refuses a scheme that was sized over other levels', () => {
     const scheme = solidOf(160)
-    expect(() => takeOffScheme(scheme, handSized(scheme, [bay]), levels, netRules)).toThrow(RangeError)
-    expect(() => takeOffScheme(scheme, handSized(scheme, [bay]), [{ ...bay, mark: 'L9' }], netRules)).toThrow(/L9 P1/)
+    expect(() => takeOffScheme(scheme, handSized(scheme, [bay]), levels, comparingRules, 'EN1992')).toThrow(RangeError)
+    expect(() => takeOffScheme(scheme, handSized(scheme, [bay]), [{ ...bay, mark: 'L9' }], comparingRules, 'EN1992')).toThrow(
+      /L9 P1/,
+    )
   })
 })

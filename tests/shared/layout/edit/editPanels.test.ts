@@ -165,7 +165,7 @@ describe('marks', () => {
   })
 
   it('copies a level once, under a free mark', () => {
-    const level = { mark: 'L1', name: 'Typical', repeat: 4, panels: gridPanels([6000], [5000]) }
+    const level = { mark: 'L1', name: 'Typical', repeat: 4, proppingHeight: 3000, panels: gridPanels([6000], [5000]) }
     expect(copyLevel(level, ['L1', 'L2'])).toEqual({ ...level, mark: 'L3', name: 'Typical, copy', repeat: 1 })
   })
 
