@@ -20,7 +20,12 @@ const levels: Levels = [
         mark: 'P1',
         repeat: 3,
         outline: rectangle(0, 0, 6210, 5070),
-        edges: [edge('discontinuous', 'wall'), edge('continuous'), edge('discontinuous'), edge('discontinuous')],
+        edges: [
+          edge('discontinuous', 'wall'),
+          { ...edge('continuous'), beyond: { panel: 'P2' } },
+          edge('discontinuous'),
+          edge('discontinuous'),
+        ],
         ribDirection: 0,
         voids: [rectangle(2000, 2000, 2100, 700)],
       },
@@ -28,7 +33,12 @@ const levels: Levels = [
         mark: 'P2',
         repeat: 3,
         outline: rectangle(6210, 0, 5630, 5070),
-        edges: [edge('discontinuous'), edge('discontinuous'), edge('discontinuous'), edge('continuous')],
+        edges: [
+          edge('discontinuous'),
+          { ...edge('continuous'), beyond: { span: 5000 } },
+          edge('discontinuous'),
+          edge('continuous'),
+        ],
         ribDirection: 0,
         voids: [],
       },
@@ -60,6 +70,7 @@ const loads = {
   partitionsLoad: 0.8,
   cover: 25,
   fireMinutes: 60,
+  redistribution: 10,
   stockLength: 6000,
 } as const
 
