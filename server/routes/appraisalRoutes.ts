@@ -9,7 +9,7 @@ import { readProjectReading } from '../services/project/projectReading'
 export function appraisalRoutes(db: EntityManager, pool: AppraisalPool): Router {
   return Router()
     .post('/appraisals/preview', async (request, response) => {
-      response.json(await pool.appraiseSent(request.body))
+      response.json(await pool.appraiseSent(whoOf(response).firmId, request.body))
     })
     .get('/projects/:id/reading', async (request, response) => {
       response.json(await readProjectReading(db, pool, whoOf(response), idOf(request, 'id')))

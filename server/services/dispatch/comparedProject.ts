@@ -20,8 +20,8 @@ function schemeOf({ schemes }: ProjectSheet, id: string, kind: 'ribbed' | 'solid
 }
 
 /** What is wrong with a stored floor is not wrong with the request: its reasons are told as such. */
-async function appraised(pool: AppraisalPool, file: AppraisalFile): Promise<ComparedAppraisal> {
-  return await pool.appraiseCompared(file).catch((error: unknown) => {
+async function appraised(pool: AppraisalPool, firmId: string, file: AppraisalFile): Promise<ComparedAppraisal> {
+  return await pool.appraiseCompared(firmId, file).catch((error: unknown) => {
     const isRefusal = error instanceof AppError && (error.code === 'invalid_request' || error.code === 'out_of_scope')
     throw isRefusal ? cannotBeSent(error.issues ?? []) : error
   })
@@ -41,6 +41,7 @@ function requirePrices({ appraisal }: ComparedAppraisal, { region, number }: Edi
  */
 export async function compareProject(
   pool: AppraisalPool,
+  firmId: string,
   sheet: ProjectSheet,
   input: DispatchInput,
 ): Promise<Omit<ComparedProject, 'blockMaterial'>> {
@@ -53,7 +54,7 @@ export async function compareProject(
   }
   const file = storedAppraisalFile({ ...sheet, schemes: [...schemes] })
   if (file === null) throw cannotBeSent([{ path: 'levels', message: 'expected at least one level with a panel' }])
-  const compared = await appraised(pool, file)
+  const compared = await appraised(pool, firmId, file)
   requirePrices(compared, edition)
   return { project, schemes, edition, file, ...compared }
 }

@@ -46,7 +46,7 @@ async function frozenOf(
   input: DispatchInput,
   contact: ContactEntity,
 ): Promise<FrozenComparison> {
-  const compared = await compareProject(pool, await sheetOf(tx, who.firmId, projectId), input)
+  const compared = await compareProject(pool, who.firmId, await sheetOf(tx, who.firmId, projectId), input)
   const blockMaterial = await materialOf(tx, who.firmId, compared.schemes[0])
   const sending = {
     firm: { name: who.firmName, isDemo: who.isDemo },
@@ -109,7 +109,7 @@ export async function createDispatch(
     await tx.update(DispatchEntity, { firmId: who.firmId, id: row.id }, { messageId: await queueMail(tx, mail) })
     return toDispatch(await tx.findOneByOrFail(DispatchEntity, { firmId: who.firmId, id: row.id }), who.name)
   }
-  return await inTurn(() => createOnce(db, who, request, create))
+  return await inTurn(who.firmId, () => createOnce(db, who, request, create))
 }
 
 function toDispatch(row: DispatchEntity, sentBy: string): Dispatch {

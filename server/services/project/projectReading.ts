@@ -50,7 +50,7 @@ export async function readProjectReading(
     return await sheetOf(tx, who.firmId, projectId)
   })
   const file = storedAppraisalFile(sheet)
-  const appraisal = file === null ? NOTHING : await pool.appraiseStored(file)
+  const appraisal = file === null ? NOTHING : await pool.appraiseStored(who.firmId, file)
   const seesMoney = hasRole(who, 'surveyor', 'developer')
   const { id, name, reference, place, use, brief, measurement, scope, factors, version, updatedAt, updatedBy } = sheet.project
   const { edition } = sheet

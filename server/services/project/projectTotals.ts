@@ -14,9 +14,9 @@ const PATIENCE_MS = 4_000
 const AT_ONCE = 4
 
 /** A scheme's total, or null: it cannot stand, has no prices, or lacks the price of an item it needs. */
-async function appraisedTotals(pool: AppraisalPool, sheet: ProjectSheet): Promise<Totals> {
+async function appraisedTotals(pool: AppraisalPool, firmId: string, sheet: ProjectSheet): Promise<Totals> {
   const file = storedAppraisalFile(sheet)
-  const results = file === null ? [] : (await pool.appraiseStored(file)).schemes
+  const results = file === null ? [] : (await pool.appraiseStored(firmId, file)).schemes
   return sheet.schemes.map(({ specification: { mark, kind } }) => {
     const cost = results.find((result) => result.mark === mark)?.cost ?? null
     return { mark, kind, total: cost === null || cost.unpriced.length > 0 ? null : cost.total }
@@ -24,9 +24,9 @@ async function appraisedTotals(pool: AppraisalPool, sheet: ProjectSheet): Promis
 }
 
 /** An appraisal that is too heavy leaves its schemes without a total; the list is shown all the same. */
-async function totalsOrNone(pool: AppraisalPool, sheet: ProjectSheet): Promise<Totals> {
+async function totalsOrNone(pool: AppraisalPool, firmId: string, sheet: ProjectSheet): Promise<Totals> {
   try {
-    return await appraisedTotals(pool, sheet)
+    return await appraisedTotals(pool, firmId, sheet)
   } catch (error) {
     if (!(error instanceof AppError) || error.code !== 'too_large') throw error
     return sheet.schemes.map(({ specification: { mark, kind } }) => ({ mark, kind, total: null }))
@@ -38,7 +38,7 @@ const underWay = new Map<string, Promise<Totals>>()
 
 async function refreshed(db: EntityManager, pool: AppraisalPool, row: ProjectEntity): Promise<Totals> {
   const { firmId, id, contentVersion } = row
-  const totals = await totalsOrNone(pool, await sheetOf(db, firmId, id))
+  const totals = await totalsOrNone(pool, firmId, await sheetOf(db, firmId, id))
   await db.update(ProjectEntity, { firmId, id, contentVersion }, { totals, totalsVersion: contentVersion })
   return totals
 }
@@ -48,6 +48,12 @@ function refreshOnce(db: EntityManager, pool: AppraisalPool, row: ProjectEntity)
   const work = underWay.get(key) ?? refreshed(db, pool, row).finally(() => underWay.delete(key))
   underWay.set(key, work)
   return work
+}
+
+/** Null where the threads have too much to do: the totals are left out this time. */
+function nullWhenBusy(error: unknown): null {
+  if (error instanceof AppError && (error.code === 'limited' || error.code === 'unavailable')) return null
+  throw error
 }
 
 /** What `work` yields, or null when `ms` pass first. A failure after that is met again by whoever asks next. */
@@ -76,7 +82,9 @@ export async function currentTotals(
   const stale = rows.filter((row) => !isCurrent(row))
   for (let first = 0; first < stale.length && Date.now() < deadline; first += AT_ONCE) {
     const group = stale.slice(first, first + AT_ONCE)
-    const fresh = await Promise.all(group.map((row) => within(refreshOnce(db, pool, row), deadline - Date.now())))
+    const fresh = await Promise.all(
+      group.map((row) => within(refreshOnce(db, pool, row).catch(nullWhenBusy), deadline - Date.now())),
+    )
     group.forEach(({ id }, place) => {
       const totals = fresh[place]
       if (totals) found.set(id, totals)
@@ -94,6 +102,6 @@ export async function refreshAllTotals(db: EntityManager, pool: AppraisalPool, i
     .getMany()
   for (const row of stale) {
     if (isStopping()) return
-    await refreshOnce(db, pool, row)
+    await refreshOnce(db, pool, row).catch(nullWhenBusy)
   }
 }
