@@ -37,6 +37,7 @@ const OTHER_WORD: Readonly<Record<string, unknown>> = {
   ribbed: 'solid',
   solid: 'ribbed',
   USD: 'JPY',
+  nrm2: 'kilograms',
   XC1: 'XC4',
   mild: 'moderate',
   held: 'mayLift',

@@ -15,6 +15,7 @@ const levels: Levels = [
   {
     mark: 'L1',
     repeat: 2,
+    proppingHeight: 2700,
     panels: [
       {
         mark: 'P1',
@@ -114,6 +115,7 @@ export const computedFile: AppraisalFileInput = {
     { mark: 'S1', kind: 'solid', thickness: 'least', bars: 'computed' },
   ],
   rates,
+  measurement: 'nrm2',
 }
 
 /** The same floor with sizes, bars and cross ribs given. */
