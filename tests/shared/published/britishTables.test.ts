@@ -132,6 +132,27 @@ describe('3.4.4.4, greatest K', () => {
   })
 })
 
+describe('3.4.4.4 and 3.4.4.5, T-sections', () => {
+  const section = { widthMm: 500, depthMm: 230, flange: { webMm: 150, thicknessMm: 40 } }
+  // Moment that the flange alone carries, 0.45·fcu·b·hf·(d − 0.5·hf): as the code prints it (seen in several worked examples).
+  const flangeNmm = 0.45 * 30 * 500 * 40 * (230 - 20)
+  const at = (share: number) => basisOf(30).flexure(section, share * flangeNmm, 0)
+
+  it('have their stress block in the flange up to 0.45·fcu·b·hf·(d − 0.5·hf)', () => {
+    expect(at(0.999).steelWorking()).toContain('in the flange')
+    expect(at(1.001).steelWorking()).toMatch(/^flange /)
+    expect(at(1).requiredMm2).toBeCloseTo(flangeNmm / (0.95 * 460 * 210), 6)
+  })
+
+  it('are in equilibrium beyond it', () => {
+    const { requiredMm2 } = at(1.1)
+    const tensionN = 0.95 * 460 * requiredMm2
+    const blockMm = 40 + (tensionN - 0.45 * 30 * 500 * 40) / (0.45 * 30 * 150)
+    const resistedNmm = 0.45 * 30 * (500 * 40 * 210 + 150 * (blockMm - 40) * (230 - (blockMm + 40) / 2))
+    expect(resistedNmm / (1.1 * flangeNmm)).toBeCloseTo(1, 9)
+  })
+})
+
 describe('Table 3.17, topping over permanent blocks', () => {
   it.each([
     [400, 30],
