@@ -58,7 +58,7 @@ describe('BarsView', () => {
     expect(numberOf(total)).toBe(numberOf(built) * numberOf(each))
     byRole('button', '01').click()
     await flushPromises()
-    expect(allByRole('row', /^L1 P1/).length).toBe(document.querySelectorAll('[aria-label="Sheets of mesh"] tbody tr').length)
+    expect(allByRole('row', /^L1 P1/).length).toBe(document.querySelectorAll('[aria-label="Sheets by panel"] tbody tr').length)
   })
 
   it('draws each mark and says its shape in words', async () => {
