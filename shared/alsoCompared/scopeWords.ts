@@ -27,7 +27,7 @@ export const SCOPE_WORDS: Readonly<Record<ScopeEntry, ScopeWords>> = {
   hoisting: { name: 'hoisting', hint: 'Blocks, bars and concrete up to each floor.' },
   leastGang: { name: 'least gang', hint: 'Small pours that keep a whole gang waiting.' },
   lineLoads: { name: 'line loads', hint: 'Walls along ribs ask for doubled ribs.' },
-  trimmingBars: { name: 'trimming bars', hint: 'Round voids and at openings made later.' },
+  trimmingBars: { name: 'trimming bars', hint: 'At openings made later; those beside drawn voids are measured.' },
   tiesChairsLinks: { name: 'ties, chairs and links', hint: 'What holds the bars in their place.' },
   loadDirection: { name: 'direction of load on beams', hint: 'Ribs load two of the four beams; a two-way slab loads all.' },
 }
