@@ -160,10 +160,20 @@ describe('a level', () => {
     })
   }
 
-  it('split into two that keep their neighbours changes no total', () => {
-    const apart = level!.panels.map((panel) => ({
+  /** The level's panels under other marks, also where an edge names one of them. */
+  const renamed = (markOf: (mark: string) => string) =>
+    level!.panels.map((panel) => ({
       ...panel,
-      mark: `${panel.mark}b`,
+      mark: markOf(panel.mark),
+      edges: panel.edges.map(({ beyond, ...edge }) => {
+        if (!beyond) return edge
+        return { ...edge, beyond: 'panel' in beyond ? { panel: markOf(beyond.panel) } : beyond }
+      }),
+    }))
+
+  it('split into two that keep their neighbours changes no total', () => {
+    const apart = renamed((mark) => `${mark}b`).map((panel) => ({
+      ...panel,
       outline: panel.outline.map(([x, y]): [number, number] => [x, y + 20_000]),
       voids: panel.voids.map((ring) => ring.map(([x, y]): [number, number] => [x, y + 20_000])),
     }))
@@ -186,7 +196,7 @@ describe('a level', () => {
   })
 
   it('under other names takes the same', () => {
-    const panels = level!.panels.map((panel, index) => ({ ...panel, mark: `X${index}` }))
+    const panels = renamed((mark) => `X-${mark}`)
     expectSame(totalsOf(appraise({ ...file, levels: [{ ...level!, mark: 'roof', panels }] })), totalsOf(appraise(file)))
   })
 
