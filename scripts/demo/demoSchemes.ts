@@ -22,6 +22,7 @@ export function ribbedScheme(mark: string, name: string, blockCode: string, size
       trimmerWidth: 200,
       cutBlocks: false,
       leastPiece: 50,
+      alignRows: false,
       ribBars: 'computed',
       topBars: 'computed',
       givenPanels: [],

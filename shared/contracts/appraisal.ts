@@ -54,7 +54,7 @@ const loads = {
   cover: z.number().min(10).max(100), // nominal, to the outermost bar; no link unless `link` is given
   fireMinutes: z.literal([0, 30, 60, 90, 120, 180, 240]),
   redistribution: z.number().min(0).max(30).default(0), // percent of elastic support moments, moved to the spans
-  stockLength: z.int().min(6000).max(18_000).multipleOf(25).default(12_000), // bars come in it; longer ones are lapped
+  stockLength: z.int().min(6000).max(18_000).multipleOf(25, 'expected a multiple of 25').default(12_000), // bars come in it; longer ones are lapped
 }
 export const brief = z.discriminatedUnion('basis', [
   z.strictObject({
@@ -117,6 +117,7 @@ export const ribbed = z.strictObject({
   trimmerWidth: z.number().min(0).max(1000).default(100), // solid strip around every void
   cutBlocks: z.boolean().default(false),
   leastPiece: z.number().min(10).default(50),
+  alignRows: z.boolean().default(false), // panels whose ribs run on across a common support take their rows from one grid
   ribBars: z.union([z.literal('computed'), bottomBarsOfRib]).default('computed'), // bottom of every rib
   topBars: z.union([z.literal('computed'), topBarsOfRib]).default('computed'), // per rib over continuous edges
   givenPanels: z.array(givenRibbedPanel).max(5000).default([]),

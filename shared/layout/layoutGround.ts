@@ -20,12 +20,13 @@ export interface LayoutGround {
  * Rows and ribs of a panel before solid zones are laid.
  *
  * Source: project rule, engine design section 2
+ * @param rowStarts - starts of the rows' bands in the panel's local frame, mm, where they are not its own (`alignedRows`)
  * @throws OutOfScopeError when the supports leave no clear outline
  */
-export function layoutGround(panel: Panel, scheme: RibbedScheme): LayoutGround {
+export function layoutGround(panel: Panel, scheme: RibbedScheme, rowStarts?: readonly number[]): LayoutGround {
   const clear = clearOutline(panel)
   const field = panelField(panel, clear, scheme.trimmerWidth)
-  const { starts } = rowBands(field.top - field.bottom, scheme)
-  const rows = starts.map((start) => clearRow(field, field.bottom + start, scheme))
+  const starts = rowStarts ?? rowBands(field.top - field.bottom, scheme).starts.map((start) => field.bottom + start)
+  const rows = starts.map((start) => clearRow(field, start, scheme))
   return { clear, field, rows, ribLines: ribLines(field, rows, scheme), longestRib: longestRib(field, rows, scheme) }
 }

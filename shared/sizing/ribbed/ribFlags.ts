@@ -29,6 +29,7 @@ export function ribFlags(task: RibTask, findings: readonly Finding[]): string[] 
           'ribs that end at a void hang on its trimmers; their bars are made up in the ribs beside and in the strips across (common practice), and not checked',
         ]
       : []),
+    ...rowFlags(task),
     ...zoneFlags(task, findings),
     ...crossRibFlag(task),
     ...meshFlag(task),
@@ -46,6 +47,14 @@ function stripAnalysisOf({ panel, context: { analysis } }: RibTask): StripAnalys
 
 function mixedFlag(panel: RibbedPanel, end: EndOfSpan): string {
   return `${endName(panel, end)}: continuous in part only, taken as discontinuous`
+}
+
+function rowFlags({ panel: { rows } }: RibTask): string[] {
+  if (rows === null) return []
+  const count = rows.fewer === 0 ? 'as many as alone' : `${rows.fewer} fewer than alone`
+  return [
+    `rows stand on one grid with those of neighbours whose ribs run on into this panel: ${rows.starts.length} rows, ${count}`,
+  ]
 }
 
 function crossRibFlag({ panel: { layout }, context: { basis, section } }: RibTask): string[] {

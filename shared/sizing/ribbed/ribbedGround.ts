@@ -1,6 +1,7 @@
 import type { RibbedScheme } from '../../contracts/appraisal'
 import { frameAt } from '../../geometry/frame'
 import type { Point } from '../../geometry/point'
+import type { AlignedRows } from '../../layout/alignedRows'
 import { type LayoutGround, layoutGround } from '../../layout/layoutGround'
 import { OutOfScopeError } from '../../outOfScope'
 import { edgesLengthMm, endBeyond } from '../analysis/endBeyond'
@@ -11,6 +12,8 @@ import { type RibLineEnds, ribLineEnds } from './ribEnds'
 
 /** What of a ribbed panel does not depend on its solid zones: rows and ribs, and what they bear on. */
 export interface RibbedGround {
+  /** The panel it was made for, in whose place `layout` lies. */
+  readonly site: PanelSite
   readonly layout: LayoutGround
   readonly ribs: readonly RibLineEnds[]
   readonly direction: Point
@@ -23,15 +26,17 @@ export interface RibbedGround {
  * Ribs of a panel with their ends.
  *
  * Source: project rule, engine design section 2
+ * @param rows - where they stand on a grid in common with neighbours
  * @throws OutOfScopeError `outline` where no row of blocks fits
  */
-export function ribbedGround(site: PanelSite, scheme: RibbedScheme): RibbedGround {
-  const layout = layoutGround(site.panel, scheme)
+export function ribbedGround(site: PanelSite, scheme: RibbedScheme, rows: AlignedRows | null): RibbedGround {
+  const layout = layoutGround(site.panel, scheme, rows?.starts)
   const ribs = ribLineEnds(site, layout)
   if (layout.longestRib === 0 || ribs.length === 0)
     throw new OutOfScopeError('outline', 'no row of blocks fits: expected a wider panel, smaller blocks or another rib direction')
   const ends = { start: lineEnd(site, ribs, 'start'), end: lineEnd(site, ribs, 'end') }
   return {
+    site,
     layout,
     ribs,
     direction: frameAt([0, 0], site.panel.ribDirection).toLevel([1, 0]),

@@ -1,4 +1,5 @@
 import type { Brief, RibbedScheme } from '../../contracts/appraisal'
+import { alignedRows } from '../../layout/alignedRows'
 import { type AnalysisRules, analysisRules } from '../analysis/analysisRules'
 import type { CodeBasis } from '../codeBasis'
 import { givenFor } from '../givenPanel'
@@ -45,12 +46,16 @@ export interface LaidLevel {
 export function ribbedJob(level: LevelSite, scheme: RibbedScheme, brief: Brief, basis: CodeBasis): RibbedJob {
   const heightMm = scheme.block.height + scheme.topping
   const rules = { basis, coverMm: brief.cover, trimmerMm: scheme.trimmerWidth, heightMm, stockMm: brief.stockLength }
-  const shapes = level.panels.map((site): RibbedShape => {
+  const aligned = scheme.alignRows ? alignedRows(level.panels, level.neighbours, scheme) : []
+  const shapes = level.panels.map((site, i): RibbedShape => {
     const given = givenFor(scheme.givenPanels, level.mark, site.panel.mark)
-    return { site, given, key: shapeKey(site, given) }
+    const rows = aligned[i] ?? null
+    return { site, given, rows, key: shapeKey(site, rows, given) }
   })
   const groundFor = remember<RibbedGround>()
-  const grounds = shapes.map(({ site, key }) => groundFor(key, () => atPath(site.path, () => ribbedGround(site, scheme))))
+  const grounds = shapes.map(({ site, rows, key }) =>
+    groundFor(key, () => atPath(site.path, () => ribbedGround(site, scheme, rows))),
+  )
   refuseLooseRibs(level, grounds)
   const memory = { shapeFor: remember<RibbedPanel>(), zoneFor: remember<number>() }
   const analysis = analysisRules(basis, brief.redistribution)

@@ -2,6 +2,7 @@ import type { Brief, GivenRibbedPanel, RibbedScheme } from '../../contracts/appr
 import type { Point } from '../../geometry/point'
 import { signedArea } from '../../geometry/ring'
 import { layOutPanel } from '../../layout/layOutPanel'
+import type { AlignedRows } from '../../layout/alignedRows'
 import type { LayoutGround } from '../../layout/layoutGround'
 import type { PanelLayout } from '../../layout/panelLayout'
 import { type FloorLoads, floorLoads, selfWeightKnPerM2 } from '../actions'
@@ -30,6 +31,7 @@ export interface RibbedPanel {
   readonly solidZoneMm: number
   /** Bars given to this panel, else to every panel of the scheme; or computed. */
   readonly bars: RibBarChoice
+  readonly rows: AlignedRows | null
   /** The panel it was laid out for, and how. */
   readonly site: PanelSite
   readonly layout: PanelLayout
@@ -56,6 +58,8 @@ export function laidOut(
 export interface RibbedShape {
   readonly site: PanelSite
   readonly given: GivenRibbedPanel | undefined
+  /** On a grid in common with neighbours; null: its own. */
+  readonly rows: AlignedRows | null
   readonly key: string
 }
 
@@ -65,8 +69,8 @@ export interface RibbedShape {
  * Source: project rule, engine design sections 2 and 4 (self-weight of all concrete and blocks inside the clear outline)
  */
 export function ribbedPanel(
-  { site, given, key }: RibbedShape,
-  { ribs, direction, ends, isCantilever, layout: ground }: RibbedGround,
+  { given, key, rows }: RibbedShape,
+  { site, ribs, direction, ends, isCantilever, layout: ground }: RibbedGround,
   scheme: RibbedScheme,
   brief: Brief,
   basis: CodeBasis,
@@ -92,6 +96,7 @@ export function ribbedPanel(
     grossMm2: signedArea(site.panel.outline),
     solidZoneMm,
     bars: { ribBars: given?.ribBars ?? scheme.ribBars, topBars: given?.topBars ?? scheme.topBars },
+    rows,
     site,
     layout,
   }
@@ -102,7 +107,11 @@ export function ribbedPanel(
  *
  * Source: project rule, identical panels are laid out once for sizing
  */
-export function shapeKey({ panel, edges, sharedEdges }: PanelSite, given?: Partial<RibBarChoice>): string {
+export function shapeKey(
+  { panel, edges, sharedEdges }: PanelSite,
+  rows: AlignedRows | null,
+  given?: Partial<RibBarChoice>,
+): string {
   const [originX, originY] = panel.outline[0]!
   const ring = (points: readonly Point[]) => points.map(([x, y]) => `${figure(x - originX, 4)},${figure(y - originY, 4)}`)
   const own = given ? [given.ribBars, given.topBars] : null
@@ -113,6 +122,7 @@ export function shapeKey({ panel, edges, sharedEdges }: PanelSite, given?: Parti
     edges,
     sharedEdges,
     ...(own ? [own] : []),
+    ...(rows ? [`rows ${figure(rows.starts[0]!, 4)} ${rows.starts.length} ${rows.fewer}`] : []),
   ])
 }
 

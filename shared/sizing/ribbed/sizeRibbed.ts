@@ -1,4 +1,5 @@
 import type { Brief, RibbedScheme } from '../../contracts/appraisal'
+import { layoutGround } from '../../layout/layoutGround'
 import type { CodeBasis } from '../codeBasis'
 import { overSupports } from '../bars/overSupports'
 import type { LevelSite } from '../panelSite'
@@ -28,7 +29,8 @@ export function sizeRibbed(level: LevelSite, scheme: RibbedScheme, brief: Brief,
   return level.panels.map((site, i) => {
     const [task, design] = [tasks[i]!, designs[i]!]
     const { panel } = task
-    const layout = site === panel.site ? panel.layout : laidOut(site, scheme, basis, panel.solidZoneMm)
+    const ground = () => layoutGround(site.panel, scheme, job.shapes[i]!.rows?.starts)
+    const layout = site === panel.site ? panel.layout : laidOut(site, scheme, basis, panel.solidZoneMm, ground())
     return sizedRibbedPanel(task, design, { level: level.mark, mark: site.panel.mark }, layout, lines[i]!)
   })
 }

@@ -24,6 +24,7 @@ export function newRibbed(block: CatalogueBlock, schemes: readonly StoredScheme[
     trimmerWidth: 100,
     cutBlocks: false,
     leastPiece: 50,
+    alignRows: false,
     ribBars: 'computed',
     topBars: 'computed',
     givenPanels: [],

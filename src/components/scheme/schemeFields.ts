@@ -12,6 +12,7 @@ export const SCHEME_FIELDS: readonly string[] = [
   'crossRibs',
   'trimmerWidth',
   'leastPiece',
+  'alignRows',
   'ribBars',
   'topBars',
   'link',

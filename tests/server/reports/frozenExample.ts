@@ -16,6 +16,7 @@ const ribbedScheme: RibbedScheme = {
   trimmerWidth: 100,
   cutBlocks: false,
   leastPiece: 50,
+  alignRows: false,
   ribBars: 'computed',
   topBars: 'computed',
   givenPanels: [],

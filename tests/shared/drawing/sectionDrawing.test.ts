@@ -20,6 +20,7 @@ const ribbed: RibbedScheme = {
   trimmerWidth: 100,
   cutBlocks: false,
   leastPiece: 50,
+  alignRows: false,
   ribBars: 'computed',
   topBars: 'computed',
   givenPanels: [],
