@@ -18,6 +18,10 @@ const LAYERS: Record<string, { may: string[]; packages: string[] }> = {
   'shared/comparison': { may: ['shared/contracts', 'shared/sizing', 'shared/takeoff', 'shared/pricing'], packages: [] },
   'shared/schedule': { may: [...ENGINE, 'shared/layout', 'shared/sizing'], packages: [] },
   'shared/calculation': { may: [...ENGINE, 'shared/layout', 'shared/sizing'], packages: [] },
+  'shared/alsoCompared': {
+    may: [...ENGINE, 'shared/sizing', 'shared/takeoff', 'shared/pricing'],
+    packages: [],
+  },
   'shared/drawing': { may: [...ENGINE, 'shared/layout', 'shared/sizing'], packages: [] },
   'server/entities': { may: ['shared/contracts'], packages: ['typeorm'] },
   'server/services': { may: ['shared', 'server/entities', 'server/errors', 'server/mail', 'server/reports'], packages: ['*'] },

@@ -1,3 +1,5 @@
+import type { AlsoCompared } from '#shared/alsoCompared/alsoCompared'
+import type { ScopeDifference } from '#shared/alsoCompared/scopeDifferences'
 import type { Appraisal, AppraisalFile, RibbedScheme, SchemeResult, SolidScheme } from '#shared/contracts/appraisal'
 import type { CatalogueBlock } from '#shared/contracts/blockCatalogue'
 import type { Project, StoredScheme } from '#shared/contracts/project'
@@ -11,6 +13,7 @@ import type { SizedPanel } from '#shared/sizing/sizedPanel'
 import { itemisedQuantities } from '#shared/takeoff/itemisedQuantities'
 import { differenceGroups } from './content/differenceGroups'
 import { tightestChecks } from './content/tightestChecks'
+import { freezeAlsoRows, freezeScope } from './freezeBeside'
 import type { FrozenComparison } from './frozenComparison'
 
 /** Two schemes of a project, appraised and fully priced: the first scheme of the file is ribbed, the second solid. */
@@ -23,6 +26,9 @@ export interface ComparedProject {
   readonly appraisal: Appraisal
   /** The panel of each scheme that its cross-section shows. */
   readonly cutPanels: readonly (SizedPanel | null)[]
+  /** Beside `appraisal.schemes`. */
+  readonly alsoCompared: readonly AlsoCompared[]
+  readonly scopeDifferences: readonly ScopeDifference[]
 }
 
 /** Who sends it to whom. */
@@ -109,5 +115,7 @@ export function freezeComparison(compared: ComparedProject, sending: Sending, fr
     groups: differenceGroups(itemisedCost(ribbed.cost), itemisedCost(solid.cost)),
     markups: ribbed.cost.markups.filter(({ percent }) => !new Decimal(percent).isZero()).map(({ name: markup }) => markup),
     sections: sections(compared),
+    alsoCompared: freezeAlsoRows(compared.alsoCompared[0]!, compared.alsoCompared[1]!),
+    scope: freezeScope(file.scope, compared.scopeDifferences, { ribbed: ribbed.mark, solid: solid.mark }),
   }
 }

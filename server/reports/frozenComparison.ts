@@ -3,6 +3,7 @@ import { brief, check, deadLoad, itemCode, markupLine, money, ribbed, solid, uni
 import { currencyCode, id, moment } from '#shared/contracts/primitives'
 import { useCategory } from '#shared/contracts/project'
 import type { SvgNode } from '#shared/drawing/svgNode'
+import { frozenAlsoRow, frozenScope } from './frozenBeside'
 
 const drawing: z.ZodType<SvgNode> = z.strictObject({
   tag: z.enum([
@@ -81,6 +82,9 @@ export const frozenComparison = z.strictObject({
   markups: z.array(markupLine.shape.name),
   /** Both cross-sections at one scale, for a page and for a telephone. */
   sections: z.strictObject({ wide: drawing, narrow: drawing }),
+  /** Beside the cost; absent in what was sent before it was compared. */
+  alsoCompared: z.array(frozenAlsoRow).optional(),
+  scope: frozenScope.optional(),
 })
 export type FrozenComparison = z.infer<typeof frozenComparison>
 export type FrozenScheme = FrozenComparison['ribbed'] | FrozenComparison['solid']

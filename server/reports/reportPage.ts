@@ -3,6 +3,7 @@ import { readFileSync } from 'node:fs'
 import { svgText } from '#shared/drawing/svgText'
 import { reportContent, type ReportContent } from './content/reportContent'
 import type { ReportFact } from './content/reportFact'
+import { besideTable, scopeSection, workingsSection } from './besideSections'
 import { barHatches } from './differenceBar'
 import { dayText } from './figureText'
 import type { FrozenComparison } from './frozenComparison'
@@ -45,6 +46,7 @@ function opening(frozen: FrozenComparison, content: ReportContent): Markup {
       <p class="to">${place}. For ${recipient.name}, ${dayText(frozen.frozenAt)}.</p>
       <h1>${sentenceMarkup(content.headline)}</h1>
       <p class="standfirst">${content.standfirst}</p>
+      ${content.scopeCaution === '' ? '' : markup`<p class="unequal">${content.scopeCaution}</p>`}
       ${content.note === '' ? '' : markup`<p class="remark">${content.note}</p>`}
     </div>`
 }
@@ -97,7 +99,8 @@ function behind(content: ReportContent): Markup {
       <h2>Checks</h2>
       ${content.checked.map(checkTable)}
       <p class="note">Used: demand over capacity; above 1.00 a check fails.</p>
-    </section>`
+    </section>
+    ${workingsSection(content)}`
 }
 
 function ending(content: ReportContent): Markup {
@@ -123,7 +126,7 @@ export function reportPage(frozen: FrozenComparison): ReportPage {
         <h2>What each makes</h2>
         ${figureTable(content)}
       </section>
-      ${differences(content)} ${behind(content)} ${ending(content)}
+      ${differences(content)} ${besideTable(content)} ${scopeSection(content)} ${behind(content)} ${ending(content)}
     </main>`
   const style = pageStyle(frozen, body.text)
   const document = markup`<!doctype html>

@@ -69,17 +69,21 @@ export const scope = z
 
 type DeclaredScheme = { readonly mark: string; readonly kind: 'ribbed' | 'solid' }
 
+/** What is wrong with one declaration of a list. */
+export interface ScopeFault {
+  readonly index: number
+  readonly field: 'scheme' | 'per'
+  readonly message: string
+}
+
 /** What a declaration cannot say of the schemes there are: of one that is none of them, or by the block where there is no block. */
-export function scopeFaults(
-  declarations: readonly ScopeDeclaration[],
-  schemes: readonly DeclaredScheme[],
-): { readonly index: number; readonly field: 'scheme' | 'per'; readonly message: string }[] {
-  return declarations.flatMap((declaration, index) => {
+export function scopeFaults(declarations: readonly ScopeDeclaration[], schemes: readonly DeclaredScheme[]): ScopeFault[] {
+  return declarations.flatMap((declaration, index): ScopeFault[] => {
     const scheme = schemes.find(({ mark }) => mark === declaration.scheme)
     if (scheme === undefined)
-      return [{ index, field: 'scheme', message: `expected one of ${schemes.map(({ mark }) => mark).join(', ')}` } as const]
+      return [{ index, field: 'scheme', message: `expected one of ${schemes.map(({ mark }) => mark).join(', ')}` }]
     if (scheme.kind === 'ribbed' || declaration.state !== 'priced' || declaration.per !== 'blocks') return []
-    return [{ index, field: 'per', message: 'expected another basis: a solid scheme has no blocks' } as const]
+    return [{ index, field: 'per', message: 'expected another basis: a solid scheme has no blocks' }]
   })
 }
 

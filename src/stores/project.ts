@@ -1,3 +1,4 @@
+import { allScopeDifferences } from '#shared/alsoCompared/scopeDifferences'
 import type { ApiIssue } from '#shared/contracts/apiError'
 import type { LevelInput, ProjectInput, ProjectSheet, SchemeInput, StoredLevel, StoredScheme } from '#shared/contracts/project'
 import type { ProjectReading } from '#shared/contracts/projectReading'
@@ -13,6 +14,7 @@ import type { AppraisalSource } from './appraisalFile'
 import { useSessionStore } from './session'
 import { createSheetAppraisal } from './sheetAppraisal'
 import { followMarks } from './followMarks'
+import { followSchemeMark } from './followSchemeMark'
 import type { SheetRow } from './sheetRow'
 import { levelInputOf, schemeInputOf, withoutRow, withRow } from './sheetRow'
 import { createSheetSaving } from './sheetSaving'
@@ -37,7 +39,14 @@ export const useProjectStore = defineStore('project', () => {
   const full = computed<FullAppraisal | null>(() =>
     reading.value === null
       ? appraisal.full.value
-      : { sized: [], problems: [], ...appraisal.full.value, appraisal: reading.value.appraisal },
+      : {
+          sized: [],
+          problems: [],
+          alsoCompared: [],
+          ...appraisal.full.value,
+          appraisal: reading.value.appraisal,
+          scopeDifferences: allScopeDifferences(reading.value.scope, reading.value.appraisal.schemes),
+        },
   )
   const problems = computed<readonly ApiIssue[]>(() => {
     const all = [...appraisal.problems.value, ...saving.refusals.value]
@@ -87,7 +96,16 @@ export const useProjectStore = defineStore('project', () => {
 
   function changeScheme(schemeId: string, input: SchemeInput): void {
     const row = sheet.value?.schemes.find(({ id }) => id === schemeId)
-    if (row !== undefined) change({ kind: 'scheme', row: { ...row, ...input } })
+    if (row === undefined) return
+    change({ kind: 'scheme', row: { ...row, ...input } })
+    followScheme(row.specification.mark, input.specification.mark)
+  }
+
+  /** What is declared of a scheme follows it to its new mark, or goes with it. */
+  function followScheme(before: string, now: string | null): void {
+    if (sheet.value === null) return
+    const scope = followSchemeMark(sheet.value.project.scope, before, now)
+    if (scope !== null) change({ kind: 'project', row: { ...sheet.value.project, scope } })
   }
 
   /** @throws ApiFailure */
@@ -121,7 +139,11 @@ export const useProjectStore = defineStore('project', () => {
   }
 
   const removeLevel = (id: string) => remove(`level:${id}`, (projectId, version) => askToRemoveLevel(projectId, id, version))
-  const removeScheme = (id: string) => remove(`scheme:${id}`, (projectId, version) => askToRemoveScheme(projectId, id, version))
+  async function removeScheme(id: string): Promise<void> {
+    const row = sheet.value?.schemes.find((each) => each.id === id)
+    await remove(`scheme:${id}`, (projectId, version) => askToRemoveScheme(projectId, id, version))
+    if (row !== undefined) followScheme(row.specification.mark, null)
+  }
 
   /** Of a conflict: stores my version over theirs. @throws ApiFailure */
   async function keepMine(): Promise<void> {

@@ -1,5 +1,6 @@
 import { sentenceText, wholeTotal, type Sentence } from '../../reports/content/headline'
 import { reportContent, type ReportContent } from '../../reports/content/reportContent'
+import type { BesideRow } from '../../reports/content/besideRows'
 import type { ComparedFigure } from '../../reports/content/comparedFigures'
 import type { ReportFact } from '../../reports/content/reportFact'
 import { dayText, decimalText } from '../../reports/figureText'
@@ -40,6 +41,20 @@ ${figures.map(figureRow)}
 </table>`
 }
 
+function besideRow({ label, unit, ribbed, solid, better: kind, verdict }: BesideRow): Markup {
+  const words = verdict === '' ? unit : `${unit}, ${verdict}`
+  return figureRow({ label, unit: words, ribbed, solid, difference: '', better: kind })
+}
+
+/** What is compared beside the cost; where the ribbed floor is worse is said below the table. */
+function beside({ beside: groups }: ReportContent): Markup {
+  const rows = groups.flatMap((group) => group.rows)
+  if (rows.length === 0) return markup``
+  const remarks = rows.filter(({ better: kind, remark }) => kind === 'solid' && remark !== '').map(({ remark }) => remark)
+  return markup`${mailHeading('Also compared')}<table width="100%" cellpadding="0" cellspacing="0" border="0">${rows.map(besideRow)}</table>
+${remarks.length === 0 ? '' : lines(remarks)}${mailNote('First ribbed, then solid. How each figure came about stands in the attached PDF.')}`
+}
+
 function factRows(facts: readonly ReportFact[]): Markup {
   return markup`<table ${TABLE}>${facts.map(
     ({ title, text }) =>
@@ -73,6 +88,7 @@ function opening(frozen: FrozenComparison, content: ReportContent): Markup {
 ${mailNote(`${place}. For ${frozen.recipient.name}, ${dayText(frozen.frozenAt)}.`)}
 <h1 style="margin:12px 0 0;${MAIL_FONT}font-size:28px;line-height:34px;font-weight:300;color:${ink};">${sentence(content.headline)}</h1>
 <p style="margin:12px 0 0;${MAIL_FONT}font-size:17px;line-height:26px;color:${ink};">${content.standfirst}</p>
+${content.scopeCaution === '' ? '' : markup`<p style="margin:12px 0 0;padding:8px 0;border-top:1px solid ${ink};border-bottom:1px solid ${ink};${MAIL_FONT}font-size:14px;line-height:20px;color:${ink};">${content.scopeCaution}</p>`}
 ${content.note === '' ? '' : content.note.split(/\n+/).map(mailParagraph)}`
 }
 
@@ -88,6 +104,8 @@ ${totalBars({ ribbed: total('ribbed'), solid: total('solid') })}
 ${figureTable(content)}
 ${mailNote('The lesser figure is set heavier. Dead load is concrete and blocks only. Both floors are drawn in the attached PDF.')}
 ${differences(content)}
+${beside(content)}
+${better('Whether both totals hold the same', content.scopeFacts)}
 ${better('Where solid is better', content.better.solid)}
 ${better('Where ribbed is better', content.better.ribbed)}
 ${mailHeading('What stands behind it')}${factRows(content.basis)}

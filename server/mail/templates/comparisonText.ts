@@ -36,6 +36,16 @@ function differenceLines({ bars, currency, totalDifference }: ReportContent): st
   ]
 }
 
+function besideLines({ beside }: ReportContent): string[] {
+  return beside.flatMap(({ name, rows }) => [
+    name,
+    ...rows.flatMap(({ label, unit, ribbed, solid, verdict, remark }) => [
+      `  ${label}, ${unit}: ribbed ${ribbed}, solid ${solid}${verdict === '' ? '' : `, ${verdict}`}`,
+      ...(remark === '' ? [] : [`    ${remark}`]),
+    ]),
+  ])
+}
+
 function checkLines({ kind, mark, summary, checks }: CheckedScheme): string[] {
   return [
     `${kind === 'ribbed' ? 'Ribbed' : 'Solid'}, ${mark}: ${summary}`,
@@ -55,10 +65,13 @@ export function comparisonText(frozen: FrozenComparison, content: ReportContent)
     '',
     sentenceText(content.headline),
     content.standfirst,
+    ...(content.scopeCaution === '' ? [] : [content.scopeCaution]),
     ...(content.note === '' ? [] : ['', content.note]),
     ...part('What each makes', figureLines(content)),
     ...part('Where the difference comes from', differenceLines(content)),
     ...(content.turning.length === 0 ? [] : part('What would turn it', content.turning)),
+    ...(content.beside.length === 0 ? [] : part('Also compared', besideLines(content))),
+    ...better('Whether both totals hold the same', content.scopeFacts),
     ...better('Where solid is better', content.better.solid),
     ...better('Where ribbed is better', content.better.ribbed),
     ...part('What stands behind it', factLines(content.basis)),

@@ -9,8 +9,14 @@ interface FavouringFact extends ReportFact {
   readonly favours: SchemeKind
 }
 
-function soundFacts({ ribbed, solid }: FrozenComparison): FavouringFact[] {
-  const [ofRibbed, ofSolid] = [soundByMassDb(ribbed.deadLoad.perArea), soundByMassDb(solid.deadLoad.perArea)]
+/** By mass over the floor's own area; for what was sent before that was compared, by the dead load. */
+function soundOf({ ribbed, solid, alsoCompared }: FrozenComparison): readonly [number | null, number | null] {
+  const row = alsoCompared?.find(({ key }) => key === 'soundAir')
+  return row ? [row.ribbed, row.solid] : [soundByMassDb(ribbed.deadLoad.perArea), soundByMassDb(solid.deadLoad.perArea)]
+}
+
+function soundFacts(frozen: FrozenComparison): FavouringFact[] {
+  const [ofRibbed, ofSolid] = soundOf(frozen)
   if (ofRibbed === null || ofSolid === null) return []
   const difference = Math.round(ofSolid) - Math.round(ofRibbed)
   if (difference === 0) return []

@@ -1,4 +1,4 @@
-import type { Cost, ItemCode } from '#shared/contracts/appraisal'
+import type { BillItem, Cost } from '#shared/contracts/appraisal'
 import { markupFactor } from '#shared/comparison/unroundedTotal'
 import { Decimal, sumOf } from '#shared/pricing/decimal'
 import { printMoney } from '#shared/pricing/money'
@@ -16,8 +16,9 @@ const FAMILIES: readonly { group: number; family: string; word: string }[] = [
   { group: 2, family: 'formwork.', word: 'formwork' },
   { group: 2, family: 'propping.', word: 'propping' },
   { group: 2, family: 'curing.', word: 'curing' },
+  { group: 3, family: 'scope.', word: 'declared scope' },
 ]
-const GROUP_COUNT = 3
+const GROUP_COUNT = 4
 
 interface Group {
   readonly words: readonly string[]
@@ -29,7 +30,7 @@ interface Group {
   readonly isMarkup: boolean
 }
 
-function amounts(cost: Cost): Map<ItemCode, Decimal> {
+function amounts(cost: Cost): Map<BillItem, Decimal> {
   return new Map(cost.lines.map(({ item, amount }) => [item, new Decimal(amount)]))
 }
 

@@ -3,6 +3,7 @@ import { Decimal } from '#shared/pricing/decimal'
 import { signedDecimalText } from '../figureText'
 import type { FrozenComparison } from '../frozenComparison'
 import { basisFacts } from './basisFacts'
+import { besideGroups, besideWorkings, scopeCaution, scopeFacts, type BesideGroup } from './besideRows'
 import { besideTheCost } from './besideTheCost'
 import { CAUTIONS } from './cautions'
 import { comparedFigures, type ComparedFigure } from './comparedFigures'
@@ -34,6 +35,8 @@ export interface ReportContent {
   readonly headline: Sentence
   readonly standfirst: string
   readonly note: string
+  /** That the totals are not like for like, or not fully declared; may be empty. */
+  readonly scopeCaution: string
   readonly currency: string
   readonly figures: readonly ComparedFigure[]
   readonly bars: readonly DifferenceBar[]
@@ -41,6 +44,10 @@ export interface ReportContent {
   readonly turning: readonly string[]
   /** Where each is the better floor beside the cost. */
   readonly better: Readonly<Record<SchemeKind, readonly ReportFact[]>>
+  /** What is compared beside the cost, and how it came about; empty for what was sent before it was compared. */
+  readonly beside: readonly BesideGroup[]
+  readonly besideWorkings: readonly ReportFact[]
+  readonly scopeFacts: readonly ReportFact[]
   readonly basis: readonly ReportFact[]
   readonly leftOut: readonly string[]
   readonly checked: readonly CheckedScheme[]
@@ -75,12 +82,16 @@ export function reportContent(frozen: FrozenComparison): ReportContent {
     headline: headline(frozen),
     standfirst: standfirst(frozen),
     note: frozen.note,
+    scopeCaution: scopeCaution(frozen),
     currency: frozen.edition.currency,
     figures: comparedFigures(frozen),
     bars: differenceBars(frozen, total),
     totalDifference: signedDecimalText(total.toFixed()),
     turning: turningSentences(frozen),
     better: { ribbed: besideTheCost(frozen, 'ribbed'), solid: besideTheCost(frozen, 'solid') },
+    beside: besideGroups(frozen),
+    besideWorkings: besideWorkings(frozen),
+    scopeFacts: scopeFacts(frozen),
     basis: basisFacts(frozen),
     leftOut: leftOut(frozen),
     checked: [checkedScheme(frozen, 'ribbed'), checkedScheme(frozen, 'solid')],

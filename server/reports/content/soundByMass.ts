@@ -1,6 +1,5 @@
-const GRAVITY = 9.81
-/** Above it the formula holds, kg/m². */
-const LEAST_MASS = 150
+import { airborneIndexDb } from '#shared/alsoCompared/soundByMass'
+import { GRAVITY_M_PER_S2 } from '#shared/units'
 
 /**
  * Weighted sound reduction index of a bare homogeneous floor by its mass, dB: Rw = 37.5 lg m′ − 42. No credit for cavities, a
@@ -10,7 +9,5 @@ const LEAST_MASS = 150
  * @returns null at 150 kg/m² and below
  */
 export function soundByMassDb(deadLoadKnPerM2: number): number | null {
-  const massKgPerM2 = (deadLoadKnPerM2 * 1000) / GRAVITY
-  if (massKgPerM2 <= LEAST_MASS) return null
-  return 37.5 * Math.log10(massKgPerM2) - 42
+  return airborneIndexDb((deadLoadKnPerM2 * 1000) / GRAVITY_M_PER_S2)
 }

@@ -1,3 +1,5 @@
+import type { AlsoCompared } from '#shared/alsoCompared/alsoCompared'
+import type { ScopeDifference } from '#shared/alsoCompared/scopeDifferences'
 import type { ApiIssue } from '#shared/contracts/apiError'
 import type { Appraisal, AppraisalFile } from '#shared/contracts/appraisal'
 import type { SizedPanel } from '#shared/sizing/sizedPanel'
@@ -15,6 +17,9 @@ export type AppraisalJob =
 export interface ComparedAppraisal {
   readonly appraisal: Appraisal
   readonly cutPanels: readonly (SizedPanel | null)[]
+  /** Beside `appraisal.schemes`. */
+  readonly alsoCompared: readonly AlsoCompared[]
+  readonly scopeDifferences: readonly ScopeDifference[]
 }
 
 /** How it ended. `outOfScope` names the field and what was expected, as `refused` does. */

@@ -61,7 +61,7 @@ function quiet(worker: Worker): void {
 function required(outcome: AppraisalOutcome): ComparedAppraisal {
   switch (outcome.kind) {
     case 'done':
-      return { appraisal: outcome.appraisal, cutPanels: [] }
+      return { appraisal: outcome.appraisal, cutPanels: [], alsoCompared: [], scopeDifferences: [] }
     case 'compared':
       return outcome
     case 'refused':

@@ -15,13 +15,13 @@ function appraiseStored(file: AppraisalFile): Appraisal {
 
 /** Every scheme, or the reasons why one of them has no result. */
 function appraiseCompared(file: AppraisalFile): AppraisalOutcome {
-  const { appraisal, sized, problems } = appraiseInFull(parseAppraisalFile(file))
+  const { appraisal, sized, problems, alsoCompared, scopeDifferences } = appraiseInFull(parseAppraisalFile(file))
   if (problems.length > 0) {
     const issues = problems.map(({ scheme, issue }) => ({ path: `schemes.${scheme}.${issue.path}`, message: issue.message }))
     return { kind: 'outOfScope', issues }
   }
   const cutPanels = sized.map(({ panels }) => (panels[0] ? { ...panels[0], layout: null } : null))
-  return { kind: 'compared', appraisal, cutPanels }
+  return { kind: 'compared', appraisal, cutPanels, alsoCompared, scopeDifferences }
 }
 
 /** Appraises, and says in plain data how it ended, so that the outcome can cross threads. */

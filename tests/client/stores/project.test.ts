@@ -13,6 +13,8 @@ const SHEET = `GET /api/projects/${projectId}`
 const empty: FullAppraisal = {
   appraisal: { format: 'bothways.appraisal-result/1', schemes: [], comparison: null },
   sized: [],
+  alsoCompared: [],
+  scopeDifferences: [],
   problems: [],
 }
 

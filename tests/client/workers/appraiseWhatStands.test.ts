@@ -9,6 +9,8 @@ const origin = { levels: [{ index: 1, panels: [0, 2, 3] }], schemes: [0, 1] }
 const empty: FullAppraisal = {
   appraisal: { format: 'bothways.appraisal-result/1', schemes: [], comparison: null },
   sized: [],
+  alsoCompared: [],
+  scopeDifferences: [],
   problems: [],
 }
 const marksOf = (file: AppraisalFile) => file.levels.flatMap(({ panels }) => panels.map(({ mark }) => mark))
