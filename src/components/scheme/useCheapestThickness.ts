@@ -22,7 +22,7 @@ export function useCheapestThickness() {
     running.value = true
     said.value = null
     try {
-      const asked = { ...file, schemes: [scheme], scope: [] }
+      const asked = { ...file, schemes: [scheme], scope: file.scope.filter((each) => each.scheme === scheme.mark) }
       const { by, thicknessMm, note } = await useStudies().ask('thickness', { file: asked, scheme: scheme.mark })
       if (by === 'cost') return withThickness(scheme, thicknessMm, note.slice(0, LONGEST_NOTE))
       said.value = note
