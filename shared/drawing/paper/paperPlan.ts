@@ -28,7 +28,7 @@ export interface PaperSubject {
 export const PAPER_BORDER_MM = { filed: 20, other: 10 } as const
 
 /** Room for legend, particulars and title block: width beside the plan, height below it, mm. */
-export const WORDS_MM = { beside: 74, below: 62 } as const
+export const WORDS_MM = { beside: 70, below: 62 } as const
 
 /** Clear room around the plan inside the frame, mm. */
 const CLEAR_MM = 3

@@ -17,18 +17,21 @@ export interface PaperContent extends OnPaper {
   readonly panels: readonly PlanPanel[]
 }
 
-/** The level, or one panel of it, that is put on paper, as the chosen scheme builds it. `panelMark` '' means the whole level. */
+/** Instead of a panel's mark; no mark may have a space. */
+export const WHOLE_LEVEL = 'whole level'
+
+/** The level, or one panel of it, that is put on paper, as the chosen scheme builds it. `panelMark` may be `WHOLE_LEVEL`. */
 export function usePaper(scheme: Ref<StoredScheme | null>) {
   const store = useProjectStore()
   const id = useId()
   const paper = ref<PaperName>('A4')
   const chosenLevel = ref<string | null>(null)
-  const chosenPanel = ref('')
+  const chosenPanel = ref(WHOLE_LEVEL)
   const levels = computed(() => store.levels.filter(({ panels }) => panels.length > 0))
   const level = computed(() => levels.value.find((each) => each.id === chosenLevel.value) ?? levels.value[0] ?? null)
   const levelId = computed({ get: () => level.value?.id ?? '', set: (value: string) => (chosenLevel.value = value) })
   const panelMark = computed({
-    get: () => (level.value?.panels.some(({ mark }) => mark === chosenPanel.value) ? chosenPanel.value : ''),
+    get: () => (level.value?.panels.some(({ mark }) => mark === chosenPanel.value) ? chosenPanel.value : WHOLE_LEVEL),
     set: (value: string) => (chosenPanel.value = value),
   })
   const sized = computed(() => store.full?.sized.find(({ mark }) => mark === scheme.value?.specification.mark) ?? null)
@@ -36,14 +39,14 @@ export function usePaper(scheme: Ref<StoredScheme | null>) {
   const content = computed<PaperContent | null>(() => {
     const [row, stored] = [scheme.value, level.value]
     if (row === null || stored === null || sized.value === null) return null
+    const isWhole = panelMark.value === WHOLE_LEVEL
     const all = planPanels(stored, sized.value, row.specification.kind)
-    const panels = panelMark.value === '' ? all : all.filter(({ panel }) => panel.mark === panelMark.value)
-    const title = `${panelMark.value === '' ? `Level ${stored.mark}` : `Panel ${panelMark.value} of level ${stored.mark}`}, ${row.specification.mark}`
+    const panels = isWhole ? all : all.filter(({ panel }) => panel.mark === panelMark.value)
+    const title = `${isWhole ? `Level ${stored.mark}` : `Panel ${panelMark.value} of level ${stored.mark}`}, ${row.specification.mark}`
     const trimmerMm = row.specification.kind === 'ribbed' ? row.specification.trimmerWidth : 0
-    const drawn =
-      panelMark.value === ''
-        ? levelOnPaper(id, panels, paper.value, title)
-        : panelOnPaper(id, panels[0]!, trimmerMm, paper.value, title)
+    const drawn = isWhole
+      ? levelOnPaper(id, panels, paper.value, title)
+      : panelOnPaper(id, panels[0]!, trimmerMm, paper.value, title)
     return { ...drawn, level: stored, scheme: row, panels }
   })
   return { paper, levels, level, levelId, panelMark, sized, content }

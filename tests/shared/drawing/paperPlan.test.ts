@@ -39,7 +39,7 @@ const widthMm = ({ attributes }: SvgNode) => {
 describe('paperPlan', () => {
   const margins = { left: 60, right: 14, top: 28, bottom: 90 }
   const room = ({ pageMm: [width, height], words }: ReturnType<typeof paperPlan>) =>
-    [width - 36 - (words === 'beside' ? 74 : 0), height - 26 - (words === 'below' ? 62 : 0)] as const
+    [width - 36 - (words === 'beside' ? 70 : 0), height - 26 - (words === 'below' ? 62 : 0)] as const
 
   it('fits the paper at the largest standard scale, whichever way the paper is turned', () => {
     const length = fc.double({ min: 500, max: 200_000, noNaN: true })
