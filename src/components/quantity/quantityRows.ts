@@ -24,8 +24,8 @@ export function printedDecimals({ unit }: { readonly unit: Unit }, { decimals }:
   return decimals[unit]
 }
 
-/** What tells a quantity from all others of its scheme. */
-export function quantityKey({ item, bands = [] }: Pick<Quantity, 'item' | 'bands'>): string {
+/** What tells a quantity, or a line of the bill, from all others of its scheme. */
+export function quantityKey({ item, bands = [] }: { readonly item: string; readonly bands?: Quantity['bands'] }): string {
   return [item, ...bands.map((band) => JSON.stringify(band))].join(' ')
 }
 
