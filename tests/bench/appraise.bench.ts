@@ -1,10 +1,12 @@
 /**
- * How long a level of 40 panels takes, both schemes, as a ratio to fixed arithmetic measured in the same run: a figure that can be
+ * How long a level of 40 panels takes, equal bays and mixed ones, both schemes, as a ratio to fixed arithmetic measured in the same run: a figure that can be
  * set against another machine's. Run: `npx tsx tests/bench/appraise.bench.ts`.
  */
 import { appraise } from '#shared/appraise'
 import { type AppraisalFileInput, appraisalFile } from '#shared/contracts/appraisal'
 import { parseAppraisalFile } from '#shared/parseAppraisalFile'
+import { sizeScheme } from '#shared/sizing/sizeScheme'
+import { mixedFile } from './mixedLevel'
 
 const ROUNDS = 7
 const COLUMNS = 8
@@ -59,21 +61,32 @@ function baseline(): number {
   return values.sort().reduce((sum, value) => sum + value, 0)
 }
 
+function timeMs(work: () => unknown): number {
+  const start = performance.now()
+  work()
+  return performance.now() - start
+}
+
 /** Middle of some timings, ms, after one round that is not counted. */
 function medianMs(work: () => unknown): number {
   work()
-  const timings = Array.from({ length: ROUNDS }, () => {
-    const start = performance.now()
-    work()
-    return performance.now() - start
-  })
+  const timings = Array.from({ length: ROUNDS }, () => timeMs(work))
   return timings.sort((a, b) => a - b)[Math.floor(ROUNDS / 2)]!
 }
 
 const forty = appraisalFile.parse(gridFile(COLUMNS, ROWS))
 const single = appraisalFile.parse(gridFile(1, 1))
+/** Levels of differing shapes, ribbed and solid, on each basis. */
+const SEED = 11
+const mixed = (['EN1992', 'BS8110'] as const).map((basis) => [basis, parseAppraisalFile(mixedFile(basis, SEED))] as const)
+const coldMs = timeMs(() => mixed.forEach(([, file]) => appraise(file)))
 const baselineMs = medianMs(baseline)
 const rows = [
+  ['appraise, 40 mixed panels, both bases, before anything has run', coldMs],
+  ...mixed.flatMap(([basis, file]) => [
+    [`appraise, 40 mixed panels, ${basis}`, medianMs(() => appraise(file))] as const,
+    ...file.schemes.map((scheme) => [`size ${scheme.kind}, ${basis}`, medianMs(() => sizeScheme(scheme, file))] as const),
+  ]),
   ['appraise, 40 panels', medianMs(() => appraise(forty))],
   ['appraise, 1 panel', medianMs(() => appraise(single))],
   ['read and check, 40 panels', medianMs(() => parseAppraisalFile(gridFile(COLUMNS, ROWS)))],
