@@ -5,6 +5,7 @@ import { AppError, STATUS } from '../errors'
 import type { Log } from '../log'
 import { recordEvent } from '../services/auditLog'
 import type { SignedIn } from '../services/session/signedIn'
+import { createAllowance } from '../services/allowance'
 import { isUnavailable } from '../services/unavailable'
 
 /** An error of the framework that says itself that it may be shown: a body that is no JSON, an address that cannot be decoded. */
@@ -25,14 +26,24 @@ export function toAppError(error: unknown): AppError {
   return fromFramework(error) ?? new AppError('internal')
 }
 
+/** Refusals of one caller that are recorded: more of them say nothing new, and would let anybody fill the table. */
+const RECORDED = { most: 100, windowMs: 3_600_000 }
+
 async function auditRefusal(db: EntityManager, request: Request, response: Response): Promise<void> {
   const who = response.locals['who'] as SignedIn | undefined
   const detail = { method: request.method, path: request.path.slice(0, 200) }
   await recordEvent(db, { event: 'request.refused', firmId: who?.firmId ?? null, personId: who?.personId ?? null, detail })
 }
 
+/** The person who is signed in, else the address. */
+function callerOf(request: Request, response: Response): string {
+  const who = response.locals['who'] as SignedIn | undefined
+  return who?.personId ?? `nobody at ${request.ip ?? 'unknown'}`
+}
+
 /** Answers every error in the one shape; logs whole what is ours, and records what was refused for want of rights. */
 export function errorHandler(db: EntityManager, log: Log): ErrorRequestHandler {
+  const isRecorded = createAllowance(RECORDED)
   return async (error: unknown, request, response, next) => {
     const known = toAppError(error)
     const requestId = String(request.id)
@@ -46,7 +57,7 @@ export function errorHandler(db: EntityManager, log: Log): ErrorRequestHandler {
       .status(STATUS[known.code])
       .set('Cache-Control', 'no-store')
       .json(known.issues === undefined ? body : { ...body, issues: known.issues })
-    if (known.code !== 'forbidden') return
+    if (known.code !== 'forbidden' || !isRecorded(callerOf(request, response))) return
     await auditRefusal(db, request, response).catch((cause: unknown) =>
       log.error({ err: cause, requestId }, 'refusal not recorded'),
     )

@@ -9,7 +9,7 @@ import { SessionEntity } from '../../server/entities/session/SessionEntity'
 import { issueAccessToken, tokenKey } from '../../server/services/session/accessToken'
 import { sha256 } from '../../server/services/sha256'
 import { session } from '../../shared/contracts/session'
-import { clientOf, makeFirm, makePerson, PASSWORD, sessionCookie, signedIn } from '../support/factories'
+import { makeFirm, makePerson, PASSWORD, sessionCookie, signedIn } from '../support/factories'
 import { TestClient, type Answer } from '../support/testClient'
 import { openTestServer, type TestServer } from '../support/testServer'
 
@@ -352,13 +352,5 @@ describe('a change from another site', () => {
     const cookie = await sessionCookie(server, (await signedIn(server, 'admin')).person)
     const answer = await new TestClient(server.app, cookie).call('post', '/api/session/refresh')
     expect(answer.status).toBe(415)
-  })
-})
-
-describe('refusals for want of rights', () => {
-  it('are recorded with who asked for what', async () => {
-    const { person } = await signedIn(server, 'client')
-    await (await clientOf(server, person)).get('/api/people')
-    await expect.poll(() => server.db.manager.countBy(AuditEntity, { personId: person.id, event: 'request.refused' })).toBe(1)
   })
 })
