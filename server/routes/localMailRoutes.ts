@@ -20,6 +20,8 @@ const PAGE_POLICY = [
 const MAIL_POLICY = "sandbox; default-src 'none'; style-src 'unsafe-inline'; img-src data:; frame-ancestors 'self'"
 const FILE_POLICY = "sandbox; default-src 'none'"
 
+const LOOPBACK = /^(127\.|::1$|::ffff:127\.)/
+
 const mailId = z.string().regex(/^\d{13}-[0-9a-f-]{36}$/, 'expected the id of a mail')
 const place = z.string().regex(/^\d{1,3}$/, 'expected the place of an attachment')
 const weight = z.enum(['300', '400', '600'])
@@ -45,15 +47,16 @@ function sendPage(response: Response, page: string): void {
 }
 
 /**
- * `/mail` of the local set-up: shows what arrived over SMTP, and nothing else. Answers under our own host name only, so that no
- * other site's name can be pointed at it to read the mail.
+ * `/mail` of the local set-up: shows what arrived over SMTP, and nothing else. Answers this machine only, since a mail may carry a
+ * link that opens an account, and under our own host name only, so that no other site's name can be pointed at it to read the mail.
  * @param origin - scheme, host and port by which browsers reach us
  */
 export function localMailRoutes(inbox: LocalInbox, origin: string): Router {
   const ownHost = new URL(origin).hostname
   const router = Router()
     .use((request, _response, next) => {
-      if (request.hostname !== ownHost) throw new AppError('not_found')
+      const isOurs = LOOPBACK.test(request.socket.remoteAddress ?? '')
+      if (!isOurs || request.hostname !== ownHost) throw new AppError('not_found')
       next()
     })
     .get('/', async (_request, response) => {

@@ -92,6 +92,18 @@ describe('the local inbox', () => {
     expect((await get('/mail').set('Host', '127.0.0.1:4280')).status).toBe(200)
   })
 
+  it('answers this machine only, whatever host name is asked for', async () => {
+    const reached = express()
+    let from = '192.0.2.7'
+    reached.use((asked, _response, next) => {
+      Object.defineProperty(asked.socket, 'remoteAddress', { get: () => from, configurable: true })
+      next()
+    }, app)
+    expect((await request(reached).get('/mail').set('Host', '127.0.0.1:4280')).status).toBe(404)
+    from = '::ffff:127.0.0.1'
+    expect((await request(reached).get('/mail').set('Host', '127.0.0.1:4280')).status).toBe(200)
+  })
+
   it('serves its own style sheet and fonts', async () => {
     expect((await get('/mail/style.css')).headers['content-type']).toMatch(/^text\/css/)
     const font = await get('/mail/fonts/400.woff2').buffer()
