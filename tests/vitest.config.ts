@@ -10,6 +10,8 @@ export default defineConfig({
   plugins: [vue()],
   test: {
     setupFiles: ['tests/support/seed.ts'],
+    // a busy machine may take its time over what an idle one does at once
+    expect: { poll: { timeout: 30_000 } },
     projects: [
       {
         extends: true,
