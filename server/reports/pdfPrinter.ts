@@ -22,8 +22,14 @@ const FLAGS = [
   '--disable-component-update',
   '--disable-sync',
 ]
+/** What the browser needs of our surroundings: not the secrets in them. */
+const PASSED_ON = ['PATH', 'HOME', 'TMPDIR', 'LANG', 'LC_ALL', 'XDG_CACHE_HOME', 'XDG_CONFIG_HOME', 'FONTCONFIG_FILE']
 const MOST_WAITING = 50
 const TIME_MS = 30_000
+
+function surroundings(): Record<string, string> {
+  return Object.fromEntries(PASSED_ON.flatMap((name) => (process.env[name] === undefined ? [] : [[name, process.env[name]]])))
+}
 
 async function printPage(browser: Browser, page: string): Promise<Buffer> {
   const context = await browser.newContext({ javaScriptEnabled: false, offline: true, serviceWorkers: 'block' })
@@ -53,6 +59,7 @@ export function createPdfPrinter(chromiumPath: string, mostWaiting: number = MOS
     starting = chromium.launch({
       executablePath: chromiumPath,
       args: FLAGS,
+      env: surroundings(),
       timeout: TIME_MS,
       handleSIGINT: false,
       handleSIGTERM: false,

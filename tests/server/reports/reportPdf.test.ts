@@ -1,5 +1,5 @@
 import { execFileSync } from 'node:child_process'
-import { mkdtempSync, rmSync, writeFileSync } from 'node:fs'
+import { mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import { createServer, type Server } from 'node:http'
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
@@ -118,6 +118,21 @@ describe('the printer', { timeout: 120_000 }, () => {
     await small.close()
     const codes = answers.map((answer) => (answer.status === 'rejected' ? (answer.reason as { code: string }).code : 'printed'))
     expect(codes).toEqual(['printed', 'printed', 'printed', 'limited', 'limited'])
+  })
+
+  it('gives the browser none of the secrets in our surroundings', async () => {
+    const [seen, script] = [join(folder, 'seen.txt'), join(folder, 'chromium.sh')]
+    writeFileSync(script, `#!/bin/sh\nenv > '${seen}'\nexec /usr/bin/chromium "$@"\n`, { mode: 0o700 })
+    process.env['SESSION_SECRET'] = 'never to be passed on'
+    const wrapped = createPdfPrinter(script)
+    await wrapped.print('<!doctype html><title>q</title>x')
+    await wrapped.close()
+    delete process.env['SESSION_SECRET']
+    const names = readFileSync(seen, 'utf8')
+      .split('\n')
+      .map((text) => text.split('=')[0])
+    expect(names).toContain('PATH')
+    expect(names.filter((name) => /SECRET|DATABASE|SMTP|VITEST/.test(name!))).toEqual([])
   })
 
   it('fails without a browser, and says so instead of hanging', async () => {
