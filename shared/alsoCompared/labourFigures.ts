@@ -2,7 +2,7 @@ import type { LabourFactors } from '../contracts/factors'
 import { figure } from '../sizing/figure'
 import type { SchemeMeasures } from '../takeoff/schemeMeasures'
 import type { AlsoFigure, FigureKey } from './alsoFigure'
-import { labourParts } from './labourParts'
+import { labourParts, labourSources } from './labourParts'
 import { strikingTimes } from './strikingTimes'
 
 const DAYS_PER_WEEK = 7
@@ -20,10 +20,14 @@ export function labourFigures(measures: SchemeMeasures, labour: LabourFactors): 
   const hours = parts.reduce((sum, part) => sum + part.hours, 0)
   const { leastGang, hoursPerDay } = labour
   const days = hours / (leastGang * hoursPerDay)
-  const sources = [...new Set(parts.map(({ source }) => source))].join('; ')
   const gang = `${figure(hours)} h / (${leastGang} people × ${hoursPerDay} h) = ${figure(days)} days`
   return [
-    figureOf('labourHours', hours, `${parts.map(({ working }) => working).join('; ')}; together ${figure(hours)} h`, sources),
+    figureOf(
+      'labourHours',
+      hours,
+      `${parts.map(({ working }) => working).join('; ')}; together ${figure(hours)} h`,
+      labourSources(labour),
+    ),
     figureOf('gangDays', days, gang, 'Least gang and hours a day by the firm'),
     ...timeFigures(measures, labour, days),
   ]

@@ -7,7 +7,6 @@ export interface LabourPart {
   readonly hours: number
   /** As 'concrete 81.2 m³ × 1.3 h/m³ = 105.6 h'. */
   readonly working: string
-  readonly source: string
 }
 
 type Band = 'barsTo8' | 'barsTo12' | 'barsTo20' | 'barsOver20'
@@ -35,17 +34,41 @@ export function labourParts(measures: SchemeMeasures, labour: LabourFactors): La
   ].filter(({ hours }) => hours > 0)
 }
 
+const EACH: readonly {
+  readonly key: Exclude<keyof LabourFactors, Band | NumberKey>
+  readonly name: string
+  readonly unit: string
+}[] = [
+  { key: 'concrete', name: 'concrete', unit: 'h/m³' },
+  { key: 'mesh', name: 'mesh', unit: 'h/m²' },
+  { key: 'blocks', name: 'blocks', unit: 'nr/h' },
+  { key: 'soffit', name: 'soffit formwork', unit: 'h/m²' },
+  { key: 'edge', name: 'edge formwork', unit: 'h/m' },
+]
+type NumberKey = 'leastGang' | 'hoursPerDay' | 'daysPerWeek' | 'airTemperature'
+
+/** Every output that the firm works by, used here or not, under where it comes from. */
+export function labourSources(labour: LabourFactors): string {
+  const outputs = [
+    ...EACH.map(({ key, name, unit }) => ({ ...labour[key], text: `${name} ${labour[key].value} ${unit}` })),
+    ...BANDS.map(({ band, name }) => ({ ...labour[band], text: `${name}: ${labour[band].value} kg/h` })),
+  ]
+  const sources = [...new Set(outputs.map(({ source }) => source))]
+  const of = (source: string) => outputs.filter((output) => output.source === source).map(({ text }) => text)
+  return sources.map((source) => `${of(source).join(', ')} (${source})`).join('; ')
+}
+
 function massOf({ barsKg }: SchemeMeasures, band: Band): number {
   const bandOf = (diameter: number) => BANDS.find(({ greatest }) => diameter <= greatest)!.band
   return Object.entries(barsKg).reduce((sum, [diameter, kg]) => sum + (bandOf(Number(diameter)) === band ? kg : 0), 0)
 }
 
-function each(name: string, quantity: number, unit: string, { value, source }: LabourOutput): LabourPart {
+function each(name: string, quantity: number, unit: string, { value }: LabourOutput): LabourPart {
   const hours = quantity * value
-  return { hours, working: `${name} ${figure(quantity, 2)} ${unit} × ${value} h/${unit} = ${figure(hours)} h`, source }
+  return { hours, working: `${name} ${figure(quantity, 2)} ${unit} × ${value} h/${unit} = ${figure(hours)} h` }
 }
 
-function perHour(name: string, quantity: number, unit: string, { value, source }: LabourOutput): LabourPart {
+function perHour(name: string, quantity: number, unit: string, { value }: LabourOutput): LabourPart {
   const hours = quantity / value
-  return { hours, working: `${name} ${figure(quantity, 0)} ${unit} / ${value} ${unit}/h = ${figure(hours)} h`, source }
+  return { hours, working: `${name} ${figure(quantity, 0)} ${unit} / ${value} ${unit}/h = ${figure(hours)} h` }
 }

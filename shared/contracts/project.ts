@@ -64,6 +64,8 @@ export const projectSummary = z.strictObject({
   edition: edition.pick({ region: true, number: true, currency: true }).nullable(),
   /** Totals as appraised at the last save; null where a scheme cannot be priced yet. */
   totals: z.array(z.strictObject({ mark, kind: z.enum(['ribbed', 'solid']), total: z.string().nullable() })),
+  /** In what the first ribbed and the first solid total are not like for like; empty where nothing is known to differ. */
+  unequalScope: z.string(),
   updatedAt: moment,
 })
 export type ProjectSummary = z.infer<typeof projectSummary>

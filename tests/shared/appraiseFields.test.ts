@@ -84,10 +84,10 @@ function otherThan(path: Path, value: unknown): unknown {
 /** The result and what is stated with it as text, or 'refused'. */
 function outcomeOf(file: unknown): string {
   try {
-    const { appraisal, sized, problems } = appraiseInFull(parseAppraisalFile(file))
+    const { appraisal, sized, problems, alsoCompared, scopeDifferences } = appraiseInFull(parseAppraisalFile(file))
     return problems.length > 0
       ? 'refused'
-      : JSON.stringify([appraisal, sized.map(({ panels }) => panels.map(({ flags }) => flags))])
+      : JSON.stringify([appraisal, alsoCompared, scopeDifferences, sized.map(({ panels }) => panels.map(({ flags }) => flags))])
   } catch (error) {
     if (error instanceof AppraisalRefusedError || error instanceof OutOfScopeError) return 'refused'
     throw error

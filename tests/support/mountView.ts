@@ -22,6 +22,7 @@ const NAMES = [
   'schemes',
   'layout',
   'bars',
+  'scope',
   'quantities',
   'bill',
   'compare',

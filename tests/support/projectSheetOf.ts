@@ -84,6 +84,7 @@ export function aSummary(given: Partial<ProjectSummary> = {}): ProjectSummary {
       { mark: 'R1', kind: 'ribbed', total: '80030.08' },
       { mark: 'S1', kind: 'solid', total: '84134.67' },
     ],
+    unequalScope: '',
     updatedAt: '2026-11-30T10:00:00.000Z',
     ...given,
   }

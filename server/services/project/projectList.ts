@@ -1,3 +1,4 @@
+import { notLikeForLike, scopeDifferences } from '#shared/alsoCompared/scopeDifferences'
 import type { ProjectSummary } from '#shared/contracts/project'
 import { In, type EntityManager } from 'typeorm'
 import { LevelEntity } from '../../entities/project/LevelEntity'
@@ -45,6 +46,12 @@ async function editionsOf(db: EntityManager, firmId: string, rows: readonly Proj
   )
 }
 
+/** In what the two totals that the list sets against each other are not like for like. */
+function unequalScope(scope: ProjectEntity['scope'], totals: ProjectSummary['totals']): string {
+  const [ribbed, solid] = (['ribbed', 'solid'] as const).map((kind) => totals.find((total) => total.kind === kind)?.mark)
+  return ribbed && solid ? notLikeForLike(scopeDifferences(scope ?? [], [ribbed, solid])) : ''
+}
+
 /**
  * Lines of the projects the reader may know of, newest change first, at most 500: all of the firm for surveyors and estimators, those
  * shared with them for developers and engineers. Engineers see no money.
@@ -60,7 +67,7 @@ export async function listProjects(db: EntityManager, pool: AppraisalPool, who: 
   const totals = seesMoney ? await currentTotals(db, pool, rows) : new Map<string, ProjectSummary['totals']>()
   const counts = await countsOf(db, firmId)
   const editions = await editionsOf(db, firmId, rows)
-  return rows.map(({ id, name, reference, place, editionId, updatedAt }) => ({
+  return rows.map(({ id, name, reference, place, editionId, scope, updatedAt }) => ({
     id,
     name,
     reference,
@@ -70,6 +77,7 @@ export async function listProjects(db: EntityManager, pool: AppraisalPool, who: 
     canOpen: hasRole(who, 'surveyor') || shared.has(id),
     edition: (seesMoney && editionId !== null && editions.get(editionId)) || null,
     totals: totals.get(id) ?? [],
+    unequalScope: unequalScope(scope, totals.get(id) ?? []),
     updatedAt: updatedAt.toISOString(),
   }))
 }

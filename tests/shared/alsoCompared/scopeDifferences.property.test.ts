@@ -19,7 +19,7 @@ const states = fc.array(
 /** Standings of R1 and S1, one pair of states for each entry of the list; null: nothing declared. */
 function standingsOf(pairs: readonly (readonly [State, State])[]): ScopeStanding[] {
   return SCOPE_ENTRIES.flatMap((entry, index) =>
-    (['R1', 'S1'] as const).flatMap((scheme, side) => {
+    (['R1', 'S1'] as const).flatMap((scheme, side): ScopeStanding[] => {
       const state = pairs[index]![side]
       return state === null ? [] : [{ scheme, entry, state, note: '' }]
     }),

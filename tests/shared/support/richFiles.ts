@@ -63,6 +63,30 @@ const rates: Rates = {
   markups: { preliminariesPercent: '11', contingencyPercent: '5', taxPercent: '7.5' },
 }
 
+const invented = { source: 'invented', date: '2026-09-01' }
+
+/** Something of every kind that a same-scope list and carbon factors can say. */
+const declared: Pick<AppraisalFileInput, 'scope' | 'factors'> = {
+  scope: [
+    { scheme: 'R1', entry: 'ceiling', state: 'priced', rate: '7.2', per: 'grossArea', note: 'plaster' },
+    { scheme: 'S1', entry: 'ceiling', state: 'leftOut', note: 'painted' },
+    { scheme: 'R1', entry: 'groutLost', state: 'priced', rate: '0.06', per: 'blocks' },
+    { scheme: 'R1', entry: 'ribbedConcrete', state: 'priced', rate: '9.8', per: 'concrete' },
+    { scheme: 'S1', entry: 'tiesChairsLinks', state: 'priced', rate: '31', per: 'steel' },
+    { scheme: 'R1', entry: 'hoisting', state: 'priced', rate: '1200', per: 'sum' },
+    { scheme: 'S1', entry: 'hoisting', state: 'inRates', note: 'crane is there' },
+  ],
+  factors: {
+    carbon: [
+      { material: 'concrete', modules: 'A1-A3', value: 250, unit: 'm³', wastePercent: 3, ...invented },
+      { material: 'bars', modules: 'A1-A3', value: 1100, unit: 't', wastePercent: 4, ...invented },
+      { material: 'mesh', modules: 'A1-A3', value: 3, unit: 'm²', ...invented },
+      { material: 'blocks', modules: 'A4', value: 0.2, unit: 'nr', ...invented },
+      { material: 'formwork', modules: 'A1-A3', value: 9, unit: 'm²', uses: 8, ...invented },
+    ],
+  },
+}
+
 const block = { length: 200, width: 400, height: 200, mass: 12.5 }
 const loads = {
   imposedLoad: 2,
@@ -115,6 +139,7 @@ export const computedFile: AppraisalFileInput = {
     { mark: 'S1', kind: 'solid', thickness: 'least', bars: 'computed' },
   ],
   rates,
+  ...declared,
   measurement: 'nrm2',
 }
 
