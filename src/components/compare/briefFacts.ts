@@ -1,6 +1,7 @@
 import type { Brief, SchemeResult } from '#shared/contracts/appraisal'
 import type { StoredLevel } from '#shared/contracts/project'
 import type { ProjectReading } from '#shared/contracts/projectReading'
+import { basisWithNote } from '#shared/sizing/basisName'
 import { formatDay } from '../base/formatMoment'
 import { checkInWords } from '../check/checkInWords'
 import type { Pair } from './phrase'
@@ -30,7 +31,7 @@ export function briefFacts(
     },
     { label: 'Fire, cover', value: `${brief.fireMinutes === 0 ? 'none asked' : `${brief.fireMinutes} min`}, ${brief.cover} mm` },
     { label: 'Concrete and bars', value: strength },
-    { label: 'Sized by', value: brief.basis === 'EN1992' ? 'EN 1992-1-1' : 'BS 8110-1:1997, withdrawn in 2010' },
+    { label: 'Sized by', value: basisWithNote(brief) },
     {
       label: 'Rates',
       value: edition ? `${edition.region}, edition ${edition.number}, of ${formatDay(edition.baseDate)}` : 'no edition chosen',
