@@ -141,6 +141,13 @@ describe('any wants', () => {
     )
   })
 
+  it('count no piece more often than it is wanted in the linear program', () => {
+    // 5 and 6 do not fit one bar of 10: two bars; if 5 could be cut twice from a bar, half a bar would seem enough for it
+    const plan = cuttingPlan(wantedOf([5, 6]), 10)
+    expect(plan.linearBound).toBeCloseTo(2, 9)
+    expect([plan.used, plan.lengthBound, plan.proof]).toEqual([2, 2, 'bound'])
+  })
+
   it('take no bar where nothing is wanted', () => {
     expect(cuttingPlan([{ lengthMm: 500, count: 0 }], 12_000)).toMatchObject({ used: 0, patterns: [], wasteShare: 0 })
   })
