@@ -4,11 +4,6 @@ import { dayText, figureText, listText } from '../figureText'
 import type { FrozenComparison } from '../frozenComparison'
 import type { ReportFact } from './reportFact'
 
-/** The code that sized the floors, as the report names it. */
-export function basisName({ basis }: Brief): string {
-  return basis === 'EN1992' ? 'EN 1992-1-1' : 'BS 8110-1:1997'
-}
-
 function basisText(brief: Brief): string {
   const values = nationalValuesText(brief)
   if (brief.basis === 'EN1992') return `EN 1992-1-1 and EN 1992-1-2 with ${values}.`

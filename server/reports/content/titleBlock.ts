@@ -1,6 +1,6 @@
+import { basisName } from '#shared/sizing/basisName'
 import { dayText } from '../figureText'
 import type { FrozenComparison } from '../frozenComparison'
-import { basisName } from './basisFacts'
 import type { ReportFact } from './reportFact'
 
 /** The fields in which a drawing sheet ends. */

@@ -1,5 +1,6 @@
 import type { StoredLevel, StoredScheme } from '#shared/contracts/project'
 import { planPanels } from '#shared/drawing/planDrawing'
+import { basisName } from '#shared/sizing/basisName'
 import type { Ref } from 'vue'
 import { computed, ref, shallowRef, watch } from 'vue'
 import { useProjectStore } from '../../stores/project'
@@ -18,7 +19,7 @@ export function useDrawnScheme(level: Ref<StoredLevel | null>) {
   const ribbed = computed(() =>
     store.schemes.flatMap(({ specification }) => (specification.kind === 'ribbed' ? [specification] : [])),
   )
-  const basis = computed(() => (store.project?.brief.basis === 'BS8110' ? 'BS 8110-1:1997' : 'EN 1992-1-1'))
+  const basis = computed(() => (store.project === null ? '' : basisName(store.project.brief)))
   const mark = computed(() => scheme.value?.specification.mark)
   const result = computed(() => store.full?.appraisal.schemes.find((each) => each.mark === mark.value) ?? null)
   const sized = computed(() => store.full?.sized.find((each) => each.mark === mark.value) ?? null)
