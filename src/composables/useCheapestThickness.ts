@@ -1,8 +1,13 @@
 import type { SolidScheme } from '#shared/contracts/appraisal'
 import { computed, ref } from 'vue'
-import { useProjectStore } from '../../stores/project'
-import { StudyRefused, useStudies } from '../../workers/studies'
-import { withThickness } from './withThickness'
+import { useProjectStore } from '../stores/project'
+import { StudyRefused, useStudies } from '../workers/studies'
+
+/** A thickness for a scheme, and how it was found. */
+export interface FoundThickness {
+  readonly thickness: SolidScheme['thickness']
+  readonly note?: string
+}
 
 /** Longest note a thickness may have, by the contract. */
 const LONGEST_NOTE = 400
@@ -15,8 +20,8 @@ export function useCheapestThickness() {
   const said = ref<string | null>(null)
   const offReason = computed(() => (store.file === null ? 'no floor stands yet' : null))
 
-  /** The scheme at its cheapest thickness; as it is where it cannot be priced; null where no thickness was found. */
-  async function withCheapest(scheme: SolidScheme): Promise<SolidScheme | null> {
+  /** The cheapest thickness; the least where it cannot be priced; null where none was found. */
+  async function find(scheme: SolidScheme): Promise<FoundThickness | null> {
     const { file } = store
     if (file === null) return null
     running.value = true
@@ -24,9 +29,9 @@ export function useCheapestThickness() {
     try {
       const asked = { ...file, schemes: [scheme], scope: file.scope.filter((each) => each.scheme === scheme.mark) }
       const { by, thicknessMm, note } = await useStudies().ask('thickness', { file: asked, scheme: scheme.mark })
-      if (by === 'cost') return withThickness(scheme, thicknessMm, note.slice(0, LONGEST_NOTE))
+      if (by === 'cost') return { thickness: thicknessMm, note: note.slice(0, LONGEST_NOTE) }
       said.value = note
-      return withThickness(scheme, 'least')
+      return { thickness: 'least' }
     } catch (cause) {
       if (!(cause instanceof StudyRefused)) throw cause
       said.value = cause.message
@@ -36,5 +41,5 @@ export function useCheapestThickness() {
     }
   }
 
-  return { running, said, offReason, withCheapest }
+  return { running, said, offReason, find }
 }
