@@ -62,7 +62,7 @@ function ribbedCallouts(subject: SectionSubject, frame: SectionFrame): SectionCa
       targetX: x(firstRib + ribWidth + block.width / 2),
       targetY: heightPx(frame, block.height - 10),
       title: `${material(blockMaterial)} block ${block.width} × ${block.length} × ${block.height}`,
-      note: `${block.mass} kg, ${block.length} along the rib, ends closed`,
+      note: `${block.mass} kg, ends closed`,
     },
     {
       targetX: x((lastRib === firstRib ? firstRib : firstRib + Math.round((lastRib - firstRib) / spacing) * spacing) + bar.xMm),

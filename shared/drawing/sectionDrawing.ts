@@ -50,7 +50,7 @@ export function sectionThumbnail(
  */
 export function sectionDrawing(subject: SectionSubject, { id, widthPx }: { id: string; widthPx: number }): SvgNode {
   const hasLeaders = widthPx >= LEADERS_FROM_PX
-  const leftPx = subject.scheme.kind === 'ribbed' ? 84 : 48
+  const leftPx = subject.scheme.kind === 'ribbed' ? 98 : 48
   const sectionWidth = widthPx - leftPx - 12
   const depth = drawnDepthMm(subject)
   const pxPerMm = Math.min(sectionWidth / lengthToShowMm(subject, hasLeaders), MOST_DEPTH_PX / depth)

@@ -67,6 +67,31 @@ function textsOf(drawing: SvgNode): string[] {
     .map(({ children }) => children.join(''))
 }
 
+interface TextBox {
+  readonly words: string
+  readonly left: number
+  readonly right: number
+  readonly top: number
+  readonly bottom: number
+}
+
+/** Where the words of a drawing stand, px, by the mean advance of the type they are set in. */
+function textBoxesOf(drawing: SvgNode): TextBox[] {
+  return nodesOf(drawing)
+    .filter(({ tag }) => tag === 'text')
+    .map((node) => {
+      const words = node.children.join('')
+      const size = number(node, 'font-size')
+      const length = words.length * size * 0.47
+      const [x, y] = [number(node, 'x'), number(node, 'y')]
+      const before = { middle: length / 2, end: length, start: 0 }[String(node.attributes['text-anchor'] ?? 'start')]!
+      const [ascent, descent] = [size * 0.72, size * 0.2]
+      return node.attributes['transform'] === undefined
+        ? { words, left: x - before, right: x - before + length, top: y - ascent, bottom: y + descent }
+        : { words, left: x - ascent, right: x + descent, top: y - before, bottom: y - before + length }
+    })
+}
+
 const number = (node: SvgNode | undefined, name: string) => Number(node?.attributes[name])
 const shell = (block: SvgNode | undefined) => block?.children[0] as SvgNode
 
@@ -116,6 +141,27 @@ describe('the cross-section of a ribbed scheme', () => {
         'link H8, cover 25',
       ]),
     )
+  })
+
+  it.each([
+    ['wide blocks', 600, 200, 100, 50],
+    ['a deep floor', 600, 450, 100, 50],
+    ['very wide blocks', 1200, 300, 300, 150],
+    ['narrow ribs without a topping', 150, 100, 50, 0],
+    ['a shallow floor of wide ribs', 200, 80, 400, 40],
+  ])('keeps words and figures apart and on the drawing: %s', (_, width, height, ribWidth, topping) => {
+    const scheme = { ...ribbed, block: { ...ribbed.block, width, height }, ribWidth, topping }
+    const ribBars = [
+      { diameter: 12, count: 2 },
+      { diameter: 16, count: 1 },
+    ]
+    const subject = { scheme, depthMm: height + topping, reinforcement: { ...unknownReinforcement(25), ribBars } }
+    for (const widthPx of [328, 520, 640, 900, 1200]) {
+      const boxes = textBoxesOf(sectionDrawing(subject, { id: 'r', widthPx }))
+      const isApart = (a: TextBox, b: TextBox) => a.right <= b.left || b.right <= a.left || a.bottom <= b.top || b.bottom <= a.top
+      expect(boxes.filter((box, i) => boxes.slice(i + 1).some((other) => !isApart(box, other)))).toEqual([])
+      expect(boxes.filter(({ left, right }) => left < 0 || right > widthPx)).toEqual([])
+    }
   })
 
   it('draws no bar before the bars are known', () => {
