@@ -34,6 +34,12 @@ function sidesOf(ring: readonly XY[]): Side[] {
 
 const moved = ([x, y]: XY, [nx, ny]: XY, by: number): XY => [x + nx * by, y + ny * by]
 
+function distanceTo({ a, b, length }: Side, [x, y]: XY): number {
+  const share = ((x - a[0]) * (b[0] - a[0]) + (y - a[1]) * (b[1] - a[1])) / length ** 2
+  const held = Math.min(1, Math.max(0, share))
+  return Math.hypot(x - a[0] - held * (b[0] - a[0]), y - a[1] - held * (b[1] - a[1]))
+}
+
 /** Corner where two sides moved to the left by d1 and d2 meet. */
 function mitre(before: Side, after: Side, d1: number, d2: number): XY {
   const [p, q] = [moved(after.a, before.normal, d1), moved(after.a, after.normal, d2)]
@@ -67,6 +73,8 @@ export interface Oracle {
   readonly isClear: (point: XY) => boolean
   readonly isInGrownVoid: (point: XY) => boolean
   readonly isInVoid: (point: XY) => boolean
+  /** Number of the outline's edge whose support a point lies on, or beyond which it lies. */
+  readonly edgeAt: (point: XY) => number
   /** Corners of everything the oracle looks at: where lengths of rows can change. */
   readonly corners: readonly XY[]
 }
@@ -82,7 +90,15 @@ export function oracleOf(panel: Panel, trimmerWidthMm: number): Oracle {
     ),
   )
   const isInVoid = (point: XY) => panel.voids.some((ring) => isInside(point, ring))
+  const sides = sidesOf(panel.outline)
+  const edgeAt = (point: XY) => {
+    const on = isInside(point, panel.outline) ? strips.findIndex((ring) => isInside(point, ring)) : -1
+    if (on >= 0) return on
+    const away = sides.map((side) => distanceTo(side, point))
+    return away.indexOf(Math.min(...away))
+  }
   return {
+    edgeAt,
     isClear: (point) => isInside(point, panel.outline) && !strips.some((ring) => isInside(point, ring)),
     isInVoid,
     isInGrownVoid: (point) => isInVoid(point) || trimmers.some((ring) => isInside(point, ring)),
