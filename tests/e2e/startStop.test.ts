@@ -56,7 +56,7 @@ describe('npm start', () => {
     expect(await isReachable(product.address)).toBe(true)
     await product.stop()
     expect(await isReachable(product.address)).toBe(false)
-    expect(await untilGone(5000)).toEqual([])
+    expect(await untilGone(30_000)).toEqual([])
   })
 
   it('keeps passwords and data at a second start, which skips what is done', async () => {
@@ -79,7 +79,7 @@ describe('npm start', () => {
     expect(await isReachable(`http://127.0.0.1:${port}`)).toBe(true)
     npm.kill('SIGKILL')
     await once(npm, 'exit')
-    expect(await untilGone(15_000)).toEqual([])
+    expect(await untilGone(30_000)).toEqual([])
   })
 
   it('says which port is taken and how to choose another', async () => {
