@@ -1,6 +1,6 @@
 import type { Quantity, SchemeResult, Unit } from '#shared/contracts/appraisal'
 import { itemCode } from '#shared/contracts/appraisal'
-import { compositeItem } from '#shared/contracts/measurement'
+import { type Band, compositeItem } from '#shared/contracts/measurement'
 import type { MeasurementRules } from '#shared/takeoff/measurementRules'
 import { formatQuantity } from '../base/formatQuantity'
 import type { Pair } from '../compare/phrase'
@@ -37,9 +37,18 @@ export function quantityRows(
   const all = [...ribbed.quantities, ...solid.quantities]
   const rows = [...compositeItem.options, ...itemCode.options].flatMap((item) => {
     const ofItem = new Map(all.filter((quantity) => quantity.item === item).map((quantity) => [quantityKey(quantity), quantity]))
-    return [...ofItem].map(([key, quantity]) => rowOf(key, quantity, { ribbed, solid }, rules))
+    return [...ofItem]
+      .sort(([, a], [, b]) => byBands(a, b))
+      .map(([key, quantity]) => rowOf(key, quantity, { ribbed, solid }, rules))
   })
   return byWorkSection(rows)
+}
+
+/** The lower stage or depth first. */
+function byBands({ bands: first = [] }: Quantity, { bands: second = [] }: Quantity): number {
+  const startOf = (band: Band) => (band.of === 'overallDepth' ? band.mm : band.over)
+  const at = first.findIndex((band, index) => startOf(band) !== startOf(second[index]!))
+  return at < 0 ? 0 : startOf(first[at]!) - startOf(second[at]!)
 }
 
 function rowOf(key: string, one: Quantity, { ribbed, solid }: Pair<SchemeResult>, rules: MeasurementRules): QuantityRow {
