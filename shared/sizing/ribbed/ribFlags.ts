@@ -57,8 +57,9 @@ function rowFlags({ panel: { rows } }: RibTask): string[] {
   ]
 }
 
-function crossRibFlag({ panel: { layout }, context: { basis, section } }: RibTask): string[] {
+function crossRibFlag({ panel: { layout }, scheme, context: { basis, section } }: RibTask): string[] {
   const most = basis.crossRibSpacingMm(section.heightMm)
+  if (!most && scheme.crossRibs === 'rule') return [`cross ribs by rule: ${basis.title} has none, so no cross rib is laid`]
   const longest = Math.max(0, ...layout.rows.flatMap(({ runs }) => runs.map(({ start, end }) => end - start)))
   if (!most || isMet(longest, most.value)) return []
   return [
