@@ -20,7 +20,7 @@ const states = fc.array(
 function standingsOf(pairs: readonly (readonly [State, State])[]): ScopeStanding[] {
   return SCOPE_ENTRIES.flatMap((entry, index) =>
     (['R1', 'S1'] as const).flatMap((scheme, side): ScopeStanding[] => {
-      const state = pairs[index]![side]
+      const state = pairs[index]![side] ?? null
       return state === null ? [] : [{ scheme, entry, state, note: '' }]
     }),
   )

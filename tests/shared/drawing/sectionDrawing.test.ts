@@ -154,7 +154,7 @@ describe('the cross-section of a ribbed scheme', () => {
     const ribBars = [
       { diameter: 12, count: 2 },
       { diameter: 16, count: 1 },
-    ]
+    ] as const
     const subject = { scheme, depthMm: height + topping, reinforcement: { ...unknownReinforcement(25), ribBars } }
     for (const widthPx of [328, 520, 640, 900, 1200]) {
       const boxes = textBoxesOf(sectionDrawing(subject, { id: 'r', widthPx }))
