@@ -63,15 +63,10 @@ describe('the command', () => {
       ['levels.0.repeat'],
     ],
     [
-      'a code of practice that is not built',
-      [
-        write(
-          'basis.json',
-          ONE_PANEL.replace('"EN1992"', '"BS8110"').replace('"fck": 30', '"fcu": 30').replace('"fyk": 500', '"fy": 500'),
-        ),
-      ],
+      'a panel that nothing bears',
+      [write('free.json', ONE_PANEL.replace('"supportWidth": 250', '"supportWidth": 0').replace('"discontinuous"', '"free"'))],
       'out_of_scope',
-      ['brief.basis'],
+      ['levels.0.panels.0.edges'],
     ],
   ])('refuses %s with status 2, the error on stderr and nothing on stdout', (_what, args, code, paths) => {
     const { status, stdout, stderr } = appraise(...args)

@@ -6,7 +6,7 @@ import { type Appraisal, appraisal as appraisalContract, type AppraisalFile } fr
 import { OutOfScopeError } from '#shared/outOfScope'
 import { Decimal, sumOf } from '#shared/pricing/decimal'
 import { parseAppraisalFile } from '#shared/parseAppraisalFile'
-import { comparingRules } from '#shared/takeoff/rules/comparingRules'
+import { RULE_SETS } from '#shared/takeoff/ruleSets'
 import { evaluate } from './support/evaluate'
 import { computedFile, givenFile } from './support/richFiles'
 
@@ -39,7 +39,7 @@ describe.each(files)('%s', (_name, file) => {
         expect(Math.abs(evaluate(expression) - value), `${item}: ${expression}`).toBeLessThanOrEqual(ARITHMETIC * value)
       }
       const whole = parts.reduce((sum, { value }) => sum + value, 0)
-      expect(Math.abs(net - whole)).toBeLessThanOrEqual(0.5 * 10 ** -comparingRules.decimals[unit] + ARITHMETIC * whole)
+      expect(Math.abs(net - whole)).toBeLessThanOrEqual(0.5 * 10 ** -RULE_SETS[file.measurement].decimals[unit] + ARITHMETIC * whole)
       const splitSum = Object.values(split ?? { whole }).reduce((sum, value) => sum + value, 0)
       expect(Math.abs(splitSum - whole), item).toBeLessThanOrEqual(ARITHMETIC * whole)
     }
@@ -113,8 +113,9 @@ describe('the front door', () => {
   })
 
   it('passes on what lies outside the rules; for screens it is a problem of the scheme', () => {
-    const brief = { basis: 'BS8110' as const, imposedLoad: 2, cover: 25, fireMinutes: 60 as const, fcu: 30, fy: 460 }
-    const other = parseAppraisalFile({ ...file, brief })
+    const [level] = file.levels
+    const edges = [{ supportWidth: 0, kind: 'beam' as const, continuity: 'free' as const }]
+    const other = parseAppraisalFile({ ...file, levels: [{ ...level!, panels: [{ ...level!.panels[0]!, edges }] }] })
     expect(() => appraise(other)).toThrow(OutOfScopeError)
     const { appraisal, sized, problems } = appraiseInFull(other)
     expect({ schemes: appraisal.schemes, comparison: appraisal.comparison, sized }).toEqual({
@@ -123,8 +124,8 @@ describe('the front door', () => {
       sized: [],
     })
     expect(problems.map(({ scheme, issue }) => [scheme, issue.path])).toEqual([
-      ['R1', 'brief.basis'],
-      ['S1', 'brief.basis'],
+      ['R1', 'levels.0.panels.0.edges'],
+      ['S1', 'levels.0.panels.0.edges'],
     ])
   })
 
