@@ -39,7 +39,9 @@ describe.each(files)('%s', (_name, file) => {
         expect(Math.abs(evaluate(expression) - value), `${item}: ${expression}`).toBeLessThanOrEqual(ARITHMETIC * value)
       }
       const whole = parts.reduce((sum, { value }) => sum + value, 0)
-      expect(Math.abs(net - whole)).toBeLessThanOrEqual(0.5 * 10 ** -RULE_SETS[file.measurement].decimals[unit] + ARITHMETIC * whole)
+      expect(Math.abs(net - whole)).toBeLessThanOrEqual(
+        0.5 * 10 ** -RULE_SETS[file.measurement].decimals[unit] + ARITHMETIC * whole,
+      )
       const splitSum = Object.values(split ?? { whole }).reduce((sum, value) => sum + value, 0)
       expect(Math.abs(splitSum - whole), item).toBeLessThanOrEqual(ARITHMETIC * whole)
     }
