@@ -1,13 +1,13 @@
 import { z } from 'zod'
 
-/** Text as typed by a person: trimmed, one line, no control characters. */
+/** Text as typed by a person: trimmed, one line, no control characters, no half of a surrogate pair (JSON columns refuse it). */
 export const line = (most: number) =>
   z
     .string()
     .trim()
     .min(1)
     .max(most)
-    .regex(/^[^\p{Cc}]*$/u, 'expected one line of text without control characters')
+    .regex(/^[^\p{Cc}\p{Cs}]*$/u, 'expected one line of text without control or broken characters')
 
 /** Like `line`, but may be left empty. */
 export const optionalLine = (most: number) =>
@@ -15,7 +15,7 @@ export const optionalLine = (most: number) =>
     .string()
     .trim()
     .max(most)
-    .regex(/^[^\p{Cc}]*$/u, 'expected one line of text without control characters')
+    .regex(/^[^\p{Cc}\p{Cs}]*$/u, 'expected one line of text without control or broken characters')
 
 /** Mark of a level, panel or scheme. */
 export const mark = z
