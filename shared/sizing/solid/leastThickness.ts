@@ -20,7 +20,7 @@ const pass = (findings: readonly Finding[]) =>
   findings.every((finding) => !isForThickness(finding) || isMet(finding.demand, finding.capacity))
 
 /**
- * Whether a panel has any set of bars that passes every check its thickness can mend.
+ * Whether a panel has a set of bars that passes every check its thickness can mend.
  *
  * Source: project rule, engine design section 3
  */
