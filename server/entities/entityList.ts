@@ -11,9 +11,13 @@ import { ProjectEntity } from './project/ProjectEntity'
 import { ProjectShareEntity } from './project/ProjectShareEntity'
 import { SchemeEntity } from './project/SchemeEntity'
 import { BlockEntity } from './rates/BlockEntity'
+import { EditionEditorEntity } from './rates/EditionEditorEntity'
 import { EditionEntity } from './rates/EditionEntity'
+import { GangEntity } from './rates/GangEntity'
+import { QuotationEntity } from './rates/QuotationEntity'
 import { RateBookEntity } from './rates/RateBookEntity'
 import { RateEntity } from './rates/RateEntity'
+import { ResourceEntity } from './rates/ResourceEntity'
 import { AttemptEntity } from './session/AttemptEntity'
 import { RefreshTokenEntity } from './session/RefreshTokenEntity'
 import { SessionEntity } from './session/SessionEntity'
@@ -33,6 +37,10 @@ export const ENTITIES = [
   RateBookEntity,
   EditionEntity,
   RateEntity,
+  EditionEditorEntity,
+  ResourceEntity,
+  GangEntity,
+  QuotationEntity,
   BlockEntity,
   ProjectEntity,
   LevelEntity,

@@ -21,6 +21,12 @@ import { KeepEditionRow1796100000019 } from './rates/1796100000019-KeepEditionRo
 import { KeepRateInsert1796100000020 } from './rates/1796100000020-KeepRateInsert'
 import { KeepRateUpdate1796100000021 } from './rates/1796100000021-KeepRateUpdate'
 import { KeepRateDelete1796100000022 } from './rates/1796100000022-KeepRateDelete'
+import { AddEditionReason1796100000050 } from './rates/1796100000050-AddEditionReason'
+import { AddRateBuildUp1796100000051 } from './rates/1796100000051-AddRateBuildUp'
+import { CreateEditionEditor1796100000052 } from './rates/1796100000052-CreateEditionEditor'
+import { CreateResource1796100000053 } from './rates/1796100000053-CreateResource'
+import { CreateGang1796100000054 } from './rates/1796100000054-CreateGang'
+import { CreateQuotation1796100000055 } from './rates/1796100000055-CreateQuotation'
 import { CreateSession1796100000006 } from './session/1796100000006-CreateSession'
 import { CreateRefreshToken1796100000007 } from './session/1796100000007-CreateRefreshToken'
 import { CreateSingleUseToken1796100000008 } from './session/1796100000008-CreateSingleUseToken'
@@ -55,4 +61,10 @@ export const MIGRATIONS = [
   CreateOutbox1796100000042,
   AddProjectScope1796100000043,
   AddLevelProppingHeight1796100000045,
+  AddEditionReason1796100000050,
+  AddRateBuildUp1796100000051,
+  CreateEditionEditor1796100000052,
+  CreateResource1796100000053,
+  CreateGang1796100000054,
+  CreateQuotation1796100000055,
 ]

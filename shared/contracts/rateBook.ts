@@ -1,6 +1,8 @@
 import { z } from 'zod'
 import { itemCode } from './appraisal'
-import { currencyCode, decimalString, id, version } from './primitives'
+import { buildUp } from './buildUp'
+import { currencyCode, decimalString, id, line, optionalLine, version } from './primitives'
+import { threePrices } from './resource'
 
 export const editionState = z.enum(['draft', 'checked', 'published', 'superseded', 'withdrawn'])
 export type EditionState = z.infer<typeof editionState>
@@ -20,9 +22,27 @@ export const edition = z.strictObject({
   checkedBy: z.string().nullable(),
   taxBasis: z.string(),
   note: z.string(),
+  /** Its rates hold overheads and profit; else a project adds its own, once. */
+  holdsOverheads: z.boolean(),
+  /** Why it was made, where it puts an earlier edition right or was rebased; else empty. */
+  reason: z.string(),
+  /** Number of the edition that it puts right. */
+  corrects: z.int().min(1).nullable(),
+  /** The reader compiled it or changed a rate in it, so that somebody else must check it. */
+  isOwnWork: z.boolean(),
   version,
 })
 export type Edition = z.infer<typeof edition>
+
+/** What a compiler states of an edition. */
+export const editionInput = z.strictObject({
+  baseDate: z.iso.date(),
+  validUntil: z.iso.date().nullable(),
+  taxBasis: line(200),
+  note: optionalLine(2000),
+  holdsOverheads: z.boolean(),
+})
+export type EditionInput = z.infer<typeof editionInput>
 
 /** One price of an edition: all-in before preliminaries, contingency and tax. */
 export const rate = z.strictObject({
@@ -33,7 +53,28 @@ export const rate = z.strictObject({
   likely: decimalString,
   high: decimalString,
   source: z.string(),
+  /** Day of the price, ISO date; null: not known, or built up. */
+  sourceDate: z.iso.date().nullable(),
+  /** Null: a plain price. */
+  buildUp: buildUp.nullable(),
+  version,
 })
+
+/** A rate as an estimator gives it: three plain prices, or a build-up that makes them; exactly one of the two. */
+export const rateInput = z
+  .strictObject({
+    description: line(200),
+    unit: line(10),
+    price: threePrices.nullable(),
+    buildUp: buildUp.nullable(),
+    source: optionalLine(400),
+    sourceDate: z.iso.date().nullable(),
+  })
+  .refine(({ price, buildUp }) => (price === null) !== (buildUp === null), {
+    path: ['price'],
+    error: 'expected either prices or a build-up',
+  })
+export type RateInput = z.infer<typeof rateInput>
 export type Rate = z.infer<typeof rate>
 
 export const editionWithRates = edition.extend({ rates: z.array(rate) })

@@ -42,6 +42,9 @@ export function aPricedSheet(unpriced: readonly ItemCode[] = []): ProjectSheet {
       likely,
       high: likely,
       source: 'agreed',
+      sourceDate: null,
+      buildUp: null,
+      version: 1,
     }))
   return { ...sheet, edition: sheet.edition && { ...sheet.edition, rates } }
 }

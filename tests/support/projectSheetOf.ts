@@ -54,6 +54,10 @@ export function aSheet(marks: readonly string[] = ['P1', 'P2']): ProjectSheet {
       checkedBy: 'checker@example.test',
       taxBasis: 'before tax',
       note: '',
+      holdsOverheads: true,
+      reason: '',
+      corrects: null,
+      isOwnWork: false,
       version: 1,
       rates: [
         {
@@ -63,7 +67,10 @@ export function aSheet(marks: readonly string[] = ['P1', 'P2']): ProjectSheet {
           low: '124',
           likely: '149.63',
           high: '178',
-          source: 'built up',
+          source: 'agreed',
+          sourceDate: null,
+          buildUp: null,
+          version: 1,
         },
       ],
     },

@@ -17,5 +17,10 @@ export class EditionEntity {
   @Column({ name: 'checked_by', type: 'varchar', length: 120, nullable: true }) checkedBy: string | null
   @Column({ name: 'tax_basis', type: 'varchar', length: 200 }) taxBasis: string
   @Column({ type: 'varchar', length: 2000 }) note: string
+  @Column({ name: 'holds_overheads', type: 'boolean', default: true }) holdsOverheads: boolean
+  /** Why it was made, where it puts an earlier edition right or was rebased. */
+  @Column({ type: 'varchar', length: 400, default: '' }) reason: string
+  /** Number of the edition that it puts right. */
+  @Column({ type: 'int', unsigned: true, nullable: true }) corrects: number | null
   @Column({ type: 'int', unsigned: true, default: 1 }) version: number
 }

@@ -1,4 +1,5 @@
 import type { ItemCode } from '#shared/contracts/appraisal'
+import type { BuildUp } from '#shared/contracts/buildUp'
 import { Column, Entity, ForeignKey, PrimaryColumn } from 'typeorm'
 
 /** One price of an edition. A trigger refuses any change once the edition is published. Decimals come as padded strings. */
@@ -14,4 +15,8 @@ export class RateEntity {
   @Column({ type: 'decimal', precision: 15, scale: 6 }) likely: string
   @Column({ type: 'decimal', precision: 15, scale: 6 }) high: string
   @Column({ type: 'varchar', length: 400 }) source: string
+  @Column({ name: 'source_date', type: 'date', nullable: true }) sourceDate: string | null
+  /** Null: a plain price. */
+  @Column({ name: 'build_up', type: 'json', nullable: true }) buildUp: BuildUp | null
+  @Column({ type: 'int', unsigned: true, default: 1 }) version: number
 }

@@ -2,6 +2,7 @@ import type { CatalogueBlock } from '#shared/contracts/blockCatalogue'
 import type { Edition, EditionState, EditionWithRates, Rate, RateBook } from '#shared/contracts/rateBook'
 import { In, type EntityManager } from 'typeorm'
 import { BlockEntity } from '../../entities/rates/BlockEntity'
+import { EditionEditorEntity } from '../../entities/rates/EditionEditorEntity'
 import { EditionEntity } from '../../entities/rates/EditionEntity'
 import { RateBookEntity } from '../../entities/rates/RateBookEntity'
 import { RateEntity } from '../../entities/rates/RateEntity'
@@ -15,13 +16,27 @@ const FIXED: readonly EditionState[] = ['published', 'superseded', 'withdrawn']
 const readableStates = (who: SignedIn): readonly EditionState[] =>
   hasRole(who, 'estimator') ? ['draft', 'checked', ...FIXED] : FIXED
 
-function toEdition(row: EditionEntity, { region, currency }: RateBookEntity): Edition {
-  const { id, bookId, number, state, baseDate, validUntil, compiledBy, checkedBy, taxBasis, note, version } = row
-  return { id, bookId, region, currency, number, state, baseDate, validUntil, compiledBy, checkedBy, taxBasis, note, version }
+/** Ids of the editions, of those asked for, that somebody compiled or changed. */
+async function ownWork(
+  db: EntityManager,
+  who: Pick<SignedIn, 'firmId' | 'personId'>,
+  ids: readonly string[],
+): Promise<Set<string>> {
+  const { firmId, personId } = who
+  const rows = ids.length === 0 ? [] : await db.findBy(EditionEditorEntity, { firmId, personId, editionId: In([...ids]) })
+  return new Set(rows.map(({ editionId }) => editionId))
 }
 
-function toRate({ item, description, unit, low, likely, high, source }: RateEntity): Rate {
-  return { item, description, unit, low: plainDecimal(low), likely: plainDecimal(likely), high: plainDecimal(high), source }
+function toEdition(row: EditionEntity, { region, currency }: RateBookEntity, isOwnWork: boolean): Edition {
+  const { id, bookId, number, state, baseDate, validUntil, compiledBy, checkedBy, taxBasis, note } = row
+  const { holdsOverheads, reason, corrects, version } = row
+  const facts = { baseDate, validUntil, compiledBy, checkedBy, taxBasis, note, holdsOverheads, reason, corrects }
+  return { id, bookId, region, currency, number, state, ...facts, isOwnWork, version }
+}
+
+function toRate({ item, description, unit, low, likely, high, source, sourceDate, buildUp, version }: RateEntity): Rate {
+  const price = { low: plainDecimal(low), likely: plainDecimal(likely), high: plainDecimal(high) }
+  return { item, description, unit, ...price, source, sourceDate, buildUp, version }
 }
 
 /** The firm's rate books in the order of their regions, each with the editions the reader may see, newest first. */
@@ -33,27 +48,41 @@ export async function listRateBooks(db: EntityManager, who: SignedIn): Promise<R
     order: { number: 'DESC' },
     take: 2000,
   })
+  const own = await ownWork(
+    db,
+    who,
+    editions.map(({ id }) => id),
+  )
   return books.map((book) => ({
     id: book.id,
     region: book.region,
     currency: book.currency,
-    editions: editions.filter(({ bookId }) => bookId === book.id).map((row) => toEdition(row, book)),
+    editions: editions.filter(({ bookId }) => bookId === book.id).map((row) => toEdition(row, book, own.has(row.id))),
   }))
 }
 
-/** An edition of the firm with its rates in the order of their items; null when the firm has none such. */
-export async function findEdition(db: EntityManager, firmId: string, id: string): Promise<EditionWithRates | null> {
+/**
+ * An edition of the firm with its rates in the order of their items; null when the firm has none such.
+ * @param personId - whose own work it may be; absent: nobody asks
+ */
+export async function findEdition(
+  db: EntityManager,
+  firmId: string,
+  id: string,
+  personId?: string,
+): Promise<EditionWithRates | null> {
   const row = await db.findOneBy(EditionEntity, { firmId, id })
   if (row === null) return null
   const book = await db.findOneByOrFail(RateBookEntity, { firmId, id: row.bookId })
   const rates = await db.find(RateEntity, { where: { firmId, editionId: id }, order: { item: 'ASC' } })
-  return { ...toEdition(row, book), rates: rates.map(toRate) }
+  const own = personId === undefined ? new Set() : await ownWork(db, { firmId, personId }, [id])
+  return { ...toEdition(row, book, own.has(id)), rates: rates.map(toRate) }
 }
 
 /** @throws AppError `not_found`, also for a draft when the reader is no estimator */
 export async function readEdition(db: EntityManager, who: SignedIn, id: string): Promise<EditionWithRates> {
   requireRole(who, 'surveyor', 'estimator')
-  const edition = await findEdition(db, who.firmId, id)
+  const edition = await findEdition(db, who.firmId, id, who.personId)
   if (edition === null || !readableStates(who).includes(edition.state)) throw new AppError('not_found')
   return edition
 }
