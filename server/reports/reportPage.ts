@@ -17,7 +17,10 @@ export interface ReportPage {
   readonly styleHash: string
 }
 
-const STYLE = readFileSync(new URL('./report.css', import.meta.url), 'utf8')
+/** In the order of the cascade. */
+const STYLE = ['report.css', 'reportTables.css', 'reportBeside.css', 'reportMedia.css']
+  .map((file) => readFileSync(new URL(file, import.meta.url), 'utf8'))
+  .join('\n')
 const CAUTION_SIGN = trustedMarkup(
   '<svg width="18" height="18" viewBox="0 0 18 18" aria-hidden="true"><path d="M9 2L17 16H1Z" fill="none" stroke="#1e2930" stroke-width="1.4"/><path d="M9 7v4M9 12.6v1.4" stroke="#1e2930" stroke-width="1.4"/></svg>',
 )
