@@ -57,8 +57,3 @@ export function byWorkSection<T extends { readonly item: BillItem }>(
     (group) => group.rows.length > 0,
   )
 }
-
-/** An expression of the engine as it is read: × for times, a true minus. */
-export function expressionInWords(expression: string): string {
-  return expression.replaceAll('*', '×').replaceAll('-', '−')
-}
