@@ -1,4 +1,5 @@
 import type { AlsoCompared } from '#shared/alsoCompared/alsoCompared'
+import type { PanelCalculation } from '#shared/calculation/calculation'
 import type { ScopeDifference } from '#shared/alsoCompared/scopeDifferences'
 import type { Appraisal, AppraisalFile, RibbedScheme, SchemeResult, SolidScheme } from '#shared/contracts/appraisal'
 import type { CatalogueBlock } from '#shared/contracts/blockCatalogue'
@@ -29,6 +30,8 @@ export interface ComparedProject {
   /** Beside `appraisal.schemes`. */
   readonly alsoCompared: readonly AlsoCompared[]
   readonly scopeDifferences: readonly ScopeDifference[]
+  /** Of the tightest panel of each scheme. */
+  readonly calculations: readonly PanelCalculation[]
 }
 
 /** Who sends it to whom. */
@@ -117,5 +120,6 @@ export function freezeComparison(compared: ComparedProject, sending: Sending, fr
     sections: sections(compared),
     alsoCompared: freezeAlsoRows(compared.alsoCompared[0]!, compared.alsoCompared[1]!),
     scope: freezeScope(file.scope, compared.scopeDifferences, { ribbed: ribbed.mark, solid: solid.mark }),
+    calculations: [...compared.calculations],
   }
 }

@@ -4,6 +4,7 @@ import { currencyCode, id, moment } from '#shared/contracts/primitives'
 import { useCategory } from '#shared/contracts/project'
 import type { SvgNode } from '#shared/drawing/svgNode'
 import { frozenAlsoRow, frozenScope } from './frozenBeside'
+import { frozenCalculation } from './frozenCalculation'
 
 const drawing: z.ZodType<SvgNode> = z.strictObject({
   tag: z.enum([
@@ -85,6 +86,8 @@ export const frozenComparison = z.strictObject({
   /** Beside the cost; absent in what was sent before it was compared. */
   alsoCompared: z.array(frozenAlsoRow).optional(),
   scope: frozenScope.optional(),
+  /** Of the tightest panel of each scheme; absent in what was sent before it was kept. */
+  calculations: z.array(frozenCalculation).optional(),
 })
 export type FrozenComparison = z.infer<typeof frozenComparison>
 export type FrozenScheme = FrozenComparison['ribbed'] | FrozenComparison['solid']

@@ -4,6 +4,7 @@ import { svgText } from '#shared/drawing/svgText'
 import { reportContent, type ReportContent } from './content/reportContent'
 import type { ReportFact } from './content/reportFact'
 import { besideTable, scopeSection, workingsSection } from './besideSections'
+import { calculationSections } from './calculationSection'
 import { barHatches } from './differenceBar'
 import { dayText } from './figureText'
 import type { FrozenComparison } from './frozenComparison'
@@ -18,7 +19,7 @@ export interface ReportPage {
 }
 
 /** In the order of the cascade. */
-const STYLE = ['report.css', 'reportTables.css', 'reportBeside.css', 'reportMedia.css']
+const STYLE = ['report.css', 'reportTables.css', 'reportBeside.css', 'reportCalculation.css', 'reportMedia.css']
   .map((file) => readFileSync(new URL(file, import.meta.url), 'utf8'))
   .join('\n')
 const CAUTION_SIGN = trustedMarkup(
@@ -130,6 +131,7 @@ export function reportPage(frozen: FrozenComparison): ReportPage {
         ${figureTable(content)}
       </section>
       ${differences(content)} ${besideTable(content)} ${scopeSection(content)} ${behind(content)} ${ending(content)}
+      ${calculationSections(content)}
     </main>`
   const style = pageStyle(frozen, body.text)
   const document = markup`<!doctype html>

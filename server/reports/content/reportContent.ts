@@ -1,3 +1,4 @@
+import type { PanelCalculation } from '#shared/calculation/calculation'
 import type { Check } from '#shared/contracts/appraisal'
 import { Decimal } from '#shared/pricing/decimal'
 import { signedDecimalText } from '../figureText'
@@ -52,6 +53,8 @@ export interface ReportContent {
   readonly leftOut: readonly string[]
   readonly checked: readonly CheckedScheme[]
   readonly cautions: readonly string[]
+  /** Of the tightest panel of each scheme. */
+  readonly calculations: readonly PanelCalculation[]
   readonly titleBlock: readonly ReportFact[]
 }
 
@@ -96,6 +99,7 @@ export function reportContent(frozen: FrozenComparison): ReportContent {
     leftOut: leftOut(frozen),
     checked: [checkedScheme(frozen, 'ribbed'), checkedScheme(frozen, 'solid')],
     cautions: CAUTIONS,
+    calculations: frozen.calculations ?? [],
     titleBlock: titleBlock(frozen),
   }
 }

@@ -1,3 +1,4 @@
+import { isTighter } from '#shared/calculation/tightestPanel'
 import type { Check } from '#shared/contracts/appraisal'
 import { CHECK_NAMES } from './checkNames'
 
@@ -18,10 +19,4 @@ export function tightestChecks(checks: readonly Check[]): Check[] {
     .sort((a, b) => b.utilisation - a.utilisation)
     .slice(0, MOST_FAILING)
   return [...tightest, ...failing]
-}
-
-/** A failing check is tighter than one that passes, whatever their utilisations. */
-function isTighter(check: Check, than: Check): boolean {
-  if (check.pass !== than.pass) return !check.pass
-  return check.utilisation > than.utilisation
 }

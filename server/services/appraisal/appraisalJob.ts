@@ -1,3 +1,4 @@
+import type { PanelCalculation } from '#shared/calculation/calculation'
 import type { AlsoCompared } from '#shared/alsoCompared/alsoCompared'
 import type { ScopeDifference } from '#shared/alsoCompared/scopeDifferences'
 import type { ApiIssue } from '#shared/contracts/apiError'
@@ -20,6 +21,8 @@ export interface ComparedAppraisal {
   /** Beside `appraisal.schemes`. */
   readonly alsoCompared: readonly AlsoCompared[]
   readonly scopeDifferences: readonly ScopeDifference[]
+  /** Of the panel with the tightest check, beside `appraisal.schemes`. */
+  readonly calculations: readonly PanelCalculation[]
 }
 
 /** How it ended. `outOfScope` names the field and what was expected, as `refused` does. */

@@ -61,7 +61,7 @@ function quiet(worker: Worker): void {
 function required(outcome: AppraisalOutcome): ComparedAppraisal {
   switch (outcome.kind) {
     case 'done':
-      return { appraisal: outcome.appraisal, cutPanels: [], alsoCompared: [], scopeDifferences: [] }
+      return { appraisal: outcome.appraisal, cutPanels: [], alsoCompared: [], scopeDifferences: [], calculations: [] }
     case 'compared':
       return outcome
     case 'refused':

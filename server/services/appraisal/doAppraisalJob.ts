@@ -1,4 +1,6 @@
 import { AppraisalRefusedError } from '#shared/appraisalRefused'
+import { calculationOf } from '#shared/calculation/calculationOf'
+import { tightestPanel } from '#shared/calculation/tightestPanel'
 import { appraise, appraiseInFull } from '#shared/appraise'
 import type { Appraisal, AppraisalFile } from '#shared/contracts/appraisal'
 import { checkFloor } from '#shared/layout/checkFloor'
@@ -21,7 +23,10 @@ function appraiseCompared(file: AppraisalFile): AppraisalOutcome {
     return { kind: 'outOfScope', issues }
   }
   const cutPanels = sized.map(({ panels }) => (panels[0] ? { ...panels[0], layout: null } : null))
-  return { kind: 'compared', appraisal, cutPanels, alsoCompared, scopeDifferences }
+  const calculations = appraisal.schemes.map((scheme) =>
+    calculationOf(file, { scheme: scheme.mark, ...tightestPanel(scheme.checks) }),
+  )
+  return { kind: 'compared', appraisal, cutPanels, alsoCompared, scopeDifferences, calculations }
 }
 
 /** Appraises, and says in plain data how it ended, so that the outcome can cross threads. */
