@@ -5,7 +5,8 @@ export function distanceToSegment([px, py]: Point, [ax, ay]: Point, [bx, by]: Po
   const [dx, dy] = [bx - ax, by - ay]
   const squared = dx * dx + dy * dy
   const along = squared === 0 ? 0 : Math.min(1, Math.max(0, ((px - ax) * dx + (py - ay) * dy) / squared))
-  return Math.hypot(px - ax - along * dx, py - ay - along * dy)
+  const [offX, offY] = [px - ax - along * dx, py - ay - along * dy]
+  return Math.sqrt(offX * offX + offY * offY)
 }
 
 /** Twice the area of triangle abc: positive when c lies left of a → b. */

@@ -1,5 +1,6 @@
 import type { BarRun } from '../sizedPanel'
 import type { BarLines, BarPiece } from './barLines'
+import { roundedLengthMm } from './barShape'
 import { type CutBar, cutBars, lengthWorking, planMm } from './cutBars'
 
 /**
@@ -8,8 +9,16 @@ import { type CutBar, cutBars, lengthWorking, planMm } from './cutBars'
  * Source: see `cutBars`
  */
 export function totalLengthMm(lines: Pick<BarLines, 'diameter' | 'pieces' | 'each' | 'stockMm' | 'lapMm'>): number {
-  const inPiece = (piece: BarPiece) => cutBars(lines, piece).reduce((sum, { lengthMm }) => sum + lengthMm, 0)
+  const inPiece = (piece: BarPiece) =>
+    straightWithinStockMm(piece, lines.stockMm) ?? cutBars(lines, piece).reduce((sum, { lengthMm }) => sum + lengthMm, 0)
   return lines.each * lines.pieces.reduce((sum, piece) => sum + inPiece(piece), 0)
+}
+
+/** Cut length of a line that is one straight bar, mm: most lines are. Null for bent and for lapped ones. */
+function straightWithinStockMm(piece: BarPiece, stockMm: number): number | null {
+  if (piece.legs[0] !== 0 || piece.legs[1] !== 0) return null
+  const lengthMm = roundedLengthMm(planMm(piece))
+  return lengthMm <= stockMm ? lengthMm : null
 }
 
 /** Bars of a position that are cut and bent alike, the longest of their lines for the working. */

@@ -15,6 +15,13 @@ export interface LineEndOnEdge {
 /** A support met at less than this sine is taken ten times its width at most. */
 const LEAST_CROSSING = 0.1
 
+/** Whether a point lies off the box round a segment, and so off the segment. */
+const isBeside = ([x, y]: Point, [ax, ay]: Point, [bx, by]: Point) =>
+  x < Math.min(ax, bx) - DRAWN_TOLERANCE_MM ||
+  x > Math.max(ax, bx) + DRAWN_TOLERANCE_MM ||
+  y < Math.min(ay, by) - DRAWN_TOLERANCE_MM ||
+  y > Math.max(ay, by) + DRAWN_TOLERANCE_MM
+
 /**
  * The support that a line ends on; of two at a corner the one it crosses more squarely.
  *
@@ -23,13 +30,14 @@ const LEAST_CROSSING = 0.1
  * @param direction - unit vector of the line
  */
 export function lineEndAt({ clear, edges }: PanelSite, at: Point, direction: Point): LineEndOnEdge {
-  const hits = clear.ring.flatMap((_, i) => {
+  let [best, squarest] = [-1, -1]
+  for (let i = 0; i < clear.ring.length; i += 1) {
     const [a, b] = edgeOfRing(clear.ring, i)
-    if (distanceToSegment(at, a, b) > DRAWN_TOLERANCE_MM) return []
+    if (isBeside(at, a, b) || distanceToSegment(at, a, b) > DRAWN_TOLERANCE_MM) continue
     const crossing = Math.abs(direction[0] * (b[1] - a[1]) - direction[1] * (b[0] - a[0])) / distance(a, b)
-    return [{ edge: clear.sources[i]!, crossing }]
-  })
-  if (hits.length === 0) return { edge: null, supportMm: 0 }
-  const { edge, crossing } = hits.reduce((best, each) => (each.crossing > best.crossing ? each : best))
-  return { edge, supportMm: edges[edge]!.supportWidth / Math.max(crossing, LEAST_CROSSING) }
+    if (crossing > squarest) [best, squarest] = [i, crossing]
+  }
+  if (best < 0) return { edge: null, supportMm: 0 }
+  const edge = clear.sources[best]!
+  return { edge, supportMm: edges[edge]!.supportWidth / Math.max(squarest, LEAST_CROSSING) }
 }

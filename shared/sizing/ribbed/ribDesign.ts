@@ -1,16 +1,17 @@
-import type { Bar, BarDiameter, RibbedScheme } from '../../contracts/appraisal'
+import type { RibbedScheme } from '../../contracts/appraisal'
 import type { EndOfSpan } from '../analysis/spanForces'
 import { totalLengthMm } from '../bars/barRuns'
 import { areaOf, type BarSet } from '../bars/barSet'
 import { type Candidate, chooseLeastMass } from '../bars/chooseLeastMass'
-import type { Finding } from '../finding'
-import { BAR_MASS_KG_PER_M, CHOSEN_DIAMETERS } from '../tables/bars'
+import { type Finding, isMet } from '../finding'
+import type { remember } from '../remember'
+import { CHOSEN_DIAMETERS } from '../tables/bars'
 import { bottomFindings } from './checks/bottomFindings'
 import { bottomLines, type RibBarRules, topLines } from './ribBarLines'
+import { ribBarOrder, type WeighedSet } from './ribBarOrder'
 import type { RibContext } from './ribContext'
 import type { RibbedPanel } from './ribbedPanel'
 import { ribShearFinding, shearFindings } from './checks/ribShear'
-import type { Compared } from './solidZones'
 import { ribBending, simpleEdgeFinding, topFindings } from './checks/topFindings'
 
 /** The bars of a panel's ribs, and what the checks find. */
@@ -22,36 +23,9 @@ export interface RibDesign {
 
 const ENDS: readonly EndOfSpan[] = ['start', 'end']
 
-/**
- * Sets a rib may be given: one bar, or two, of equal or different diameters.
- *
- * Source: project rule, engine design section 4 (bars computed)
- */
-export const RIB_BAR_SETS: readonly BarSet[] = CHOSEN_DIAMETERS.flatMap((first, i): BarSet[] => [
-  [{ diameter: first, count: 1 }],
-  ...CHOSEN_DIAMETERS.slice(0, i).map((second): Bar[] => [
-    { diameter: first, count: 1 },
-    { diameter: second, count: 1 },
-  ]),
-  [{ diameter: first, count: 2 }],
-])
-
 /** Sets whose bars lie deepest in the rib, and least deep. */
 const DEEPEST: BarSet = [{ diameter: CHOSEN_DIAMETERS[0], count: 1 }]
 const SHALLOWEST: BarSet = [{ diameter: CHOSEN_DIAMETERS[CHOSEN_DIAMETERS.length - 1]!, count: 1 }]
-
-type MassOf = (set: BarSet) => number
-
-/** Mass of a set whose lines of one bar of each diameter are known, remembered by diameter. */
-function massBy(lengthOf: (diameter: BarDiameter) => number): MassOf {
-  const known = new Map<BarDiameter, number>()
-  return (set) =>
-    set.reduce((sum, { diameter, count }) => {
-      const length = known.get(diameter) ?? lengthOf(diameter)
-      known.set(diameter, length)
-      return sum + (count * length * BAR_MASS_KG_PER_M[diameter]) / 1000
-    }, 0)
-}
 
 type FindingsOf = (set: BarSet) => readonly Finding[]
 
@@ -71,13 +45,13 @@ function leastAreaMm2(findingsOf: FindingsOf): number {
   return BOUND_SHARE * Math.max(0, ...required(DEEPEST).map((demand, i) => Math.min(demand, shallow[i]!)))
 }
 
-function choose(massOf: MassOf, findingsOf: FindingsOf): BarSet {
+function choose(order: readonly WeighedSet[], findingsOf: FindingsOf): BarSet {
   const leastMm2 = leastAreaMm2(findingsOf)
-  const candidates = RIB_BAR_SETS.map((option): Candidate<BarSet> => ({
-    option,
-    massKg: massOf(option),
-    findings: () => findingsOf(option),
-    isHopeless: areaOf(option) < leastMm2,
+  const candidates = order.map(({ set, areaMm2, massKg }): Candidate<BarSet> => ({
+    option: set,
+    massKg,
+    findings: () => findingsOf(set),
+    isHopeless: areaMm2 < leastMm2,
   }))
   return chooseLeastMass(candidates).option
 }
@@ -88,6 +62,8 @@ export interface RibTask {
   readonly context: RibContext
   readonly scheme: RibbedScheme
   readonly rules: RibBarRules
+  /** Orders of bars by mass, remembered by the panel's ribs and what else their lengths depend on. */
+  readonly orderFor: ReturnType<typeof remember<readonly WeighedSet[]>>
 }
 
 /**
@@ -95,13 +71,13 @@ export interface RibTask {
  *
  * Source: project rule, engine design section 4
  */
-export function chooseBottom({ panel, context, rules }: RibTask): BarSet {
+export function chooseBottom({ panel, context, rules, orderFor }: RibTask): BarSet {
   const { ribBars } = panel.bars
   if (ribBars !== 'computed') return ribBars
-  return choose(
-    massBy((diameter) => totalLengthMm(bottomLines(panel, diameter, 1, rules))),
-    (set) => bottomFindings(context, set),
+  const order = orderFor(`${panel.shapeKey} bottom`, () =>
+    ribBarOrder((diameter) => totalLengthMm(bottomLines(panel, diameter, 1, rules))),
   )
+  return choose(order, (set) => bottomFindings(context, set))
 }
 
 /**
@@ -110,15 +86,18 @@ export function chooseBottom({ panel, context, rules }: RibTask): BarSet {
  *
  * Source: project rule, engine design section 4
  */
-export function chooseTop({ panel, context, rules }: RibTask, end: EndOfSpan): BarSet {
+export function chooseTop({ panel, context, rules, orderFor }: RibTask, end: EndOfSpan): BarSet {
   const { isContinuous, isFree } = panel.ends[end]
   const { topBars } = panel.bars
   if (isFree) return []
   if (isContinuous && topBars !== 'computed') return topBars
-  const massOf = massBy((diameter) =>
-    topLines(panel, end, diameter, 1, context, rules).reduce((sum, lines) => sum + totalLengthMm(lines), 0),
+  const { spanMm, position, overhangMm } = context.analysis
+  const order = orderFor(`${panel.shapeKey} ${end} ${spanMm} ${position} ${overhangMm[end]}`, () =>
+    ribBarOrder((diameter) =>
+      topLines(panel, end, diameter, 1, context, rules).reduce((sum, lines) => sum + totalLengthMm(lines), 0),
+    ),
   )
-  return choose(massOf, (set) => (isContinuous ? topFindings(context, end, set) : [simpleEdgeFinding(context, end, set)]))
+  return choose(order, (set) => (isContinuous ? topFindings(context, end, set) : [simpleEdgeFinding(context, end, set)]))
 }
 
 /**
@@ -155,19 +134,24 @@ export function lightestTops(task: RibTask): Readonly<Record<EndOfSpan, BarSet>>
 }
 
 /**
- * What the width of the solid zone decides with the lightest top bars: shear of the rib where the zone ends, and its bending there. That
+ * Whether what the width of the solid zone decides is met with the lightest top bars: shear of the rib where the zone ends, and its bending there. That
  * the lightest bars must do keeps more load from ending in less steel through a wider zone.
  *
  * Source: project rule, engine design sections 4 (`"least"` lets shear widen the zone) and 8 (monotone)
  */
-export function zoneFindings(task: RibTask, bottom: BarSet, tops: Readonly<Record<EndOfSpan, BarSet>>): Compared[] {
-  const { context, panel } = task
-  return ENDS.filter((end) => !panel.ends[end].isFree).flatMap((end) => {
+export function isZoneWideEnough(
+  { context, panel }: RibTask,
+  bottom: BarSet,
+  tops: Readonly<Record<EndOfSpan, BarSet>>,
+): boolean {
+  return ENDS.every((end) => {
+    const { isFree, isContinuous } = panel.ends[end]
+    if (isFree) return true
     const top = tops[end]
-    const shear = [ribShearFinding(context, end, { bottom, top })]
-    if (!panel.ends[end].isContinuous) return shear
+    const shear = ribShearFinding(context, end, { bottom, top })
+    if (!isMet(shear.demand, shear.capacity)) return false
+    if (!isContinuous) return true
     const { k, greatestK, requiredMm2 } = ribBending(context, end, top)
-    const steel = panel.bars.topBars === 'computed' ? [{ demand: requiredMm2, capacity: areaOf(top) }] : []
-    return [...shear, { demand: k, capacity: greatestK }, ...steel]
+    return isMet(k, greatestK) && (panel.bars.topBars !== 'computed' || isMet(requiredMm2, areaOf(top)))
   })
 }

@@ -28,6 +28,7 @@ export interface RibbedJob {
   readonly shapeFor: ReturnType<typeof remember<RibbedPanel>>
   readonly zoneFor: ReturnType<typeof remember<number>>
   readonly designFor: ReturnType<typeof remember<RibDesign>>
+  readonly orderFor: RibTask['orderFor']
 }
 
 /** Panels of a level laid out with a zone each, and their forces. */
@@ -59,7 +60,7 @@ export function ribbedJob(level: LevelSite, scheme: RibbedScheme, brief: Brief, 
   refuseLooseRibs(level, grounds)
   const memory = { shapeFor: remember<RibbedPanel>(), zoneFor: remember<number>() }
   const analysis = analysisRules(basis, brief.redistribution)
-  return { scheme, brief, basis, level, rules, analysis, shapes, grounds, ...memory, designFor: remember() }
+  return { scheme, brief, basis, level, rules, analysis, shapes, grounds, ...memory, designFor: remember(), orderFor: remember() }
 }
 
 /**
@@ -113,5 +114,5 @@ export function taskOf(job: RibbedJob, panel: RibbedPanel, analysis: RibAnalysis
     fireMinutes: brief.fireMinutes,
     carriesPartitions: brief.partitionsLoad > 0,
   }
-  return { panel, context, scheme, rules }
+  return { panel, context, scheme, rules, orderFor: job.orderFor }
 }

@@ -21,6 +21,8 @@ export type RibBarChoice = Pick<RibbedScheme, 'ribBars' | 'topBars'>
 export interface RibbedPanel {
   /** As `shapeKey`, with the zone. */
   readonly key: string
+  /** Without the zone. */
+  readonly shapeKey: string
   readonly ribs: readonly RibLineEnds[]
   readonly direction: Point
   readonly clearMm: number
@@ -87,6 +89,7 @@ export function ribbedPanel(
   )
   return {
     key: `${solidZoneMm} ${key}`,
+    shapeKey: key,
     ribs,
     direction,
     clearMm: layout.longestRib,

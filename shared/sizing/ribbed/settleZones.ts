@@ -1,6 +1,5 @@
-import { isMet } from '../finding'
 import type { RibAnalysis } from './ribAnalysis'
-import { chooseBottom, lightestTops, zoneFindings } from './ribDesign'
+import { chooseBottom, isZoneWideEnough, lightestTops } from './ribDesign'
 import type { RibbedPanel } from './ribbedPanel'
 import { type LaidLevel, laidLevel, reinforcementKey, type RibbedJob, taskOf } from './ribbedJob'
 import { leastZoneMm, ZONE_STEP_MM } from './solidZones'
@@ -52,7 +51,9 @@ function zoneOf(job: RibbedJob, panel: RibbedPanel, analysis: RibAnalysis, fromM
   return job.zoneFor(`${fromMm} ${reinforcementKey(panel, analysis)}`, () => {
     const task = taskOf(job, panel, analysis)
     const [bottom, lightest] = [chooseBottom(task), lightestTops(task)]
-    return leastZoneMm(fromMm, panel.clearMm, (zoneMm) => zoneFindings(taskOf(job, panel, analysis, zoneMm), bottom, lightest))
+    return leastZoneMm(fromMm, panel.clearMm, (zoneMm) =>
+      isZoneWideEnough(taskOf(job, panel, analysis, zoneMm), bottom, lightest),
+    )
   })
 }
 
@@ -68,5 +69,5 @@ function narrowed(job: RibbedJob, { zones }: LaidLevel): LaidLevel | null {
 
 function does(job: RibbedJob, panel: RibbedPanel, analysis: RibAnalysis): boolean {
   const task = taskOf(job, panel, analysis)
-  return zoneFindings(task, chooseBottom(task), lightestTops(task)).every(({ demand, capacity }) => isMet(demand, capacity))
+  return isZoneWideEnough(task, chooseBottom(task), lightestTops(task))
 }

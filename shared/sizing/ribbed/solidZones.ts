@@ -1,17 +1,9 @@
-import { isMet } from '../finding'
-
 /**
  * Step in which a solid zone left to the engine is widened, mm.
  *
  * Source: project rule, engine design section 4 (common practice, no source)
  */
 export const ZONE_STEP_MM = 25
-
-/** Something with demand and capacity. */
-export interface Compared {
-  readonly demand: number
-  readonly capacity: number
-}
 
 /**
  * Widest solid zone that leaves blocks between two of them, mm, in steps.
@@ -28,12 +20,11 @@ export function widestZoneMm(clearMm: number): number {
  * where nothing is.
  *
  * Source: project rule, engine design section 4 (`"least"` lets shear widen the zone)
- * @param findingsAt - what the zone's width decides
+ * @param isMetAt - whether what the zone's width decides is met
  * @param clearMm - clear length of the longest rib
  */
-export function leastZoneMm(fromMm: number, clearMm: number, findingsAt: (zoneMm: number) => readonly Compared[]): number {
+export function leastZoneMm(fromMm: number, clearMm: number, isMetAt: (zoneMm: number) => boolean): number {
   const widest = widestZoneMm(clearMm)
-  for (let zone = fromMm; zone <= widest; zone += ZONE_STEP_MM)
-    if (findingsAt(zone).every(({ demand, capacity }) => isMet(demand, capacity))) return zone
+  for (let zone = fromMm; zone <= widest; zone += ZONE_STEP_MM) if (isMetAt(zone)) return zone
   return Math.max(fromMm, widest)
 }

@@ -4,7 +4,7 @@ import { bottomAlternatives } from './bars/chooseBottomBars'
 import { chooseSlabBars } from './bars/chooseSlabBars'
 import { topAlternatives } from './bars/chooseTopBars'
 import { sizeFindings } from './layerFindings'
-import { type SlabContext, slabKey, topPlaces } from './slabContext'
+import { type SlabContext, slabKey } from './slabContext'
 
 /**
  * Least thickness, the firm's step and greatest thickness that the engine chooses from, mm.
@@ -28,7 +28,7 @@ export function canPass(context: SlabContext): boolean {
   return (
     pass(sizeFindings(context)) &&
     bottomAlternatives(context).some(({ short, long }) => pass(short()) && long.some((each) => pass(each()))) &&
-    topPlaces(context).every((place) => topAlternatives(context, place).some((each) => pass(each())))
+    context.places.every((place) => topAlternatives(context, place).some((each) => pass(each())))
   )
 }
 

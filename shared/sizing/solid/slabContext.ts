@@ -14,6 +14,8 @@ export interface SlabContext {
   readonly plan: SlabPlan
   readonly analysis: SlabAnalysis
   readonly heightMm: number
+  /** As `topPlaces`. */
+  readonly places: readonly TopPlace[]
 }
 
 /** Width that forces and steel are per, mm. */
@@ -43,8 +45,7 @@ export interface TopPlace {
  *
  * Source: project rule, engine design section 4
  */
-export function topPlaces({ analysis }: Pick<SlabContext, 'analysis'>): TopPlace[] {
-  const { short, long, other } = analysis
+export function topPlaces({ short, long, other }: SlabAnalysis): TopPlace[] {
   const at = (direction: 'short' | 'long', end: EndOfSpan, side: SlabSide, span: SlabSpan | null): TopPlace[] =>
     side.isFree ? [] : [{ direction, end, side, span }]
   return (['start', 'end'] as const).flatMap((end) => [

@@ -9,7 +9,7 @@ import { CHOSEN_DIAMETERS } from '../tables/bars'
 import { leastThickness } from './leastThickness'
 import { leastThicknesses } from './leastThicknesses'
 import { analyseSlabs } from './slabAnalysis'
-import type { SlabContext } from './slabContext'
+import { type SlabContext, topPlaces } from './slabContext'
 import { type SlabPlan, slabPlan } from './slabPlan'
 
 /** A level of a solid scheme with the thickness of each panel, mm, and what its bars and checks are worked out from. */
@@ -76,6 +76,7 @@ function contextsAt(
   const analyses = analyseSlabs(site, plans, thicknesses, basis, rules)
   return plans.map((plan, i) => {
     const own = givenFor(scheme.givenPanels, site.mark, plan.site.panel.mark)?.bars ?? scheme.bars
-    return { basis, brief, given: own === 'computed' ? null : own, plan, analysis: analyses[i]!, heightMm: heightsMm[i]! }
+    const [analysis, heightMm] = [analyses[i]!, heightsMm[i]!]
+    return { basis, brief, given: own === 'computed' ? null : own, plan, analysis, heightMm, places: topPlaces(analysis) }
   })
 }

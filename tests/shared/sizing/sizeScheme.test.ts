@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import type { Bar } from '#shared/contracts/appraisal'
 import { OutOfScopeError } from '#shared/outOfScope'
-import { RIB_BAR_SETS } from '#shared/sizing/ribbed/ribDesign'
+import { RIB_BAR_SETS } from '#shared/sizing/ribbed/ribBarOrder'
 import { sizeScheme } from '#shared/sizing/sizeScheme'
 import { BAR_MASS_KG_PER_M } from '#shared/sizing/tables/bars'
 import { edge, fileOf, panelOf, rectangle, ribbed, row, schemeOf, solid } from './support/floors'

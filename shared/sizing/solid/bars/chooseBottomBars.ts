@@ -5,13 +5,13 @@ import { CHOSEN_DIAMETERS } from '../../tables/bars'
 import { firstMeeting, inStrips, leastMm2 } from './firstMeeting'
 import { longBottomFindings, midspanFlexure, shortBottomFindings, slabDeflection, slabShearFinding } from '../layerFindings'
 import { greatestSpacingMm, secondarySteel } from '../slabLimits'
-import { layerDepthMm, type SlabContext, topPlaces } from '../slabContext'
+import { layerDepthMm, type SlabContext } from '../slabContext'
 import { layerAreaMm2, layerFor, type StripLayers } from './slabLayer'
 import { bottomParts, stripsMassKg } from './slabMass'
 
 /** Shear at the ends of one direction where bottom bars are the tension steel. */
 function bottomShears(context: SlabContext, direction: 'short' | 'long', depthMm: number, layer: BarLayer): Finding[] {
-  return topPlaces(context)
+  return context.places
     .filter((place) => place.direction === direction && !place.side.isContinuous)
     .flatMap((place) => slabShearFinding(context, place, depthMm, layerAreaMm2(layer)) ?? [])
 }

@@ -7,7 +7,7 @@ import { chooseLongBottom, shortFindings, shortLayer } from './chooseBottomBars'
 import { chooseTopBars, type TopBars } from './chooseTopBars'
 import { inStrips } from './firstMeeting'
 import { midspanFlexure } from '../layerFindings'
-import { layerDepthMm, type SlabContext, topPlaces } from '../slabContext'
+import { layerDepthMm, type SlabContext } from '../slabContext'
 import type { StripLayers } from './slabLayer'
 import { bottomParts, stripsMassKg } from './slabMass'
 import { type TorsionBars, torsionBars } from './torsionBars'
@@ -73,7 +73,7 @@ function lightestPassing(context: SlabContext, all: readonly ShortBars[]): Candi
  * Source: project rule, engine design section 4 (set of least total mass that passes every check)
  */
 export function chooseSlabBars(context: SlabContext): SlabBars {
-  const tops = topPlaces(context).map((place) => chooseTopBars(context, place))
+  const tops = context.places.map((place) => chooseTopBars(context, place))
   const layers = context.given ? [context.given.bottomX] : CHOSEN_DIAMETERS.map((diameter) => shortLayer(context, diameter))
   const all = layers.map((layer) => shortBars(context, layer))
   const best = lightestPassing(context, all) ?? chooseLeastMass(all.map((each) => candidateOf(context, each)))

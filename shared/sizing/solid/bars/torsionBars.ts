@@ -5,7 +5,7 @@ import type { BarPiece } from '../../bars/barLines'
 import { CHOSEN_DIAMETERS } from '../../tables/bars'
 import { topFlexure } from '../layerFindings'
 import { greatestSpacingMm } from '../slabLimits'
-import { givenTop, hasHeldCorners, isHogging, layerDepthMm, type SlabContext, type TopPlace, topPlaces } from '../slabContext'
+import { givenTop, hasHeldCorners, isHogging, layerDepthMm, type SlabContext, type TopPlace } from '../slabContext'
 import { remember } from '../../remember'
 import { leastMm2 } from './firstMeeting'
 import { layerAreaMm2, layerFor } from './slabLayer'
@@ -43,7 +43,7 @@ const [THINNEST, THICKEST] = [CHOSEN_DIAMETERS[0], CHOSEN_DIAMETERS[CHOSEN_DIAME
  */
 export function torsionBars(context: SlabContext, midspanMm2: number): TorsionBars[] {
   if (!hasHeldCorners(context)) return []
-  const places = topPlaces(context)
+  const places = context.places
   const lightest = remember<AddedBars>()
   const placeAt = (direction: Direction, end: EndOfSpan) =>
     places.find((each) => each.direction === direction && each.end === end)
