@@ -12,6 +12,7 @@ import type { SectionSubject } from '#shared/drawing/sectionBody'
 import { sectionReinforcement } from '#shared/drawing/sectionReinforcement'
 import type { SizedPanel } from '#shared/sizing/sizedPanel'
 import { itemisedQuantities } from '#shared/takeoff/itemisedQuantities'
+import { RULE_SETS } from '#shared/takeoff/ruleSets'
 import { differenceGroups } from './content/differenceGroups'
 import { tightestChecks } from './content/tightestChecks'
 import { freezeAlsoRows, freezeScope } from './freezeBeside'
@@ -89,6 +90,11 @@ function floorOf({ levels }: AppraisalFile, { panels }: SchemeResult): FrozenCom
   }
 }
 
+function measuredBy({ measurement }: AppraisalFile): FrozenComparison['measuredBy'] {
+  const { name, source } = RULE_SETS[measurement]
+  return { name, source }
+}
+
 /**
  * All that the report needs, taken out of an appraisal once and for good: what is in it never changes with the project, the
  * rates or the engine. It holds no rate, and amounts of groups only.
@@ -120,6 +126,7 @@ export function freezeComparison(compared: ComparedProject, sending: Sending, fr
     sections: sections(compared),
     alsoCompared: freezeAlsoRows(compared.alsoCompared[0]!, compared.alsoCompared[1]!),
     scope: freezeScope(file.scope, compared.scopeDifferences, { ribbed: ribbed.mark, solid: solid.mark }),
+    measuredBy: measuredBy(file),
     calculations: [...compared.calculations],
   }
 }

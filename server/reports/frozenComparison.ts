@@ -86,6 +86,8 @@ export const frozenComparison = z.strictObject({
   /** Beside the cost; absent in what was sent before it was compared. */
   alsoCompared: z.array(frozenAlsoRow).optional(),
   scope: frozenScope.optional(),
+  /** Rules that the quantities are measured by, by name and source; absent in what was sent before they were kept. */
+  measuredBy: z.strictObject({ name: z.string(), source: z.string() }).optional(),
   /** Of the tightest panel of each scheme; absent in what was sent before it was kept. */
   calculations: z.array(frozenCalculation).optional(),
 })

@@ -4,6 +4,9 @@ import { dayText, figureText, listText } from '../figureText'
 import type { FrozenComparison } from '../frozenComparison'
 import type { ReportFact } from './reportFact'
 
+/** Conditions of exposure that are no class of their own name. */
+const EXPOSURE_WORDS: Readonly<Record<string, string>> = { verySevere: 'very severe', mostSevere: 'most severe' }
+
 function basisText(brief: Brief): string {
   const values = nationalValuesText(brief)
   if (brief.basis === 'EN1992') return `EN 1992-1-1 and EN 1992-1-2 with ${values}.`
@@ -27,9 +30,10 @@ function loadText(brief: Brief): string {
   return words.length === 0 ? 'None beside the own weight.' : `${listText(words)} kN/m², beside the own weight.`
 }
 
-function fireText({ fireMinutes, cover }: Brief): string {
+function fireText({ fireMinutes, cover, exposure }: Brief): string {
   const period = fireMinutes === 0 ? 'No fire period' : `${fireMinutes} minutes of fire`
-  return `${period}; ${figureText(cover, 0)} mm of cover to the outermost bar.`
+  const exposed = exposure === undefined ? '' : `, checked for exposure ${EXPOSURE_WORDS[exposure] ?? exposure}`
+  return `${period}; ${figureText(cover, 0)} mm of cover to the outermost bar${exposed}.`
 }
 
 function ribbedText({ ribbed: { specification, name } }: FrozenComparison): string {
@@ -55,6 +59,17 @@ function markupText({ markups, edition }: FrozenComparison): string {
   return edition.taxBasis === '' ? included : `${included} Tax basis of the rates: ${edition.taxBasis.replace(/\.$/, '')}.`
 }
 
+/** By which rules the quantities are measured; nothing for what was sent before they were kept. */
+function measuredFacts({ measuredBy }: FrozenComparison): ReportFact[] {
+  return measuredBy === undefined ? [] : [{ title: 'Measured by', text: `${measuredBy.name}: ${measuredBy.source}.` }]
+}
+
+function momentFacts({ redistribution }: Brief): ReportFact[] {
+  if (redistribution === 0) return []
+  const share = figureText(redistribution, 0)
+  return [{ title: 'Moments', text: `${share} % of elastic support moments are moved to the spans where the code allows it.` }]
+}
+
 /** What the figures rest on, so that they can be questioned. */
 export function basisFacts(frozen: FrozenComparison): ReportFact[] {
   const { brief, edition } = frozen
@@ -62,10 +77,12 @@ export function basisFacts(frozen: FrozenComparison): ReportFact[] {
     { title: 'Sized by', text: basisText(brief) },
     { title: 'Loads', text: loadText(brief) },
     { title: 'Strengths', text: strengthText(brief) },
+    ...momentFacts(brief),
     { title: 'Fire and cover', text: fireText(brief) },
     { title: 'Ribbed', text: ribbedText(frozen) },
     { title: 'Solid', text: solidText(frozen) },
     { title: 'Area', text: areaText(frozen) },
+    ...measuredFacts(frozen),
     {
       title: 'Rates',
       text: `${edition.region}, edition ${edition.number}, prices of ${dayText(edition.baseDate)}, ${edition.currency}. This report keeps them whatever the book says later.`,
