@@ -10,7 +10,7 @@ export const resourceCode = z
   .regex(/^[\p{L}\p{N}][\p{L}\p{N} ._/-]*$/u, 'expected a code of letters, digits, spaces and . _ / -, as CEM-42')
 
 /** A decimal above zero: an output, an amount of material in a unit of the work. */
-const positiveDecimal = decimalString.refine((text) => Number(text) > 0, 'expected a number above zero')
+export const positiveDecimal = decimalString.refine((text) => Number(text) > 0, 'expected a number above zero')
 
 /** Material in one unit of the work: delivered price × quantity × (1 + waste) ÷ uses. */
 export const materialLine = z.strictObject({

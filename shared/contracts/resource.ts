@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { resourceCode } from './buildUp'
+import { positiveDecimal, resourceCode } from './buildUp'
 import { decimalString, id, line, optionalLine, version } from './primitives'
 
 export const resourceKind = z.enum(['material', 'labour', 'plant'])
@@ -34,7 +34,7 @@ export const gangInput = z.strictObject({
   code: resourceCode,
   description: line(200),
   members: z
-    .array(z.strictObject({ resource: resourceCode, count: decimalString }))
+    .array(z.strictObject({ resource: resourceCode, count: positiveDecimal }))
     .min(1)
     .max(20),
 })
@@ -49,7 +49,7 @@ export const quotationInput = z.strictObject({
   /** Price of what is quoted, delivered. */
   price: decimalString,
   /** Units of the resource in what is quoted: 120 for a pallet of 120 blocks. */
-  contains: decimalString.refine((text) => Number(text) > 0, 'expected a number above zero'),
+  contains: positiveDecimal,
   reference: optionalLine(120),
   day: z.iso.date(),
   validUntil: z.iso.date().nullable(),
