@@ -18,6 +18,7 @@ export interface AuditEvent {
     | 'request.refused'
     | 'project.pricesChanged'
     | 'project.readersChanged'
+    | 'edition.pricesChanged'
     | 'firm.made'
   readonly firmId: string | null
   readonly personId: string | null

@@ -4,7 +4,6 @@ import { AppError } from '../errors'
 
 interface Versioned extends ObjectLiteral {
   firmId: string
-  id: string
   version: number
 }
 
@@ -17,13 +16,13 @@ async function rethrowMiss<T extends Versioned>(
 }
 
 /**
- * Changes the row `row` (a firm's, by id) where it still has `version`, and raises its version by one.
+ * Changes the row `row` (a firm's, by its key) where it still has `version`, and raises its version by one.
  * @throws AppError `not_found` when there is no such row, `stale` when it has another version
  */
 export async function updateVersioned<T extends Versioned>(
   tx: EntityManager,
   entity: EntityTarget<T>,
-  row: FindOptionsWhere<T> & { firmId: string; id: string },
+  row: FindOptionsWhere<T> & { firmId: string },
   version: number,
   change: QueryDeepPartialEntity<T>,
 ): Promise<void> {
@@ -36,7 +35,7 @@ export async function updateVersioned<T extends Versioned>(
 export async function deleteVersioned<T extends Versioned>(
   tx: EntityManager,
   entity: EntityTarget<T>,
-  row: FindOptionsWhere<T> & { firmId: string; id: string },
+  row: FindOptionsWhere<T> & { firmId: string },
   version: number,
 ): Promise<void> {
   const { affected } = await tx.delete(entity, { ...row, version })

@@ -1,5 +1,5 @@
 import type { CatalogueBlock } from '#shared/contracts/blockCatalogue'
-import type { Edition, EditionState, EditionWithRates, Rate, RateBook } from '#shared/contracts/rateBook'
+import type { Edition, EditionState, EditionWithRates, RateBook } from '#shared/contracts/rateBook'
 import { In, type EntityManager } from 'typeorm'
 import { BlockEntity } from '../../entities/rates/BlockEntity'
 import { EditionEditorEntity } from '../../entities/rates/EditionEditorEntity'
@@ -9,6 +9,7 @@ import { RateEntity } from '../../entities/rates/RateEntity'
 import { AppError } from '../../errors'
 import { plainDecimal } from '../decimalText'
 import { hasRole, requireRole, type SignedIn } from '../session/signedIn'
+import { toRate } from './rateRow'
 
 /** States of an edition that has once been published: it is fixed, and every surveyor may read it. */
 const FIXED: readonly EditionState[] = ['published', 'superseded', 'withdrawn']
@@ -32,11 +33,6 @@ function toEdition(row: EditionEntity, { region, currency }: RateBookEntity, isO
   const { holdsOverheads, reason, corrects, version } = row
   const facts = { baseDate, validUntil, compiledBy, checkedBy, taxBasis, note, holdsOverheads, reason, corrects }
   return { id, bookId, region, currency, number, state, ...facts, isOwnWork, version }
-}
-
-function toRate({ item, description, unit, low, likely, high, source, sourceDate, buildUp, version }: RateEntity): Rate {
-  const price = { low: plainDecimal(low), likely: plainDecimal(likely), high: plainDecimal(high) }
-  return { item, description, unit, ...price, source, sourceDate, buildUp, version }
 }
 
 /** The firm's rate books in the order of their regions, each with the editions the reader may see, newest first. */
