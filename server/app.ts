@@ -21,7 +21,9 @@ import { localMailRoutes } from './routes/localMailRoutes'
 import { passwordRoutes } from './routes/passwordRoutes'
 import { personRoutes } from './routes/personRoutes'
 import { projectRoutes } from './routes/projectRoutes'
+import { priceRoutes } from './routes/priceRoutes'
 import { rateRoutes } from './routes/rateRoutes'
+import { resourceRoutes } from './routes/resourceRoutes'
 import { sessionRoutes } from './routes/sessionRoutes'
 import type { AppraisalPool } from './services/appraisal/appraisalPool'
 
@@ -54,6 +56,8 @@ function api({ db, env, appraisals, printer = createPdfPrinter(env.chromiumPath)
     .use(projectRoutes(manager, appraisals))
     .use(appraisalRoutes(manager, appraisals))
     .use(rateRoutes(manager))
+    .use(resourceRoutes(manager))
+    .use(priceRoutes(manager))
     .use(contactRoutes(manager))
     .use(dispatchRoutes(manager, appraisals, printer))
     .use(personRoutes(manager, env.origin))

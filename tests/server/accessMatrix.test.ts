@@ -7,7 +7,9 @@ import { ProjectEntity } from '../../server/entities/project/ProjectEntity'
 import { ProjectShareEntity } from '../../server/entities/project/ProjectShareEntity'
 import { SchemeEntity } from '../../server/entities/project/SchemeEntity'
 import { role, type Role } from '../../shared/contracts/person'
-import { clientOf, makeEdition, makeFirm, makePerson, type TestPerson } from '../support/factories'
+import { clientOf, makeFirm, makePerson, type TestPerson } from '../support/factories'
+import { makePricedEdition } from '../support/pricedDraft'
+import { blockQuotation, fixers, material, plainRate } from '../support/samplePrices'
 import { sampleLevel, sampleProject, sampleRibbed, sampleSolid } from '../support/sampleProject'
 import { TestClient, type Method } from '../support/testClient'
 import { openTestServer, type TestServer } from '../support/testServer'
@@ -22,6 +24,11 @@ interface Place {
   readonly editionId: string
   readonly contactId: string
   readonly otherId: string
+  /** A draft with resources, a gang, quotations and a built-up rate. */
+  readonly draftId: string
+  readonly resource: string
+  readonly gang: string
+  readonly quotationId: string
 }
 
 interface Row {
@@ -115,6 +122,79 @@ const ROWS: readonly Row[] = [
   { method: 'post', path: '/appraisals/preview', may: EVERYBODY, ok: 400 },
   { method: 'get', path: '/rate-books', may: ['surveyor', 'estimator'], ok: 200 },
   { method: 'get', path: '/editions/:editionId', may: ['surveyor', 'estimator'], ok: 200 },
+  { method: 'get', path: '/editions/:editionId/resources', may: ['surveyor', 'estimator'], ok: 200 },
+  { method: 'post', path: '/editions/:draftId/resources', may: ['estimator'], ok: 201, body: () => material('new') },
+  { method: 'get', path: '/editions/:editionId/resources/:resource', may: ['surveyor', 'estimator'], ok: 200 },
+  {
+    method: 'put',
+    path: '/editions/:draftId/resources/:resource',
+    may: ['estimator'],
+    ok: 200,
+    version: 1,
+    body: ({ resource }) => material(resource),
+  },
+  { method: 'delete', path: '/editions/:draftId/resources/:resource', may: ['estimator'], ok: 204, version: 1 },
+  {
+    method: 'post',
+    path: '/editions/:editionId/resources/:resource/preview',
+    may: ['surveyor', 'estimator'],
+    ok: 200,
+    body: ({ resource }) => material(resource),
+  },
+  {
+    method: 'put',
+    path: '/editions/:draftId/resources/:resource/choice',
+    may: ['estimator'],
+    ok: 200,
+    version: 1,
+    body: ({ quotationId }) => ({ quotation: quotationId }),
+  },
+  {
+    method: 'post',
+    path: '/editions/:editionId/resources/:resource/choice/preview',
+    may: ['surveyor', 'estimator'],
+    ok: 200,
+    body: () => ({ quotation: null }),
+  },
+  { method: 'get', path: '/editions/:editionId/gangs', may: ['surveyor', 'estimator'], ok: 200 },
+  { method: 'post', path: '/editions/:draftId/gangs', may: ['estimator'], ok: 201, body: () => fixers('new') },
+  {
+    method: 'put',
+    path: '/editions/:draftId/gangs/:gang',
+    may: ['estimator'],
+    ok: 200,
+    version: 1,
+    body: ({ gang }) => fixers(gang),
+  },
+  { method: 'delete', path: '/editions/:draftId/gangs/:gang', may: ['estimator'], ok: 409, version: 1 },
+  {
+    method: 'post',
+    path: '/editions/:editionId/gangs/:gang/preview',
+    may: ['surveyor', 'estimator'],
+    ok: 200,
+    body: ({ gang }) => fixers(gang),
+  },
+  { method: 'post', path: '/editions/:draftId/quotations', may: ['estimator'], ok: 201, body: () => blockQuotation() },
+  {
+    method: 'put',
+    path: '/editions/:draftId/quotations/:quotationId',
+    may: ['estimator'],
+    ok: 200,
+    version: 1,
+    body: () => blockQuotation(),
+  },
+  { method: 'delete', path: '/editions/:draftId/quotations/:quotationId', may: ['estimator'], ok: 204, version: 1 },
+  { method: 'get', path: '/editions/:editionId/build-up/steel.bar.12', may: ['surveyor', 'estimator'], ok: 200 },
+  { method: 'post', path: '/editions/:draftId/rates/formwork.edge', may: ['estimator'], ok: 201, body: () => plainRate('m') },
+  {
+    method: 'put',
+    path: '/editions/:draftId/rates/steel.bar.12',
+    may: ['estimator'],
+    ok: 200,
+    version: 1,
+    body: () => plainRate('t'),
+  },
+  { method: 'delete', path: '/editions/:draftId/rates/steel.bar.12', may: ['estimator'], ok: 204, version: 1 },
   { method: 'get', path: '/blocks', may: ['surveyor', 'estimator'], ok: 200 },
   { method: 'get', path: '/people', may: ['admin'], ok: 200 },
   {
@@ -148,7 +228,9 @@ async function makePlace(): Promise<{ place: Place; people: Map<Role, TestPerson
   for (const asking of role.options) people.set(asking, await makePerson(server, firmId, [asking]))
   const { manager } = server.db
   const other = await makePerson(server, firmId, ['surveyor'], { state: 'invited' })
-  const editionId = await makeEdition(server, firmId)
+  const { editionId } = await makePricedEdition(server, firmId, 'published')
+  const { editionId: draftId, quotationId } = await makePricedEdition(server, firmId)
+  const prices = { editionId, draftId, quotationId, resource: 'block', gang: 'gang.fixer' }
   const [projectId, levelId, ribbedId, solidId, contactId] = [v7(), v7(), v7(), v7(), v7()]
   const of = { firmId, projectId }
   const now = new Date()
@@ -164,7 +246,7 @@ async function makePlace(): Promise<{ place: Place; people: Map<Role, TestPerson
     [...people.values()].map(({ id }) => ({ ...of, personId: id })),
   )
   await manager.insert(ContactEntity, { ...of, id: contactId, name: 'Contact', email: 'contact@example.test', createdAt: now })
-  return { place: { firmId, projectId, levelId, ribbedId, solidId, editionId, contactId, otherId: other.id }, people }
+  return { place: { firmId, projectId, levelId, ribbedId, solidId, contactId, otherId: other.id, ...prices }, people }
 }
 
 async function ask(client: TestClient, row: Row, place: Place) {
@@ -233,7 +315,7 @@ function routesOf(layers: readonly Layer[]): string[] {
 }
 
 describe('the matrix', () => {
-  const shape = (path: string) => path.replace(/:\w+/g, ':id')
+  const shape = (path: string) => path.replace(/\/(:\w+|steel\.bar\.12|formwork\.edge)/g, '/:id')
   const OUTSIDE_API = ['get /livez', 'get /readyz', 'get /{*path}']
 
   it('has a row for every route of the application, and no other', () => {
