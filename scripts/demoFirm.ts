@@ -17,6 +17,7 @@ import { DEMO_PEOPLE } from './demo/demoPeople'
 import type { DemoProject } from './demo/demoProject'
 import { DEMO_BOOKS, DEMO_RATES, type DemoEdition } from './demo/demoRates'
 import { GANNET_HOUSE } from './demo/gannetHouse'
+import { makeDemoPrices } from './demo/makeDemoPrices'
 import { MILLRACE_CLINIC } from './demo/millraceClinic'
 import { TARN_COURT } from './demo/tarnCourt'
 
@@ -52,7 +53,7 @@ async function makeBlocks(tx: EntityManager, firmId: string): Promise<Map<string
 
 async function makeEdition(tx: EntityManager, firmId: string, bookId: string, edition: DemoEdition): Promise<string> {
   const id = v7()
-  const { factors, state, ...own } = edition
+  const { factors, state, isBuiltUp, ...own } = edition
   await tx.insert(EditionEntity, {
     ...own,
     firmId,
@@ -79,6 +80,7 @@ async function makeEdition(tx: EntityManager, firmId: string, bookId: string, ed
     }
   })
   await tx.insert(RateEntity, rates)
+  if (isBuiltUp) await makeDemoPrices(tx, firmId, id)
   await tx.update(EditionEntity, { firmId, id }, { state })
   return id
 }

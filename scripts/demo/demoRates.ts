@@ -117,6 +117,8 @@ export interface DemoEdition {
   readonly baseDate: string
   readonly validUntil: string | null
   readonly note: string
+  /** Has resources, gangs and quotations, and some of its rates are built up from them. */
+  readonly isBuiltUp?: true
   readonly factors: Readonly<Record<DemoRate['trade'], number>>
 }
 
@@ -138,6 +140,7 @@ export const DEMO_BOOKS: readonly { region: string; editions: readonly DemoEditi
         baseDate: '2026-09-01',
         validUntil: '2027-02-28',
         note: 'Demo data, invented. Steel fell since edition 3, cement and wages rose.',
+        isBuiltUp: true,
         factors: { concrete: 1, blocks: 1, steel: 1, labour: 1 },
       },
     ],
