@@ -1,5 +1,6 @@
 import { flushPromises } from '@vue/test-utils'
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
+import { RULE_SETS } from '#shared/takeoff/ruleSets'
 import QuantitiesView from '../../../src/views/QuantitiesView.vue'
 import { aPricedSheet, openSheet } from '../../support/openSheet'
 import { allByRole, byRole } from '../../support/screen'
@@ -69,6 +70,25 @@ describe('QuantitiesView', () => {
     byRole('button', 'Close').click()
     await flushPromises()
     expect(table(/^Parts of/)).toBeUndefined()
+  })
+
+  it('measures by other rules when they are chosen, says what they change, and opens a composite to what it adds up', async () => {
+    const { store, settle } = await shown()
+    expect(byRole('row', /^Concrete in slabs/)).toBeTruthy()
+    byRole('combobox', 'Measured by').click()
+    await flushPromises()
+    const { name } = RULE_SETS.composite
+    ;[...document.querySelectorAll<HTMLElement>('[role=option]')].find(({ textContent }) => textContent.includes(name))!.click()
+    await settle()
+    expect(store.project?.measurement).toBe('composite')
+    expect(document.body.textContent).toContain('Against the rules for comparing')
+    const [ribbed] = store.full!.appraisal.schemes
+    const composite = ribbed!.quantities.find(({ item }) => item === 'floor.ribbed')!
+    expect(composite.analysis!.map(({ item }) => item)).toContain('concrete.slab')
+    byRole('button', /^Floor of ribs/).click()
+    await flushPromises()
+    const opened = document.querySelector('div.opened')!.textContent
+    for (const { net } of composite.analysis!.filter((part) => part.unit === 'm³')) expect(opened).toContain(net.toFixed(2))
   })
 
   it('says where to begin when there is no panel', async () => {
