@@ -8,6 +8,9 @@ import type { SlabContext } from '../sizing/solid/slabContext'
 import type { CalculationEntry, CalculationLine } from './calculation'
 import { reckoned, said, worked } from './line'
 
+/** Moments this close are one. */
+const SAME = 1e-9
+
 const ENDS: readonly EndOfSpan[] = ['start', 'end']
 
 /** What coefficients are of: ultimate load, kN/m², and span, m. */
@@ -22,6 +25,18 @@ function momentLine(symbol: string, momentNmm: number, { load, spanM, span }: Sc
   const value = momentNmm / 1e6
   const coefficient = momentNmm / 1e3 / (load * spanM ** 2) / 1e3
   return reckoned(symbol, `c·n·${span}²`, `${figure(coefficient, 4)}·${figure(load, 3)}·${figure(spanM, 3)}²`, value, 'kNm/m')
+}
+
+/** The moment over a support: the panel's own, and where the floor behind has a larger one, that of the two which counts. */
+function hoggingLines(momentNmm: number, ownNmm: number, scale: Scale): CalculationLine[] {
+  if (momentNmm <= 0) return []
+  if (momentNmm <= ownNmm * (1 + SAME)) return [momentLine('M hogging', momentNmm, scale)]
+  const [own, counts] = [ownNmm / 1e6, momentNmm / 1e6]
+  const larger = reckoned('M hogging', 'max(M own; M behind)', `max(${figure(own, 2)}; ${figure(counts, 2)})`, counts, 'kNm/m')
+  return [
+    ...(own > 0 ? [momentLine('M own', ownNmm, scale)] : []),
+    { ...larger, note: 'of unequal moments the larger counts on both sides, on the safe side' },
+  ]
 }
 
 /** A shear as a coefficient of n·l. */
@@ -51,9 +66,9 @@ function spanEntries(name: string, { axis, ends, saggingNmm }: SlabSpan, scale: 
   const atEnd = (end: EndOfSpan): CalculationEntry[] => {
     const side = axis.ends[end]
     if (side.isFree) return []
-    const { hoggingNmm, shearN } = ends[end]
-    const hogging = hoggingNmm > 0 ? [momentLine('M hogging', hoggingNmm, scale)] : []
-    return [worked(`${name}, ${endName({ ends: axis.ends }, end)}`, clause, ...hogging, shearLine('V', shearN, scale))]
+    const { hoggingNmm, ownNmm, shearN } = ends[end]
+    const heading = `${name}, ${endName({ ends: axis.ends }, end)}`
+    return [worked(heading, clause, ...hoggingLines(hoggingNmm, ownNmm, scale), shearLine('V', shearN, scale))]
   }
   return [worked(`${name}, midspan`, clause, momentLine('M sagging', saggingNmm, scale)), ...ENDS.flatMap(atEnd)]
 }
@@ -74,17 +89,16 @@ export function ribbedForceEntries({ context, panel }: RibTask): CalculationEntr
       unit,
     )
   }
-  const moment = (symbol: string, momentNmm: number) => [
-    momentLine(symbol, momentNmm, scale),
-    ofRib(symbol, momentNmm / 1e6, 'kNm'),
-  ]
   const atEnd = (end: EndOfSpan): CalculationEntry[] => {
     if (ends[end].edges.length === 0) return [worked(endsAtVoid, clause, said('hangs on trimmers of a void'))]
     const [hoggingNmm, shearN] = [forces.hoggingNmm(end, 0), forces.shearN(end, 0)]
-    const hogging = ends[end].isContinuous && hoggingNmm > 0 ? moment('M hogging', hoggingNmm) : []
+    const ownNmm = forces.ownHoggingNmm?.(end) ?? hoggingNmm
+    const isHogging = ends[end].isContinuous && hoggingNmm > 0
+    const hogging = isHogging ? [...hoggingLines(hoggingNmm, ownNmm, scale), ofRib('M hogging', hoggingNmm / 1e6, 'kNm')] : []
     return [worked(endName(context, end), clause, ...hogging, shearLine('V', shearN, scale), ofRib('V', shearN / 1000, 'kN'))]
   }
-  return [worked('midspan', clause, ...moment('M sagging', forces.saggingNmm)), ...ENDS.flatMap(atEnd)]
+  const sagging = [momentLine('M sagging', forces.saggingNmm, scale), ofRib('M sagging', forces.saggingNmm / 1e6, 'kNm')]
+  return [worked('midspan', clause, ...sagging), ...ENDS.flatMap(atEnd)]
 }
 
 const endsAtVoid = 'end at a void'

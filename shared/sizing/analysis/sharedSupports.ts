@@ -38,6 +38,7 @@ export function raisedTo(forces: SpanForces, spanMm: number, least: Readonly<Rec
   return {
     ...forces,
     key: `${forces.key};${forcesKey([start, end])}`,
+    ownHoggingNmm: (at) => forces.hoggingNmm(at, 0),
     hoggingNmm: (at, from) => forces.hoggingNmm(at, from) + carried(at, from),
     casesAt: (at, from) => forces.casesAt(at, from).map((each) => ({ ...each, hoggingNmm: each.hoggingNmm + carried(at, from) })),
   }

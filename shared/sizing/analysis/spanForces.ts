@@ -16,6 +16,8 @@ export interface SpanForces {
   readonly key: string
   readonly saggingNmm: number
   readonly hoggingNmm: (end: EndOfSpan, fromSupportMm: number) => number
+  /** Over the support, before it was raised to that of the floor behind; absent where none is raised. */
+  readonly ownHoggingNmm?: (end: EndOfSpan) => number
   readonly shearN: (end: EndOfSpan, fromSupportMm: number) => number
   /** The same section under each load case by itself; shear positive upwards on the side of `end`. */
   readonly casesAt: (end: EndOfSpan, fromSupportMm: number) => readonly SectionForces[]

@@ -18,9 +18,14 @@ import { continuousEnds, refuseUnheld, type SlabThickness, type Spanning, spanni
 /** Force at one end of a span: moment, N·mm per metre, and shear, N per metre; length of a cantilever that goes on behind it, mm, or 0. */
 export interface EndForces {
   readonly hoggingNmm: number
+  /** Before it was raised to that of the floor behind, where it was. */
+  readonly ownNmm: number
   readonly shearN: number
   readonly overhangMm: number
 }
+
+/** As the panel alone has them. */
+const endForces = (hoggingNmm: number, shearN: number): EndForces => ({ hoggingNmm, ownNmm: hoggingNmm, shearN, overhangMm: 0 })
 
 /** One direction of a slab that carries load. */
 export interface SlabSpan {
@@ -93,11 +98,7 @@ function spanLine({ plan, first, firstMm, isTwoWay, isCantilever, loads }: Spann
 
 function oneWay({ first, second, firstMm, secondMm, loads }: Spanning, strip: Strip, rules: AnalysisRules): SlabAnalysis {
   const forces = stripForces(strip, rules)
-  const at = (end: EndOfSpan): EndForces => ({
-    hoggingNmm: forces.hoggingNmm(end, 0),
-    shearN: forces.shearN(end, 0),
-    overhangMm: 0,
-  })
+  const at = (end: EndOfSpan) => endForces(forces.hoggingNmm(end, 0), forces.shearN(end, 0))
   return {
     short: {
       axis: first,
@@ -148,8 +149,8 @@ function twoWay({ plan, first, second, firstMm, secondMm, loads }: Spanning, loa
     redistributedShare: COEFFICIENT_REDISTRIBUTION,
     saggingNmm,
     ends: {
-      start: { hoggingNmm: hoggingNmm[0], shearN: shearN[0], overhangMm: 0 },
-      end: { hoggingNmm: hoggingNmm[1], shearN: shearN[1], overhangMm: 0 },
+      start: endForces(hoggingNmm[0], shearN[0]),
+      end: endForces(hoggingNmm[1], shearN[1]),
     },
   })
   return {

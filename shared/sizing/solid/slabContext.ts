@@ -3,7 +3,7 @@ import type { EndOfSpan } from '../analysis/spanForces'
 import type { CodeBasis } from '../codeBasis'
 import { endName } from '../ribbed/ribContext'
 import { depthLeft } from '../sectionDepth'
-import type { SlabAnalysis, SlabSpan } from './slabAnalysis'
+import type { EndForces, SlabAnalysis, SlabSpan } from './slabAnalysis'
 import type { SlabAxis, SlabPlan, SlabSide } from './slabPlan'
 
 /** Everything the checks of one solid panel look at, per metre of width. */
@@ -97,8 +97,12 @@ export function givenTop({ given }: SlabContext, { direction }: TopPlace): BarLa
  */
 export function slabKey({ heightMm, given, analysis }: SlabContext): string {
   const { short, long, other, aspect, method, panelCase } = analysis
-  const spanKey = (span: SlabSpan | null) =>
-    span && [span.spanMm, span.position, span.redistributedShare, span.saggingNmm, span.ends]
+  const endKey = ({ hoggingNmm, shearN, overhangMm }: EndForces) => [hoggingNmm, shearN, overhangMm]
+  const spanKey = (span: SlabSpan | null) => {
+    if (span === null) return null
+    const { spanMm, position, redistributedShare, saggingNmm, ends } = span
+    return [spanMm, position, redistributedShare, saggingNmm, endKey(ends.start), endKey(ends.end)]
+  }
   const axisKey = ({ clearMm, ends }: SlabAxis) => [clearMm, ends]
   const round = (_: string, value: unknown) => (typeof value === 'number' ? Number(value.toPrecision(10)) : value)
   const forces = [spanKey(short), spanKey(long), axisKey(short.axis), axisKey(other), aspect, method, panelCase]
