@@ -109,6 +109,13 @@ const routes: NamedRoute[] = [
     meta: { title: 'Rates', roles: ['surveyor', 'estimator'] },
   },
   {
+    path: '/rates/:editionId/resources',
+    name: 'resources',
+    props: true,
+    component: () => import('../views/ResourcesView.vue'),
+    meta: { title: 'Resources', roles: ['surveyor', 'estimator'] },
+  },
+  {
     path: '/people',
     name: 'people',
     component: () => import('../views/PeopleView.vue'),

@@ -17,6 +17,7 @@ export type RouteName =
   | 'checks'
   | 'sent'
   | 'rates'
+  | 'resources'
   | 'people'
   | 'received'
   | 'notFound'

@@ -31,6 +31,7 @@ const NAMES = [
   'received',
   'people',
   'rates',
+  'resources',
 ] as const
 
 /** Mounts a view at an address, in the document, with a router that knows every name and shows only this view. */
