@@ -18,7 +18,13 @@ export interface AuditEvent {
     | 'request.refused'
     | 'project.pricesChanged'
     | 'project.readersChanged'
+    | 'rateBook.made'
+    | 'edition.begun'
+    | 'edition.discarded'
+    | 'edition.stepped'
     | 'edition.pricesChanged'
+    | 'edition.imported'
+    | 'edition.importUndone'
     | 'firm.made'
   readonly firmId: string | null
   readonly personId: string | null

@@ -1,7 +1,7 @@
 import { typedText } from '#shared/harmlessText'
 import type { ImportField, ImportMatching } from '#shared/contracts/rateImport'
-import { readDay } from '../readDay'
-import { readPrice } from '../readPrice'
+import { readDay } from './readDay'
+import { readPrice } from './readPrice'
 import { cellText, type Cell, type ReadRow } from '../reading/readRow'
 
 /** Fields of a row as text: prices as decimals, days as ISO dates; what its cells leave open is absent. */

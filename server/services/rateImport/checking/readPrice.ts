@@ -1,5 +1,5 @@
 import { Decimal } from '#shared/pricing/decimal'
-import type { Cell } from './reading/readRow'
+import type { Cell } from '../reading/readRow'
 
 /** A number as it was read, or why it is none. */
 export type ReadNumber =
