@@ -17,15 +17,20 @@ import { appraisalRoutes } from './routes/appraisalRoutes'
 import { contactRoutes } from './routes/contactRoutes'
 import { dispatchRoutes } from './routes/dispatchRoutes'
 import { healthRoutes } from './routes/healthRoutes'
+import { importRoutes } from './routes/importRoutes'
 import { localMailRoutes } from './routes/localMailRoutes'
 import { passwordRoutes } from './routes/passwordRoutes'
 import { personRoutes } from './routes/personRoutes'
 import { projectRoutes } from './routes/projectRoutes'
 import { priceRoutes } from './routes/priceRoutes'
 import { rateRoutes } from './routes/rateRoutes'
+import { editionRoutes } from './routes/editionRoutes'
 import { resourceRoutes } from './routes/resourceRoutes'
 import { sessionRoutes } from './routes/sessionRoutes'
 import type { AppraisalPool } from './services/appraisal/appraisalPool'
+import { createImportDesk, type ImportDesk } from './services/rateImport/importDesk'
+import { importFiles } from './services/rateImport/importFiles'
+import { createTableReader } from './services/rateImport/reading/tableReader'
 
 /** What the application runs on. */
 export interface Surroundings {
@@ -35,14 +40,23 @@ export interface Surroundings {
   readonly appraisals: AppraisalPool
   /** Prints reports; absent: one of its own, started when it is first needed. */
   readonly printer?: PdfPrinter
+  /** Works on imported price lists; absent: a desk of its own. */
+  readonly imports?: ImportDesk
   /** Mail server of the local set-up; absent elsewhere, where `/mail` does not exist. */
   readonly inbox?: LocalInbox
   /** True once the server is about to stop. */
   readonly isDraining?: () => boolean
 }
 
+/** A desk for price lists in the data folder. */
+export function importDeskOf({ db, env, log }: Pick<Surroundings, 'db' | 'env' | 'log'>): ImportDesk {
+  const onFault = (cause: unknown) => log.error({ err: cause }, 'import failed')
+  return createImportDesk(db.manager, createTableReader(), importFiles(env.dataFolder), onFault)
+}
+
 /** The API below `/api`: first what is open to everybody, then what needs a session. */
-function api({ db, env, appraisals, printer = createPdfPrinter(env.chromiumPath) }: Surroundings): Router {
+function api(surroundings: Surroundings): Router {
+  const { db, env, appraisals, printer = createPdfPrinter(env.chromiumPath) } = surroundings
   const settings = { secret: env.sessionSecret, origin: env.origin }
   const { manager } = db
   return Router()
@@ -56,8 +70,10 @@ function api({ db, env, appraisals, printer = createPdfPrinter(env.chromiumPath)
     .use(projectRoutes(manager, appraisals))
     .use(appraisalRoutes(manager, appraisals))
     .use(rateRoutes(manager))
+    .use(editionRoutes(manager))
     .use(resourceRoutes(manager))
     .use(priceRoutes(manager))
+    .use(importRoutes(manager, surroundings.imports ?? importDeskOf(surroundings)))
     .use(contactRoutes(manager))
     .use(dispatchRoutes(manager, appraisals, printer))
     .use(personRoutes(manager, env.origin))

@@ -28,6 +28,8 @@ export const edition = z.strictObject({
   reason: z.string(),
   /** Number of the edition that it puts right. */
   corrects: z.int().min(1).nullable(),
+  /** Why it was last returned to its compilers, or withdrawn; else empty. */
+  stateReason: z.string(),
   /** The reader compiled it or changed a rate in it, so that somebody else must check it. */
   isOwnWork: z.boolean(),
   version,
@@ -43,6 +45,25 @@ export const editionInput = z.strictObject({
   holdsOverheads: z.boolean(),
 })
 export type EditionInput = z.infer<typeof editionInput>
+
+/** A new draft: empty, or a copy of an edition whose money is the same; `isCorrection`: it puts that edition right, and `reason` says how. */
+export const draftInput = z
+  .strictObject({ from: id.nullable(), isCorrection: z.boolean(), reason: optionalLine(400), particulars: editionInput })
+  .refine(({ from, isCorrection }) => from !== null || !isCorrection, {
+    path: ['from'],
+    error: 'expected the edition that is put right',
+  })
+  .refine(({ reason, isCorrection }) => reason !== '' || !isCorrection, { path: ['reason'], error: 'expected what is put right' })
+export type DraftInput = z.infer<typeof draftInput>
+
+/** A step in the life of an edition. Returning and withdrawing need a reason. */
+export const editionStep = z
+  .strictObject({ step: z.enum(['check', 'return', 'publish', 'withdraw']), reason: optionalLine(400) })
+  .refine(({ step, reason }) => reason !== '' || step === 'check' || step === 'publish', {
+    path: ['reason'],
+    error: 'expected a reason',
+  })
+export type EditionStep = z.infer<typeof editionStep>
 
 /** One price of an edition: all-in before preliminaries, contingency and tax. */
 export const rate = z.strictObject({
@@ -83,3 +104,6 @@ export type EditionWithRates = z.infer<typeof editionWithRates>
 /** A region's book with its editions, newest first, without their rates. */
 export const rateBook = z.strictObject({ id, region: z.string(), currency: currencyCode, editions: z.array(edition) })
 export type RateBook = z.infer<typeof rateBook>
+
+export const rateBookInput = z.strictObject({ region: line(80), currency: currencyCode })
+export type RateBookInput = z.infer<typeof rateBookInput>

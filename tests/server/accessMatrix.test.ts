@@ -2,6 +2,7 @@ import type { Express, Router } from 'express'
 import { v7 } from 'uuid'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { ContactEntity } from '../../server/entities/dispatch/ContactEntity'
+import { EditionEntity } from '../../server/entities/rates/EditionEntity'
 import { LevelEntity } from '../../server/entities/project/LevelEntity'
 import { ProjectEntity } from '../../server/entities/project/ProjectEntity'
 import { ProjectShareEntity } from '../../server/entities/project/ProjectShareEntity'
@@ -22,6 +23,7 @@ interface Place {
   readonly ribbedId: string
   readonly solidId: string
   readonly editionId: string
+  readonly bookId: string
   readonly contactId: string
   readonly otherId: string
   /** A draft with resources, a gang, quotations and a built-up rate. */
@@ -42,6 +44,7 @@ interface Row {
   readonly version?: number
 }
 
+const PARTICULARS = { baseDate: '2026-11-01', validUntil: null, taxBasis: 'before tax', note: '', holdsOverheads: true }
 const EVERYBODY = 'signedIn'
 const BEARERS = 'anybody'
 const token = 'A'.repeat(43)
@@ -121,7 +124,31 @@ const ROWS: readonly Row[] = [
   { method: 'get', path: '/dispatches/:otherId/report.html', may: EVERYBODY, ok: 404 },
   { method: 'post', path: '/appraisals/preview', may: EVERYBODY, ok: 400 },
   { method: 'get', path: '/rate-books', may: ['surveyor', 'estimator'], ok: 200 },
+  {
+    method: 'post',
+    path: '/rate-books',
+    may: ['estimator'],
+    ok: 201,
+    body: () => ({ region: 'Somewhere else', currency: 'USD' }),
+  },
+  {
+    method: 'post',
+    path: '/rate-books/:bookId/editions',
+    may: ['estimator'],
+    ok: 201,
+    body: ({ editionId }) => ({ from: editionId, isCorrection: true, reason: 'because', particulars: PARTICULARS }),
+  },
   { method: 'get', path: '/editions/:editionId', may: ['surveyor', 'estimator'], ok: 200 },
+  { method: 'put', path: '/editions/:draftId', may: ['estimator'], ok: 200, version: 1, body: () => PARTICULARS },
+  { method: 'delete', path: '/editions/:draftId', may: ['estimator'], ok: 204, version: 1 },
+  {
+    method: 'post',
+    path: '/editions/:draftId/steps',
+    may: ['estimator'],
+    ok: 200,
+    version: 1,
+    body: () => ({ step: 'check', reason: '' }),
+  },
   { method: 'get', path: '/editions/:editionId/resources', may: ['surveyor', 'estimator'], ok: 200 },
   { method: 'post', path: '/editions/:draftId/resources', may: ['estimator'], ok: 201, body: () => material('new') },
   { method: 'get', path: '/editions/:editionId/resources/:resource', may: ['surveyor', 'estimator'], ok: 200 },
@@ -230,7 +257,8 @@ async function makePlace(): Promise<{ place: Place; people: Map<Role, TestPerson
   const other = await makePerson(server, firmId, ['surveyor'], { state: 'invited' })
   const { editionId } = await makePricedEdition(server, firmId, 'published')
   const { editionId: draftId, quotationId } = await makePricedEdition(server, firmId)
-  const prices = { editionId, draftId, quotationId, resource: 'block', gang: 'gang.fixer' }
+  const { bookId } = await manager.findOneByOrFail(EditionEntity, { firmId, id: editionId })
+  const prices = { editionId, bookId, draftId, quotationId, resource: 'block', gang: 'gang.fixer' }
   const [projectId, levelId, ribbedId, solidId, contactId] = [v7(), v7(), v7(), v7(), v7()]
   const of = { firmId, projectId }
   const now = new Date()

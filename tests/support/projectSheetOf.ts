@@ -57,6 +57,7 @@ export function aSheet(marks: readonly string[] = ['P1', 'P2']): ProjectSheet {
       holdsOverheads: true,
       reason: '',
       corrects: null,
+      stateReason: '',
       isOwnWork: false,
       version: 1,
       rates: [

@@ -22,5 +22,7 @@ export class EditionEntity {
   @Column({ type: 'varchar', length: 400, default: '' }) reason: string
   /** Number of the edition that it puts right. */
   @Column({ type: 'int', unsigned: true, nullable: true }) corrects: number | null
+  /** Why it was last returned to its compilers, or withdrawn. */
+  @Column({ name: 'state_reason', type: 'varchar', length: 400, default: '' }) stateReason: string
   @Column({ type: 'int', unsigned: true, default: 1 }) version: number
 }

@@ -30,8 +30,8 @@ async function ownWork(
 
 function toEdition(row: EditionEntity, { region, currency }: RateBookEntity, isOwnWork: boolean): Edition {
   const { id, bookId, number, state, baseDate, validUntil, compiledBy, checkedBy, taxBasis, note } = row
-  const { holdsOverheads, reason, corrects, version } = row
-  const facts = { baseDate, validUntil, compiledBy, checkedBy, taxBasis, note, holdsOverheads, reason, corrects }
+  const { holdsOverheads, reason, corrects, stateReason, version } = row
+  const facts = { baseDate, validUntil, compiledBy, checkedBy, taxBasis, note, holdsOverheads, reason, corrects, stateReason }
   return { id, bookId, region, currency, number, state, ...facts, isOwnWork, version }
 }
 
@@ -73,6 +73,15 @@ export async function findEdition(
   const rates = await db.find(RateEntity, { where: { firmId, editionId: id }, order: { item: 'ASC' } })
   const own = personId === undefined ? new Set() : await ownWork(db, { firmId, personId }, [id])
   return { ...toEdition(row, book, own.has(id)), rates: rates.map(toRate) }
+}
+
+/** An edition without its rates, as a person sees it. @throws AppError `not_found` */
+export async function requireOneEdition(db: EntityManager, { firmId, personId }: SignedIn, id: string): Promise<Edition> {
+  const row = await db.findOneBy(EditionEntity, { firmId, id })
+  if (row === null) throw new AppError('not_found')
+  const book = await db.findOneByOrFail(RateBookEntity, { firmId, id: row.bookId })
+  const own = await ownWork(db, { firmId, personId }, [id])
+  return toEdition(row, book, own.has(id))
 }
 
 /** @throws AppError `not_found`, also for a draft when the reader is no estimator */

@@ -1,0 +1,7 @@
+import { KeepInDraft } from './keepInDraft'
+
+export class KeepQuotationInsert1796100000064 extends KeepInDraft {
+  constructor() {
+    super('quotation', 'INSERT')
+  }
+}

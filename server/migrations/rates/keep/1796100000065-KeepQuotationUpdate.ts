@@ -1,0 +1,7 @@
+import { KeepInDraft } from './keepInDraft'
+
+export class KeepQuotationUpdate1796100000065 extends KeepInDraft {
+  constructor() {
+    super('quotation', 'UPDATE')
+  }
+}
