@@ -1,3 +1,5 @@
+import { tmpdir } from 'node:os'
+import { join } from 'node:path'
 import type { Express } from 'express'
 import type { DataSource } from 'typeorm'
 import { createApp } from '../../server/app'
@@ -25,7 +27,7 @@ export function testEnv(changed: Partial<Env> = {}): Env {
     smtpUrl: null,
     mailFrom: 'Bothways <bothways@example.test>',
     localMailFolder: '/nonexistent',
-    dataFolder: '/nonexistent',
+    dataFolder: join(tmpdir(), `bothways-test-${process.pid}`),
     chromiumPath: '/usr/bin/chromium',
     clientFolder: '/nonexistent',
     trustedProxies: 0,
