@@ -1,12 +1,15 @@
 import { createServer, type Server } from 'node:http'
 import type { DataSource } from 'typeorm'
-import { createApp } from './app'
+import { createApp, importDeskOf } from './app'
 import { createDataSource } from './dataSource'
 import { EnvError, readEnv, type Env } from './env'
 import { createLog, type Log } from './log'
 import { createPdfPrinter } from './reports/pdfPrinter'
 import { createAppraisalPool } from './services/appraisal/appraisalPool'
 import { refreshAllTotals } from './services/project/projectTotals'
+import { tidyImportFiles } from './services/rateImport/importFiles'
+import type { ImportDesk } from './services/rateImport/importDesk'
+import { tidyImports } from './services/rateImport/tidyImports'
 import { tidy } from './services/tidy'
 import { startMail } from './startMail'
 
@@ -37,8 +40,15 @@ async function drain(server: Server): Promise<void> {
   clearTimeout(late)
 }
 
-function tidyNowAndHourly(db: DataSource, log: Log): NodeJS.Timeout {
-  const run = () => void tidy(db.manager, new Date()).catch((cause: unknown) => log.error({ err: cause }, 'tidying failed'))
+async function tidyAll({ manager }: DataSource, { files }: ImportDesk): Promise<void> {
+  const now = new Date()
+  await tidy(manager, now)
+  await tidyImports(manager, now)
+  await tidyImportFiles(files, now)
+}
+
+function tidyNowAndHourly(db: DataSource, imports: ImportDesk, log: Log): NodeJS.Timeout {
+  const run = () => void tidyAll(db, imports).catch((cause: unknown) => log.error({ err: cause }, 'tidying failed'))
   run()
   return setInterval(run, HOUR_MS)
 }
@@ -50,12 +60,14 @@ async function main(): Promise<void> {
   await db.initialize().catch((cause: Error) => {
     throw new StartError(`The database cannot be reached: ${cause.message}`)
   })
-  const tidying = tidyNowAndHourly(db, log)
+  const imports = importDeskOf({ db, env, log })
+  const tidying = tidyNowAndHourly(db, imports, log)
   const appraisals = createAppraisalPool()
   const printer = createPdfPrinter(env.chromiumPath)
   const mail = await startMail({ db, env, log, printer })
   let isDraining = false
-  const server = createServer(createApp({ db, env, log, appraisals, printer, inbox: mail.inbox, isDraining: () => isDraining }))
+  const surroundings = { db, env, log, appraisals, printer, imports, inbox: mail.inbox, isDraining: () => isDraining }
+  const server = createServer(createApp(surroundings))
   server.requestTimeout = 30_000
   await listen(server, env)
   log.info({ origin: env.origin, port: env.port }, 'listening')
@@ -67,6 +79,7 @@ async function main(): Promise<void> {
     isDraining = true
     clearInterval(tidying)
     await drain(server)
+    await imports.close()
     await mail.stop()
     await printer.close()
     await appraisals.close()

@@ -17,6 +17,9 @@ import { GangEntity } from './rates/GangEntity'
 import { QuotationEntity } from './rates/QuotationEntity'
 import { RateBookEntity } from './rates/RateBookEntity'
 import { RateEntity } from './rates/RateEntity'
+import { RateImportEntity } from './rates/RateImportEntity'
+import { RateImportRowEntity } from './rates/RateImportRowEntity'
+import { RateImportWriteEntity } from './rates/RateImportWriteEntity'
 import { ResourceEntity } from './rates/ResourceEntity'
 import { AttemptEntity } from './session/AttemptEntity'
 import { RefreshTokenEntity } from './session/RefreshTokenEntity'
@@ -41,6 +44,9 @@ export const ENTITIES = [
   ResourceEntity,
   GangEntity,
   QuotationEntity,
+  RateImportEntity,
+  RateImportRowEntity,
+  RateImportWriteEntity,
   BlockEntity,
   ProjectEntity,
   LevelEntity,
