@@ -16,6 +16,7 @@ import { createPdfPrinter, type PdfPrinter } from './reports/pdfPrinter'
 import { appraisalRoutes } from './routes/appraisalRoutes'
 import { contactRoutes } from './routes/contactRoutes'
 import { dispatchRoutes } from './routes/dispatchRoutes'
+import { exportRoutes } from './routes/exportRoutes'
 import { healthRoutes } from './routes/healthRoutes'
 import { importRoutes } from './routes/importRoutes'
 import { localMailRoutes } from './routes/localMailRoutes'
@@ -73,6 +74,7 @@ function api(surroundings: Surroundings): Router {
     .use(editionRoutes(manager))
     .use(resourceRoutes(manager))
     .use(priceRoutes(manager))
+    .use(exportRoutes(manager))
     .use(importRoutes(manager, surroundings.imports ?? importDeskOf(surroundings)))
     .use(contactRoutes(manager))
     .use(dispatchRoutes(manager, appraisals, printer))

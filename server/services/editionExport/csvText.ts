@@ -1,0 +1,25 @@
+import { harmlessText } from '#shared/harmlessText'
+import type { ExportedSheet, SheetCell } from './sheetCell'
+
+const quoted = (text: string): string => (/[",;\r\n]|^\s|\s$/.test(text) ? `"${text.replaceAll('"', '""')}"` : text)
+
+function textOf(cell: SheetCell): string {
+  switch (cell.kind) {
+    case 'text':
+      return quoted(harmlessText(cell.text))
+    case 'number':
+      return cell.decimal
+    case 'day':
+      return cell.iso
+    case 'formula':
+      return cell.value
+    case 'empty':
+      return ''
+  }
+}
+
+/** A sheet as text of columns: commas between, a point as decimal mark, UTF-8 with a mark, values instead of formulas. Source: RFC 4180 */
+export function* csvText({ heads, rows }: ExportedSheet): Generator<string> {
+  yield `\uFEFF${heads.map(quoted).join(',')}\r\n`
+  for (const row of rows) yield `${row.map(textOf).join(',')}\r\n`
+}
