@@ -77,10 +77,17 @@ async function firstProject(context: BrowserContext): Promise<string> {
   return projects.find(({ name }) => name === 'Tarn Court')!.id
 }
 
+async function publishedEdition(context: BrowserContext): Promise<string> {
+  const answer = await context.request.get(`${product.address}/api/rate-books`)
+  const books = (await answer.json()) as { region: string; editions: { id: string; state: string }[] }[]
+  return books.find(({ region }) => region === 'Eastmere')!.editions.find(({ state }) => state === 'published')!.id
+}
+
 const sheets = (role: Role) => sheetsFor([role]).map(({ name }) => `/projects/:id/${name}`)
 const SCREENS: readonly [who: string, paths: readonly string[]][] = [
   ['nobody', ['/sign-in', '/reset', '/invitation', '/no-such-sheet']],
   ['surveyor', ['/', '/rates', ...sheets('surveyor')]],
+  ['estimator', ['/rates', '/rates/:edition/resources']],
   ['developer', ['/', ...sheets('developer')]],
   ['engineer', ['/']],
   ['client', ['/received']],
@@ -95,7 +102,11 @@ describe('every screen', () => {
       const context = await openAs(who === 'nobody' ? undefined : who)
       const page = await context.newPage()
       const id = paths.some((path) => path.includes(':id')) ? await firstProject(context) : ''
-      for (const path of paths) expect.soft(await faultsOfScreen(page, path.replace(':id', id)), path).toEqual([])
+      const edition = paths.some((path) => path.includes(':edition')) ? await publishedEdition(context) : ''
+      for (const path of paths) {
+        const address = path.replace(':id', id).replace(':edition', edition)
+        expect.soft(await faultsOfScreen(page, address), path).toEqual([])
+      }
       await context.close()
     },
   )
