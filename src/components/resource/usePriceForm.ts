@@ -95,7 +95,7 @@ export function usePriceForm<Input, Stored extends { readonly version: number }>
   /** What is wrong with a field: by the contract, or as the server said. */
   function problemOf(path: string): string | null {
     const said = [...problems.value, ...(saving.error.value?.issues ?? [])].find((issue) => issue.path === path)
-    return said?.message ?? null
+    return said?.message.replace(/, got ""$/, '') ?? null
   }
 
   function noteWrong(path: string, expected: string | null): void {
