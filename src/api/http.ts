@@ -6,6 +6,8 @@ export type Method = 'GET' | 'POST' | 'PUT' | 'DELETE'
 
 export interface RequestOptions {
   readonly body?: unknown
+  /** A form with a file, in place of a body. */
+  readonly form?: FormData
   /** Version of the row being changed: goes out as `If-Match`. */
   readonly version?: number
   /** Makes a creating POST safe to repeat. */
@@ -32,7 +34,7 @@ function headersOf({ body, version, idempotencyKey }: RequestOptions): Headers {
 }
 
 async function send(method: Method, path: string, options: RequestOptions): Promise<Response> {
-  const { body, keepalive = false } = options
+  const { body, form, keepalive = false } = options
   try {
     return await fetch(path, {
       method,
@@ -40,7 +42,7 @@ async function send(method: Method, path: string, options: RequestOptions): Prom
       credentials: 'same-origin',
       cache: 'no-store',
       keepalive,
-      ...(body === undefined ? {} : { body: JSON.stringify(body) }),
+      ...(form !== undefined ? { body: form } : body === undefined ? {} : { body: JSON.stringify(body) }),
     })
   } catch (cause) {
     throw new ApiFailure('unreachable', cause instanceof Error ? cause.message : 'no answer')

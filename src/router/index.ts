@@ -116,6 +116,13 @@ const routes: NamedRoute[] = [
     meta: { title: 'Resources', roles: ['surveyor', 'estimator'] },
   },
   {
+    path: '/rates/:editionId/import',
+    name: 'rateImport',
+    props: true,
+    component: () => import('../views/RateImportView.vue'),
+    meta: { title: 'Price lists', roles: ['surveyor', 'estimator'] },
+  },
+  {
     path: '/people',
     name: 'people',
     component: () => import('../views/PeopleView.vue'),

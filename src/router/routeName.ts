@@ -18,6 +18,7 @@ export type RouteName =
   | 'sent'
   | 'rates'
   | 'resources'
+  | 'rateImport'
   | 'people'
   | 'received'
   | 'notFound'

@@ -31,6 +31,7 @@ const NAMES = [
   'received',
   'people',
   'rates',
+  'rateImport',
   'resources',
 ] as const
 
