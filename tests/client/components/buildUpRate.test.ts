@@ -133,7 +133,7 @@ describe('a built-up rate on screen', () => {
     answers[`GET ${at}/build-up/blocks.whole`] = () => ({ status: 200, json: theirs })
     type(byRole('textbox', 'Waste, %'), '7')
     await click('Save the rate')
-    expect(byRole('row', /wastePercent/).textContent).toMatch(/7.*5/)
+    expect(byRole('row', /materials 1, waste, %/).textContent).toMatch(/7.*5/)
     expect(text()).toContain('Blocks, theirs')
     await click('Take theirs')
     expect((byRole('textbox', 'Description') as HTMLInputElement).value).toBe('Blocks, theirs')
