@@ -5,9 +5,14 @@ import type { WorkSection } from '../quantity/itemInWords'
 import { WORK_SECTIONS, workSectionOf } from '../quantity/itemInWords'
 import type { Pair } from './phrase'
 
+const MARKUPS = {
+  plain: 'Preliminaries, contingency, tax',
+  withOverheads: 'Preliminaries, overheads and profit, contingency, tax',
+} as const
+
 /** Cost of one work section in both schemes, exact decimal strings. */
 export interface SectionCost {
-  readonly name: WorkSection | 'Preliminaries, contingency, tax'
+  readonly name: WorkSection | (typeof MARKUPS)[keyof typeof MARKUPS]
   readonly amounts: Pair<string>
 }
 
@@ -25,9 +30,10 @@ export function costBySection({ ribbed, solid }: Pair<SchemeResult>): SectionCos
   if (first === null || second === null) return []
   const row = (name: SectionCost['name'], a: Decimal, b: Decimal) => ({ name, a, b })
   const markups = (cost: Cost) => sumOf(cost.markups.map(({ amount }) => new Decimal(amount)))
+  const hasOverheads = [...first.markups, ...second.markups].some(({ name }) => name === 'overheadsAndProfit')
   return [
     ...WORK_SECTIONS.map((section) => row(section, ofSection(first, section), ofSection(second, section))),
-    row('Preliminaries, contingency, tax', markups(first), markups(second)),
+    row(hasOverheads ? MARKUPS.withOverheads : MARKUPS.plain, markups(first), markups(second)),
   ]
     .filter(({ a, b }) => !a.isZero() || !b.isZero())
     .map(({ name, a, b }) => ({ name, amounts: { ribbed: a.toFixed(), solid: b.toFixed() } }))
