@@ -3,9 +3,15 @@ import { planMargins } from '../planDimensions'
 import { planLayers, planSvg, SCALE_BAR_PX } from '../planDrawing'
 import type { PlanPanel } from '../planPanel'
 import type { SvgNode } from '../svgNode'
-import type { PaperPlan } from './paperPlan'
+import type { PaperPlan, PaperTurn } from './paperPlan'
 import { paperPlan } from './paperPlan'
 import type { PaperName } from './paperSize'
+
+/** The sheet that is asked for. */
+export interface PaperAsked {
+  readonly paper: PaperName
+  readonly turn?: PaperTurn
+}
 
 /** A drawing at the stated scale of its paper. */
 export interface OnPaper {
@@ -19,7 +25,7 @@ export interface OnPaper {
  * @param id - unique in the page: prefix of the hatches
  * @throws RangeError as `paperPlan` does
  */
-export function levelOnPaper(id: string, panels: readonly PlanPanel[], paper: PaperName, title: string): OnPaper {
+export function levelOnPaper(id: string, panels: readonly PlanPanel[], { paper, turn }: PaperAsked, title: string): OnPaper {
   const outlines = panels.map(({ panel }) => panel.outline)
   const box = boundsOf(outlines.flat())
   const subject = {
@@ -27,7 +33,7 @@ export function levelOnPaper(id: string, panels: readonly PlanPanel[], paper: Pa
     margins: planMargins(outlines),
     footPx: SCALE_BAR_PX,
   }
-  const plan = paperPlan(subject, paper)
+  const plan = paperPlan(subject, paper, turn)
   const layers = planLayers({ id, panels, fit: { pxPerMm: plan.pxPerMm } })
   return {
     plan,

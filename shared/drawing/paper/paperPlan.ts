@@ -33,6 +33,9 @@ export const WORDS_MM = { beside: 70, below: 62 } as const
 /** Clear room around the plan inside the frame, mm. */
 const CLEAR_MM = 3
 
+/** Which way the paper lies; `either`: as the larger scale asks. */
+export type PaperTurn = 'either' | 'landscape' | 'portrait'
+
 type Placing = Pick<PaperPlan, 'isLandscape' | 'words'>
 /** In order of preference where the scale is the same. */
 const PLACINGS: readonly Placing[] = [
@@ -43,13 +46,15 @@ const PLACINGS: readonly Placing[] = [
 ]
 
 /**
- * The largest scale at which a plan lies on a sheet of paper, the paper turned and the words placed as best for it.
+ * The largest scale at which a plan lies on a sheet of paper, the words placed as best for it, and the paper turned so too
+ * unless `turn` says how it lies.
  *
  * Source: project rule; scales ISO 5455, paper ISO 216
  * @throws RangeError for a floor of more than fifty thousand times the paper
  */
-export function paperPlan(subject: PaperSubject, paper: PaperName): PaperPlan {
-  const placed = PLACINGS.flatMap((placing) => {
+export function paperPlan(subject: PaperSubject, paper: PaperName, turn: PaperTurn = 'either'): PaperPlan {
+  const allowed = PLACINGS.filter(({ isLandscape }) => turn === 'either' || isLandscape === (turn === 'landscape'))
+  const placed = allowed.flatMap((placing) => {
     const reduction = reductionFor(subject, roomMm(paper, placing))
     return reduction === null ? [] : [{ ...placing, reduction }]
   })

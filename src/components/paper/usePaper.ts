@@ -2,6 +2,7 @@ import type { StoredLevel, StoredScheme } from '#shared/contracts/project'
 import { levelOnPaper } from '#shared/drawing/paper/levelOnPaper'
 import type { OnPaper } from '#shared/drawing/paper/levelOnPaper'
 import { panelOnPaper } from '#shared/drawing/paper/panelOnPaper'
+import type { PaperTurn } from '#shared/drawing/paper/paperPlan'
 import type { PaperName } from '#shared/drawing/paper/paperSize'
 import { planPanels } from '#shared/drawing/planDrawing'
 import type { PlanPanel } from '#shared/drawing/planPanel'
@@ -25,6 +26,7 @@ export function usePaper(scheme: Ref<StoredScheme | null>) {
   const store = useProjectStore()
   const id = useId()
   const paper = ref<PaperName>('A4')
+  const turn = ref<PaperTurn>('either')
   const chosenLevel = ref<string | null>(null)
   const chosenPanel = ref(WHOLE_LEVEL)
   const levels = computed(() => store.levels.filter(({ panels }) => panels.length > 0))
@@ -44,10 +46,9 @@ export function usePaper(scheme: Ref<StoredScheme | null>) {
     const panels = isWhole ? all : all.filter(({ panel }) => panel.mark === panelMark.value)
     const title = `${isWhole ? `Level ${stored.mark}` : `Panel ${panelMark.value} of level ${stored.mark}`}, ${row.specification.mark}`
     const trimmerMm = row.specification.kind === 'ribbed' ? row.specification.trimmerWidth : 0
-    const drawn = isWhole
-      ? levelOnPaper(id, panels, paper.value, title)
-      : panelOnPaper(id, panels[0]!, trimmerMm, paper.value, title)
+    const asked = { paper: paper.value, turn: turn.value }
+    const drawn = isWhole ? levelOnPaper(id, panels, asked, title) : panelOnPaper(id, panels[0]!, trimmerMm, asked, title)
     return { ...drawn, level: stored, scheme: row, panels }
   })
-  return { paper, levels, level, levelId, panelMark, sized, content }
+  return { paper, turn, levels, level, levelId, panelMark, sized, content }
 }

@@ -30,6 +30,20 @@ describe('LayoutView', () => {
     expect(paper.textContent).toContain(store.project!.reference)
   })
 
+  it('lays the paper as asked', async () => {
+    const { settle } = await shown()
+    const option = (words: string) =>
+      [...document.querySelectorAll<HTMLElement>('[role=option]')].find(({ textContent }) => textContent.includes(words))!
+    for (const words of ['portrait', 'landscape']) {
+      byRole('combobox', 'Paper lies').click()
+      await flushPromises()
+      option(words).click()
+      await settle()
+      expect(document.querySelector(`.paper.a4-${words}`)).not.toBeNull()
+      expect(document.querySelector('.type-standfirst')!.textContent).toContain(`A4 ${words}`)
+    }
+  })
+
   it('prints when asked', async () => {
     const print = vi.fn()
     vi.stubGlobal('print', print)

@@ -62,6 +62,15 @@ describe('paperPlan', () => {
     }
   })
 
+  it('lays the paper as asked, at a scale no larger than the best, and takes the best when nothing is asked', () => {
+    for (const lengthsMm of [[6000, 4500] as const, [20_000, 12_000] as const, [9000, 40_000] as const]) {
+      const subject = { lengthsMm, margins, footPx: 34 }
+      const [best, wide, high] = (['either', 'landscape', 'portrait'] as const).map((turn) => paperPlan(subject, 'A4', turn))
+      expect([wide!.isLandscape, high!.isLandscape]).toEqual([true, false])
+      expect(best!.reduction).toBe(Math.min(wide!.reduction, high!.reduction))
+    }
+  })
+
   it('refuses a floor that no scale brings onto the paper', () => {
     expect(() => paperPlan({ lengthsMm: [1e9, 1e9], margins, footPx: 34 }, 'A4')).toThrow(/1 : 50 000/)
   })
@@ -69,7 +78,7 @@ describe('paperPlan', () => {
 
 describe('levelOnPaper and panelOnPaper', () => {
   it('draws every counted block at the stated scale', () => {
-    const { node, plan } = levelOnPaper('t', panels, 'A3', 'Level L1')
+    const { node, plan } = levelOnPaper('t', panels, { paper: 'A3' }, 'Level L1')
     const counted = panels.reduce((sum, { layout }) => sum + layout!.blocks.length, 0)
     expect(blocksIn(node)).toHaveLength(counted)
     const { block } = file.schemes.find(({ kind }) => kind === 'ribbed') as { block: { length: number; width: number } }
@@ -78,8 +87,8 @@ describe('levelOnPaper and panelOnPaper', () => {
   })
 
   it('draws one panel larger, with its ribs, sizes and clear lengths', () => {
-    const whole = levelOnPaper('t', panels, 'A4', 'Level L1')
-    const { node, plan } = panelOnPaper('t', panels[0]!, 100, 'A4', 'Panel P1')
+    const whole = levelOnPaper('t', panels, { paper: 'A4' }, 'Level L1')
+    const { node, plan } = panelOnPaper('t', panels[0]!, 100, { paper: 'A4' }, 'Panel P1')
     expect(plan.reduction).toBeLessThan(whole.plan.reduction)
     expect(blocksIn(node)).toHaveLength(panels[0]!.layout!.blocks.length)
     const texts = nodesOf(node).flatMap(({ tag, children }) => (tag === 'text' ? children.map(String) : []))
