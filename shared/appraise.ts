@@ -1,4 +1,5 @@
 import { alsoCompared, type AlsoCompared } from './alsoCompared/alsoCompared'
+import { gangWeeks } from './alsoCompared/labourFigures'
 import { allScopeDifferences, type ScopeDifference } from './alsoCompared/scopeDifferences'
 import { AppraisalRefusedError } from './appraisalRefused'
 import { compareSchemes } from './comparison/compareSchemes'
@@ -7,7 +8,9 @@ import type { Appraisal, AppraisalFile, PanelResult, Scheme, SchemeResult } from
 import { checkFloor } from './layout/checkFloor'
 import { OutOfScopeError } from './outOfScope'
 import { priceScheme } from './pricing/priceScheme'
+import { ratesOfScheme } from './pricing/ratesOfScheme'
 import { scopeLines } from './pricing/scopeLines'
+import { toQuantity } from './pricing/toQuantity'
 import type { SizedPanel, SizedScheme } from './sizing/sizedPanel'
 import { sizeScheme } from './sizing/sizeScheme'
 import { deadLoadOf, grossAreaM2 } from './takeoff/deadLoad'
@@ -17,6 +20,9 @@ import { RULE_SETS } from './takeoff/ruleSets'
 import { comparingRules } from './takeoff/rules/comparingRules'
 import { schemeMeasures, type SchemeMeasures } from './takeoff/schemeMeasures'
 import { takeOffScheme } from './takeoff/takeOffScheme'
+
+/** Weeks are priced as printed. */
+const WEEK_DECIMALS = 2
 
 /** A scheme that lies outside what the rules cover, and why: it has no result, the other schemes have. */
 export interface SchemeProblem {
@@ -114,6 +120,8 @@ function appraiseScheme(scheme: Scheme, file: AppraisalFile): AppraisedScheme {
   const panels = measuredPanels(sized, levels)
   const measures = schemeMeasures(panels, scheme, levels)
   const declared = rates ? scopeLines(scope, scheme.mark, measures, rates.currency) : []
+  const isByWeek = rates !== undefined && /[1-9]/.test(rates.markups.preliminariesPerWeek)
+  const weeks = isByWeek ? toQuantity(gangWeeks(measures, file.factors.labour), WEEK_DECIMALS) : undefined
   const result: SchemeResult = {
     mark: scheme.mark,
     kind: scheme.kind,
@@ -123,7 +131,7 @@ function appraiseScheme(scheme: Scheme, file: AppraisalFile): AppraisedScheme {
     panels: sized.panels.map(panelResultOf),
     quantities,
     deadLoad: deadLoadOf(panels, scheme, comparingRules),
-    cost: rates ? priceScheme(quantities, rates, grossAreaM2(panels), declared, rules) : null,
+    cost: rates ? priceScheme(quantities, ratesOfScheme(rates, scheme.mark, weeks), grossAreaM2(panels), declared, rules) : null,
   }
   return { result, sized, measures }
 }

@@ -28,7 +28,14 @@ export const GANNET_HOUSE: DemoProject = {
       fyk: 500,
       nationalValues: {},
     },
-    markups: { preliminariesPercent: '15', contingencyPercent: '7.5', taxPercent: '8' },
+    markups: {
+      preliminariesPercent: '15',
+      preliminariesFixed: '0',
+      preliminariesPerWeek: '0',
+      overheadsAndProfitPercent: '0',
+      contingencyPercent: '7.5',
+      taxPercent: '8',
+    },
     measurement: 'comparing',
     scope: [
       ...inRatesOf(['R1', 'R2', 'S1'], ['ceiling', 'deck', 'hoisting', 'tiesChairsLinks', 'leastGang']),

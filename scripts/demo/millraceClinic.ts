@@ -28,7 +28,14 @@ export const MILLRACE_CLINIC: DemoProject = {
       fyk: 500,
       nationalValues: {},
     },
-    markups: { preliminariesPercent: '13', contingencyPercent: '5', taxPercent: '6' },
+    markups: {
+      preliminariesPercent: '13',
+      preliminariesFixed: '0',
+      preliminariesPerWeek: '0',
+      overheadsAndProfitPercent: '0',
+      contingencyPercent: '5',
+      taxPercent: '6',
+    },
     measurement: 'comparing',
     scope: [
       ...inRatesOf(['R1', 'R2', 'S1'], ['deck', 'propping', 'hoisting', 'tiesChairsLinks', 'trimmingBars']),

@@ -28,7 +28,14 @@ export const TARN_COURT: DemoProject = {
       fyk: 500,
       nationalValues: {},
     },
-    markups: { preliminariesPercent: '12', contingencyPercent: '5', taxPercent: '8' },
+    markups: {
+      preliminariesPercent: '12',
+      preliminariesFixed: '0',
+      preliminariesPerWeek: '0',
+      overheadsAndProfitPercent: '0',
+      contingencyPercent: '5',
+      taxPercent: '8',
+    },
     measurement: 'comparing',
     scope: [
       ...inRatesOf(['R1', 'S1'], ['deck', 'propping', 'hoisting', 'tiesChairsLinks', 'groutLost', 'ribbedConcrete']),

@@ -19,7 +19,7 @@ export function labourFigures(measures: SchemeMeasures, labour: LabourFactors): 
   const parts = labourParts(measures, labour)
   const hours = parts.reduce((sum, part) => sum + part.hours, 0)
   const { leastGang, hoursPerDay } = labour
-  const days = hours / (leastGang * hoursPerDay)
+  const days = gangDays(hours, labour)
   const gang = `${figure(hours)} h / (${leastGang} people × ${hoursPerDay} h) = ${figure(days)} days`
   return [
     figureOf(
@@ -31,6 +31,18 @@ export function labourFigures(measures: SchemeMeasures, labour: LabourFactors): 
     figureOf('gangDays', days, gang, 'Least gang and hours a day by the firm'),
     ...timeFigures(measures, labour, days),
   ]
+}
+
+const gangDays = (hours: number, { leastGang, hoursPerDay }: LabourFactors) => hours / (leastGang * hoursPerDay)
+
+/**
+ * Weeks that the man-hours of a scheme take its least gang, working days a week apart: what preliminaries by the week are charged for.
+ *
+ * Source: outputs, gang, hours and days by the firm
+ */
+export function gangWeeks(measures: SchemeMeasures, labour: LabourFactors): number {
+  const hours = labourParts(measures, labour).reduce((sum, part) => sum + part.hours, 0)
+  return gangDays(hours, labour) / labour.daysPerWeek
 }
 
 function timeFigures({ soffitM2, floorCount }: SchemeMeasures, labour: LabourFactors, days: number): AlsoFigure[] {

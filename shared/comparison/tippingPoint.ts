@@ -15,7 +15,7 @@ const LARGEST_RATE = new Decimal(10).pow(9)
 /**
  * The rate of an item at which two schemes cost the same, all else held: r* = r − (C₁ − C₂) / (∂C₁/∂r − ∂C₂/∂r), on unrounded
  * totals with markups in. `value` is null where the rate moves both alike, where r* is not above zero, or where it is beyond any
- * rate that can be typed (10⁹). Below r* the scheme that takes more of the item is the cheaper one.
+ * rate that can be typed (10⁹). Where the schemes have rates of their own for it, r is the first's, and both move alike. Below r* the scheme that takes more of the item is the cheaper one.
  *
  * Source: linear equation of the two totals; project rule, sizes and quantities are held fixed
  * @throws RangeError when neither bill prices the item

@@ -1,13 +1,13 @@
 import type { Cost, ItemCode } from '../contracts/appraisal'
 import { Decimal, sumOf } from '../pricing/decimal'
 import { itemisedCost } from '../pricing/itemisedCost'
-import { markupFactor } from '../pricing/markupFactor'
+import { markupFactor, markupSum } from '../pricing/markupFactor'
 
 export { markupFactor }
 
 /**
- * Total of a bill before any rounding of money: Σ printed quantity × rate × (1 + preliminaries)(1 + contingency)(1 + tax).
- * It is linear in each rate. With `item` and `rate` the bill is reckoned as if that item cost `rate`.
+ * Total of a bill before any rounding of money: Σ printed quantity × rate × the percentages of all markups, and the sums among these
+ * with the percentages charged on them. It is affine in each rate. With `item` and `rate` the bill is reckoned as if that item cost `rate`.
  *
  * Source: project rule, tipping points rest on unrounded totals
  */
@@ -15,5 +15,5 @@ export function unroundedTotal(cost: Cost, item?: ItemCode, rate?: Decimal): Dec
   const lines = itemisedCost(cost).lines.map((line) =>
     new Decimal(line.quantity).times(line.item === item && rate ? rate : line.rate),
   )
-  return sumOf(lines).times(markupFactor(cost))
+  return sumOf(lines).times(markupFactor(cost)).plus(markupSum(cost))
 }

@@ -153,12 +153,16 @@ export const level = z.strictObject({
 export const scheme = z.discriminatedUnion('kind', [ribbed, solid])
 export const markups = z.strictObject({
   preliminariesPercent: percent.default('0'),
+  preliminariesFixed: decimal.default('0'), // of each scheme, whatever it measures
+  preliminariesPerWeek: decimal.default('0'), // × weeks of the scheme's least gang, as compared beside the cost
+  overheadsAndProfitPercent: percent.default('0'), // on measured work with preliminaries, where the rates do not hold them
   contingencyPercent: percent.default('0'),
   taxPercent: percent.default('0'),
 })
 export const rates = z.strictObject({
   currency: z.string().regex(/^[A-Z]{3}$/),
   items: z.partialRecord(itemCode, decimal),
+  byScheme: z.record(mark, z.partialRecord(itemCode, decimal)).default({}), // by mark; go before `items` there
   markups: markups.prefault({}),
 })
 export const appraisalFile = z
@@ -172,7 +176,14 @@ export const appraisalFile = z
     scope: scope.default([]),
     factors: factors.prefault({}),
   })
-  .superRefine(({ schemes, scope: declarations }, context) => {
+  .superRefine(({ schemes, scope: declarations, rates: priced }, context) => {
+    for (const of of Object.keys(priced?.byScheme ?? {}))
+      if (!schemes.some((each) => each.mark === of))
+        context.addIssue({
+          code: 'custom',
+          path: ['rates', 'byScheme', of],
+          message: 'expected the mark of a scheme of the file',
+        })
     for (const { index, field, message } of scopeFaults(declarations, schemes))
       context.addIssue({ code: 'custom', path: ['scope', index, field], message })
   })
@@ -265,7 +276,22 @@ export const itemLine = z.strictObject({
   bands: z.array(band).optional(),
 })
 export const billLine = itemLine.extend({ analysis: z.array(itemLine).optional() }) // the lines that a composite adds up
-export const markupLine = z.strictObject({ name: z.enum(['preliminaries', 'contingency', 'tax']), percent, amount: money })
+export const markupName = z.enum([
+  'preliminaries',
+  'preliminariesFixed', // only where there is such a sum, as the two after it
+  'preliminariesPerWeek',
+  'overheadsAndProfit',
+  'contingency',
+  'tax',
+])
+/** A percentage of all that stands before it, or a sum (`percent` 0): fixed, or so much a week. */
+export const markupLine = z.strictObject({
+  name: markupName,
+  percent,
+  amount: money,
+  perWeek: decimal.optional(),
+  weeks: z.string().optional(),
+})
 export const cost = z.strictObject({
   currency: z.string(),
   lines: z.array(billLine),
@@ -334,6 +360,7 @@ export type DeadLoad = z.infer<typeof deadLoad>
 export type BillLine = z.infer<typeof billLine>
 export type ItemLine = z.infer<typeof itemLine>
 export type MarkupLine = z.infer<typeof markupLine>
+export type MarkupName = z.infer<typeof markupName>
 export type Cost = z.infer<typeof cost>
 export type SchemeResult = z.infer<typeof schemeResult>
 export type LedgerLine = z.infer<typeof ledgerLine>

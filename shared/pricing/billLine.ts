@@ -9,6 +9,7 @@ const KG_PER_T = 1000
 /** Most decimals of a rate in a bill. */
 const MOST_RATE_DECIMALS = 9
 
+type ItemRates = Pick<Rates, 'items' | 'currency'>
 type Decimals = MeasurementRules['decimals']
 
 /**
@@ -18,7 +19,7 @@ type Decimals = MeasurementRules['decimals']
  *
  * Source: project rule, the total is the same whatever the rules bill apart or together
  */
-export function billLine(quantity: Quantity, rates: Rates, decimals: Decimals): BillLine | null {
+export function billLine(quantity: Quantity, rates: ItemRates, decimals: Decimals): BillLine | null {
   const { item, unit, net, bands, analysis } = quantity
   if (analysis === undefined) return itemLine(quantity as ItemQuantity, rates, decimals)
   const lines = analysis.flatMap((each) => itemLine(each, rates, decimals) ?? [])
@@ -36,7 +37,7 @@ export function billLine(quantity: Quantity, rates: Rates, decimals: Decimals): 
   }
 }
 
-function itemLine({ item, unit, net, bands }: ItemQuantity, { items, currency }: Rates, decimals: Decimals): ItemLine | null {
+function itemLine({ item, unit, net, bands }: ItemQuantity, { items, currency }: ItemRates, decimals: Decimals): ItemLine | null {
   const bookRate = items[item]
   if (bookRate === undefined) return null
   const isPerThousand = unit === 'kg' && unitOf(item) === 't'

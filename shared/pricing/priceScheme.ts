@@ -1,20 +1,17 @@
-import type { BillLine, Cost, ItemQuantity, MarkupLine, Markups, Quantity, Rates } from '../contracts/appraisal'
+import type { BillLine, Cost, ItemQuantity, Quantity, Rates } from '../contracts/appraisal'
 import type { MeasurementRules } from '../takeoff/measurementRules'
 import { comparingRules } from '../takeoff/rules/comparingRules'
 import { billLine } from './billLine'
 import { Decimal, sumOf } from './decimal'
-import { printMoney, roundMoney } from './money'
+import { markupLines } from './markupLines'
+import { printMoney } from './money'
 
-/** In the order they are charged; each on the sum of all that stands before it. */
-const MARKUPS = [
-  { name: 'preliminaries', percentOf: (markups: Markups) => markups.preliminariesPercent },
-  { name: 'contingency', percentOf: (markups: Markups) => markups.contingencyPercent },
-  { name: 'tax', percentOf: (markups: Markups) => markups.taxPercent },
-] as const
+/** Rates as one scheme is priced by. `weeks`: that the amount a week is charged for, as printed. */
+export type SchemeRates = Omit<Rates, 'byScheme'> & { readonly weeks?: string }
 
 /**
- * The bill of a scheme. A line is the printed quantity × rate, rounded; preliminaries, contingency and tax follow in this order,
- * each rounded; the total is the sum of what is printed. Items without a rate are named in `unpriced` and cost nothing.
+ * The bill of a scheme. A line is the printed quantity × rate, rounded; preliminaries, overheads and profit, contingency and tax follow
+ * in this order, each rounded; the total is the sum of what is printed. Items without a rate are named in `unpriced` and cost nothing.
  *
  * Source: project rule, a printed bill adds up
  * @param quantities - of all levels, each item once in each of its stages
@@ -24,7 +21,7 @@ const MARKUPS = [
  */
 export function priceScheme(
   quantities: readonly Quantity[],
-  rates: Rates,
+  rates: SchemeRates,
   grossAreaM2: number,
   scope: readonly BillLine[] = [],
   { decimals }: Pick<MeasurementRules, 'decimals'> = comparingRules,
@@ -33,7 +30,7 @@ export function priceScheme(
   const lines = [...quantities.flatMap((quantity) => billLine(quantity, rates, decimals) ?? []), ...scope]
   const items = quantities.flatMap((quantity) => quantity.analysis ?? [quantity as ItemQuantity]).map(({ item }) => item)
   const measured = sumOf(lines.map(({ amount }) => new Decimal(amount)))
-  const markups = markupLines(measured, rates)
+  const markups = markupLines(measured, rates, lines.length > 0)
   const total = measured.plus(sumOf(markups.map(({ amount }) => new Decimal(amount))))
   return {
     currency,
@@ -43,14 +40,4 @@ export function priceScheme(
     total: printMoney(total, currency),
     perArea: printMoney(total.div(grossAreaM2), currency),
   }
-}
-
-function markupLines(measured: Decimal, { markups, currency }: Rates): MarkupLine[] {
-  let running = measured
-  return MARKUPS.map(({ name, percentOf }) => {
-    const percent = percentOf(markups)
-    const amount = roundMoney(running.times(percent).div(100), currency)
-    running = running.plus(amount)
-    return { name, percent, amount: printMoney(amount, currency) }
-  })
 }

@@ -1,3 +1,4 @@
+import { markups } from '#shared/contracts/appraisal'
 import type { ProjectSheet, ProjectSummary } from '#shared/contracts/project'
 import type { Session } from '#shared/contracts/session'
 import type { Role } from '#shared/contracts/person'
@@ -25,7 +26,7 @@ export function aSheet(marks: readonly string[] = ['P1', 'P2']): ProjectSheet {
       use: 'A',
       brief,
       editionId,
-      markups: { preliminariesPercent: '10', contingencyPercent: '5', taxPercent: '0' },
+      markups: markups.parse({ preliminariesPercent: '10', contingencyPercent: '5' }),
       measurement: 'comparing',
       scope: [],
       factors,

@@ -5,7 +5,7 @@ import { declaredFor } from '#shared/contracts/sameScope'
 function ratesOf({ project, edition }: ProjectSheet): Rates | undefined {
   if (edition === null) return undefined
   const items = Object.fromEntries(edition.rates.map(({ item, likely }) => [item, likely])) as Partial<Record<ItemCode, string>>
-  return { currency: edition.currency, items, markups: project.markups }
+  return { currency: edition.currency, items, byScheme: {}, markups: project.markups }
 }
 
 /** The appraisal file of a stored project, priced by its edition's likely rates. Null while it has no panel or no scheme. */

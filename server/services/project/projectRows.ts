@@ -1,4 +1,9 @@
-import { brief as briefContract, panel as panelContract, scheme as schemeContract } from '#shared/contracts/appraisal'
+import {
+  brief as briefContract,
+  markups as markupsContract,
+  panel as panelContract,
+  scheme as schemeContract,
+} from '#shared/contracts/appraisal'
 import { factors as factorsContract } from '#shared/contracts/factors'
 import { scope as scopeContract } from '#shared/contracts/sameScope'
 import type { Project, StoredLevel, StoredScheme } from '#shared/contracts/project'
@@ -18,16 +23,17 @@ export async function requireProject(db: EntityManager, firmId: string, id: stri
 
 /** A project's row as the contract has it; fields younger than the row take their defaults. */
 export async function toProject(db: EntityManager, row: ProjectEntity): Promise<Project> {
-  const { id, name, reference, place, use, editionId, markups, measurement, version } = row
+  const { id, name, reference, place, use, editionId, measurement, version } = row
   const person = await db.findOneByOrFail(PersonEntity, { firmId: row.firmId, id: row.updatedBy })
   const given = {
     brief: briefContract.parse(row.brief),
+    markups: markupsContract.parse(row.markups),
     scope: scopeContract.parse(row.scope ?? []),
     factors: factorsContract.parse(row.factors ?? {}),
     updatedAt: row.updatedAt.toISOString(),
     updatedBy: person.name,
   }
-  return { id, name, reference, place, use, editionId, markups, measurement, version, ...given }
+  return { id, name, reference, place, use, editionId, measurement, version, ...given }
 }
 
 /** A level's row as the contract has it; fields of its panels younger than the row take their defaults. */

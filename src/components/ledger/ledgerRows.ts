@@ -4,6 +4,7 @@ import { Decimal, sumOf } from '#shared/pricing/decimal'
 import { itemisedCost } from '#shared/pricing/itemisedCost'
 import { printMoney } from '#shared/pricing/money'
 import { formatDecimal } from '../base/formatDecimal'
+import { markupName, markupWorking } from '../bill/markupInWords'
 import { rateDecimals } from '../bill/rateDecimals'
 import type { Pair } from '../compare/phrase'
 import { itemInWords } from '../quantity/itemInWords'
@@ -26,8 +27,6 @@ export interface LedgerRows {
   readonly same: { readonly names: string; readonly amount: string; readonly difference: string } | null
   readonly total: Pair<string> & { readonly difference: string }
 }
-
-const MARKUPS: Readonly<Record<string, string>> = { preliminaries: 'Preliminaries', contingency: 'Contingency', tax: 'Tax' }
 
 /** The engine's ledger made readable: names, workings, and what is the same in both taken together. */
 export function ledgerRows(comparison: Comparison, pair: Pair<SchemeResult>): LedgerRows | null {
@@ -63,9 +62,8 @@ export function ledgerRows(comparison: Comparison, pair: Pair<SchemeResult>): Le
 function named(item: string, ribbed: Cost, solid: Cost): { name: string; working: string } {
   const code = billItem.safeParse(item)
   if (!code.success) {
-    const percent =
-      ribbed.markups.find(({ name }) => name === item)?.percent ?? solid.markups.find(({ name }) => name === item)?.percent
-    return { name: `${MARKUPS[item] ?? item}, ${percent} %`, working: 'on every item, same ones included' }
+    const lines = [...ribbed.markups, ...solid.markups].filter(({ name }) => name === item)
+    return { name: lines[0] === undefined ? item : markupName(lines[0]), working: markupWorking(lines) }
   }
   const lines = [ribbed, solid].flatMap((cost) => itemisedCost(cost).lines.find((line) => line.item === item) ?? [])
   const quantities = lines.map((line) => formatDecimal(line.quantity))

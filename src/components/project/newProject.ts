@@ -1,3 +1,4 @@
+import { markups } from '#shared/contracts/appraisal'
 import { factors } from '#shared/contracts/factors'
 import type { ProjectInput, UseCategory } from '#shared/contracts/project'
 import { useOf } from '../brief/useCategories'
@@ -36,7 +37,7 @@ export function newProjectInput({ name, reference, place, use, editionId }: NewP
       fyk: 500,
       nationalValues: {},
     },
-    markups: { preliminariesPercent: '0', contingencyPercent: '0', taxPercent: '0' },
+    markups: markups.parse({}),
     measurement: 'comparing',
     scope: [],
     factors: factors.parse({}),

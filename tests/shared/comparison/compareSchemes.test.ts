@@ -2,6 +2,7 @@ import Big from 'big.js'
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import {
+  markups,
   comparison as comparisonContract,
   itemCode,
   type ItemCode,
@@ -39,7 +40,8 @@ function schemeOf(mark: string, kind: SchemeResult['kind'], quantities: readonly
 const simpleRates: Rates = {
   currency: 'USD',
   items: { 'concrete.slab': '100', 'blocks.whole': '1' },
-  markups: { preliminariesPercent: '10', contingencyPercent: '0', taxPercent: '0' },
+  byScheme: {},
+  markups: markups.parse({ preliminariesPercent: '10' }),
 }
 const quantity = (item: ItemCode, net: number): Quantity => ({
   item,

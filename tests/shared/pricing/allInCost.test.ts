@@ -1,7 +1,7 @@
 import Big from 'big.js'
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import { cost as costContract } from '#shared/contracts/appraisal'
+import { cost as costContract, markups } from '#shared/contracts/appraisal'
 import { allInCost } from '#shared/pricing/allInCost'
 import { allocate } from '#shared/pricing/allocate'
 import { Decimal } from '#shared/pricing/decimal'
@@ -49,7 +49,7 @@ describe('allInCost', () => {
       {
         currency: 'USD',
         items: { 'concrete.slab': '150', 'blocks.whole': '1.25' },
-        markups: { preliminariesPercent: '10', contingencyPercent: '0', taxPercent: '0' },
+        markups: markups.parse({ preliminariesPercent: '10' }),
       },
       500,
     )

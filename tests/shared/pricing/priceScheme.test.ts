@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest'
-import type { Quantity, Rates } from '#shared/contracts/appraisal'
+import { markups, type Quantity, type Rates } from '#shared/contracts/appraisal'
 import { priceScheme } from '#shared/pricing/priceScheme'
 
 const concrete: Quantity = { item: 'concrete.slab', unit: 'm³', net: 33.9, parts: [] }
@@ -7,7 +7,8 @@ const bars: Quantity = { item: 'steel.bar.12', unit: 't', net: 1.205, parts: [] 
 const rates: Rates = {
   currency: 'USD',
   items: { 'concrete.slab': '149.63', 'steel.bar.12': '1310' },
-  markups: { preliminariesPercent: '10', contingencyPercent: '5', taxPercent: '7.5' },
+  byScheme: {},
+  markups: markups.parse({ preliminariesPercent: '10', contingencyPercent: '5', taxPercent: '7.5' }),
 }
 
 it('multiplies printed quantities, rounds each line and takes markups in turn', () => {

@@ -1,7 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { ledger } from '#shared/comparison/ledger'
-import type { Rates } from '#shared/contracts/appraisal'
+import { rates as ratesContract, type Rates } from '#shared/contracts/appraisal'
 import { scopeBasis, type ScopeDeclaration, scopeEntry } from '#shared/contracts/sameScope'
 import { priceScheme } from '#shared/pricing/priceScheme'
 import { scopeLines } from '#shared/pricing/scopeLines'
@@ -66,7 +66,7 @@ describe('lines of declared scope', () => {
     fc.assert(
       fc.property(declared('R1'), declared('S1'), percent, percent, (ribbed, solid, preliminaries, tax) => {
         const markups = { preliminariesPercent: preliminaries, contingencyPercent: '5', taxPercent: tax }
-        const rates: Rates = { currency: 'USD', items: {}, markups }
+        const rates: Rates = ratesContract.parse({ currency: 'USD', items: {}, markups })
         const scope = [...ribbed, ...solid]
         const first = priceScheme([], rates, 125, scopeLines(scope, 'R1', ribbedMeasures(), 'USD'))
         const second = priceScheme([], rates, 125, scopeLines(scope, 'S1', solidMeasures(), 'USD'))

@@ -29,5 +29,18 @@ export const arbitraryRates: fc.Arbitrary<Rates> = fc.record({
     preliminariesPercent: decimalText(33, 2),
     contingencyPercent: decimalText(33, 4),
     taxPercent: decimalText(33, 2),
+    preliminariesFixed: fc.constant('0'),
+    preliminariesPerWeek: fc.constant('0'),
+    overheadsAndProfitPercent: fc.constant('0'),
   }),
+  byScheme: fc.constant({}),
 })
+
+/** The same with every kind of markup: sums, so much a week for some weeks, overheads and profit. */
+export const arbitraryFullRates: fc.Arbitrary<Rates & { weeks: string }> = fc
+  .tuple(arbitraryRates, decimalText(9_000_000, 3), decimalText(50_000, 2), decimalText(33, 2), decimalText(200, 2))
+  .map(([rates, preliminariesFixed, preliminariesPerWeek, overheadsAndProfitPercent, weeks]) => ({
+    ...rates,
+    markups: { ...rates.markups, preliminariesFixed, preliminariesPerWeek, overheadsAndProfitPercent },
+    weeks,
+  }))

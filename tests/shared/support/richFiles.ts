@@ -60,7 +60,15 @@ const rates: Rates = {
     'curing.area': '0.62',
     'propping.area': '4.30',
   },
-  markups: { preliminariesPercent: '11', contingencyPercent: '5', taxPercent: '7.5' },
+  byScheme: { R1: { 'concrete.slab': '171.25' } },
+  markups: {
+    preliminariesPercent: '11',
+    preliminariesFixed: '2500',
+    preliminariesPerWeek: '640',
+    overheadsAndProfitPercent: '8',
+    contingencyPercent: '5',
+    taxPercent: '7.5',
+  },
 }
 
 const invented = { source: 'invented', date: '2026-09-01' }
