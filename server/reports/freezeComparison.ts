@@ -5,7 +5,6 @@ import type { Appraisal, AppraisalFile, RibbedScheme, SchemeResult, SolidScheme 
 import type { CatalogueBlock } from '#shared/contracts/blockCatalogue'
 import type { Project, StoredScheme } from '#shared/contracts/project'
 import type { Edition } from '#shared/contracts/rateBook'
-import { Decimal } from '#shared/pricing/decimal'
 import { itemisedCost } from '#shared/pricing/itemisedCost'
 import { comparisonSections } from '#shared/drawing/comparisonSections'
 import type { SectionSubject } from '#shared/drawing/sectionBody'
@@ -14,6 +13,7 @@ import type { SizedPanel } from '#shared/sizing/sizedPanel'
 import { itemisedQuantities } from '#shared/takeoff/itemisedQuantities'
 import { RULE_SETS } from '#shared/takeoff/ruleSets'
 import { differenceGroups } from './content/differenceGroups'
+import { chargedMarkups } from './content/markupWords'
 import { tightestChecks } from './content/tightestChecks'
 import { freezeAlsoRows, freezeScope } from './freezeBeside'
 import type { FrozenComparison } from './frozenComparison'
@@ -122,7 +122,7 @@ export function freezeComparison(compared: ComparedProject, sending: Sending, fr
     ribbed: { ...frozenScheme(schemes[0], ribbed), specification: schemes[0].specification as RibbedScheme },
     solid: { ...frozenScheme(schemes[1], solid), specification: schemes[1].specification as SolidScheme },
     groups: differenceGroups(itemisedCost(ribbed.cost), itemisedCost(solid.cost)),
-    markups: ribbed.cost.markups.filter(({ percent }) => !new Decimal(percent).isZero()).map(({ name: markup }) => markup),
+    markups: chargedMarkups(ribbed.cost),
     sections: sections(compared),
     alsoCompared: freezeAlsoRows(compared.alsoCompared[0]!, compared.alsoCompared[1]!),
     scope: freezeScope(file.scope, compared.scopeDifferences, { ribbed: ribbed.mark, solid: solid.mark }),

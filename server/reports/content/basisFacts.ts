@@ -2,6 +2,7 @@ import type { Brief } from '#shared/contracts/appraisal'
 import { nationalValuesText } from '#shared/sizing/nationalValuesText'
 import { dayText, figureText, listText } from '../figureText'
 import type { FrozenComparison } from '../frozenComparison'
+import { markupWords } from './markupWords'
 import type { ReportFact } from './reportFact'
 
 /** Conditions of exposure that are no class of their own name. */
@@ -55,7 +56,9 @@ function areaText({ floor }: FrozenComparison): string {
 
 function markupText({ markups, edition }: FrozenComparison): string {
   const included =
-    markups.length === 0 ? 'No preliminaries, contingency or tax are in the costs.' : `In both totals: ${listText(markups)}.`
+    markups.length === 0
+      ? 'No preliminaries, contingency or tax are in the costs.'
+      : `In both totals: ${listText(markupWords(markups))}.`
   return edition.taxBasis === '' ? included : `${included} Tax basis of the rates: ${edition.taxBasis.replace(/\.$/, '')}.`
 }
 

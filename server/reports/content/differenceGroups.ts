@@ -4,6 +4,7 @@ import { Decimal, sumOf } from '#shared/pricing/decimal'
 import { printMoney } from '#shared/pricing/money'
 import { listText } from '../figureText'
 import type { FrozenGroup } from '../frozenComparison'
+import { chargedMarkups, markupWords } from './markupWords'
 
 /** Items under one heading, in the words of the report. A family is an item code or its beginning. */
 const FAMILIES: readonly { group: number; family: string; word: string }[] = [
@@ -52,10 +53,10 @@ function itemGroups(ribbed: Cost, solid: Cost): Group[] {
 }
 
 function markupGroup(ribbed: Cost, solid: Cost): Group[] {
-  const used = ribbed.markups.filter(({ percent }) => !new Decimal(percent).isZero())
+  const used = chargedMarkups(ribbed)
   if (used.length === 0) return []
   const total = ({ markups }: Cost) => sumOf(markups.map(({ amount }) => new Decimal(amount)))
-  const words = used.map(({ name }) => name)
+  const words = markupWords(used)
   const difference = total(ribbed).minus(total(solid))
   return [{ words, itemDifference: new Decimal(0), difference, differing: used.length, isMarkup: true }]
 }

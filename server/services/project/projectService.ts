@@ -1,3 +1,4 @@
+import { markups as markupsContract, type Markups } from '#shared/contracts/appraisal'
 import type { Project, ProjectInput, ProjectSheet } from '#shared/contracts/project'
 import type { EntityManager } from 'typeorm'
 import { v7 } from 'uuid'
@@ -20,10 +21,20 @@ function rethrowDuplicate(error: unknown): never {
 }
 
 /** Refuses an edition that the firm has not published. One that the project has already may stay when it is superseded. */
-async function requireEdition(tx: EntityManager, who: SignedIn, editionId: string | null, present: string | null): Promise<void> {
-  if (editionId === null || editionId === present) return
+async function requireEdition(tx: EntityManager, who: SignedIn, input: ProjectInput, present: string | null): Promise<void> {
+  const { editionId } = input
+  if (editionId === null) return
+  await requireOverheadsOnce(tx, who, editionId, input.markups)
+  if (editionId === present) return
   const isPublished = await tx.existsBy(EditionEntity, { firmId: who.firmId, id: editionId, state: 'published' })
   if (!isPublished) throw refuse('editionId', 'expected a published edition of the firm')
+}
+
+/** Overheads and profit stand in the rates or among the markups, never in both. */
+async function requireOverheadsOnce(tx: EntityManager, who: SignedIn, editionId: string, markups: Markups): Promise<void> {
+  if (!/[1-9]/.test(markups.overheadsAndProfitPercent)) return
+  const holds = await tx.existsBy(EditionEntity, { firmId: who.firmId, id: editionId, holdsOverheads: true })
+  if (holds) throw refuse('markups.overheadsAndProfitPercent', 'expected 0: the rates of the edition hold overheads and profit')
 }
 
 /** @throws AppError `conflict` when the reference is taken, `invalid_request` for an edition that is not published */
@@ -35,7 +46,7 @@ export async function createProject(
 ): Promise<Project> {
   requireRole(who, 'surveyor')
   return await createOnce(db, who, request, async (tx) => {
-    await requireEdition(tx, who, input.editionId, null)
+    await requireEdition(tx, who, input, null)
     const now = new Date()
     const row = { ...input, firmId: who.firmId, id: v7(), totals: [], createdAt: now, updatedAt: now, updatedBy: who.personId }
     await tx.insert(ProjectEntity, row).catch(rethrowDuplicate)
@@ -74,7 +85,7 @@ export async function changeProject(
   requireRole(who, 'surveyor')
   return await inTransaction(db, async (tx) => {
     const before = await requireProject(tx, who.firmId, id)
-    await requireEdition(tx, who, input.editionId, before.editionId)
+    await requireEdition(tx, who, input, before.editionId)
     const change = { ...input, contentVersion: () => 'content_version + 1', updatedAt: new Date(), updatedBy: who.personId }
     await updateVersioned(tx, ProjectEntity, { firmId: who.firmId, id }, version, change).catch(rethrowDuplicate)
     await recordPriceChange(tx, who, before, input)
@@ -83,7 +94,7 @@ export async function changeProject(
 }
 
 async function recordPriceChange(tx: EntityManager, who: SignedIn, before: ProjectEntity, after: ProjectInput): Promise<void> {
-  const from = { editionId: before.editionId, markups: before.markups, scope: before.scope ?? [] }
+  const from = { editionId: before.editionId, markups: markupsContract.parse(before.markups), scope: before.scope ?? [] }
   const to = { editionId: after.editionId, markups: after.markups, scope: after.scope }
   if (JSON.stringify(from) === JSON.stringify(to)) return
   const detail = { projectId: before.id, from, to }
