@@ -9,6 +9,7 @@ import { ProjectShareEntity } from '../../server/entities/project/ProjectShareEn
 import { SchemeEntity } from '../../server/entities/project/SchemeEntity'
 import { role, type Role } from '../../shared/contracts/person'
 import { clientOf, makeFirm, makePerson, type TestPerson } from '../support/factories'
+import { importMatching, makeCommittedImport } from '../support/committedImport'
 import { makePricedEdition } from '../support/pricedDraft'
 import { blockQuotation, fixers, material, plainRate } from '../support/samplePrices'
 import { sampleLevel, sampleProject, sampleRibbed, sampleSolid } from '../support/sampleProject'
@@ -31,6 +32,8 @@ interface Place {
   readonly resource: string
   readonly gang: string
   readonly quotationId: string
+  /** An import into the draft that is put in. */
+  readonly importId: string
 }
 
 interface Row {
@@ -222,6 +225,21 @@ const ROWS: readonly Row[] = [
     body: () => plainRate('t'),
   },
   { method: 'delete', path: '/editions/:draftId/rates/steel.bar.12', may: ['estimator'], ok: 204, version: 1 },
+  { method: 'get', path: '/editions/:editionId/workbook', may: ['surveyor', 'estimator'], ok: 200 },
+  { method: 'get', path: '/editions/:editionId/tables/rates', may: ['surveyor', 'estimator'], ok: 200 },
+  { method: 'get', path: '/editions/:draftId/imports', may: ['estimator'], ok: 200 },
+  { method: 'post', path: '/editions/:draftId/imports', may: ['estimator'], ok: 400 },
+  { method: 'get', path: '/imports/:importId', may: ['estimator'], ok: 200 },
+  { method: 'get', path: '/imports/:importId/rows', may: ['estimator'], ok: 200 },
+  {
+    method: 'put',
+    path: '/imports/:importId/matching',
+    may: ['estimator'],
+    ok: 409,
+    body: () => importMatching(),
+  },
+  { method: 'post', path: '/imports/:importId/commit', may: ['estimator'], ok: 409, body: () => ({ leaveOutRefused: true }) },
+  { method: 'post', path: '/imports/:importId/undo', may: ['estimator'], ok: 200 },
   { method: 'get', path: '/blocks', may: ['surveyor', 'estimator'], ok: 200 },
   { method: 'get', path: '/people', may: ['admin'], ok: 200 },
   {
@@ -258,7 +276,8 @@ async function makePlace(): Promise<{ place: Place; people: Map<Role, TestPerson
   const { editionId } = await makePricedEdition(server, firmId, 'published')
   const { editionId: draftId, quotationId } = await makePricedEdition(server, firmId)
   const { bookId } = await manager.findOneByOrFail(EditionEntity, { firmId, id: editionId })
-  const prices = { editionId, bookId, draftId, quotationId, resource: 'block', gang: 'gang.fixer' }
+  const importId = await makeCommittedImport(server, firmId, draftId, other.id)
+  const prices = { editionId, bookId, draftId, quotationId, importId, resource: 'block', gang: 'gang.fixer' }
   const [projectId, levelId, ribbedId, solidId, contactId] = [v7(), v7(), v7(), v7(), v7()]
   const of = { firmId, projectId }
   const now = new Date()
@@ -343,7 +362,7 @@ function routesOf(layers: readonly Layer[]): string[] {
 }
 
 describe('the matrix', () => {
-  const shape = (path: string) => path.replace(/\/(:\w+|steel\.bar\.12|formwork\.edge)/g, '/:id')
+  const shape = (path: string) => path.replace(/(?<=\/tables)\/rates|\/(:\w+|steel\.bar\.12|formwork\.edge)/g, '/:id')
   const OUTSIDE_API = ['get /livez', 'get /readyz', 'get /{*path}']
 
   it('has a row for every route of the application, and no other', () => {

@@ -5,6 +5,7 @@ import type { RateImportEntity } from '../../entities/rates/RateImportEntity'
 import { RateImportRowEntity } from '../../entities/rates/RateImportRowEntity'
 import { AppError } from '../../errors'
 import { recordEvent } from '../auditLog'
+import { takeChosenPrices } from '../rates/chosenPrices'
 import { recomputeRates } from '../rates/recomputeRates'
 import { touchDraft } from '../rates/touchDraft'
 import type { SignedIn } from '../session/signedIn'
@@ -65,6 +66,7 @@ async function commit(db: EntityManager, who: SignedIn, row: RateImportEntity, t
     tell(0.3)
     await tx.query('DELETE FROM rate_import_write WHERE firm_id = ? AND import_id = ?', [firmId, row.id])
     await putAll(tx, row, writes, tell)
+    await takeChosenPrices(tx, { firmId, editionId })
     const moved = await recomputeRates(tx, firmId, editionId)
     const detail = { editionId, importId: row.id, rows: rows.length, target, moved: moved.map(({ item }) => item) }
     await recordEvent(tx, { event: 'edition.imported', firmId, personId: who.personId, detail })

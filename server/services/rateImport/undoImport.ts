@@ -7,6 +7,7 @@ import { RateImportWriteEntity } from '../../entities/rates/RateImportWriteEntit
 import { ResourceEntity } from '../../entities/rates/ResourceEntity'
 import { AppError } from '../../errors'
 import { recordEvent } from '../auditLog'
+import { takeChosenPrices } from '../rates/chosenPrices'
 import { recomputeRates } from '../rates/recomputeRates'
 import { touchDraft } from '../rates/touchDraft'
 import type { SignedIn } from '../session/signedIn'
@@ -74,6 +75,7 @@ export async function undoImport(db: EntityManager, desk: ImportDesk, who: Signe
     const writes = await tx.findBy(RateImportWriteEntity, { firmId, importId: id })
     await requireUntouched(tx, row, writes)
     await restore(tx, row, writes)
+    await takeChosenPrices(tx, { firmId, editionId })
     const moved = await recomputeRates(tx, firmId, editionId)
     const detail = { editionId, importId: id, rows: writes.length, moved: moved.map(({ item }) => item) }
     await recordEvent(tx, { event: 'edition.importUndone', firmId, personId: who.personId, detail })
