@@ -93,6 +93,16 @@ describe('quotations', () => {
     expect((await sheet()).resource).toMatchObject({ version: 1, hasChosenQuotation: false })
   })
 
+  it('leave the version of the resource where a change of another quotation does not move it', async () => {
+    const { client, at, sheet, quotationId, secondQuotationId } = await draft()
+    await client.put(`${at}/resources/block/choice`, { quotation: quotationId }, 1)
+    const same = blockQuotation({ supplier: 'Second kiln', price: '105', reference: 'as told', day: '2026-08-10' })
+    expect((await client.put(`${at}/quotations/${secondQuotationId}`, same, 1)).status).toBe(200)
+    expect((await sheet()).resource.version).toBe(2)
+    expect((await client.put(`${at}/quotations/${secondQuotationId}`, { ...same, price: '120' }, 2)).status).toBe(200)
+    expect((await sheet()).resource).toMatchObject({ version: 3, price: { likely: '0.8', high: '1' } })
+  })
+
   it('are chosen for their own resource only', async () => {
     const { client, at, quotationId } = await draft()
     const answer = await client.put(`${at}/resources/bar/choice`, { quotation: quotationId }, 1)

@@ -1,11 +1,10 @@
 import type { ImportCommit, RateImport } from '#shared/contracts/rateImport'
 import { rm } from 'node:fs/promises'
-import { In, type EntityManager } from 'typeorm'
+import { In, MoreThan, type EntityManager } from 'typeorm'
 import type { RateImportEntity } from '../../entities/rates/RateImportEntity'
 import { RateImportRowEntity } from '../../entities/rates/RateImportRowEntity'
 import { AppError } from '../../errors'
 import { recordEvent } from '../auditLog'
-import { takeChosenPrices } from '../rates/chosenPrices'
 import { recomputeRates } from '../rates/recomputeRates'
 import { touchDraft } from '../rates/touchDraft'
 import type { SignedIn } from '../session/signedIn'
@@ -20,6 +19,8 @@ import { putRows } from './writing/putWrites'
 import { requireAsSeen } from './writing/requireAsSeen'
 import { writesOf } from './writing/writesOf'
 
+/** Rows read before others get their turn. */
+const READ_AT_ONCE = 1000
 const LOG = 'INSERT INTO rate_import_write (firm_id, import_id, kind, target, `before`, version)'
 
 /** Puts the rows in and keeps how they stood. */
@@ -46,11 +47,15 @@ async function putAll(tx: EntityManager, row: RateImportEntity, writes: DraftWri
   await put(tx, row, 'rate', rates, (count) => share(resources.length + quotations.length + count))
 }
 
+/** New and changed rows in the order of the sheet, some at a time. */
 async function writtenRows(tx: EntityManager, { firmId, id }: RateImportEntity): Promise<WrittenRow[]> {
-  return await tx.find(RateImportRowEntity, {
-    where: { firmId, importId: id, state: In(['new', 'changed']) },
-    order: { row: 'ASC' },
-  })
+  const rows: RateImportRowEntity[] = []
+  for (;;) {
+    const where = { firmId, importId: id, state: In(['new', 'changed']), row: MoreThan(rows.at(-1)?.row ?? 0) }
+    const some = await tx.find(RateImportRowEntity, { where, order: { row: 'ASC' }, take: READ_AT_ONCE })
+    for (const row of some) rows.push(row)
+    if (some.length < READ_AT_ONCE) return rows
+  }
 }
 
 /** Everything in one transaction: the rows, what is needed to undo them, the rates that rest on them, the record. */
@@ -66,7 +71,6 @@ async function commit(db: EntityManager, who: SignedIn, row: RateImportEntity, t
     tell(0.3)
     await tx.query('DELETE FROM rate_import_write WHERE firm_id = ? AND import_id = ?', [firmId, row.id])
     await putAll(tx, row, writes, tell)
-    await takeChosenPrices(tx, { firmId, editionId })
     const moved = await recomputeRates(tx, firmId, editionId)
     const detail = { editionId, importId: row.id, rows: rows.length, target, moved: moved.map(({ item }) => item) }
     await recordEvent(tx, { event: 'edition.imported', firmId, personId: who.personId, detail })

@@ -1,5 +1,5 @@
 import type { RateImport } from '#shared/contracts/rateImport'
-import type { EntityManager } from 'typeorm'
+import { MoreThan, type EntityManager } from 'typeorm'
 import { QuotationEntity } from '../../entities/rates/QuotationEntity'
 import { RateEntity } from '../../entities/rates/RateEntity'
 import type { RateImportEntity } from '../../entities/rates/RateImportEntity'
@@ -7,7 +7,6 @@ import { RateImportWriteEntity } from '../../entities/rates/RateImportWriteEntit
 import { ResourceEntity } from '../../entities/rates/ResourceEntity'
 import { AppError } from '../../errors'
 import { recordEvent } from '../auditLog'
-import { takeChosenPrices } from '../rates/chosenPrices'
 import { recomputeRates } from '../rates/recomputeRates'
 import { touchDraft } from '../rates/touchDraft'
 import type { SignedIn } from '../session/signedIn'
@@ -21,6 +20,9 @@ import { putRows } from './writing/putWrites'
 import { removeRows } from './writing/removeRows'
 import { named } from './writing/requireAsSeen'
 import { restingOnNew } from './writing/restingOnNew'
+
+/** Rows read before others get their turn. */
+const READ_AT_ONCE = 1000
 
 type Writes = readonly RateImportWriteEntity[]
 
@@ -41,6 +43,21 @@ async function changedSince(tx: EntityManager, of: { firmId: string; editionId: 
   return writes
     .filter(({ kind, target, version }) => standing.get(`${kind} ${target}`) !== version)
     .map(({ kind, target }) => (kind === 'quotation' ? (suppliers.get(target) ?? 'a quotation that was removed') : target))
+}
+
+/** All that an import wrote, some at a time. */
+async function writesOfImport(tx: EntityManager, { firmId, id }: RateImportEntity): Promise<RateImportWriteEntity[]> {
+  const writes: RateImportWriteEntity[] = []
+  for (const kind of ['resource', 'quotation', 'rate'] as const) {
+    for (let last = ''; ;) {
+      const where = { firmId, importId: id, kind, target: MoreThan(last) }
+      const some = await tx.find(RateImportWriteEntity, { where, order: { target: 'ASC' }, take: READ_AT_ONCE })
+      for (const write of some) writes.push(write)
+      last = some.at(-1)?.target ?? ''
+      if (some.length < READ_AT_ONCE) break
+    }
+  }
+  return writes
 }
 
 async function requireUntouched(tx: EntityManager, row: RateImportEntity, writes: Writes): Promise<void> {
@@ -72,10 +89,9 @@ export async function undoImport(db: EntityManager, desk: ImportDesk, who: Signe
   await inTransaction(db, async (tx) => {
     await touchDraft(tx, who, editionId)
     await takeStep(tx, row, ['committed'], { state: 'undone', failure: null, moves: null })
-    const writes = await tx.findBy(RateImportWriteEntity, { firmId, importId: id })
+    const writes = await writesOfImport(tx, row)
     await requireUntouched(tx, row, writes)
     await restore(tx, row, writes)
-    await takeChosenPrices(tx, { firmId, editionId })
     const moved = await recomputeRates(tx, firmId, editionId)
     const detail = { editionId, importId: id, rows: writes.length, moved: moved.map(({ item }) => item) }
     await recordEvent(tx, { event: 'edition.importUndone', firmId, personId: who.personId, detail })

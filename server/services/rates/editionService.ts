@@ -9,6 +9,7 @@ import { RateEntity } from '../../entities/rates/RateEntity'
 import { AppError } from '../../errors'
 import { plainDecimal } from '../decimalText'
 import { hasRole, requireRole, type SignedIn } from '../session/signedIn'
+import { blockRatesOf } from './blockRates'
 import { toRate } from './rateRow'
 
 /** States of an edition that has once been published: it is fixed, and every surveyor may read it. */
@@ -72,7 +73,8 @@ export async function findEdition(
   const book = await db.findOneByOrFail(RateBookEntity, { firmId, id: row.bookId })
   const rates = await db.find(RateEntity, { where: { firmId, editionId: id }, order: { item: 'ASC' } })
   const own = personId === undefined ? new Set() : await ownWork(db, { firmId, personId }, [id])
-  return { ...toEdition(row, book, own.has(id)), rates: rates.map(toRate) }
+  const blockRates = await blockRatesOf(db, { firmId, editionId: id }, rates, book.currency)
+  return { ...toEdition(row, book, own.has(id)), rates: rates.map(toRate), blockRates }
 }
 
 /** An edition without its rates, as a person sees it. @throws AppError `not_found` */

@@ -1,38 +1,19 @@
-import type { RateMove, ThreePrices } from '#shared/contracts/resource'
+import type { RateMove } from '#shared/contracts/resource'
 import type { QuotationChoice, ResourceSheet } from '#shared/contracts/resourceSheet'
 import type { EntityManager } from 'typeorm'
-import { QuotationEntity } from '../../entities/rates/QuotationEntity'
 import { ResourceEntity } from '../../entities/rates/ResourceEntity'
-import { AppError, refuse } from '../../errors'
+import { AppError } from '../../errors'
 import { requireRole, type SignedIn } from '../session/signedIn'
 import { inTransaction } from '../transaction'
 import { updateVersioned } from '../versionedUpdate'
-import { toPriced, type InEdition } from './buildUpPricesOf'
+import { toPriced } from './buildUpPricesOf'
+import { takenFrom } from './chosenPrices'
 import { followChange } from './followChange'
-import { quotedPrice, todayUtc } from './quotedPrice'
 import { movesWith } from './rateMoves'
 import { readableEdition } from './readableEdition'
 import { resourceSheetOf } from './resourceList'
 import type { PricePlace } from './resourceService'
 import { touchDraft } from './touchDraft'
-
-/** What a resource takes over from a quotation chosen for it. @throws AppError `invalid_request` when it is not one of its quotations */
-async function takenFrom(db: EntityManager, of: InEdition, code: string, id: string) {
-  const all = await db.findBy(QuotationEntity, { ...of, resource: code })
-  const chosen = all.find((row) => row.id === id)
-  if (chosen === undefined) throw refuse('quotation', `expected a quotation for ${code}, or null for none`)
-  const { supplier, reference, day } = chosen
-  const source = reference === '' ? supplier : `${supplier}, ${reference}`
-  return { price: quotedPrice(chosen, all, todayUtc()) satisfies ThreePrices, source, sourceDate: day }
-}
-
-/** Lets a resource with a chosen quotation follow its quotations as they now stand; leaves any other as it is. */
-export async function takeChosenPrice(tx: EntityManager, of: InEdition, code: string): Promise<void> {
-  const { quotationId, version } = await tx.findOneByOrFail(ResourceEntity, { ...of, code })
-  if (quotationId === null) return
-  const { price, source, sourceDate } = await takenFrom(tx, of, code, quotationId)
-  await updateVersioned(tx, ResourceEntity, { ...of, code }, version, { ...price, source, sourceDate })
-}
 
 /**
  * Chooses the quotation that a resource takes its price, source and date from, or none: then all three stay as they are, to be typed
