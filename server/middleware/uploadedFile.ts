@@ -7,6 +7,7 @@ import { extensionOf, type UploadedFile } from '../services/rateImport/startImpo
 
 /** What the frame of a form adds to its file. */
 const FRAME_BYTES = 16 * 1024
+const CUT_AFTER_MS = 500
 const MEGABYTES = TABLE_LIMITS.fileBytes / 1024 / 1024
 
 const tooLarge = () => new AppError('too_large', `The file is larger than ${MEGABYTES} MB. Save only the list, without pictures.`)
@@ -19,6 +20,21 @@ function uploadError(error: unknown): unknown {
   }
   const isForm = error instanceof Error && /boundary|multipart|unexpected end of form|malformed/i.test(error.message)
   return isForm ? new AppError('invalid_request', 'The form with the file is broken off or damaged.') : error
+}
+
+/**
+ * Refuses a request as soon as more has come than a file may have, without waiting for the rest; the sender has a moment to read the
+ * answer, then the line is cut, on which what was kept is removed.
+ */
+function refuseLong(request: Request, response: Response, refuseWith: (error: AppError) => void): void {
+  let bytes = 0
+  request.on('data', function count(piece: Buffer) {
+    bytes += piece.length
+    if (bytes <= TABLE_LIMITS.fileBytes + FRAME_BYTES) return
+    request.off('data', count)
+    response.once('finish', () => setTimeout(() => request.destroy(), CUT_AFTER_MS).unref())
+    refuseWith(tooLarge())
+  })
 }
 
 /**
@@ -46,6 +62,7 @@ export async function uploadedFile(request: Request, response: Response, folder:
     },
   }).single('file')
   await new Promise<void>((resolve, reject) => {
+    refuseLong(request, response, reject)
     take(request, response, (error: unknown) => (error === undefined ? resolve() : reject(uploadError(error) as Error)))
   })
   if (request.file === undefined) throw refuse('file', 'expected one file in the field "file"')

@@ -1,3 +1,4 @@
+import { setImmediate as pause } from 'node:timers/promises'
 import type { ImportMatching } from '#shared/contracts/rateImport'
 import type { EntityManager } from 'typeorm'
 import type { InEdition } from '../../rates/buildUpPricesOf'
@@ -15,6 +16,9 @@ export interface CheckedList {
   readonly rows: CheckedRow[]
   readonly leftOut: number
 }
+
+/** Rows checked before others get their turn. */
+const CHECKED_AT_ONCE = 500
 
 type Check = (row: TakenFields) => CheckedRow
 
@@ -93,6 +97,11 @@ export async function checkRows(
   const { taken, refused, leftOut } = await readList(rowsPath, matching)
   const codes = [...new Set(taken.map(({ code }) => code))]
   const check = await checkOf(db, of, matching, codes, { name: fileName, defaults: matching.defaults })
-  const rows = [...refused, ...taken.map(check)].sort((a, b) => a.row - b.row)
+  const rows = [...refused]
+  for (const [index, row] of taken.entries()) {
+    if (index % CHECKED_AT_ONCE === 0) await pause()
+    rows.push(check(row))
+  }
+  rows.sort((a, b) => a.row - b.row)
   return { rows, leftOut }
 }
