@@ -66,7 +66,12 @@ export function useImport(editionId: () => string) {
   })
 
   watch([filter, page], () => void list.run())
-  watch(editionId, () => void take(null), { immediate: true })
+  async function begin(): Promise<void> {
+    await take(null)
+    edition.value = null
+    await load.run()
+  }
+  watch(editionId, () => void begin(), { immediate: true })
   onUnmounted(() => clearTimeout(waiting))
   return {
     edition,
