@@ -20,6 +20,7 @@ import { exportRoutes } from './routes/exportRoutes'
 import { healthRoutes } from './routes/healthRoutes'
 import { importRoutes } from './routes/importRoutes'
 import { localMailRoutes } from './routes/localMailRoutes'
+import { overrideRoutes } from './routes/overrideRoutes'
 import { passwordRoutes } from './routes/passwordRoutes'
 import { personRoutes } from './routes/personRoutes'
 import { projectRoutes } from './routes/projectRoutes'
@@ -69,6 +70,7 @@ function api(surroundings: Surroundings): Router {
     .use(passwordRoutes(manager, settings))
     .use(signedInOnly(manager, settings))
     .use(projectRoutes(manager, appraisals))
+    .use(overrideRoutes(manager))
     .use(appraisalRoutes(manager, appraisals))
     .use(rateRoutes(manager))
     .use(editionRoutes(manager))

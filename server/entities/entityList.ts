@@ -1,3 +1,4 @@
+import { RateOverrideEntity } from './project/RateOverrideEntity'
 import { AuditEntity } from './AuditEntity'
 import { ContactEntity } from './dispatch/ContactEntity'
 import { DispatchEntity } from './dispatch/DispatchEntity'
@@ -52,6 +53,7 @@ export const ENTITIES = [
   LevelEntity,
   SchemeEntity,
   ProjectShareEntity,
+  RateOverrideEntity,
   ContactEntity,
   DispatchEntity,
   OutboxEntity,

@@ -1,3 +1,5 @@
+import { CreateRateOverride1796100000081 } from './project/1796100000081-CreateRateOverride'
+import { AddBlockPriceCode1796100000080 } from './rates/1796100000080-AddBlockPriceCode'
 import { CreateAudit1796100000004 } from './1796100000004-CreateAudit'
 import { CreateIdempotency1796100000005 } from './1796100000005-CreateIdempotency'
 import { CreateContact1796100000040 } from './dispatch/1796100000040-CreateContact'
@@ -97,4 +99,6 @@ export const MIGRATIONS = [
   CreateRateImport1796100000075,
   CreateRateImportRow1796100000076,
   CreateRateImportWrite1796100000077,
+  AddBlockPriceCode1796100000080,
+  CreateRateOverride1796100000081,
 ]

@@ -18,6 +18,8 @@ export interface AuditEvent {
     | 'request.refused'
     | 'project.pricesChanged'
     | 'project.readersChanged'
+    | 'project.rateOverridden'
+    | 'block.changed'
     | 'rateBook.made'
     | 'edition.begun'
     | 'edition.discarded'

@@ -3,6 +3,7 @@ import { brief, level, mark, markups, panel, scheme } from './appraisal'
 import { factors } from './factors'
 import { measurement } from './measurement'
 import { edition, editionWithRates } from './rateBook'
+import { rateOverride } from './rateOverride'
 import { id, line, moment, optionalLine, version } from './primitives'
 import { scope } from './sameScope'
 
@@ -47,6 +48,8 @@ export const projectSheet = z.strictObject({
   levels: z.array(storedLevel),
   schemes: z.array(storedScheme),
   edition: editionWithRates.nullable(),
+  /** Rates of this project's own, in the order of their items. */
+  overrides: z.array(rateOverride).default([]),
 })
 export type ProjectSheet = z.infer<typeof projectSheet>
 

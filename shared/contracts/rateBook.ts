@@ -98,7 +98,11 @@ export const rateInput = z
 export type RateInput = z.infer<typeof rateInput>
 export type Rate = z.infer<typeof rate>
 
-export const editionWithRates = edition.extend({ rates: z.array(rate) })
+/** What an item costs built up with a block of the catalogue, by that block's price code. */
+export const blockRate = z.strictObject({ blockId: id, item: itemCode, rate: decimalString })
+export type BlockRate = z.infer<typeof blockRate>
+
+export const editionWithRates = edition.extend({ rates: z.array(rate), blockRates: z.array(blockRate).default([]) })
 export type EditionWithRates = z.infer<typeof editionWithRates>
 
 /** A region's book with its editions, newest first, without their rates. */

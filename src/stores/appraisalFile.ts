@@ -1,8 +1,9 @@
 import type { ApiIssue } from '#shared/contracts/apiError'
 import type { AppraisalFile, Rates } from '#shared/contracts/appraisal'
 import { brief, level, panel, rates, scheme } from '#shared/contracts/appraisal'
-import type { Project, StoredLevel, StoredScheme } from '#shared/contracts/project'
+import type { Project, ProjectSheet, StoredLevel, StoredScheme } from '#shared/contracts/project'
 import type { EditionWithRates } from '#shared/contracts/rateBook'
+import { projectRates } from '#shared/pricing/projectRates'
 import type { z } from 'zod'
 import type { FileOrigin } from '../workers/appraisalAnswer'
 import { readFactors, readScope } from './sheetDeclared'
@@ -12,8 +13,9 @@ import { panelsLeftOut, withoutGiven } from '../workers/withoutGiven'
 export interface AppraisalSource {
   readonly project: Pick<Project, 'brief' | 'factors' | 'measurement'> & Partial<Pick<Project, 'markups' | 'scope'>>
   readonly levels: readonly StoredLevel[]
-  readonly schemes: readonly StoredScheme[]
+  readonly schemes: StoredScheme[]
   readonly edition: EditionWithRates | null
+  readonly overrides?: ProjectSheet['overrides']
 }
 
 export interface AppraisalDraft {
@@ -48,10 +50,12 @@ function readLevel(row: StoredLevel, index: number, problems: ApiIssue[]) {
   return value === null ? [] : [{ value, origin: { index, panels: panels.map(({ at }) => at) } }]
 }
 
-function ratesOf({ project, edition }: AppraisalSource, problems: ApiIssue[]): Rates | undefined {
-  if (edition === null || project.markups === undefined) return undefined
-  const items = Object.fromEntries(edition.rates.map(({ item, likely }) => [item, likely]))
-  return read(rates, { currency: edition.currency, items, markups: project.markups }, 'rates', problems) ?? undefined
+function ratesOf(source: AppraisalSource, marks: ReadonlySet<string>, problems: ApiIssue[]): Rates | undefined {
+  const { edition, schemes, overrides = [] } = source
+  const { markups } = source.project
+  if (edition === null || markups === undefined) return undefined
+  const own = schemes.filter(({ specification }) => marks.has(specification.mark))
+  return read(rates, projectRates({ edition, markups, overrides, schemes: own }), 'rates', problems) ?? undefined
 }
 
 /** The appraisal file of a sheet: rows that the contract refuses are left out, their reasons kept. */
@@ -64,7 +68,7 @@ export function toAppraisalFile(source: AppraisalSource): AppraisalDraft {
     return value === null ? [] : [{ value, index }]
   })
   const rows = levels.map(({ value }) => value)
-  const priced = ratesOf(source, problems)
+  const priced = ratesOf(source, new Set(schemes.map(({ value }) => value.mark)), problems)
   const declared = readScope(
     source.project.scope ?? [],
     schemes.map(({ value }) => value),

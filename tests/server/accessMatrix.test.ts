@@ -6,6 +6,7 @@ import { EditionEntity } from '../../server/entities/rates/EditionEntity'
 import { LevelEntity } from '../../server/entities/project/LevelEntity'
 import { ProjectEntity } from '../../server/entities/project/ProjectEntity'
 import { ProjectShareEntity } from '../../server/entities/project/ProjectShareEntity'
+import { RateOverrideEntity } from '../../server/entities/project/RateOverrideEntity'
 import { SchemeEntity } from '../../server/entities/project/SchemeEntity'
 import { role, type Role } from '../../shared/contracts/person'
 import { clientOf, makeFirm, makePerson, type TestPerson } from '../support/factories'
@@ -106,6 +107,22 @@ const ROWS: readonly Row[] = [
     body: () => sampleSolid(),
   },
   { method: 'delete', path: '/projects/:projectId/schemes/:solidId', may: ['surveyor'], ok: 204, version: 1 },
+  {
+    method: 'post',
+    path: '/projects/:projectId/overrides/concrete.slab',
+    may: ['surveyor'],
+    ok: 201,
+    body: () => ({ rate: '151.20', reason: 'tender of a supplier' }),
+  },
+  {
+    method: 'put',
+    path: '/projects/:projectId/overrides/formwork.edge',
+    may: ['surveyor'],
+    ok: 200,
+    version: 1,
+    body: () => ({ rate: '9.10', reason: 'tender of a supplier' }),
+  },
+  { method: 'delete', path: '/projects/:projectId/overrides/formwork.edge', may: ['surveyor'], ok: 204, version: 1 },
   { method: 'get', path: '/projects/:projectId/contacts', may: ['surveyor'], ok: 200 },
   {
     method: 'post',
@@ -292,6 +309,8 @@ async function makePlace(): Promise<{ place: Place; people: Map<Role, TestPerson
     ProjectShareEntity,
     [...people.values()].map(({ id }) => ({ ...of, personId: id })),
   )
+  const override = { item: 'formwork.edge', rate: '9', reason: 'tender', changedBy: other.id, changedAt: now } as const
+  await manager.insert(RateOverrideEntity, { ...of, ...override })
   await manager.insert(ContactEntity, { ...of, id: contactId, name: 'Contact', email: 'contact@example.test', createdAt: now })
   return { place: { firmId, projectId, levelId, ribbedId, solidId, contactId, otherId: other.id, ...prices }, people }
 }
@@ -362,7 +381,8 @@ function routesOf(layers: readonly Layer[]): string[] {
 }
 
 describe('the matrix', () => {
-  const shape = (path: string) => path.replace(/(?<=\/tables)\/rates|\/(:\w+|steel\.bar\.12|formwork\.edge)/g, '/:id')
+  const shape = (path: string) =>
+    path.replace(/(?<=\/tables)\/rates|\/(:\w+|steel\.bar\.12|formwork\.edge|concrete\.slab)/g, '/:id')
   const OUTSIDE_API = ['get /livez', 'get /readyz', 'get /{*path}']
 
   it('has a row for every route of the application, and no other', () => {

@@ -61,6 +61,7 @@ export function aSheet(marks: readonly string[] = ['P1', 'P2']): ProjectSheet {
       stateReason: '',
       isOwnWork: false,
       version: 1,
+      blockRates: [],
       rates: [
         {
           item: 'concrete.slab',

@@ -18,4 +18,7 @@ export class BlockEntity {
   @Column({ type: 'varchar', length: 120 }) supplier: string
   @Column({ name: 'pallet_count', type: 'int', unsigned: true, nullable: true }) palletCount: number | null
   @Column({ name: 'breakage_percent', type: 'decimal', precision: 7, scale: 4 }) breakagePercent: string
+  /** Code of the resource that it is priced by, in any edition; null: by the edition's own build-ups. */
+  @Column({ name: 'price_code', type: 'varchar', length: 40, nullable: true, collation: 'utf8mb4_bin' }) priceCode: string | null
+  @Column({ type: 'int', unsigned: true, default: 1 }) version: number
 }

@@ -1,14 +1,13 @@
-import type { AppraisalFile, ItemCode, Rates } from '#shared/contracts/appraisal'
+import type { AppraisalFile, Rates } from '#shared/contracts/appraisal'
 import type { ProjectSheet } from '#shared/contracts/project'
 import { declaredFor } from '#shared/contracts/sameScope'
+import { projectRates } from '#shared/pricing/projectRates'
 
-function ratesOf({ project, edition }: ProjectSheet): Rates | undefined {
-  if (edition === null) return undefined
-  const items = Object.fromEntries(edition.rates.map(({ item, likely }) => [item, likely])) as Partial<Record<ItemCode, string>>
-  return { currency: edition.currency, items, byScheme: {}, markups: project.markups }
+function ratesOf({ project, edition, overrides, schemes }: ProjectSheet): Rates | undefined {
+  return edition === null ? undefined : projectRates({ edition, markups: project.markups, overrides, schemes })
 }
 
-/** The appraisal file of a stored project, priced by its edition's likely rates. Null while it has no panel or no scheme. */
+/** The appraisal file of a stored project, priced by its edition's likely rates and its own. Null while it has no panel or no scheme. */
 export function storedAppraisalFile(sheet: ProjectSheet): AppraisalFile | null {
   const levels = sheet.levels
     .filter(({ panels }) => panels.length > 0)

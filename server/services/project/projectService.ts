@@ -13,6 +13,7 @@ import { findEdition } from '../rates/editionService'
 import { requireRole, type SignedIn } from '../session/signedIn'
 import { duplicateIndex, inTransaction } from '../transaction'
 import { updateVersioned } from '../versionedUpdate'
+import { overridesOf } from './overrideService'
 import { requireProject, toProject, toStoredLevel, toStoredScheme } from './projectRows'
 
 function rethrowDuplicate(error: unknown): never {
@@ -71,6 +72,7 @@ export async function sheetOf(tx: EntityManager, firmId: string, id: string): Pr
     levels: levels.map(toStoredLevel),
     schemes: schemes.map(toStoredScheme),
     edition: row.editionId === null ? null : await findEdition(tx, firmId, row.editionId),
+    overrides: await overridesOf(tx, firmId, id),
   }
 }
 
