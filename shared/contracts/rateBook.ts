@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import { itemCode } from './appraisal'
-import { buildUp } from './buildUp'
+import { buildUp, resourceCode } from './buildUp'
 import { currencyCode, decimalString, id, line, optionalLine, version } from './primitives'
 import { threePrices } from './resource'
 
@@ -98,8 +98,8 @@ export const rateInput = z
 export type RateInput = z.infer<typeof rateInput>
 export type Rate = z.infer<typeof rate>
 
-/** What an item costs built up with a block of the catalogue, by that block's price code. */
-export const blockRate = z.strictObject({ blockId: id, item: itemCode, rate: decimalString })
+/** What an item costs built up with a block of the catalogue, by that block's price code (`code`). */
+export const blockRate = z.strictObject({ blockId: id, code: resourceCode, item: itemCode, rate: decimalString })
 export type BlockRate = z.infer<typeof blockRate>
 
 export const editionWithRates = edition.extend({ rates: z.array(rate), blockRates: z.array(blockRate).default([]) })

@@ -1,6 +1,8 @@
 import { allScopeDifferences } from '#shared/alsoCompared/scopeDifferences'
 import type { ApiIssue } from '#shared/contracts/apiError'
 import type { LevelInput, ProjectInput, ProjectSheet, SchemeInput, StoredLevel, StoredScheme } from '#shared/contracts/project'
+import type { ItemCode } from '#shared/contracts/appraisal'
+import type { RateOverride } from '#shared/contracts/rateOverride'
 import type { ProjectReading } from '#shared/contracts/projectReading'
 import { defineStore } from 'pinia'
 import { computed, shallowRef } from 'vue'
@@ -84,6 +86,14 @@ export const useProjectStore = defineStore('project', () => {
     const other = input.editionId === null ? null : await readEdition(input.editionId)
     if (sheet.value.project.editionId !== input.editionId) return
     sheet.value = { ...sheet.value, edition: other }
+    appraisal.schedule()
+  }
+
+  /** Takes in a rate of the project's own that was stored, or lifted (null). */
+  function putOverride(item: ItemCode, override: RateOverride | null): void {
+    if (sheet.value === null) return
+    const others = sheet.value.overrides.filter((each) => each.item !== item)
+    sheet.value = { ...sheet.value, overrides: override === null ? others : [...others, override] }
     appraisal.schedule()
   }
 
@@ -184,6 +194,7 @@ export const useProjectStore = defineStore('project', () => {
     close,
     flush: saving.queue.flush,
     changeProject,
+    putOverride,
     changeLevel,
     addLevel,
     removeLevel,

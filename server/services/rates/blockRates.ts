@@ -42,5 +42,10 @@ export async function blockRatesOf(
   )
   return asked
     .filter(({ code }) => prices.resources.get(code)?.kind === 'material')
-    .map(({ blockId, item, buildUp }) => ({ blockId, item, rate: builtUpRate(buildUp, prices, currency).price.likely }))
+    .map(({ blockId, code, item, buildUp }) => ({
+      blockId,
+      code,
+      item,
+      rate: builtUpRate(buildUp, prices, currency).price.likely,
+    }))
 }

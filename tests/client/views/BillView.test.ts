@@ -2,7 +2,8 @@ import { flushPromises } from '@vue/test-utils'
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
 import BillView from '../../../src/views/BillView.vue'
 import { aPricedSheet, openSheet } from '../../support/openSheet'
-import { byRole } from '../../support/screen'
+import { editionId, projectId } from '../../support/projectSheetOf'
+import { byRole, type } from '../../support/screen'
 
 const cents = (row: Element) => Number(row.lastElementChild!.textContent.replace(/[^\d]/g, ''))
 const text = () => document.body.textContent.replace(/\s+/g, ' ')
@@ -16,8 +17,8 @@ describe('BillView', () => {
     vi.unstubAllGlobals()
   })
 
-  async function shown(sheet = aPricedSheet()) {
-    const opened = await openSheet(BillView, sheet)
+  async function shown(sheet = aPricedSheet(), answers: Parameters<typeof openSheet>[2] = {}) {
+    const opened = await openSheet(BillView, sheet, answers)
     unmount = opened.unmount
     return opened
   }
@@ -44,6 +45,51 @@ describe('BillView', () => {
     const row = byRole('row', /^Formwork to soffits/).textContent.replace(/\s+/g, ' ')
     expect(row).toContain('21.40')
     expect(row).toContain('edition 4, agreed')
+  })
+
+  it('shows a rate of the project’s own beside the edition’s, with reason, author and day, and prices by it', async () => {
+    const own = {
+      item: 'formwork.soffit',
+      rate: '24.75',
+      reason: 'quoted for this site',
+      author: 'A person',
+      version: 1,
+    } as const
+    await shown({ ...aPricedSheet(), overrides: [{ ...own, changedAt: '2026-11-30T10:00:00.000Z' }] })
+    const row = byRole('row', /^Formwork to soffits/)
+    expect(row.querySelector('del')!.textContent).toContain('21.40')
+    const [quantity, amount] = [row.children[1]!.textContent, row.lastElementChild!.textContent].map((each) =>
+      Number(each.replace(/[^\d.]/g, '')),
+    )
+    expect(Math.round(quantity! * 24.75 * 100)).toBe(Math.round(amount! * 100))
+    expect(row.textContent).toMatch(/this project’s own, quoted for this site,\s+A person, 30 November 2026/)
+  })
+
+  it('opens how a rate is built up, and prices the item otherwise in this project', async () => {
+    const sheet = aPricedSheet()
+    const rate = sheet.edition!.rates.find(({ item }) => item === 'formwork.soffit')!
+    const own = { item: 'formwork.soffit', author: 'A person', changedAt: '2026-11-30T10:00:00.000Z', version: 1 }
+    const address = `/api/projects/${projectId}/overrides/formwork.soffit`
+    const { api, settle } = await shown(sheet, {
+      [`GET /api/editions/${editionId}/build-up/formwork.soffit`]: () => ({
+        status: 200,
+        json: { currency: 'USD', rate, built: null },
+      }),
+      [`POST ${address}`]: ({ body }) => ({ status: 201, json: { ...own, ...(body as object) } }),
+    })
+    byRole('row', /^Formwork to soffits/)
+      .querySelector('button')!
+      .click()
+    await settle()
+    expect(text()).toContain('A plain price, not built up. Source: agreed')
+    type(byRole('textbox', /^Rate/), '24.75')
+    type(byRole('textbox', /^Reason/), 'quoted for this site')
+    await flushPromises()
+    byRole('button', 'Price by this rate').click()
+    await flushPromises()
+    expect(api.calls.at(-1)).toMatchObject({ path: address, body: { rate: '24.75', reason: 'quoted for this site' } })
+    await settle()
+    expect(byRole('row', /^Formwork to soffits/).querySelector('del')!.textContent).toContain('21.40')
   })
 
   it('bills the scheme that is chosen', async () => {
