@@ -1,15 +1,13 @@
 import { exportTable } from '#shared/contracts/rateImport'
 import { Router } from 'express'
-import { Readable } from 'node:stream'
-import { pipeline } from 'node:stream/promises'
 import type { EntityManager } from 'typeorm'
 import { parse } from '../errors'
 import { attachment } from '../middleware/attachment'
 import { idOf } from '../middleware/idOf'
 import { whoOf } from '../middleware/signedInOnly'
-import { csvText } from '../services/editionExport/csvText'
 import { editionSheets } from '../services/editionExport/editionSheets'
 import { exportedEdition, type ExportedEdition } from '../services/editionExport/exportedEdition'
+import { writeTable } from '../services/editionExport/writeTable'
 import { writeWorkbook } from '../services/editionExport/writeWorkbook'
 
 const WORKBOOK = 'application/vnd.openxmlformats-officedocument.spreadsheetml.sheet'
@@ -30,6 +28,6 @@ export function exportRoutes(db: EntityManager): Router {
       const exported = await exportedEdition(db, whoOf(response), idOf(request, 'id'))
       const sheet = editionSheets(exported).find(({ name }) => name === table)!
       attachment(response, 'text/csv; charset=utf-8', `${nameOf(exported)}, ${table}.csv`)
-      await pipeline(Readable.from(csvText(sheet)), response)
+      await writeTable(sheet, response)
     })
 }

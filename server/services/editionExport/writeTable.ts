@@ -1,4 +1,6 @@
 import { harmlessText } from '#shared/harmlessText'
+import { Readable, type Writable } from 'node:stream'
+import { pipeline } from 'node:stream/promises'
 import type { ExportedSheet, SheetCell } from './sheetCell'
 
 const quoted = (text: string): string => (/[",;\r\n]|^\s|\s$/.test(text) ? `"${text.replaceAll('"', '""')}"` : text)
@@ -19,7 +21,12 @@ function textOf(cell: SheetCell): string {
 }
 
 /** A sheet as text of columns: commas between, a point as decimal mark, UTF-8 with a mark, values instead of formulas. Source: RFC 4180 */
-export function* csvText({ heads, rows }: ExportedSheet): Generator<string> {
+function* csvText({ heads, rows }: ExportedSheet): Generator<string> {
   yield `\uFEFF${heads.map(quoted).join(',')}\r\n`
   for (const row of rows) yield `${row.map(textOf).join(',')}\r\n`
+}
+
+/** Writes a sheet as text of columns into a stream, which it ends. */
+export async function writeTable(sheet: ExportedSheet, stream: Writable): Promise<void> {
+  await pipeline(Readable.from(csvText(sheet)), stream)
 }
