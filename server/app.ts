@@ -14,6 +14,7 @@ import { securityHeaders } from './middleware/securityHeaders'
 import { signedInOnly } from './middleware/signedInOnly'
 import { createPdfPrinter, type PdfPrinter } from './reports/pdfPrinter'
 import { appraisalRoutes } from './routes/appraisalRoutes'
+import { blockRoutes } from './routes/blockRoutes'
 import { contactRoutes } from './routes/contactRoutes'
 import { dispatchRoutes } from './routes/dispatchRoutes'
 import { exportRoutes } from './routes/exportRoutes'
@@ -73,6 +74,7 @@ function api(surroundings: Surroundings): Router {
     .use(overrideRoutes(manager))
     .use(appraisalRoutes(manager, appraisals))
     .use(rateRoutes(manager))
+    .use(blockRoutes(manager))
     .use(editionRoutes(manager))
     .use(resourceRoutes(manager))
     .use(priceRoutes(manager))

@@ -1,7 +1,7 @@
-import type { CatalogueBlock } from '#shared/contracts/blockCatalogue'
+import type { BlockInput } from '#shared/contracts/blockCatalogue'
 
 /** Invented blocks of invented makers. Length runs along the rib; millimetres and kilograms. */
-export const DEMO_BLOCKS: readonly Omit<CatalogueBlock, 'id'>[] = [
+export const DEMO_BLOCKS: readonly BlockInput[] = [
   clay('HC 150', 150, 10),
   clay('HC 200', 200, 15),
   clay('HC 250', 250, 20),
@@ -16,6 +16,7 @@ export const DEMO_BLOCKS: readonly Omit<CatalogueBlock, 'id'>[] = [
     supplier: 'Dunvale Brick and Tile',
     palletCount: 96,
     breakagePercent: '4',
+    priceCode: null,
   },
   {
     code: 'SQ 200',
@@ -28,6 +29,7 @@ export const DEMO_BLOCKS: readonly Omit<CatalogueBlock, 'id'>[] = [
     supplier: 'Stonequay Precast',
     palletCount: 72,
     breakagePercent: '2',
+    priceCode: null,
   },
   {
     code: 'LA 240',
@@ -40,10 +42,11 @@ export const DEMO_BLOCKS: readonly Omit<CatalogueBlock, 'id'>[] = [
     supplier: 'Stonequay Precast',
     palletCount: null,
     breakagePercent: '5',
+    priceCode: null,
   },
 ]
 
-function clay(code: string, height: number, mass: number): Omit<CatalogueBlock, 'id'> {
+function clay(code: string, height: number, mass: number): BlockInput {
   return {
     code,
     name: `Hollow clay block 400 × ${height}`,
@@ -55,5 +58,6 @@ function clay(code: string, height: number, mass: number): Omit<CatalogueBlock, 
     supplier: 'Harrowcombe Clayworks',
     palletCount: 120,
     breakagePercent: '3',
+    priceCode: null,
   }
 }

@@ -3,9 +3,9 @@ import type { EntityManager } from 'typeorm'
 import { idOf } from '../middleware/idOf'
 import { whoOf } from '../middleware/signedInOnly'
 import { tellVersion } from '../middleware/version'
-import { listBlocks, listRateBooks, readEdition } from '../services/rates/editionService'
+import { listRateBooks, readEdition } from '../services/rates/editionService'
 
-/** Rate books with their editions, and the block catalogue. */
+/** Rate books with their editions. */
 export function rateRoutes(db: EntityManager): Router {
   return Router()
     .get('/rate-books', async (_request, response) => {
@@ -15,8 +15,5 @@ export function rateRoutes(db: EntityManager): Router {
       const edition = await readEdition(db, whoOf(response), idOf(request, 'id'))
       tellVersion(response, edition.version)
       response.json(edition)
-    })
-    .get('/blocks', async (_request, response) => {
-      response.json(await listBlocks(db, whoOf(response)))
     })
 }

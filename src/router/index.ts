@@ -123,6 +123,12 @@ const routes: NamedRoute[] = [
     meta: { title: 'Price lists', roles: ['surveyor', 'estimator'] },
   },
   {
+    path: '/blocks',
+    name: 'blocks',
+    component: () => import('../views/BlocksView.vue'),
+    meta: { title: 'Blocks', roles: ['surveyor', 'estimator'] },
+  },
+  {
     path: '/people',
     name: 'people',
     component: () => import('../views/PeopleView.vue'),

@@ -19,6 +19,7 @@ export type RouteName =
   | 'rates'
   | 'resources'
   | 'rateImport'
+  | 'blocks'
   | 'people'
   | 'received'
   | 'notFound'

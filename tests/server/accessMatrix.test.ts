@@ -9,10 +9,10 @@ import { ProjectShareEntity } from '../../server/entities/project/ProjectShareEn
 import { RateOverrideEntity } from '../../server/entities/project/RateOverrideEntity'
 import { SchemeEntity } from '../../server/entities/project/SchemeEntity'
 import { role, type Role } from '../../shared/contracts/person'
-import { clientOf, makeFirm, makePerson, type TestPerson } from '../support/factories'
+import { clientOf, makeBlock, makeFirm, makePerson, type TestPerson } from '../support/factories'
 import { importMatching, makeCommittedImport } from '../support/committedImport'
 import { makePricedEdition } from '../support/pricedDraft'
-import { blockQuotation, fixers, material, plainRate } from '../support/samplePrices'
+import { blockQuotation, fixers, sampleBlock, material, plainRate } from '../support/samplePrices'
 import { sampleLevel, sampleProject, sampleRibbed, sampleSolid } from '../support/sampleProject'
 import { TestClient, type Method } from '../support/testClient'
 import { openTestServer, type TestServer } from '../support/testServer'
@@ -33,6 +33,7 @@ interface Place {
   readonly resource: string
   readonly gang: string
   readonly quotationId: string
+  readonly blockId: string
   /** An import into the draft that is put in. */
   readonly importId: string
 }
@@ -258,6 +259,9 @@ const ROWS: readonly Row[] = [
   { method: 'post', path: '/imports/:importId/commit', may: ['estimator'], ok: 409, body: () => ({ leaveOutRefused: true }) },
   { method: 'post', path: '/imports/:importId/undo', may: ['estimator'], ok: 200 },
   { method: 'get', path: '/blocks', may: ['surveyor', 'estimator'], ok: 200 },
+  { method: 'post', path: '/blocks', may: ['estimator'], ok: 201, body: () => sampleBlock() },
+  { method: 'put', path: '/blocks/:blockId', may: ['estimator'], ok: 200, version: 1, body: () => sampleBlock() },
+  { method: 'delete', path: '/blocks/:blockId', may: ['estimator'], ok: 204, version: 1 },
   { method: 'get', path: '/people', may: ['admin'], ok: 200 },
   {
     method: 'post',
@@ -309,10 +313,11 @@ async function makePlace(): Promise<{ place: Place; people: Map<Role, TestPerson
     ProjectShareEntity,
     [...people.values()].map(({ id }) => ({ ...of, personId: id })),
   )
+  const blockId = await makeBlock(server, firmId)
   const override = { item: 'formwork.edge', rate: '9', reason: 'tender', changedBy: other.id, changedAt: now } as const
   await manager.insert(RateOverrideEntity, { ...of, ...override })
   await manager.insert(ContactEntity, { ...of, id: contactId, name: 'Contact', email: 'contact@example.test', createdAt: now })
-  return { place: { firmId, projectId, levelId, ribbedId, solidId, contactId, otherId: other.id, ...prices }, people }
+  return { place: { firmId, projectId, levelId, ribbedId, solidId, contactId, blockId, otherId: other.id, ...prices }, people }
 }
 
 async function ask(client: TestClient, row: Row, place: Place) {

@@ -42,6 +42,7 @@ export function aSheet(marks: readonly string[] = ['P1', 'P2']): ProjectSheet {
       blockId: null,
       specification,
     })),
+    overrides: [],
     edition: {
       id: editionId,
       bookId,

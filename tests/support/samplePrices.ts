@@ -1,3 +1,4 @@
+import type { BlockInput } from '../../shared/contracts/blockCatalogue'
 import type { RateInput } from '../../shared/contracts/rateBook'
 import type { GangInput, QuotationInput, ResourceInput } from '../../shared/contracts/resource'
 
@@ -41,5 +42,21 @@ export const plainRate = (unit: string, change: Partial<RateInput> = {}): RateIn
   buildUp: null,
   source: 'Last job',
   sourceDate: '2026-07-01',
+  ...change,
+})
+
+/** A hollow clay block, 400 wide and 200 high. */
+export const sampleBlock = (change: Partial<BlockInput> = {}): BlockInput => ({
+  code: 'HB 200',
+  name: 'Hollow clay block',
+  material: 'fired clay',
+  length: 200,
+  width: 400,
+  height: 200,
+  mass: 15,
+  supplier: 'First kiln',
+  palletCount: 120,
+  breakagePercent: '3',
+  priceCode: null,
   ...change,
 })

@@ -1,13 +1,10 @@
-import type { CatalogueBlock } from '#shared/contracts/blockCatalogue'
 import type { Edition, EditionState, EditionWithRates, RateBook } from '#shared/contracts/rateBook'
 import { In, type EntityManager } from 'typeorm'
-import { BlockEntity } from '../../entities/rates/BlockEntity'
 import { EditionEditorEntity } from '../../entities/rates/EditionEditorEntity'
 import { EditionEntity } from '../../entities/rates/EditionEntity'
 import { RateBookEntity } from '../../entities/rates/RateBookEntity'
 import { RateEntity } from '../../entities/rates/RateEntity'
 import { AppError } from '../../errors'
-import { plainDecimal } from '../decimalText'
 import { hasRole, requireRole, type SignedIn } from '../session/signedIn'
 import { blockRatesOf } from './blockRates'
 import { toRate } from './rateRow'
@@ -92,23 +89,4 @@ export async function readEdition(db: EntityManager, who: SignedIn, id: string):
   const edition = await findEdition(db, who.firmId, id, who.personId)
   if (edition === null || !readableStates(who).includes(edition.state)) throw new AppError('not_found')
   return edition
-}
-
-/** The firm's block catalogue in the order of its codes. */
-export async function listBlocks(db: EntityManager, who: SignedIn): Promise<CatalogueBlock[]> {
-  requireRole(who, 'surveyor', 'estimator')
-  const rows = await db.find(BlockEntity, { where: { firmId: who.firmId }, order: { code: 'ASC' }, take: 1000 })
-  return rows.map(({ id, code, name, material, length, width, height, mass, supplier, palletCount, breakagePercent }) => ({
-    id,
-    code,
-    name,
-    material,
-    length,
-    width,
-    height,
-    mass,
-    supplier,
-    palletCount,
-    breakagePercent: plainDecimal(breakagePercent),
-  }))
 }

@@ -21,6 +21,8 @@ const block = {
   supplier: 'Clayworks',
   palletCount: 80,
   breakagePercent: '3',
+  priceCode: null,
+  version: 1,
 }
 const drawing = () => document.querySelector('.section-figure svg')!
 const words = () => [...drawing().querySelectorAll('text')].map((node) => node.textContent)
