@@ -5,6 +5,7 @@ import type { Appraisal, AppraisalFile, RibbedScheme, SchemeResult, SolidScheme 
 import type { CatalogueBlock } from '#shared/contracts/blockCatalogue'
 import type { Project, StoredScheme } from '#shared/contracts/project'
 import type { Edition } from '#shared/contracts/rateBook'
+import type { RateOverride } from '#shared/contracts/rateOverride'
 import { itemisedCost } from '#shared/pricing/itemisedCost'
 import { comparisonSections } from '#shared/drawing/comparisonSections'
 import type { SectionSubject } from '#shared/drawing/sectionBody'
@@ -24,6 +25,7 @@ export interface ComparedProject {
   readonly schemes: readonly [StoredScheme, StoredScheme]
   readonly blockMaterial: CatalogueBlock['material'] | undefined
   readonly edition: Edition
+  readonly overrides: readonly RateOverride[]
   readonly file: AppraisalFile
   readonly appraisal: Appraisal
   /** The panel of each scheme that its cross-section shows. */
@@ -95,6 +97,14 @@ function measuredBy({ measurement }: AppraisalFile): FrozenComparison['measuredB
   return { name, source }
 }
 
+/** Items of either bill that the project prices otherwise. */
+function overriddenIn({ overrides, appraisal }: ComparedProject): Pick<FrozenComparison, 'overrides'> {
+  const billed = new Set(appraisal.schemes.flatMap(({ cost }) => (cost ? itemisedCost(cost).lines.map(({ item }) => item) : [])))
+  const used = overrides.filter(({ item }) => billed.has(item))
+  if (used.length === 0) return {}
+  return { overrides: used.map(({ item, reason, author, changedAt }) => ({ item, reason, author, changedAt })) }
+}
+
 /**
  * All that the report needs, taken out of an appraisal once and for good: what is in it never changes with the project, the
  * rates or the engine. It holds no rate, and amounts of groups only.
@@ -127,6 +137,7 @@ export function freezeComparison(compared: ComparedProject, sending: Sending, fr
     alsoCompared: freezeAlsoRows(compared.alsoCompared[0]!, compared.alsoCompared[1]!),
     scope: freezeScope(file.scope, compared.scopeDifferences, { ribbed: ribbed.mark, solid: solid.mark }),
     measuredBy: measuredBy(file),
+    ...overriddenIn(compared),
     calculations: [...compared.calculations],
   }
 }

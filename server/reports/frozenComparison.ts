@@ -1,6 +1,7 @@
 import { z } from 'zod'
 import { brief, check, deadLoad, itemCode, markupLine, money, ribbed, solid, unit } from '#shared/contracts/appraisal'
 import { currencyCode, id, moment } from '#shared/contracts/primitives'
+import { rateOverride } from '#shared/contracts/rateOverride'
 import { useCategory } from '#shared/contracts/project'
 import type { SvgNode } from '#shared/drawing/svgNode'
 import { frozenAlsoRow, frozenScope } from './frozenBeside'
@@ -88,6 +89,8 @@ export const frozenComparison = z.strictObject({
   scope: frozenScope.optional(),
   /** Rules that the quantities are measured by, by name and source; absent in what was sent before they were kept. */
   measuredBy: z.strictObject({ name: z.string(), source: z.string() }).optional(),
+  /** Items that the project prices otherwise than its edition, and why, without the rates; absent in what was sent before there were any. */
+  overrides: z.array(rateOverride.pick({ item: true, reason: true, author: true, changedAt: true })).optional(),
   /** Of the tightest panel of each scheme; absent in what was sent before it was kept. */
   calculations: z.array(frozenCalculation).optional(),
 })

@@ -2,6 +2,7 @@ import type { Brief } from '#shared/contracts/appraisal'
 import { nationalValuesText } from '#shared/sizing/nationalValuesText'
 import { dayText, figureText, listText } from '../figureText'
 import type { FrozenComparison } from '../frozenComparison'
+import { itemText } from './itemText'
 import { markupWords } from './markupWords'
 import type { ReportFact } from './reportFact'
 
@@ -67,6 +68,17 @@ function measuredFacts({ measuredBy }: FrozenComparison): ReportFact[] {
   return measuredBy === undefined ? [] : [{ title: 'Measured by', text: `${measuredBy.name}: ${measuredBy.source}.` }]
 }
 
+/** What the project prices otherwise than its edition, and why. */
+function overrideFacts({ overrides }: FrozenComparison): ReportFact[] {
+  if (overrides === undefined || overrides.length === 0) return []
+  const each = overrides.map(
+    ({ item, reason, author, changedAt }) =>
+      `${itemText(item)}, ${reason.replace(/\.$/, '')} (${author}, ${dayText(changedAt.slice(0, 10))})`,
+  )
+  const text = each.join('; ')
+  return [{ title: 'Rates of this project’s own', text: `${text.charAt(0).toUpperCase()}${text.slice(1)}.` }]
+}
+
 function momentFacts({ redistribution }: Brief): ReportFact[] {
   if (redistribution === 0) return []
   const share = figureText(redistribution, 0)
@@ -90,6 +102,7 @@ export function basisFacts(frozen: FrozenComparison): ReportFact[] {
       title: 'Rates',
       text: `${edition.region}, edition ${edition.number}, prices of ${dayText(edition.baseDate)}, ${edition.currency}. This report keeps them whatever the book says later.`,
     },
+    ...overrideFacts(frozen),
     { title: 'Markups', text: markupText(frozen) },
   ]
 }

@@ -56,5 +56,5 @@ export async function compareProject(
   if (file === null) throw cannotBeSent([{ path: 'levels', message: 'expected at least one level with a panel' }])
   const compared = await appraised(pool, firmId, file)
   requirePrices(compared, edition)
-  return { project, schemes, edition, file, ...compared }
+  return { project, schemes, edition, overrides: sheet.overrides, file, ...compared }
 }
