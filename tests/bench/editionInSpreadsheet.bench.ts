@@ -66,7 +66,7 @@ const life = {
   holdsOverheads: true,
   reason: '',
 }
-const edition = { ...facts, ...life, corrects: null, stateReason: '', isOwnWork: true, version: 1, rates }
+const edition = { ...facts, ...life, corrects: null, stateReason: '', isOwnWork: true, version: 1, rates, blockRates: [] }
 const exported: ExportedEdition = { edition, resources, gangs, quotations: [] }
 
 type Formula = { readonly place: string; readonly value: number }
