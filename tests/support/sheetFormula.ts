@@ -6,7 +6,7 @@ type Book = ExcelJS.Workbook
 export function cellNumber(book: Book, sheet: string, address: string): number {
   const { value } = book.getWorksheet(sheet)!.getCell(address)
   if (typeof value === 'number') return value
-  if (value !== null && typeof value === 'object' && 'formula' in value) return evaluate(book, sheet, value.formula)
+  if (value !== null && typeof value === 'object' && 'formula' in value) return evaluate(book, sheet, String(value.formula ?? ''))
   throw new Error(`${sheet}!${address} holds no number: ${JSON.stringify(value)}`)
 }
 
@@ -23,7 +23,7 @@ function evaluate(book: Book, sheet: string, formula: string): number {
     at = TOKEN.lastIndex
   }
   const sign = () => token?.[9]
-  const expect = (wanted: string) => {
+  const expected = (wanted: string) => {
     if (sign() !== wanted) throw new Error(`expected ${wanted} in ${formula}`)
     next()
   }
@@ -43,14 +43,14 @@ function evaluate(book: Book, sheet: string, formula: string): number {
     }
     if (found[8] === 'ROUND') return rounded()
     const inside = sum()
-    expect(')')
+    expected(')')
     return inside
   }
   function rounded(): number {
     const value = sum()
-    expect(',')
+    expected(',')
     const scale = 10 ** sum()
-    expect(')')
+    expected(')')
     return Math.round(Number((value * scale).toPrecision(15))) / scale
   }
   function product(): number {
