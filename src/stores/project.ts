@@ -2,6 +2,7 @@ import { allScopeDifferences } from '#shared/alsoCompared/scopeDifferences'
 import type { ApiIssue } from '#shared/contracts/apiError'
 import type { LevelInput, ProjectInput, ProjectSheet, SchemeInput, StoredLevel, StoredScheme } from '#shared/contracts/project'
 import type { ItemCode } from '#shared/contracts/appraisal'
+import type { EditionWithRates } from '#shared/contracts/rateBook'
 import type { RateOverride } from '#shared/contracts/rateOverride'
 import type { ProjectReading } from '#shared/contracts/projectReading'
 import { defineStore } from 'pinia'
@@ -30,6 +31,8 @@ export const useProjectStore = defineStore('project', () => {
   const session = useSessionStore()
   const sheet = shallowRef<ProjectSheet | null>(null)
   const reading = shallowRef<ProjectReading | null>(null)
+  /** The edition that this project was priced by before another was chosen here; null: none was, or it was seen. */
+  const formerEdition = shallowRef<EditionWithRates | null>(null)
   const source = (): AppraisalSource | null => sheet.value ?? (reading.value && { ...reading.value, edition: null })
   const appraisal = createSheetAppraisal(source)
   const saving = createSheetSaving(sheet)
@@ -68,6 +71,7 @@ export const useProjectStore = defineStore('project', () => {
     saving.reset()
     appraisal.reset()
     sheet.value = null
+    formerEdition.value = null
     reading.value = null
   }
 
@@ -85,6 +89,7 @@ export const useProjectStore = defineStore('project', () => {
     if (input.editionId === (sheet.value.edition?.id ?? null)) return
     const other = input.editionId === null ? null : await readEdition(input.editionId)
     if (sheet.value.project.editionId !== input.editionId) return
+    formerEdition.value = other === null || sheet.value.edition?.id === other.id ? null : sheet.value.edition
     sheet.value = { ...sheet.value, edition: other }
     appraisal.schedule()
   }
@@ -181,6 +186,7 @@ export const useProjectStore = defineStore('project', () => {
     levels,
     schemes,
     edition,
+    formerEdition,
     full,
     file: appraisal.file,
     problems,

@@ -87,7 +87,7 @@ const sheets = (role: Role) => sheetsFor([role]).map(({ name }) => `/projects/:i
 const SCREENS: readonly [who: string, paths: readonly string[]][] = [
   ['nobody', ['/sign-in', '/reset', '/invitation', '/no-such-sheet']],
   ['surveyor', ['/', '/rates', ...sheets('surveyor')]],
-  ['estimator', ['/rates', '/rates/:edition/resources']],
+  ['estimator', ['/blocks', '/rates', '/rates/:edition/resources']],
   ['developer', ['/', ...sheets('developer')]],
   ['engineer', ['/']],
   ['client', ['/received']],

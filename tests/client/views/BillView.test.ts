@@ -1,5 +1,6 @@
 import { flushPromises } from '@vue/test-utils'
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
+import { projectInputOf } from '../../../src/stores/sheetRow'
 import BillView from '../../../src/views/BillView.vue'
 import { aPricedSheet, openSheet } from '../../support/openSheet'
 import { editionId, projectId } from '../../support/projectSheetOf'
@@ -90,6 +91,31 @@ describe('BillView', () => {
     expect(api.calls.at(-1)).toMatchObject({ path: address, body: { rate: '24.75', reason: 'quoted for this site' } })
     await settle()
     expect(byRole('row', /^Formwork to soffits/).querySelector('del')!.textContent).toContain('21.40')
+  })
+
+  it('says what another edition moved, by which rate, down to the difference of the totals', async () => {
+    const sheet = aPricedSheet()
+    const other = '00000000-0000-4000-8000-000000000055'
+    const rates = sheet.edition!.rates.map((rate) => (rate.item === 'formwork.soffit' ? { ...rate, likely: '24.75' } : rate))
+    const { store, settle } = await shown(sheet, {
+      [`GET /api/editions/${other}`]: () => ({ status: 200, json: { ...sheet.edition!, id: other, number: 5, rates } }),
+      [`PUT /api/projects/${projectId}`]: ({ body }) => ({
+        status: 200,
+        json: { ...sheet.project, ...(body as object), version: 2 },
+      }),
+    })
+    const before = cents(byRole('row', /^Floors, ribbed R1/))
+    await store.changeProject({ ...projectInputOf(store.sheet!.project), editionId: other })
+    await settle(5000)
+    const [moves] = [...document.querySelectorAll('.moves tbody tr')].map((row) => row.textContent)
+    expect(moves).toMatch(/Formwork to soffits\s*21\.40\s*24\.75/)
+    const totals = [...document.querySelectorAll('tfoot .total')].map(cents)
+    expect(totals[1]! - before).toBe(totals[0])
+    const parts = [...document.querySelectorAll('.moves tbody tr')].map(cents)
+    expect(parts.reduce((sum, part) => sum + part, 0)).toBe(totals[0])
+    byRole('button', 'Put this away').click()
+    await settle()
+    expect(document.querySelector('.moves')).toBeNull()
   })
 
   it('bills the scheme that is chosen', async () => {
