@@ -10,7 +10,7 @@ import type { Role } from '#shared/contracts/person'
 import { createPinia } from 'pinia'
 
 const { edition, project } = aSheet()
-const plainEdition = Object.fromEntries(Object.entries(edition!).filter(([key]) => key !== 'rates'))
+const plainEdition = Object.fromEntries(Object.entries(edition!).filter(([key]) => key !== 'rates' && key !== 'blockRates'))
 const books = [{ id: bookId, region: 'Eastmere', currency: 'USD', editions: [plainEdition] }]
 
 async function shown(answers: Parameters<typeof fakeApi>[0], role: Role) {

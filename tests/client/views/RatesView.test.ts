@@ -21,6 +21,7 @@ const answer =
 function withoutRates(edition: EditionWithRates): Edition {
   const listed: Partial<EditionWithRates> = { ...edition }
   delete listed.rates
+  delete listed.blockRates
   return listed as Edition
 }
 
