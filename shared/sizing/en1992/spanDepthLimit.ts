@@ -51,19 +51,26 @@ export function spanDepthRatioOfSteel({ position, section, requiredMm2 }: SpanDe
 }
 
 /**
- * Greatest span over effective depth for which deflection need not be calculated.
+ * Greatest span over effective depth for which deflection need not be calculated. A span that no load case bends downwards requires no
+ * steel there, for which the expression has no value: the least share of steel stands in for what is required.
  *
- * Source: EN 1992-1-1:2004, 7.4.2(2), Expressions (7.16), (7.17), Table 7.4N; cap on the steel factor by the national values
+ * Source: EN 1992-1-1:2004, 7.4.2(2), Expressions (7.16), (7.17), Table 7.4N; 9.2.1.1(1) for the least share; cap on the steel factor by
+ *   the national values
  */
 export function spanDepthLimit(input: SpanDepthInput, { fckMpa, fykMpa, values }: Strengths): Answer {
   const { section, spanMm, requiredMm2, providedMm2 } = input
-  const rho = spanDepthRatioOfSteel(input)
+  const isBentDown = requiredMm2 > 0
+  const rho = isBentDown ? spanDepthRatioOfSteel(input) : values.leastSteel.share
   const system = STRUCTURAL_SYSTEM[input.position]
   const basic = basicSpanDepth(rho, fckMpa)
   const { overWidthRatio, factor } = values.flangedFactor
   const flanged = section.flange && section.widthMm / section.flange.webMm > overWidthRatio ? factor : 1
   const long = input.carriesPartitions && spanMm > LONG_SPAN_MM ? LONG_SPAN_MM / spanMm : 1
-  const steel = Math.min(values.greatestSteelStressFactor, (500 * providedMm2) / (fykMpa * requiredMm2))
+  const steel = isBentDown ? Math.min(values.greatestSteelStressFactor, (500 * providedMm2) / (fykMpa * requiredMm2)) : 1
+  const steelNote = () =>
+    isBentDown
+      ? `F3 = 500·${figure(providedMm2, 0)}/(${figure(fykMpa)}·${figure(requiredMm2, 0)}) ≤ ${values.greatestSteelStressFactor}`
+      : 'nowhere bent downwards, so the least ρ'
   const byExpression = system * basic * flanged * long * steel
   const cap = system * values.greatestSpanDepth
   return {
@@ -72,7 +79,6 @@ export function spanDepthLimit(input: SpanDepthInput, { fckMpa, fykMpa, values }
     working: () =>
       `limit = K·N·F1·F2·F3 = ${system}·${figure(basic)}·${flanged}·${figure(long, 3)}·${figure(steel, 3)} = ` +
       `${figure(byExpression)}${cap < byExpression ? `, nationally at most ${figure(values.greatestSpanDepth)}·K = ${figure(cap)}` : ''} ` +
-      `(ρ ${figure(100 * rho, 3)} %, ρ0 ${figure(0.1 * Math.sqrt(fckMpa), 3)} %; ` +
-      `F3 = 500·${figure(providedMm2, 0)}/(${figure(fykMpa)}·${figure(requiredMm2, 0)}) ≤ ${values.greatestSteelStressFactor})`,
+      `(ρ ${figure(100 * rho, 3)} %, ρ0 ${figure(0.1 * Math.sqrt(fckMpa), 3)} %; ${steelNote()})`,
   }
 }
