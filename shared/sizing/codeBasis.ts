@@ -194,8 +194,6 @@ export interface CodeBasis {
   anchorageMm(diameterMm: BarDiameter, bond: BarBond, stressShare: number): Answer
   lapMm(diameterMm: BarDiameter, bond: BarBond): Answer
   bottomEnd(diameterMm: BarDiameter, end: SpanEnd, depthMm: number): BottomEnd
-  /** How far top bars run past the point from which no moment pulls them, mm. */
-  pastHogging(diameterMm: BarDiameter, depthMm: number): Omit<Answer, 'working'>
   ribProportions(shape: RibShape): readonly Comparison[]
   leastToppingMm(shape: RibShape): Answer
   /** Greatest clear length of ribs between cross ribs or solid zones, mm; null where the code has no rule. */

@@ -60,15 +60,6 @@ export function lapMm(diameterMm: BarDiameter, bond: BarBond, strengths: Strengt
 }
 
 /**
- * How far a top bar runs past the point where hogging ends, mm: the effective depth or twelve diameters.
- *
- * Source: BS 8110-1:1997, 3.12.9.1 (seen in a textbook's account of it)
- */
-export function pastHogging(diameterMm: BarDiameter, depthMm: number): Omit<Answer, 'working'> {
-  return { value: Math.max(depthMm, 12 * diameterMm), clause: 'BS 8110-1 3.12.9.1' }
-}
-
-/**
  * How far a bottom bar passes the face of its support, mm: where the floor ends, twelve diameters past the centre of the support or half a
  * depth past its face, whichever is less; else to the centre, at least twelve diameters.
  *

@@ -1,6 +1,6 @@
 import type { Brief } from '../../contracts/appraisal'
 import type { CodeBasis } from '../codeBasis'
-import { anchorageMm, bottomEnd, lapMm, pastHogging } from './anchorage'
+import { anchorageMm, bottomEnd, lapMm } from './anchorage'
 import { greatestSpacingMm } from './barSpacing'
 import { effectiveSpanMm } from './effectiveSpan'
 import { exposureCover } from './exposure'
@@ -63,7 +63,6 @@ export function bs8110Basis({ fcu, fy, cover, nationalValues, exposure }: Britis
     anchorageMm: (diameter, _bond, stressShare) => anchorageMm(diameter, stressShare, strengths),
     lapMm: (diameter, bond) => lapMm(diameter, bond, strengths),
     bottomEnd,
-    pastHogging,
     ribProportions,
     leastToppingMm,
     crossRibSpacingMm: () => null,

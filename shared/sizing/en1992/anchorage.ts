@@ -66,15 +66,6 @@ export function lapMm(diameterMm: BarDiameter, bond: BarBond, strengths: Strengt
 }
 
 /**
- * How far a top bar runs past the point where hogging ends, mm: moments shifted by d, and the least anchorage beyond.
- *
- * Source: EN 1992-1-1:2004, 9.2.1.3(2) with 9.3.1.1(4) (al = d without shear reinforcement) and 8.4.4(1), Expression (8.6) (from memory)
- */
-export function pastHogging(diameterMm: BarDiameter, depthMm: number): Omit<Answer, 'working'> {
-  return { value: depthMm + Math.max(10 * diameterMm, 100), clause: 'EN 1992-1-1 9.2.1.3(2)' }
-}
-
-/**
  * How far a bottom bar passes the face of its support, mm: ten diameters, or to the middle of the support.
  *
  * Source: EN 1992-1-1:2004, 9.3.1.2(1) with 8.4.4 (10φ); the middle of the support: common practice, no source (engine design section 4)

@@ -1,6 +1,6 @@
 import type { Brief } from '../../contracts/appraisal'
 import type { CodeBasis } from '../codeBasis'
-import { anchorageMm, bottomEnd, lapMm, pastHogging } from './anchorage'
+import { anchorageMm, bottomEnd, lapMm } from './anchorage'
 import { effectiveSpanMm } from './effectiveSpan'
 import { exposureCover } from './exposure'
 import { ribFire, slabFire } from './fire'
@@ -52,7 +52,6 @@ export function en1992Basis({ fck, fyk, nationalValues: chosen, exposure }: Euro
     anchorageMm: (diameter, bond, stressShare) => anchorageMm(diameter, bond, stressShare, strengths),
     lapMm: (diameter, bond) => lapMm(diameter, bond, strengths),
     bottomEnd,
-    pastHogging,
     ribProportions,
     leastToppingMm,
     crossRibSpacingMm,

@@ -1,5 +1,4 @@
 import type { AnalysisRules } from '../analysis/analysisRules'
-import { hoggingShare } from '../analysis/hoggingShare'
 import { bayAreas, overhangBehind, type SpanLine, stripOf } from '../analysis/levelStrips'
 import { momentFromBehind, raisedTo } from '../analysis/sharedSupports'
 import { type EndOfSpan, liftedEnds, type SpanForces } from '../analysis/spanForces'
@@ -20,8 +19,6 @@ export interface RibAnalysis {
   readonly assumedEnds: number
   /** Length of a cantilever that goes on behind each end, mm; 0 without one. */
   readonly overhangMm: Readonly<Record<EndOfSpan, number>>
-  /** As `hoggingShare`, at each end. */
-  readonly hoggingShares: Readonly<Record<EndOfSpan, number>>
   /** The strip it was analysed in. */
   readonly strip: Strip
   /** Share of redistribution that was asked for. */
@@ -75,7 +72,6 @@ export function analyseRibs(
         start: overhangBehind(i, ends.start.edges, lines, neighboursOf),
         end: overhangBehind(i, ends.end.edges, lines, neighboursOf),
       },
-      hoggingShares: { start: hoggingShare(strip, forces, 'start'), end: hoggingShare(strip, forces, 'end') },
       strip,
       askedShare: rules.redistributedShare,
       lifted: strip.spans[strip.index]!.isCantilever

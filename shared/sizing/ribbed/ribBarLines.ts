@@ -4,8 +4,7 @@ import { anchoredEnd, type BarEnd, bottomBarEnd } from '../bars/barEnds'
 import type { BarLines, BarPiece } from '../bars/barLines'
 import type { CodeBasis } from '../codeBasis'
 import type { RibLineEnds } from './ribEnds'
-import { isFarReach } from '../bars/topReach'
-import { type RibContext, topReachMm, topReachOf } from './ribContext'
+import { type RibContext, topReachMm } from './ribContext'
 import type { RibbedPanel } from './ribbedPanel'
 
 /** What lengths of rib bars depend on beside the panel. */
@@ -74,8 +73,6 @@ export function topLines(
   const anchorageMm = basis.anchorageMm(diameter, bond, 1).value
   const { reach, clause } = basis.simpleEdge.rib
   const isContinuous = ends[end].isContinuous
-  const isFar = isFarReach(topReachOf(context, end, clearMm, diameter))
-  const runsOn = isFar ? basis.pastHogging(diameter, heightMm).clause : 'common practice'
   const spanAddedMm = context.analysis.spanMm - clearMm
   const pieceOf = (rib: RibLineEnds, edge: number): BarPiece => {
     const { supportMm } = rib[end]
@@ -83,7 +80,7 @@ export function topLines(
     const fullMm = isCut ? clearMm : rib.clearMm
     const roomMm = isCut ? rib.clearMm + rules.trimmerMm - rules.coverMm : Infinity
     if (isContinuous)
-      return { parts: [supportMm / 2, Math.min(topReachMm(context, end, fullMm, diameter), roomMm)], legs: [0, 0], over: edge }
+      return { parts: [supportMm / 2, Math.min(topReachMm(context, end, fullMm), roomMm)], legs: [0, 0], over: edge }
     const { pastMm, legMm } = anchoredEnd(diameter, anchorageMm, supportMm - rules.coverMm)
     return { parts: [Math.min(reach * (fullMm + spanAddedMm), roomMm), pastMm], legs: [legMm, 0] }
   }
@@ -96,6 +93,6 @@ export function topLines(
     pieces: ribs.filter((rib) => rib[end].edge === edge).map((rib) => pieceOf(rib, edge)),
     stockMm: rules.stockMm,
     lapMm: () => basis.lapMm(diameter, bond).value,
-    clause: isContinuous ? runsOn : clause,
+    clause: isContinuous ? 'common practice' : clause,
   }))
 }

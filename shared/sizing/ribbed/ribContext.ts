@@ -1,6 +1,4 @@
-import type { BarDiameter } from '../../contracts/appraisal'
 import type { EndOfSpan } from '../analysis/spanForces'
-import { topBarReachMm, type TopReach } from '../bars/topReach'
 import type { CodeBasis } from '../codeBasis'
 import type { LineEnd } from '../analysis/levelStrips'
 import type { RibAnalysis } from './ribAnalysis'
@@ -22,40 +20,25 @@ export interface RibContext {
 export const RIB_AGGREGATE_MM = 10
 
 /**
- * How far top bars run past the face of an end into ribs of a clear length, mm: over the whole of a cantilever, else as `topBarReachMm`.
+ * Reach of top bars over a continuous support past its face, as a share of the clear span.
  *
- * Source: see `topBarReachMm`
+ * Source: project rule, common practice of detailing, no source (engine design section 4, lengths)
  */
-export function topReachMm(
-  { analysis, section, basis }: Pick<RibContext, 'analysis' | 'section' | 'basis'>,
-  end: EndOfSpan,
-  clearMm: number,
-  diameter: BarDiameter,
-): number {
-  if (analysis.position === 'cantilever') return clearMm - section.coverMm
-  return topBarReachMm(topReachOf({ analysis, section, basis }, end, clearMm, diameter))
-}
+export const TOP_REACH = 0.3
 
 /**
- * What the reach of top bars over an end depends on.
+ * How far top bars run past the face of an end into ribs of a clear length, mm: over the whole of a cantilever, and as far behind it; else
+ * the usual share.
  *
- * Source: see `topBarReachMm`
+ * Source: see TOP_REACH; behind a cantilever as long as it: common practice, no source
  */
-export function topReachOf(
-  { analysis, section, basis }: Pick<RibContext, 'analysis' | 'section' | 'basis'>,
+export function topReachMm(
+  { analysis, section }: Pick<RibContext, 'analysis' | 'section'>,
   end: EndOfSpan,
   clearMm: number,
-  diameter: BarDiameter,
-): TopReach {
-  return {
-    basis,
-    diameter,
-    depthMm: section.heightMm - section.coverMm - section.linkMm,
-    bond: { isTop: true, sectionMm: section.heightMm, isCorner: false },
-    clearMm,
-    hoggingShare: analysis.hoggingShares[end],
-    overhangMm: analysis.overhangMm[end],
-  }
+): number {
+  if (analysis.position === 'cantilever') return clearMm - section.coverMm
+  return Math.max(TOP_REACH * clearMm, Math.min(clearMm, analysis.overhangMm[end]))
 }
 
 /**

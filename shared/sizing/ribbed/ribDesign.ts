@@ -91,8 +91,8 @@ export function chooseTop({ panel, context, rules, orderFor }: RibTask, end: End
   const { topBars } = panel.bars
   if (isFree) return []
   if (isContinuous && topBars !== 'computed') return topBars
-  const { spanMm, position, overhangMm, hoggingShares } = context.analysis
-  const order = orderFor(`${panel.shapeKey} ${end} ${spanMm} ${position} ${overhangMm[end]} ${hoggingShares[end]}`, () =>
+  const { spanMm, position, overhangMm } = context.analysis
+  const order = orderFor(`${panel.shapeKey} ${end} ${spanMm} ${position} ${overhangMm[end]}`, () =>
     ribBarOrder((diameter) =>
       topLines(panel, end, diameter, 1, context, rules).reduce((sum, lines) => sum + totalLengthMm(lines), 0),
     ),

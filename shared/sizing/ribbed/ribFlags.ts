@@ -5,11 +5,9 @@ import { fireFlags } from '../fireFlags'
 import { slenderFlags } from '../slenderFlags'
 import { type Finding, isMet } from '../finding'
 import { FABRIC } from '../tables/fabric'
-import { thickest } from '../bars/barSet'
-import { farReachFlag, isFarReach } from '../bars/topReach'
-import { endName, topReachOf } from './ribContext'
+import { endName } from './ribContext'
 import { isMixedEnd, type RibbedPanel } from './ribbedPanel'
-import type { RibDesign, RibTask } from './ribDesign'
+import type { RibTask } from './ribDesign'
 import { zoneFlags } from './zoneFlags'
 
 /**
@@ -17,13 +15,12 @@ import { zoneFlags } from './zoneFlags'
  *
  * Source: project rule, what was assumed is stated (engine design sections 1 and 4)
  */
-export function ribFlags(task: RibTask, findings: readonly Finding[], tops: RibDesign['tops']): string[] {
+export function ribFlags(task: RibTask, findings: readonly Finding[]): string[] {
   const { panel, context } = task
   const lengths = panel.ribs.map(({ clearMm }) => clearMm)
   const varies = Math.max(...lengths) - Math.min(...lengths) > 1
   return [
     ...stripFlags(stripAnalysisOf(task), context.basis.redistribution),
-    ...farReachFlags(task, tops),
     ...idleBeyondFlags(panel.site.edges, [...panel.ends.start.edges, ...panel.ends.end.edges]),
     ...(['start', 'end'] as const).filter((end) => isMixedEnd(panel, end)).map((end) => mixedFlag(panel, end)),
     ...(varies ? [`ribs differ in length: sized on the longest clear rib, ${figure(panel.clearMm, 0)} mm`] : []),
@@ -46,12 +43,6 @@ function stripAnalysisOf({ panel, context: { analysis } }: RibTask): StripAnalys
   const { method, redistributedShare } = forces
   const liftedEdges = lifted.flatMap((end) => panel.ends[end].edges)
   return { strip, position, method, redistributedShare, askedShare, liftedEdges }
-}
-
-function farReachFlags({ panel, context }: RibTask, tops: RibDesign['tops']): string[] {
-  return (['start', 'end'] as const)
-    .filter((end) => panel.ends[end].isContinuous && isFarReach(topReachOf(context, end, panel.clearMm, thickest(tops[end]))))
-    .map((end) => farReachFlag(endName(panel, end), context.analysis.hoggingShares[end]))
 }
 
 function mixedFlag(panel: RibbedPanel, end: EndOfSpan): string {

@@ -93,9 +93,8 @@ function shaped(
  *
  * Source: project rule, identical panels are sized once
  */
-export function reinforcementKey({ key }: RibbedPanel, { forces, spanMm, position, hoggingShares }: RibAnalysis): string {
-  const { start, end } = hoggingShares
-  return [key, forces.key, spanMm.toPrecision(10), position, start.toPrecision(10), end.toPrecision(10)].join(' ')
+export function reinforcementKey({ key }: RibbedPanel, { forces, spanMm, position }: RibAnalysis): string {
+  return [key, forces.key, spanMm.toPrecision(10), position].join(' ')
 }
 
 /**

@@ -55,7 +55,7 @@ export function sizedRibbedPanel(
       ...fireSizeFindings(basis, section, analysis, minutes),
       ...fireFindings({ ...context, fireMinutes: minutes }, design.bottom),
     ]),
-    flags: [...ribFlags(task, findings, design.tops), ...givenFlags(task.scheme, level, mark)],
+    flags: [...ribFlags(task, findings), ...givenFlags(task.scheme, level, mark)],
   }
 }
 

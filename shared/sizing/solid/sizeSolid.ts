@@ -78,7 +78,7 @@ function sizedPanel(
       ...sizeFindings(context, minutes),
       ...fireFindings(context, chosen.bottom.short.middle, minutes),
     ]),
-    flags: [...slabFlags(context, findings, chosen.tops), ...hopelessThicknessFlags(context, scheme, findings), ...notes],
+    flags: [...slabFlags(context, findings), ...hopelessThicknessFlags(context, scheme, findings), ...notes],
   }
 }
 

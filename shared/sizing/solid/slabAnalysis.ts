@@ -1,6 +1,5 @@
 import { type FloorLoads, ultimateLoad } from '../actions'
 import type { AnalysisRules } from '../analysis/analysisRules'
-import { hoggingShare } from '../analysis/hoggingShare'
 import { bayAreas, type NeighboursOf, overhangBehind, type SpanLine, type SpanLines, stripOf } from '../analysis/levelStrips'
 import { type EdgeMoments, momentFromBehind } from '../analysis/sharedSupports'
 import { type EndOfSpan, liftedEnds, type SpanForces } from '../analysis/spanForces'
@@ -23,18 +22,10 @@ export interface EndForces {
   readonly ownNmm: number
   readonly shearN: number
   readonly overhangMm: number
-  /** As `hoggingShare`. */
-  readonly hoggingShare: number
 }
 
 /** As the panel alone has them. */
-const endForces = (hoggingNmm: number, shearN: number, share = 0): EndForces => ({
-  hoggingNmm,
-  ownNmm: hoggingNmm,
-  shearN,
-  overhangMm: 0,
-  hoggingShare: share,
-})
+const endForces = (hoggingNmm: number, shearN: number): EndForces => ({ hoggingNmm, ownNmm: hoggingNmm, shearN, overhangMm: 0 })
 
 /** One direction of a slab that carries load. */
 export interface SlabSpan {
@@ -107,8 +98,7 @@ function spanLine({ plan, first, firstMm, isTwoWay, isCantilever, loads }: Spann
 
 function oneWay({ first, second, firstMm, secondMm, loads }: Spanning, strip: Strip, rules: AnalysisRules): SlabAnalysis {
   const forces = stripForces(strip, rules)
-  const shares = { start: hoggingShare(strip, forces, 'start'), end: hoggingShare(strip, forces, 'end') }
-  const at = (end: EndOfSpan) => endForces(forces.hoggingNmm(end, 0), forces.shearN(end, 0), shares[end])
+  const at = (end: EndOfSpan) => endForces(forces.hoggingNmm(end, 0), forces.shearN(end, 0))
   return {
     short: {
       axis: first,

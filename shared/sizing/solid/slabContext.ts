@@ -97,7 +97,7 @@ export function givenTop({ given }: SlabContext, { direction }: TopPlace): BarLa
  */
 export function slabKey({ heightMm, given, analysis }: SlabContext): string {
   const { short, long, other, aspect, method, panelCase } = analysis
-  const endKey = ({ hoggingNmm, shearN, overhangMm, hoggingShare }: EndForces) => [hoggingNmm, shearN, overhangMm, hoggingShare]
+  const endKey = ({ hoggingNmm, shearN, overhangMm }: EndForces) => [hoggingNmm, shearN, overhangMm]
   const spanKey = (span: SlabSpan | null) => {
     if (span === null) return null
     const { spanMm, position, redistributedShare, saggingNmm, ends } = span

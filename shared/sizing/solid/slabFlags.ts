@@ -2,17 +2,14 @@ import { idleBeyondFlags, stripFlags } from '../analysis/stripFlags'
 import type { Finding } from '../finding'
 import { fireFlags } from '../fireFlags'
 import { slenderFlags } from '../slenderFlags'
-import { farReachFlag, isFarReach } from '../bars/topReach'
-import type { TopBars } from './bars/chooseTopBars'
-import { topReachOf } from './bars/slabMass'
-import { isHogging, placeName, type SlabContext } from './slabContext'
+import type { SlabContext } from './slabContext'
 
 /**
  * Assumptions and approximations of one solid panel, in sentences.
  *
  * Source: project rule, what was assumed is stated (engine design sections 1, 3 and 4)
  */
-export function slabFlags(context: SlabContext, findings: readonly Finding[], tops: readonly TopBars[]): string[] {
+export function slabFlags(context: SlabContext, findings: readonly Finding[]): string[] {
   const { plan, analysis } = context
   const sides = [...Object.values(analysis.short.axis.ends), ...Object.values(analysis.other.ends)]
   return [
@@ -21,7 +18,6 @@ export function slabFlags(context: SlabContext, findings: readonly Finding[], to
       plan.site.edges,
       analysis.strip ? Object.values(analysis.short.axis.ends).flatMap(({ edges }) => edges) : [],
     ),
-    ...farReachFlags(context, tops),
     ...(plan.isRectangle ? [] : ['not a rectangle: sized on its least-area enclosing rectangle']),
     ...sides
       .filter(({ isMixed }) => isMixed)
@@ -35,15 +31,6 @@ export function slabFlags(context: SlabContext, findings: readonly Finding[], to
     ...fireFlags(findings),
     ...slenderFlags(findings, context.basis),
   ]
-}
-
-function farReachFlags(context: SlabContext, tops: readonly TopBars[]): string[] {
-  const { short } = context.analysis
-  return tops.flatMap(({ place, layers }) => {
-    if (!layers || !isHogging(place)) return []
-    const reach = topReachOf(context, place, short.axis.clearMm, layers.middle.diameter)
-    return isFarReach(reach) ? [farReachFlag(placeName(place), reach.hoggingShare)] : []
-  })
 }
 
 function twoWayFlag({ analysis: { panelCase } }: SlabContext): string {

@@ -108,7 +108,7 @@ function anchorageAt(context: RibContext, end: EndOfSpan, top: BarSet, fromFaceM
   const { basis, section, analysis, clearMm } = context
   if (top.length === 0) return () => false
   const depthMm = effectiveDepthMm(section, top)
-  const roomMm = topReachMm(context, end, clearMm, thickest(top)) - fromFaceMm - depthMm
+  const roomMm = topReachMm(context, end, clearMm) - fromFaceMm - depthMm
   const bond = { isTop: true, sectionMm: section.heightMm, isCorner: false }
   const fits = (stressShare: number) => basis.anchorageMm(thickest(top), bond, stressShare).value <= roomMm
   if (fits(1)) return () => true

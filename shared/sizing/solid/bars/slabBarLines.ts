@@ -1,14 +1,13 @@
 import type { BarLayer } from '../../../contracts/appraisal'
 import type { BarLines, BarPiece } from '../../bars/barLines'
 import type { EndOfSpan } from '../../analysis/spanForces'
-import { isFarReach } from '../../bars/topReach'
 import { bottomLineEnd } from './bottomLineEnd'
 import type { SlabBars } from './chooseSlabBars'
 import type { TopBars } from './chooseTopBars'
 import { isHogging, type SlabContext } from '../slabContext'
 import { layerText, type StripLayers } from './slabLayer'
 import { type SlabLine, slabLines } from './slabLines'
-import { lineCount, simpleTopPiece, slabBond, topReachMm, topReachOf } from './slabMass'
+import { lineCount, simpleTopPiece, slabBond, topReachMm } from './slabMass'
 import { stripsOf } from './slabStrips'
 import { trimmerLines } from './slabTrimmers'
 import type { SlabAxis } from '../slabPlan'
@@ -108,17 +107,11 @@ export function topBarLines(context: SlabContext, { place, layers }: TopBars): B
     if (edge === null || !place.side.edges.includes(edge)) return null
     const roomMm = line[opposite(place.end)].edge === null ? line.clearMm - context.brief.cover : Infinity
     if (!hogging) return simpleTopPiece(context, place, diameter, supportMm, roomMm)
-    return {
-      parts: [supportMm / 2, Math.min(topReachMm(context, place, line.fullMm, diameter), roomMm)],
-      legs: [0, 0],
-      over: edge,
-    }
+    return { parts: [supportMm / 2, Math.min(topReachMm(context, place, line.fullMm), roomMm)], legs: [0, 0], over: edge }
   }
   const edges = place.side.edges.map((edge) => edge + 1).join(', ')
   const position = `top, edge ${edges}`
-  const isFar = hogging && isFarReach(topReachOf(context, place, axis.clearMm, layers.middle.diameter))
-  const past = basis.pastHogging(layers.middle.diameter, context.heightMm).clause
-  const clause = hogging ? (isFar ? past : 'common practice') : basis.simpleEdge.slab.clause
+  const clause = hogging ? 'common practice' : basis.simpleEdge.slab.clause
   return linesIn(context, axis, across.clearMm, layers, { position, clause, isTop: true }, pieceOf)
 }
 

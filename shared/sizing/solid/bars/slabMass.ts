@@ -3,7 +3,6 @@ import type { EndOfSpan } from '../../analysis/spanForces'
 import { anchoredEnd, bottomBarEnd } from '../../bars/barEnds'
 import type { BarPiece } from '../../bars/barLines'
 import { totalLengthMm } from '../../bars/barRuns'
-import { topBarReachMm, type TopReach } from '../../bars/topReach'
 import type { BarBond } from '../../codeBasis'
 import { BAR_MASS_KG_PER_M } from '../../tables/bars'
 import { isHogging, type SlabContext, type TopPlace } from '../slabContext'
@@ -16,6 +15,13 @@ import type { SlabAxis } from '../slabPlan'
  * Source: BS 8110-1:1997, 3.5.3.5 and Figure 3.9 (middle strips three quarters; from memory, engine design section 4)
  */
 export const EDGE_STRIP = 1 / 8
+
+/**
+ * Reach of top bars past the face of a continuous support, as a share of the clear span.
+ *
+ * Source: project rule, common practice of detailing, no source (engine design section 4, lengths)
+ */
+export const SLAB_TOP_REACH = 0.3
 
 /**
  * Bars that a width takes at a spacing, half a spacing in from either side.
@@ -42,46 +48,24 @@ export function bottomParts(
 }
 
 /**
- * How far top bars run past the face of a continuous support into a clear length, mm: over the whole of a cantilever, else as
- * `topBarReachMm`.
+ * How far top bars run past the face of a continuous support into a clear length, mm: over the whole of a cantilever, and as far behind it;
+ * else the usual share.
  *
- * Source: see `topBarReachMm`
+ * Source: see SLAB_TOP_REACH; behind a cantilever as long as it: common practice, no source
  */
-export function topReachMm(context: SlabContext, place: TopPlace, clearMm: number, diameter: BarDiameter): number {
-  if (place.span?.position === 'cantilever') return clearMm - context.brief.cover
-  return topBarReachMm(topReachOf(context, place, clearMm, diameter))
+export function topReachMm({ brief }: SlabContext, { span, end }: TopPlace, clearMm: number): number {
+  if (span?.position === 'cantilever') return clearMm - brief.cover
+  return Math.max(SLAB_TOP_REACH * clearMm, Math.min(clearMm, span?.ends[end].overhangMm ?? 0))
 }
 
 /**
- * What the reach of top bars at a place depends on.
- *
- * Source: see `topBarReachMm`
- */
-export function topReachOf(
-  { basis, brief, heightMm }: SlabContext,
-  { span, end }: TopPlace,
-  clearMm: number,
-  diameter: BarDiameter,
-): TopReach {
-  return {
-    basis,
-    diameter,
-    depthMm: heightMm - brief.cover,
-    bond: slabBond(heightMm, true),
-    clearMm,
-    hoggingShare: span?.ends[end].hoggingShare ?? 0,
-    overhangMm: span?.ends[end].overhangMm ?? 0,
-  }
-}
-
-/**
- * A top bar at one end: half the support and its reach past the face; at an edge taken as simple see `simpleTopPiece`.
+ * A top bar at one end: half the support and 0.3 of the clear span; at an edge taken as simple see `simpleTopPiece`.
  *
  * Source: engine design section 4; for the floor behind see `overSupports`
  */
 export function topParts(context: SlabContext, place: TopPlace, { diameter }: BarLayer, clearMm: number): BarPiece {
   const { supportMm } = place.side
-  if (isHogging(place)) return { parts: [supportMm / 2, topReachMm(context, place, clearMm, diameter)], legs: [0, 0] }
+  if (isHogging(place)) return { parts: [supportMm / 2, topReachMm(context, place, clearMm)], legs: [0, 0] }
   return simpleTopPiece(context, place, diameter, supportMm)
 }
 

@@ -100,7 +100,7 @@ function topTrimmers(context: SlabContext, { place, layers }: TopBars): BarLines
     const near = (y: number) =>
       chordsAt(field.clear, y).some(({ start, end }) => {
         const fromFace = place.end === 'start' ? minX - start : end - maxX
-        return fromFace < topReachMm(context, place, end - start, layers.middle.diameter)
+        return fromFace < topReachMm(context, place, end - start)
       })
     const cut = linesCut(field, course, ring).filter(near).length
     const sides = sideLines(context, course, field, ring).map((lines) =>
@@ -108,7 +108,7 @@ function topTrimmers(context: SlabContext, { place, layers }: TopBars): BarLines
     )
     const pieces = sides.map((lines) =>
       lines.map(({ line }): BarPiece => {
-        const reach = topReachMm(context, place, line.fullMm, layers.middle.diameter)
+        const reach = topReachMm(context, place, line.fullMm)
         return { parts: [reach, line[place.end].supportMm, reach], legs: [0, 0] }
       }),
     )
