@@ -11,6 +11,7 @@ import { priceScheme } from './pricing/priceScheme'
 import { ratesOfScheme } from './pricing/ratesOfScheme'
 import { scopeLines } from './pricing/scopeLines'
 import { toQuantity } from './pricing/toQuantity'
+import { type LevelSite, levelSites } from './sizing/panelSite'
 import type { SizedPanel, SizedScheme } from './sizing/sizedPanel'
 import { sizeScheme } from './sizing/sizeScheme'
 import { deadLoadOf, grossAreaM2 } from './takeoff/deadLoad'
@@ -51,7 +52,8 @@ export interface FullAppraisal {
  */
 export function appraise(file: AppraisalFile): Appraisal {
   refuseImpossibleFloor(file)
-  const schemes = file.schemes.map((scheme) => appraiseScheme(scheme, file).result)
+  const sites = levelSites(file.levels)
+  const schemes = file.schemes.map((scheme) => appraiseScheme(scheme, file, sites).result)
   return appraisalOf(schemes, file)
 }
 
@@ -62,7 +64,8 @@ export function appraise(file: AppraisalFile): Appraisal {
  */
 export function appraiseInFull(file: AppraisalFile): FullAppraisal {
   refuseImpossibleFloor(file)
-  const outcomes = file.schemes.map((scheme) => attempt(scheme, file))
+  const sites = levelSites(file.levels)
+  const outcomes = file.schemes.map((scheme) => attempt(scheme, file, sites))
   const done = outcomes.filter((outcome) => 'result' in outcome)
   return {
     appraisal: appraisalOf(
@@ -103,18 +106,18 @@ interface AppraisedScheme {
   readonly measures: SchemeMeasures
 }
 
-function attempt(scheme: Scheme, file: AppraisalFile): AppraisedScheme | SchemeProblem {
+function attempt(scheme: Scheme, file: AppraisalFile, sites: readonly LevelSite[]): AppraisedScheme | SchemeProblem {
   try {
-    return appraiseScheme(scheme, file)
+    return appraiseScheme(scheme, file, sites)
   } catch (error) {
     if (!(error instanceof OutOfScopeError)) throw error
     return { scheme: scheme.mark, issue: { path: error.path, message: error.expected } }
   }
 }
 
-function appraiseScheme(scheme: Scheme, file: AppraisalFile): AppraisedScheme {
+function appraiseScheme(scheme: Scheme, file: AppraisalFile, sites: readonly LevelSite[]): AppraisedScheme {
   const { brief, levels, rates, scope } = file
-  const sized = sizeScheme(scheme, { brief, levels })
+  const sized = sizeScheme(scheme, { brief, levels }, sites)
   const rules = RULE_SETS[file.measurement]
   const quantities = takeOffScheme(scheme, sized, levels, rules, brief.basis)
   const panels = measuredPanels(sized, levels)
