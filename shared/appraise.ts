@@ -11,7 +11,6 @@ import { priceScheme } from './pricing/priceScheme'
 import { ratesOfScheme } from './pricing/ratesOfScheme'
 import { scopeLines } from './pricing/scopeLines'
 import { toQuantity } from './pricing/toQuantity'
-import { type LevelSite, levelSites } from './sizing/panelSite'
 import type { SizedPanel, SizedScheme } from './sizing/sizedPanel'
 import { sizeScheme } from './sizing/sizeScheme'
 import { deadLoadOf, grossAreaM2 } from './takeoff/deadLoad'
@@ -52,8 +51,7 @@ export interface FullAppraisal {
  */
 export function appraise(file: AppraisalFile): Appraisal {
   refuseImpossibleFloor(file)
-  const sites = levelSites(file.levels)
-  const schemes = file.schemes.map((scheme) => appraiseScheme(scheme, file, sites).result)
+  const schemes = file.schemes.map((scheme) => appraiseScheme(scheme, file).result)
   return appraisalOf(schemes, file)
 }
 
@@ -64,8 +62,7 @@ export function appraise(file: AppraisalFile): Appraisal {
  */
 export function appraiseInFull(file: AppraisalFile): FullAppraisal {
   refuseImpossibleFloor(file)
-  const sites = levelSites(file.levels)
-  const outcomes = file.schemes.map((scheme) => attempt(scheme, file, sites))
+  const outcomes = file.schemes.map((scheme) => attempt(scheme, file))
   const done = outcomes.filter((outcome) => 'result' in outcome)
   return {
     appraisal: appraisalOf(
@@ -106,18 +103,18 @@ interface AppraisedScheme {
   readonly measures: SchemeMeasures
 }
 
-function attempt(scheme: Scheme, file: AppraisalFile, sites: readonly LevelSite[]): AppraisedScheme | SchemeProblem {
+function attempt(scheme: Scheme, file: AppraisalFile): AppraisedScheme | SchemeProblem {
   try {
-    return appraiseScheme(scheme, file, sites)
+    return appraiseScheme(scheme, file)
   } catch (error) {
     if (!(error instanceof OutOfScopeError)) throw error
     return { scheme: scheme.mark, issue: { path: error.path, message: error.expected } }
   }
 }
 
-function appraiseScheme(scheme: Scheme, file: AppraisalFile, sites: readonly LevelSite[]): AppraisedScheme {
+function appraiseScheme(scheme: Scheme, file: AppraisalFile): AppraisedScheme {
   const { brief, levels, rates, scope } = file
-  const sized = sizeScheme(scheme, { brief, levels }, sites)
+  const sized = sizeScheme(scheme, { brief, levels })
   const rules = RULE_SETS[file.measurement]
   const quantities = takeOffScheme(scheme, sized, levels, rules, brief.basis)
   const panels = measuredPanels(sized, levels)

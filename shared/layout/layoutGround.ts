@@ -21,15 +21,10 @@ export interface LayoutGround {
  *
  * Source: project rule, engine design section 2
  * @param rowStarts - starts of the rows' bands in the panel's local frame, mm, where they are not its own (`alignedRows`)
- * @param clear - clear outline of this panel, where it is known
  * @throws OutOfScopeError when the supports leave no clear outline
  */
-export function layoutGround(
-  panel: Panel,
-  scheme: RibbedScheme,
-  rowStarts?: readonly number[],
-  clear: ClearOutline = clearOutline(panel),
-): LayoutGround {
+export function layoutGround(panel: Panel, scheme: RibbedScheme, rowStarts?: readonly number[]): LayoutGround {
+  const clear = clearOutline(panel)
   const field = panelField(panel, clear, scheme.trimmerWidth)
   const starts = rowStarts ?? rowBands(field.top - field.bottom, scheme).starts.map((start) => field.bottom + start)
   const rows = starts.map((start) => clearRow(field, start, scheme))

@@ -1,6 +1,6 @@
 import type { Level, Panel } from '../contracts/appraisal'
 import type { Point } from '../geometry/point'
-import { type Bounds, boundsOf, boundsOverlap, distance, edgeOfRing } from '../geometry/ring'
+import { boundsOf, boundsOverlap, distance, edgeOfRing } from '../geometry/ring'
 import { DRAWN_TOLERANCE_MM } from '../geometry/tolerance'
 
 /** Two panels of a level that stand on one support: each pair is listed from both sides. Numbers of panels and edges from 0. */
@@ -31,8 +31,7 @@ export function findNeighbours({ panels }: Pick<Level, 'panels'>): Neighbour[] {
   order.forEach((first, position) => {
     for (const second of order.slice(position + 1)) {
       if (bounds[second]!.minX > bounds[first]!.maxX + DRAWN_TOLERANCE_MM) break
-      if (!boundsOverlap(bounds[first]!, bounds[second]!, -2 * DRAWN_TOLERANCE_MM)) continue
-      found.push(...between(panels, bounds, first, second))
+      if (boundsOverlap(bounds[first]!, bounds[second]!, -2 * DRAWN_TOLERANCE_MM)) found.push(...between(panels, first, second))
     }
   })
   return found.sort(
@@ -51,11 +50,10 @@ export function findSharedEdges(level: Pick<Level, 'panels'>): boolean[][] {
   )
 }
 
-function between(panels: readonly Panel[], bounds: readonly Bounds[], first: number, second: number): Neighbour[] {
+function between(panels: readonly Panel[], first: number, second: number): Neighbour[] {
   const [a, b] = [panels[first]!.outline, panels[second]!.outline]
-  const [ofA, ofB] = [edgesNear(a, bounds[second]!), edgesNear(b, bounds[first]!)]
-  return ofA.flatMap((edge) =>
-    ofB.flatMap((neighbourEdge): Neighbour[] => {
+  return a.flatMap((_, edge) =>
+    b.flatMap((_, neighbourEdge): Neighbour[] => {
       const overlap = commonLength(edgeOfRing(a, edge), edgeOfRing(b, neighbourEdge))
       if (overlap <= LEAST_OVERLAP_MM) return []
       return [
@@ -64,17 +62,6 @@ function between(panels: readonly Panel[], bounds: readonly Bounds[], first: num
       ]
     }),
   )
-}
-
-/** Edges of a ring that run for more than the least overlap within some bounds, or as good as along them: no others can lie on their ring. */
-function edgesNear(ring: readonly Point[], { minX, minY, maxX, maxY }: Bounds): number[] {
-  const near = 2 * DRAWN_TOLERANCE_MM
-  return [...ring.keys()].filter((i) => {
-    const [[ax, ay], [bx, by]] = edgeOfRing(ring, i)
-    const width = Math.min(Math.max(ax, bx), maxX + near) - Math.max(Math.min(ax, bx), minX - near)
-    const height = Math.min(Math.max(ay, by), maxY + near) - Math.max(Math.min(ay, by), minY - near)
-    return width >= 0 && height >= 0 && width + height > LEAST_OVERLAP_MM
-  })
 }
 
 /** Length that two edges have in common when they lie in one line and run opposite ways, else 0, mm. */

@@ -49,8 +49,7 @@ export function panelField(panel: Panel, clear: ClearOutline, trimmerWidthMm: nu
   const inVoid = (windings: readonly number[]) => windings.slice(1, 1 + holes).some((winding) => winding > 0)
   const inHole = (windings: readonly number[]) => windings.slice(1).some((winding) => winding > 0)
   const where = (isInside: (windings: readonly number[]) => boolean) => regionWhere(slabs, rings.length, isInside)
-  const clearRegion = where(inOutline)
-  const free = holes === 0 ? clearRegion : where((windings) => inOutline(windings) && !inHole(windings))
+  const free = where((windings) => inOutline(windings) && !inHole(windings))
   const { minY: bottom, maxY: top } = boundsOf(outlineRing)
   const clearArea = signedArea(outlineRing)
   const voidsArea = holes === 0 ? 0 : areaOf(where((windings) => inOutline(windings) && inVoid(windings)))
@@ -65,7 +64,7 @@ export function panelField(panel: Panel, clear: ClearOutline, trimmerWidthMm: nu
     frame,
     bottom,
     top,
-    clear: clearRegion,
+    clear: where(inOutline),
     free,
     outlineRing,
     voidRings,

@@ -10,10 +10,10 @@ import { stripAreas } from './stripAreas'
  * fillers are 0.
  *
  * @param sharedEdges - one for each edge of the outline: true where another panel stands on the same support (outer half of walls)
- * @param outline - clear outline of this panel, where it is known
  * @throws OutOfScopeError when the supports leave no clear outline
  */
-export function solidAreas(panel: Panel, sharedEdges: readonly boolean[], outline = clearOutline(panel)): PanelAreas {
+export function solidAreas(panel: Panel, sharedEdges: readonly boolean[]): PanelAreas {
+  const outline = clearOutline(panel)
   const { clearArea: clear, voidsArea: voids } = panelField(panel, outline, 0)
   const none = { blocks: 0, ribs: 0, edgeStrips: 0, crossRibs: 0, trimmers: 0, fillers: 0 }
   return {

@@ -1,6 +1,6 @@
 import type { AppraisalFile, Scheme } from '../contracts/appraisal'
 import { codeBasisOf } from './codeBases'
-import { type LevelSite, levelSites } from './panelSite'
+import { levelSites } from './panelSite'
 import { sizeRibbed } from './ribbed/sizeRibbed'
 import type { SizedPanel, SizedScheme } from './sizedPanel'
 import { sizeSolid } from './solid/sizeSolid'
@@ -9,15 +9,11 @@ import { sizeSolid } from './solid/sizeSolid'
  * A scheme sized over all levels of a floor: depth, bars, moments and every check of each panel.
  *
  * Source: project rule, engine design sections 1 to 4
- * @param sites - of these levels, where they are known from another scheme
  * @throws OutOfScopeError for a code basis that is not built, or panels outside the rules' scope
  */
-export function sizeScheme(
-  scheme: Scheme,
-  { brief, levels }: Pick<AppraisalFile, 'brief' | 'levels'>,
-  sites: readonly LevelSite[] = levelSites(levels),
-): SizedScheme {
+export function sizeScheme(scheme: Scheme, { brief, levels }: Pick<AppraisalFile, 'brief' | 'levels'>): SizedScheme {
   const basis = codeBasisOf(brief)
+  const sites = levelSites(levels)
   const panels: readonly SizedPanel[] =
     scheme.kind === 'ribbed'
       ? sites.flatMap((level) => sizeRibbed(level, scheme, brief, basis))

@@ -1,5 +1,4 @@
-import type { Level, Panel, Ring } from '../contracts/appraisal'
-import { clearOutline } from '../layout/clearOutline'
+import type { Level, Panel } from '../contracts/appraisal'
 import { findSharedEdges } from '../layout/neighbours'
 import type { SizedPanel, SizedScheme } from '../sizing/sizedPanel'
 import { type Expression, timesed } from './expression'
@@ -9,8 +8,6 @@ export interface MeasuredPanel {
   readonly level: Level
   readonly panel: Panel
   readonly sized: SizedPanel
-  /** Between the faces of supports, mm. */
-  readonly clearRing: Ring
   /** One for each edge of the outline: whether another panel of the level stands on the same support. */
   readonly sharedEdges: readonly boolean[]
 }
@@ -32,7 +29,7 @@ export function measuredPanels(sized: SizedScheme, levels: readonly Level[]): Me
     if (sizedPanel.level !== level.mark || sizedPanel.mark !== panel.mark) {
       throw new RangeError(`expected panel ${level.mark} ${panel.mark} sized, got ${sizedPanel.level} ${sizedPanel.mark}`)
     }
-    return { level, panel, sized: sizedPanel, clearRing: clearOutline(panel).ring, sharedEdges }
+    return { level, panel, sized: sizedPanel, sharedEdges }
   })
 }
 

@@ -1,3 +1,4 @@
+import { clearOutline } from '../layout/clearOutline'
 import { toM2 } from '../units'
 import { type Expression, figure, less, plus } from './expression'
 import type { MeasuredPanel } from './measuredPanel'
@@ -5,8 +6,8 @@ import { areaOf } from './ringExpressions'
 import { deductedVoids } from './voidsOf'
 
 /** Plan area between the faces of supports, voids in, m². */
-export function clearAreaOf({ clearRing, sized }: MeasuredPanel): Expression {
-  return areaOf(clearRing, sized.areas.clear)
+export function clearAreaOf({ panel, sized }: MeasuredPanel): Expression {
+  return areaOf(clearOutline(panel).ring, sized.areas.clear)
 }
 
 /** Plan area between the faces of supports less voids, m²: what is formed and propped. */

@@ -30,7 +30,7 @@ export interface RibbedGround {
  * @throws OutOfScopeError `outline` where no row of blocks fits
  */
 export function ribbedGround(site: PanelSite, scheme: RibbedScheme, rows: AlignedRows | null): RibbedGround {
-  const layout = layoutGround(site.panel, scheme, rows?.starts, site.clear)
+  const layout = layoutGround(site.panel, scheme, rows?.starts)
   const ribs = ribLineEnds(site, layout)
   if (layout.longestRib === 0 || ribs.length === 0)
     throw new OutOfScopeError('outline', 'no row of blocks fits: expected a wider panel, smaller blocks or another rib direction')

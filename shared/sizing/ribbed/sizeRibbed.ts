@@ -29,7 +29,7 @@ export function sizeRibbed(level: LevelSite, scheme: RibbedScheme, brief: Brief,
   return level.panels.map((site, i) => {
     const [task, design] = [tasks[i]!, designs[i]!]
     const { panel } = task
-    const ground = () => layoutGround(site.panel, scheme, job.shapes[i]!.rows?.starts, site.clear)
+    const ground = () => layoutGround(site.panel, scheme, job.shapes[i]!.rows?.starts)
     const layout = site === panel.site ? panel.layout : laidOut(site, scheme, basis, panel.solidZoneMm, ground())
     return sizedRibbedPanel(task, design, { level: level.mark, mark: site.panel.mark }, layout, lines[i]!)
   })

@@ -53,7 +53,7 @@ export function slabPlan(site: PanelSite): SlabPlan {
   const fields = remember<PanelField>()
   return {
     site,
-    areas: solidAreas(site.panel, site.sharedEdges, site.clear),
+    areas: solidAreas(site.panel, site.sharedEdges),
     isRectangle: isFilled,
     axes: [slabAxis(site, along), slabAxis(site, across)],
     fieldAlong: ({ angle }) => fields(String(angle), () => panelField({ ...site.panel, ribDirection: angle }, site.clear, 0)),

@@ -1,7 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { frameAt } from '#shared/geometry/frame'
 import { findNeighbours, findSharedEdges } from '#shared/layout/neighbours'
-import { FORTY_PANELS, mixedPanels } from '../../bench/mixedLevel'
 import { levelOf, panelOf, rectangle } from './support/floorParts'
 
 const at = (mark: string, ...place: [number, number, number, number]) => panelOf({ mark, outline: rectangle(...place) })
@@ -53,17 +51,6 @@ describe('findNeighbours', () => {
   it('takes no edges that lie in one line but on the same side of it', () => {
     const level = levelOf([at('P1', 0, 0, 6000, 4500), at('P2', 2000, 0, 2000, 2000)])
     expect(findNeighbours(level)).toEqual([])
-  })
-
-  it('finds the same however a level is turned', () => {
-    const panels = mixedPanels(FORTY_PANELS, 7)
-    const found = [0, 17, 45, 90, 133].map((angle) => {
-      const { toLevel } = frameAt([0, 0], angle)
-      const turned = panels.map(({ mark, outline }) => panelOf({ mark, outline: outline.map(([x, y]) => [...toLevel([x, y])]) }))
-      return findNeighbours(levelOf(turned)).map(({ overlap, ...pair }) => ({ ...pair, overlap: Math.round(overlap) }))
-    })
-    expect(found[0]).toHaveLength(2 * (7 * 5 + 8 * 4))
-    for (const each of found) expect(each).toEqual(found[0])
   })
 
   it('looks at 500 panels in a moment', () => {
