@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import { CALCULATION_TITLES, type PanelCalculation } from '#shared/calculation/calculation'
-import { check } from '#shared/contracts/appraisal'
+import { check } from '#shared/contracts/appraisalResult'
 
 const line = z.strictObject({
   symbol: z.string().nullable(),

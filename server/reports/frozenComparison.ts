@@ -1,5 +1,6 @@
 import { z } from 'zod'
-import { brief, check, deadLoad, itemCode, markupLine, money, ribbed, solid, unit } from '#shared/contracts/appraisal'
+import { brief, itemCode, ribbed, solid } from '#shared/contracts/appraisal'
+import { check, deadLoad, markupLine, money, unit } from '#shared/contracts/appraisalResult'
 import { currencyCode, id, moment } from '#shared/contracts/primitives'
 import { rateOverride } from '#shared/contracts/rateOverride'
 import { useCategory } from '#shared/contracts/project'

@@ -1,4 +1,4 @@
-import type { Check } from '#shared/contracts/appraisal'
+import type { Check } from '#shared/contracts/appraisalResult'
 import { CHECK_NAMES } from './content/checkNames'
 import type { ComparedFigure } from './content/comparedFigures'
 import type { Sentence } from './content/headline'

@@ -1,4 +1,5 @@
-import type { AppraisalFile, DeadLoad, Scheme } from '../contracts/appraisal'
+import type { AppraisalFile, Scheme } from '../contracts/appraisal'
+import type { DeadLoad } from '../contracts/appraisalResult'
 import type { SizedPanel } from '../sizing/sizedPanel'
 import type { SchemeMeasures } from '../takeoff/schemeMeasures'
 import type { AlsoFigure } from './alsoFigure'

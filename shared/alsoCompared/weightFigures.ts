@@ -1,4 +1,4 @@
-import type { DeadLoad } from '../contracts/appraisal'
+import type { DeadLoad } from '../contracts/appraisalResult'
 import { figure } from '../sizing/figure'
 import { REINFORCED_CONCRETE_KN_PER_M3 } from '../takeoff/deadLoad'
 import type { SchemeMeasures } from '../takeoff/schemeMeasures'

@@ -1,4 +1,4 @@
-import type { Check } from '../contracts/appraisal'
+import type { Check } from '../contracts/appraisalResult'
 
 /** One line of a calculation as an engineer writes it: symbol = formula = numbers = result. What a line has not is null. */
 export interface CalculationLine {

@@ -1,4 +1,4 @@
-import type { Check } from '../contracts/appraisal'
+import type { Check } from '../contracts/appraisalResult'
 import type { SizedPanel } from '../sizing/sizedPanel'
 import type { CalculationEntry, CalculationTitle } from './calculation'
 import { readWorking } from './readWorking'

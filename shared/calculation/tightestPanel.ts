@@ -1,4 +1,4 @@
-import type { Check } from '../contracts/appraisal'
+import type { Check } from '../contracts/appraisalResult'
 
 /** A failing check is tighter than one that passes, whatever their utilisations; of two alike the one that uses more. */
 export function isTighter(check: Check, than: Check): boolean {

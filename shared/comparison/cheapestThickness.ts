@@ -1,4 +1,5 @@
-import type { AppraisalFile, Cost, ItemCode, SchemeResult, SolidScheme } from '../contracts/appraisal'
+import type { AppraisalFile, ItemCode, SolidScheme } from '../contracts/appraisal'
+import type { Cost, SchemeResult } from '../contracts/appraisalResult'
 import { Decimal, sumOf } from '../pricing/decimal'
 import { itemisedCost } from '../pricing/itemisedCost'
 import { markupFactor } from './unroundedTotal'

@@ -1,4 +1,5 @@
-import type { Comparison, Cost, ItemCode, SchemeResult, TippingPoint } from '../contracts/appraisal'
+import type { ItemCode } from '../contracts/appraisal'
+import type { Comparison, Cost, SchemeResult, TippingPoint } from '../contracts/appraisalResult'
 import { allInCost } from '../pricing/allInCost'
 import { allInFactor } from '../pricing/allInFactor'
 import { allInRate } from '../pricing/allInRate'

@@ -1,4 +1,5 @@
-import { type Comparison, itemCode, type SchemeResult } from '../contracts/appraisal'
+import { itemCode } from '../contracts/appraisal'
+import { type Comparison, type SchemeResult } from '../contracts/appraisalResult'
 import { itemisedCost } from '../pricing/itemisedCost'
 import { ledger } from './ledger'
 import { type PricedScheme, tippingPoint } from './tippingPoint'

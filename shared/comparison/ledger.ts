@@ -1,4 +1,4 @@
-import type { Cost, LedgerLine } from '../contracts/appraisal'
+import type { Cost, LedgerLine } from '../contracts/appraisalResult'
 import { Decimal } from '../pricing/decimal'
 import { printMoney } from '../pricing/money'
 

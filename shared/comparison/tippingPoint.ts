@@ -1,4 +1,5 @@
-import type { Cost, ItemCode, TippingPoint } from '../contracts/appraisal'
+import type { ItemCode } from '../contracts/appraisal'
+import type { Cost, TippingPoint } from '../contracts/appraisalResult'
 import { Decimal } from '../pricing/decimal'
 import { markupFactor, unroundedTotal } from './unroundedTotal'
 

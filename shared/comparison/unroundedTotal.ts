@@ -1,4 +1,5 @@
-import type { Cost, ItemCode } from '../contracts/appraisal'
+import type { ItemCode } from '../contracts/appraisal'
+import type { Cost } from '../contracts/appraisalResult'
 import { Decimal, sumOf } from '../pricing/decimal'
 import { itemisedCost } from '../pricing/itemisedCost'
 import { markupFactor, markupSum } from '../pricing/markupFactor'

@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { appraisal } from './appraisal'
+import { appraisal } from './appraisalResult'
 import { edition } from './rateBook'
 import { project, storedLevel, storedScheme } from './project'
 import { scopeStanding } from './sameScope'

@@ -1,4 +1,4 @@
-import type { Cost, ItemLine } from '../contracts/appraisal'
+import type { Cost, ItemLine } from '../contracts/appraisalResult'
 import { allInFactor } from './allInFactor'
 import { allInRate } from './allInRate'
 import { allocate } from './allocate'

@@ -1,4 +1,4 @@
-import type { Cost } from '../contracts/appraisal'
+import type { Cost } from '../contracts/appraisalResult'
 import { Decimal, sumOf } from './decimal'
 import { itemisedCost } from './itemisedCost'
 import { markupFactor, markupSum } from './markupFactor'

@@ -1,4 +1,5 @@
-import type { BillLine, ItemLine, ItemQuantity, Quantity, Rates } from '../contracts/appraisal'
+import type { Rates } from '../contracts/appraisal'
+import type { BillLine, ItemLine, ItemQuantity, Quantity } from '../contracts/appraisalResult'
 import { type MeasurementRules, unitOf } from '../takeoff/measurementRules'
 import { Decimal, sumOf } from './decimal'
 import { minorUnit } from './minorUnit'

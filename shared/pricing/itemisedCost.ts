@@ -1,4 +1,4 @@
-import type { Cost, ItemLine } from '../contracts/appraisal'
+import type { Cost, ItemLine } from '../contracts/appraisalResult'
 import { Decimal } from './decimal'
 import { printMoney } from './money'
 

@@ -1,4 +1,4 @@
-import type { Cost, MarkupLine } from '../contracts/appraisal'
+import type { Cost, MarkupLine } from '../contracts/appraisalResult'
 import { Decimal } from './decimal'
 
 /** What percentages of preliminaries, overheads, contingency and tax together multiply measured work by, unrounded: 1 for none. */

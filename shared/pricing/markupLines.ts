@@ -1,4 +1,4 @@
-import type { MarkupLine, MarkupName } from '../contracts/appraisal'
+import type { MarkupLine, MarkupName } from '../contracts/appraisalResult'
 import { Decimal } from './decimal'
 import { printMoney, roundMoney } from './money'
 import type { SchemeRates } from './priceScheme'

@@ -1,4 +1,5 @@
-import type { BillLine, Cost, ItemQuantity, Quantity, Rates } from '../contracts/appraisal'
+import type { Rates } from '../contracts/appraisal'
+import type { BillLine, Cost, ItemQuantity, Quantity } from '../contracts/appraisalResult'
 import type { MeasurementRules } from '../takeoff/measurementRules'
 import { comparingRules } from '../takeoff/rules/comparingRules'
 import { billLine } from './billLine'

@@ -1,4 +1,4 @@
-import type { BillLine } from '../contracts/appraisal'
+import type { BillLine } from '../contracts/appraisalResult'
 import type { ScopeBasis, ScopeDeclaration } from '../contracts/sameScope'
 import { comparingRules } from '../takeoff/rules/comparingRules'
 import type { SchemeMeasures } from '../takeoff/schemeMeasures'

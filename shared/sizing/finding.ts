@@ -1,4 +1,4 @@
-import type { Check } from '../contracts/appraisal'
+import type { Check } from '../contracts/appraisalResult'
 
 /** A check of one panel before it is stamped with level and panel; its working is written only when it is shown. */
 export interface Finding {

@@ -1,4 +1,5 @@
-import type { Bar, BarDiameter, Check, PanelResult, SlabLayers } from '../contracts/appraisal'
+import type { Bar, BarDiameter, SlabLayers } from '../contracts/appraisal'
+import type { Check, PanelResult } from '../contracts/appraisalResult'
 import type { PanelAreas, PanelLayout } from '../layout/panelLayout'
 import type { BarShape } from './bars/barShape'
 import type { FireStanding } from './fireStanding'

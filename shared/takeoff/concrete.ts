@@ -1,4 +1,5 @@
-import type { ConcreteSplit, RibbedScheme, Scheme } from '../contracts/appraisal'
+import type { RibbedScheme, Scheme } from '../contracts/appraisal'
+import type { ConcreteSplit } from '../contracts/appraisalResult'
 import type { PanelAreas } from '../layout/panelLayout'
 import { toM, toM2, toM3 } from '../units'
 import { type Expression, figure, less, plus, times } from './expression'

@@ -1,4 +1,5 @@
-import type { DeadLoad, Scheme } from '../contracts/appraisal'
+import type { Scheme } from '../contracts/appraisal'
+import type { DeadLoad } from '../contracts/appraisalResult'
 import { toKn, toM2 } from '../units'
 import { concreteSplit } from './concrete'
 import { type MeasuredPanel, repeatsOf } from './measuredPanel'

@@ -1,4 +1,5 @@
-import type { ItemCode, ItemQuantity, Quantity } from '../contracts/appraisal'
+import type { ItemCode } from '../contracts/appraisal'
+import type { ItemQuantity, Quantity } from '../contracts/appraisalResult'
 import { unitOf } from './measurementRules'
 import { roundAsPrinted } from './roundAsPrinted'
 

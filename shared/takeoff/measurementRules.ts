@@ -1,4 +1,5 @@
-import type { ItemCode, Scheme, Unit } from '../contracts/appraisal'
+import type { ItemCode, Scheme } from '../contracts/appraisal'
+import type { Unit } from '../contracts/appraisalResult'
 import type { CompositeItem, Measurement, Stage } from '../contracts/measurement'
 
 /** How a rule is known: seen in a text, from memory, a rule of this project, or common practice without a source. */

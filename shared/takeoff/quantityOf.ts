@@ -1,4 +1,5 @@
-import type { ItemCode, ItemQuantity, Part } from '../contracts/appraisal'
+import type { ItemCode } from '../contracts/appraisal'
+import type { ItemQuantity, Part } from '../contracts/appraisalResult'
 import type { CompositeItem } from '../contracts/measurement'
 import type { Expression } from './expression'
 import { withRepeats, type MeasuredPanel } from './measuredPanel'

@@ -1,4 +1,5 @@
-import type { Brief, ItemCode, ItemQuantity, Level, Scheme, Unit } from '../contracts/appraisal'
+import type { Brief, ItemCode, Level, Scheme } from '../contracts/appraisal'
+import type { ItemQuantity, Unit } from '../contracts/appraisalResult'
 import type { SizedScheme } from '../sizing/sizedPanel'
 import { itemisedQuantities } from './itemisedQuantities'
 import type { MeasurementRules } from './measurementRules'

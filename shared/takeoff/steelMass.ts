@@ -1,4 +1,5 @@
-import type { Mesh, Quantity } from '../contracts/appraisal'
+import type { Mesh } from '../contracts/appraisal'
+import type { Quantity } from '../contracts/appraisalResult'
 import { FABRIC } from '../sizing/tables/fabric'
 
 /**

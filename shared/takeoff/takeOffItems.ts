@@ -1,4 +1,5 @@
-import type { BarDiameter, Brief, ItemCode, ItemQuantity, Mesh, Scheme } from '../contracts/appraisal'
+import type { BarDiameter, Brief, ItemCode, Mesh, Scheme } from '../contracts/appraisal'
+import type { ItemQuantity } from '../contracts/appraisalResult'
 import { blockCount } from './blocks'
 import { concreteOf, concreteSplit } from './concrete'
 import type { Expression } from './expression'

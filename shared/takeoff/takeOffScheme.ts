@@ -1,4 +1,5 @@
-import type { Brief, Level, Quantity, Scheme } from '../contracts/appraisal'
+import type { Brief, Level, Scheme } from '../contracts/appraisal'
+import type { Quantity } from '../contracts/appraisalResult'
 import type { SizedScheme } from '../sizing/sizedPanel'
 import { type MeasuredPanel, measuredPanels } from './measuredPanel'
 import type { Composite, MeasurementRules } from './measurementRules'

@@ -5,7 +5,7 @@ import { join } from 'node:path'
 import { fileURLToPath } from 'node:url'
 import { afterAll, describe, expect, it } from 'vitest'
 import { apiError } from '#shared/contracts/apiError'
-import { appraisal } from '#shared/contracts/appraisal'
+import { appraisal } from '#shared/contracts/appraisalResult'
 
 const ROOT = fileURLToPath(new URL('../..', import.meta.url))
 const ONE_PANEL = readFileSync(join(ROOT, 'shared/examples/one-panel.json'), 'utf8')

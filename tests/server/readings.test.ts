@@ -1,7 +1,7 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { ProjectEntity } from '../../server/entities/project/ProjectEntity'
 import { appraise } from '../../shared/appraise'
-import { appraisal } from '../../shared/contracts/appraisal'
+import { appraisal } from '../../shared/contracts/appraisalResult'
 import { project, projectSheet, projectSummary, storedScheme } from '../../shared/contracts/project'
 import { projectReading } from '../../shared/contracts/projectReading'
 import { parseAppraisalFile } from '../../shared/parseAppraisalFile'

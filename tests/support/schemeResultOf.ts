@@ -1,4 +1,4 @@
-import type { Check, Cost, SchemeResult } from '#shared/contracts/appraisal'
+import type { Check, Cost, SchemeResult } from '#shared/contracts/appraisalResult'
 
 /** A priced and passing scheme of one concrete line, with what a test changes. */
 export function aResult(kind: 'ribbed' | 'solid', given: Partial<SchemeResult> = {}): SchemeResult {

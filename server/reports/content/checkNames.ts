@@ -1,4 +1,4 @@
-import type { Check } from '#shared/contracts/appraisal'
+import type { Check } from '#shared/contracts/appraisalResult'
 
 /** Kinds of checks in the words of the report. */
 export const CHECK_NAMES = {

@@ -1,4 +1,4 @@
-import type { BillItem, Cost } from '#shared/contracts/appraisal'
+import type { BillItem, Cost } from '#shared/contracts/appraisalResult'
 import { markupFactor } from '#shared/comparison/unroundedTotal'
 import { Decimal, sumOf } from '#shared/pricing/decimal'
 import { printMoney } from '#shared/pricing/money'

@@ -1,4 +1,4 @@
-import type { Cost, MarkupName } from '#shared/contracts/appraisal'
+import type { Cost, MarkupName } from '#shared/contracts/appraisalResult'
 
 const WORDS: Readonly<Record<MarkupName, string>> = {
   preliminaries: 'preliminaries',

@@ -1,5 +1,5 @@
 import type { PanelCalculation } from '#shared/calculation/calculation'
-import type { Check } from '#shared/contracts/appraisal'
+import type { Check } from '#shared/contracts/appraisalResult'
 import { Decimal } from '#shared/pricing/decimal'
 import { signedDecimalText } from '../figureText'
 import type { FrozenComparison } from '../frozenComparison'

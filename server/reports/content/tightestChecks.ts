@@ -1,5 +1,5 @@
 import { isTighter } from '#shared/calculation/tightestPanel'
-import type { Check } from '#shared/contracts/appraisal'
+import type { Check } from '#shared/contracts/appraisalResult'
 import { CHECK_NAMES } from './checkNames'
 
 /** Failing checks listed at most; the report says how many there are in all. */

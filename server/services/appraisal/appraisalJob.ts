@@ -2,7 +2,8 @@ import type { PanelCalculation } from '#shared/calculation/calculation'
 import type { AlsoCompared } from '#shared/alsoCompared/alsoCompared'
 import type { ScopeDifference } from '#shared/alsoCompared/scopeDifferences'
 import type { ApiIssue } from '#shared/contracts/apiError'
-import type { Appraisal, AppraisalFile } from '#shared/contracts/appraisal'
+import type { AppraisalFile } from '#shared/contracts/appraisal'
+import type { Appraisal } from '#shared/contracts/appraisalResult'
 import type { SizedPanel } from '#shared/sizing/sizedPanel'
 
 /**

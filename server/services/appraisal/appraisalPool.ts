@@ -1,4 +1,5 @@
-import type { Appraisal, AppraisalFile } from '#shared/contracts/appraisal'
+import type { AppraisalFile } from '#shared/contracts/appraisal'
+import type { Appraisal } from '#shared/contracts/appraisalResult'
 import { Worker } from 'node:worker_threads'
 import { AppError } from '../../errors'
 import type { AppraisalJob, AppraisalOutcome, ComparedAppraisal } from './appraisalJob'

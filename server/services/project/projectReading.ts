@@ -1,5 +1,5 @@
 import { compareAllIn } from '#shared/comparison/compareAllIn'
-import type { Appraisal } from '#shared/contracts/appraisal'
+import type { Appraisal } from '#shared/contracts/appraisalResult'
 import type { ProjectReading } from '#shared/contracts/projectReading'
 import { allInCost } from '#shared/pricing/allInCost'
 import type { EntityManager } from 'typeorm'

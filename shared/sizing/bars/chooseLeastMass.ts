@@ -1,4 +1,4 @@
-import type { Check } from '../../contracts/appraisal'
+import type { Check } from '../../contracts/appraisalResult'
 import { type Finding, isMet, utilisationOf } from '../finding'
 
 /** A way to reinforce: what it weighs and what its checks find, which is asked only when needed. */

@@ -1,4 +1,5 @@
-import type { Brief, Check, Level, Scheme } from '../../contracts/appraisal'
+import type { Brief, Level, Scheme } from '../../contracts/appraisal'
+import type { Check } from '../../contracts/appraisalResult'
 
 /** A floor and one way of building it: what a cure changes. */
 export interface CureInput {

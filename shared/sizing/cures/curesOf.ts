@@ -1,4 +1,4 @@
-import type { Check } from '../../contracts/appraisal'
+import type { Check } from '../../contracts/appraisalResult'
 import { OutOfScopeError } from '../../outOfScope'
 import { figure } from '../figure'
 import type { SizedPanel } from '../sizedPanel'

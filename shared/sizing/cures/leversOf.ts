@@ -1,4 +1,5 @@
-import type { Check, RibbedScheme, SlabLayers, SolidScheme } from '../../contracts/appraisal'
+import type { RibbedScheme, SlabLayers, SolidScheme } from '../../contracts/appraisal'
+import type { Check } from '../../contracts/appraisalResult'
 import { type BarAim, otherLayer, otherRibBars } from './barLevers'
 import type { CheckName, CheckTarget, CureInput, Lever } from './cure'
 import { largerRib, otherCover, strongerConcrete, thickerSlab, widerZone } from './sizeLevers'

@@ -1,4 +1,4 @@
-import type { Check } from '../../contracts/appraisal'
+import type { Check } from '../../contracts/appraisalResult'
 import type { SizedPanel } from '../sizedPanel'
 
 /** A check told from all others of its panel by name, place, and order among those alike. */

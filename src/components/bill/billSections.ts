@@ -1,4 +1,4 @@
-import type { BillLine, Cost, ItemLine } from '#shared/contracts/appraisal'
+import type { BillLine, Cost, ItemLine } from '#shared/contracts/appraisalResult'
 import type { EditionWithRates } from '#shared/contracts/rateBook'
 import type { RateOverride } from '#shared/contracts/rateOverride'
 import { Decimal, sumOf } from '#shared/pricing/decimal'

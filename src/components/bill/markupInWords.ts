@@ -1,4 +1,4 @@
-import type { MarkupLine, MarkupName } from '#shared/contracts/appraisal'
+import type { MarkupLine, MarkupName } from '#shared/contracts/appraisalResult'
 import { formatDecimal } from '../base/formatDecimal'
 
 const NAMES: Readonly<Record<MarkupName, string>> = {

@@ -1,4 +1,4 @@
-import type { Check } from '#shared/contracts/appraisal'
+import type { Check } from '#shared/contracts/appraisalResult'
 
 const NAMES: Record<Check['name'], string> = {
   'flexure.midspan': 'Bending, midspan',

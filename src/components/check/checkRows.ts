@@ -1,4 +1,4 @@
-import type { Check, SchemeResult } from '#shared/contracts/appraisal'
+import type { Check, SchemeResult } from '#shared/contracts/appraisalResult'
 import type { SizedPanel } from '#shared/sizing/sizedPanel'
 
 /** Checks of a scheme, failing first, then the tightest. */

@@ -1,4 +1,4 @@
-import type { Check } from '#shared/contracts/appraisal'
+import type { Check } from '#shared/contracts/appraisalResult'
 import type { CheckTarget } from '#shared/sizing/cures/cure'
 
 /** A check's row in its panel's own list, which the engine numbers from 0. @param checks - of the scheme, in the engine's order */

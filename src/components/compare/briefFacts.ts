@@ -1,4 +1,5 @@
-import type { Brief, SchemeResult } from '#shared/contracts/appraisal'
+import type { Brief } from '#shared/contracts/appraisal'
+import type { SchemeResult } from '#shared/contracts/appraisalResult'
 import type { StoredLevel } from '#shared/contracts/project'
 import type { ProjectReading } from '#shared/contracts/projectReading'
 import { basisWithNote } from '#shared/sizing/basisName'

@@ -1,4 +1,4 @@
-import type { SchemeResult } from '#shared/contracts/appraisal'
+import type { SchemeResult } from '#shared/contracts/appraisalResult'
 import { Decimal } from '#shared/pricing/decimal'
 import { moneyInWords } from './moneyInWords'
 import type { Pair, Phrase } from './phrase'

@@ -1,4 +1,4 @@
-import type { SchemeResult } from '#shared/contracts/appraisal'
+import type { SchemeResult } from '#shared/contracts/appraisalResult'
 import { mesh } from '#shared/contracts/appraisal'
 import { FABRIC } from '#shared/sizing/tables/fabric'
 import { itemisedQuantities } from '#shared/takeoff/itemisedQuantities'

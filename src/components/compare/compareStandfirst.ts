@@ -1,4 +1,4 @@
-import type { Comparison, SchemeResult, TippingPoint } from '#shared/contracts/appraisal'
+import type { Comparison, SchemeResult, TippingPoint } from '#shared/contracts/appraisalResult'
 import type { Rate } from '#shared/contracts/rateBook'
 import { Decimal } from '#shared/pricing/decimal'
 import { unitOf } from '#shared/takeoff/measurementRules'

@@ -1,4 +1,4 @@
-import type { Cost, SchemeResult } from '#shared/contracts/appraisal'
+import type { Cost, SchemeResult } from '#shared/contracts/appraisalResult'
 import { Decimal, sumOf } from '#shared/pricing/decimal'
 import { itemisedCost } from '#shared/pricing/itemisedCost'
 import type { WorkSection } from '../quantity/itemInWords'

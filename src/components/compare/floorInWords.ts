@@ -1,4 +1,4 @@
-import type { PanelResult } from '#shared/contracts/appraisal'
+import type { PanelResult } from '#shared/contracts/appraisalResult'
 import type { StoredLevel } from '#shared/contracts/project'
 import { formatQuantity } from '../base/formatQuantity'
 

@@ -1,4 +1,4 @@
-import type { Comparison, SchemeResult } from '#shared/contracts/appraisal'
+import type { Comparison, SchemeResult } from '#shared/contracts/appraisalResult'
 import type { StoredScheme } from '#shared/contracts/project'
 import { compareMarks } from '#shared/comparison/compareSchemes'
 import { useSessionStorage } from '@vueuse/core'

@@ -1,5 +1,5 @@
-import type { BillLine, Comparison, Cost, SchemeResult } from '#shared/contracts/appraisal'
-import { billItem } from '#shared/contracts/appraisal'
+import type { BillLine, Comparison, Cost, SchemeResult } from '#shared/contracts/appraisalResult'
+import { billItem } from '#shared/contracts/appraisalResult'
 import { Decimal, sumOf } from '#shared/pricing/decimal'
 import { itemisedCost } from '#shared/pricing/itemisedCost'
 import { printMoney } from '#shared/pricing/money'

@@ -1,4 +1,5 @@
-import type { ItemCode, SchemeResult } from '#shared/contracts/appraisal'
+import type { ItemCode } from '#shared/contracts/appraisal'
+import type { SchemeResult } from '#shared/contracts/appraisalResult'
 import type { StoredLevel } from '#shared/contracts/project'
 import { itemisedQuantities } from '#shared/takeoff/itemisedQuantities'
 import { itemInWords } from '../quantity/itemInWords'

@@ -1,4 +1,4 @@
-import type { Check } from '#shared/contracts/appraisal'
+import type { Check } from '#shared/contracts/appraisalResult'
 
 /** The check of each kind that is used up most, tightest first. */
 export function tightestChecks(checks: readonly Check[]): Check[] {

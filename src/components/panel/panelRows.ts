@@ -1,5 +1,6 @@
 import type { ApiIssue } from '#shared/contracts/apiError'
-import type { Panel, PanelResult, RibbedScheme } from '#shared/contracts/appraisal'
+import type { Panel, RibbedScheme } from '#shared/contracts/appraisal'
+import type { PanelResult } from '#shared/contracts/appraisalResult'
 import type { CellProblem, PanelColumn, PanelRowText } from '#shared/layout/edit/panelRowText'
 import { EMPTY_ROW } from '#shared/layout/edit/panelRowText'
 import { rectangleFit } from '#shared/layout/edit/rectangleFit'

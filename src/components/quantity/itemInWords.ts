@@ -1,5 +1,5 @@
 import { scopeTitle } from '#shared/alsoCompared/scopeWords'
-import type { BillItem } from '#shared/contracts/appraisal'
+import type { BillItem } from '#shared/contracts/appraisalResult'
 import { scopeEntry } from '#shared/contracts/sameScope'
 
 /** Sections of the bill, in the order they are built. */

@@ -1,4 +1,4 @@
-import type { Quantity, SchemeResult, Unit } from '#shared/contracts/appraisal'
+import type { Quantity, SchemeResult, Unit } from '#shared/contracts/appraisalResult'
 import { itemCode } from '#shared/contracts/appraisal'
 import { type Band, compositeItem } from '#shared/contracts/measurement'
 import type { MeasurementRules } from '#shared/takeoff/measurementRules'

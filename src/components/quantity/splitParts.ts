@@ -1,4 +1,4 @@
-import type { ConcreteSplit } from '#shared/contracts/appraisal'
+import type { ConcreteSplit } from '#shared/contracts/appraisalResult'
 
 export interface SplitPart {
   readonly name: string

@@ -1,4 +1,5 @@
-import type { Scheme, SchemeResult } from '#shared/contracts/appraisal'
+import type { Scheme } from '#shared/contracts/appraisal'
+import type { SchemeResult } from '#shared/contracts/appraisalResult'
 import { fieldCheck } from '#shared/layout/fieldCheck'
 import type { SizedScheme } from '#shared/sizing/sizedPanel'
 import { formatDecimal } from '../base/formatDecimal'

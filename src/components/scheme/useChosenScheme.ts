@@ -1,4 +1,4 @@
-import type { SchemeResult } from '#shared/contracts/appraisal'
+import type { SchemeResult } from '#shared/contracts/appraisalResult'
 import type { StoredScheme } from '#shared/contracts/project'
 import { computed, ref } from 'vue'
 import { useProjectStore } from '../../stores/project'

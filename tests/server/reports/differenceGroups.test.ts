@@ -1,6 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import type { Cost, ItemCode } from '../../../shared/contracts/appraisal'
+import type { ItemCode } from '../../../shared/contracts/appraisal'
+import type { Cost } from '../../../shared/contracts/appraisalResult'
 import { itemCode } from '../../../shared/contracts/appraisal'
 import { Decimal, sumOf } from '../../../shared/pricing/decimal'
 import { differenceGroups } from '../../../server/reports/content/differenceGroups'

@@ -1,7 +1,8 @@
 import { comparisonSections } from '#shared/drawing/comparisonSections'
 import type { SectionSubject } from '#shared/drawing/sectionBody'
 import type { FrozenComparison } from '../../../server/reports/frozenComparison'
-import type { Check, RibbedScheme, SolidScheme } from '#shared/contracts/appraisal'
+import type { RibbedScheme, SolidScheme } from '#shared/contracts/appraisal'
+import type { Check } from '#shared/contracts/appraisalResult'
 
 const ribbedScheme: RibbedScheme = {
   mark: 'R1',

@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto'
 import { describe, expect, it } from 'vitest'
-import type { Check } from '../../../shared/contracts/appraisal'
+import type { Check } from '../../../shared/contracts/appraisalResult'
 import { besideTheCost } from '../../../server/reports/content/besideTheCost'
 import { tightestChecks } from '../../../server/reports/content/tightestChecks'
 import { soundByMassDb } from '../../../server/reports/content/soundByMass'

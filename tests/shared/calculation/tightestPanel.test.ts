@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { isTighter, tightestPanel } from '../../../shared/calculation/tightestPanel'
-import type { Check } from '../../../shared/contracts/appraisal'
+import type { Check } from '../../../shared/contracts/appraisalResult'
 
 const check = (panel: string, utilisation: number, pass = utilisation <= 1): Check => ({
   level: 'L1',

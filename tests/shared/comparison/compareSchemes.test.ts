@@ -1,15 +1,8 @@
 import Big from 'big.js'
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
-import {
-  markups,
-  comparison as comparisonContract,
-  itemCode,
-  type ItemCode,
-  type Quantity,
-  type Rates,
-  type SchemeResult,
-} from '#shared/contracts/appraisal'
+import { markups, itemCode, type ItemCode, type Rates } from '#shared/contracts/appraisal'
+import { comparison as comparisonContract, type Quantity, type SchemeResult } from '#shared/contracts/appraisalResult'
 import { compareMarks, compareSchemes } from '#shared/comparison/compareSchemes'
 import { compareAllIn } from '#shared/comparison/compareAllIn'
 import { unroundedTotal } from '#shared/comparison/unroundedTotal'

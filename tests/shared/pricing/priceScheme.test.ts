@@ -1,5 +1,6 @@
 import { expect, it } from 'vitest'
-import { markups, type Quantity, type Rates } from '#shared/contracts/appraisal'
+import { markups, type Rates } from '#shared/contracts/appraisal'
+import { type Quantity } from '#shared/contracts/appraisalResult'
 import { priceScheme } from '#shared/pricing/priceScheme'
 
 const concrete: Quantity = { item: 'concrete.slab', unit: 'm³', net: 33.9, parts: [] }

@@ -7,7 +7,8 @@
  * others from memory and recalculated from their wires).
  */
 import { describe, expect, it } from 'vitest'
-import type { BarDiameter, Quantity } from '#shared/contracts/appraisal'
+import type { BarDiameter } from '#shared/contracts/appraisal'
+import type { Quantity } from '#shared/contracts/appraisalResult'
 import { FABRIC } from '#shared/sizing/tables/fabric'
 import { comparingRules } from '#shared/takeoff/rules/comparingRules'
 import { steelMassKg } from '#shared/takeoff/steelMass'

@@ -3,7 +3,7 @@
  * 6.0 × 4.5 m on beams 250 wide, simple all round; imposed 2.0, partitions 0.8, finishes 1.5 kN/m²; C30/37, fyk 500, cover 25.
  */
 import { describe, expect, it } from 'vitest'
-import type { Check } from '#shared/contracts/appraisal'
+import type { Check } from '#shared/contracts/appraisalResult'
 import { sizeScheme } from '#shared/sizing/sizeScheme'
 import { fileOf, panelOf, rectangle, ribbed, schemeOf, solid } from './support/floors'
 

@@ -1,5 +1,6 @@
 import fc from 'fast-check'
-import { itemCode, type ItemQuantity, type Rates } from '#shared/contracts/appraisal'
+import { itemCode, type Rates } from '#shared/contracts/appraisal'
+import { type ItemQuantity } from '#shared/contracts/appraisalResult'
 import { unitOf } from '#shared/takeoff/measurementRules'
 import { comparingRules } from '#shared/takeoff/rules/comparingRules'
 import { roundAsPrinted } from '#shared/takeoff/roundAsPrinted'

@@ -4,7 +4,7 @@
  * hour of fire.
  */
 import { describe, expect, it } from 'vitest'
-import type { Check } from '#shared/contracts/appraisal'
+import type { Check } from '#shared/contracts/appraisalResult'
 import { sizeScheme } from '#shared/sizing/sizeScheme'
 import { britishFileOf, panelOf, rectangle, ribbed, schemeOf, solid } from '../support/floors'
 

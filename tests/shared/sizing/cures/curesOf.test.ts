@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import { appraiseInFull } from '#shared/appraise'
-import { type AppraisalFile, appraisalFile, type AppraisalFileInput, type Check } from '#shared/contracts/appraisal'
+import { type AppraisalFile, appraisalFile, type AppraisalFileInput } from '#shared/contracts/appraisal'
+import { type Check } from '#shared/contracts/appraisalResult'
 import type { Cure, CureInput } from '#shared/sizing/cures/cure'
 import { curesOf } from '#shared/sizing/cures/curesOf'
 import { firstPassing } from '#shared/sizing/cures/firstPassing'

@@ -4,7 +4,7 @@
  */
 import { describe, expect, it } from 'vitest'
 import { appraise } from '#shared/appraise'
-import { appraisal } from '#shared/contracts/appraisal'
+import { appraisal } from '#shared/contracts/appraisalResult'
 import { fileOf, ribbed, row, schemeOf } from '../support/floors'
 
 const block = { length: 200, width: 400, height: 250, mass: 15 }
